@@ -18,6 +18,11 @@ export type ParsedLength = Parsed<number, { unit: LengthUnit; kind: LengthKind }
 /** One inch in millimetres, exact by definition (international yard, 1959). */
 export const MM_PER_INCH = 25.4;
 
+/** Inches to millimetres, by way of whole ten-thousandths so that 3/8 in is 9.525 and not a hair under. */
+export function inchesToMm(inches: number): number {
+  return (inches * 254_000) / 10_000;
+}
+
 /** Longest length any reader accepts, mm. Far beyond every machine this engine knows; families set their own limits. */
 export const MAX_LENGTH_MM = 100_000;
 
