@@ -21,6 +21,8 @@ export interface EngineRequest {
   scale: 'auto' | number;
   balloons: boolean;
   register: Register;
+  /** Station id that lengths are dimensioned from; absent: as the designer gave them. */
+  datum?: string;
   titleBlock: EngineTitleBlock;
   stamp?: string;
   /** Balloons frozen by an earlier release, by size id. */

@@ -1,0 +1,59 @@
+import { mkdir, writeFile } from 'node:fs/promises';
+import { dirname } from 'node:path';
+import { readArguments } from './headless/arguments';
+import { InputProblem } from './headless/input-problem';
+import { listTemplates } from './headless/list-templates';
+import { sheetPdf } from './pdf/sheet-pdf';
+import { drawResult } from '../shared/api/contract';
+import { drawResultOf } from '../shared/draw-result';
+import { runEngine } from '../shared/engine-run';
+
+/**
+ * The headless command: values in, JSON, SVG and PDF out. No database, no server.
+ * Exit 0 drawn, 2 a problem in the input (one line each on stderr), 1 a fault of ours.
+ */
+async function main(words: readonly string[]): Promise<number> {
+  if (words.includes('--templates')) {
+    process.stdout.write(`${JSON.stringify(listTemplates(), null, 2)}\n`);
+    return 0;
+  }
+  const { request, outputs } = await readArguments(words);
+  const result = runEngine(request);
+  if (!result.good) throw new InputProblem(result.problems);
+
+  const json = drawResult.parse(drawResultOf({ ...result, good: result.good }));
+  const text = `${JSON.stringify(json, null, 2)}\n`;
+  if (outputs.svg) await write(outputs.svg, result.good.svg);
+  if (outputs.pdf)
+    await write(outputs.pdf, await sheetPdf([result.good.svg], { title: request.typed['title'] as string }));
+  if (outputs.json) await write(outputs.json, text);
+  if (!outputs.svg && !outputs.pdf && !outputs.json) process.stdout.write(text);
+  return 0;
+}
+
+async function write(path: string, content: string | Uint8Array): Promise<void> {
+  try {
+    await mkdir(dirname(path), { recursive: true });
+    await writeFile(path, content);
+  } catch (error) {
+    throw new InputProblem([{ path, message: `This file cannot be written: ${(error as Error).message}.` }]);
+  }
+}
+
+main(process.argv.slice(2)).then(
+  (code) => {
+    process.exitCode = code;
+  },
+  (error: unknown) => {
+    if (error instanceof InputProblem) {
+      for (const { path, message } of error.problems)
+        process.stderr.write(`${path}: ${message.replaceAll('\n', ' ')}\n`);
+      process.exitCode = 2;
+      return;
+    }
+    process.stderr.write(
+      `A fault of the program, not of the sizes: ${error instanceof Error ? error.message : String(error)}\n`,
+    );
+    process.exitCode = 1;
+  },
+);
