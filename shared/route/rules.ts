@@ -29,7 +29,6 @@ export const LIMITS = {
   gripRatio: limit('grip-ratio', 0.35, 'ratio', 'A grip shorter than this share of its diameter lets the work rock; the longer of this and the least grip rules.', JUDGEMENT),
   partingClear: limit('parting-clear', 3, 'mm', 'Least distance between the jaws and the near side of the parting blade.', JUDGEMENT),
   overhang: limit('overhang', 3, 'ratio', 'Free length from the hold to the far end of the cut, over the smallest diameter between them on the stage before the cut: above this the work wants a centre or a steady.'),
-  overhangLight: limit('overhang-light', 10, 'ratio', 'The same ratio for facing, centre drilling, mouth work and edges, which push along the axis or hardly at all: above this even they want support.', JUDGEMENT),
   slender: limit('slender', 10, 'ratio', 'Free length over the smallest diameter above which a centre alone is not enough for a heavy cut: light cuts, a steady, or between centres.'),
   lightDepth: limit('light-depth', 0.25, 'mm', 'Largest radial depth of a light cut: all that is taken on work that stands out too far with nothing at its end.', JUDGEMENT),
   forcePerDepth: limit('force-per-depth', 240, 'N/mm', 'Cutting force sideways for each millimetre of radial depth at a usual feed in mild steel.', JUDGEMENT),
@@ -57,6 +56,29 @@ export const LIMITS = {
   volumeTolerance: limit('volume-tolerance', 1e-6, 'ratio', 'Volumes must balance to this share of the blank.'),
   mouthOfJaw: limit('jaw-reach', 40, 'mm', 'Length of work that jaws can cover when the register does not say.', JUDGEMENT),
 } as const satisfies Record<string, Limit>;
+
+/**
+ * Methods that push sideways along the work: judged by the overhang ratio (unless a centre or a steady stands in)
+ * and by the bend under their own depth of cut. The light ones below are judged by the bend alone, and take no
+ * more than the light depth a cut where the overhang ratio is exceeded. The rest (marking, measuring, tapping,
+ * dies, which push along the axis or follow the work) are not judged by either.
+ */
+export const SIDE_METHODS = [
+  'rough-turn', 'turn', 'taper-turn', 'groove', 'knurl', 'thread-single-point', 'mill-flat', 'mill-key',
+] as const; // prettier-ignore
+export const LIGHT_METHODS = ['face', 'form-turn', 'chamfer'] as const;
+
+/*
+ * Conventions that planner and simulator both keep:
+ * - in a set-up whose support is `centre` the tail stands in the free end as soon as there is a hole to enter (drilled
+ *   in this set-up or an earlier one) and until a cut takes the hole away; it is out for facing, end forms and dies;
+ * - free length runs from the grip's edge on the free side to the far end of the cut; the smallest diameter is that of
+ *   the stage before the cut, flats counted across them, over that length;
+ * - the bend is F / E · ∫ (xc − x)² / I dx over that length on the same stage, xc the far end of the cut,
+ *   I = π (r⁴ − b⁴) / 4 with r held to a flat's distance, F = forcePerDepth × depthOfCut; × tailFactor with a centre;
+ * - passes × depthOfCut is at least the metal gone: radially for turning, along the axis for facing, square to the
+ *   face for a flat.
+ */
 
 export type LimitName = keyof typeof LIMITS;
 
