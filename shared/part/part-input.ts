@@ -1,4 +1,4 @@
-import type { ThreadSpec } from '../standards/threads/thread';
+import type { ThreadSpec } from '../standards/threads';
 
 /**
  * What a template says of a part, length by length from the left, before envelopes are intersected.

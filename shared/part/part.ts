@@ -63,6 +63,8 @@ export interface FlatsFeature extends Spanned {
   phase: number;
   /** Where the flats really stop: where r(x) falls to the distance, or the end of the declared span at a wall. */
   runOutTo: number;
+  /** The same at their left end. */
+  runOutFrom: number;
   /** True where the round they are milled from leaves rounded corners. */
   roundedCorners: boolean;
 }
