@@ -233,7 +233,7 @@ export const MATERIALS: readonly Material[] = [
   material(
     'cast-iron-grey',
     'Grey cast iron grade 250',
-    ['EN-GJL-250', 'meehanite'],
+    ['EN-GJL-250', 'GG25'],
     7200,
     'cast-iron',
     'About 250 N/mm²',
