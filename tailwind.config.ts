@@ -86,7 +86,9 @@ const config: Config = {
     plugin(({ addBase }) => {
       addBase({
         ':root': { ...variables(day), colorScheme: 'light' },
-        '@media (prefers-color-scheme: dark)': { ':root:not([data-shift="day"])': { ...variables(night), colorScheme: 'dark' } },
+        '@media (prefers-color-scheme: dark)': {
+          ':root:not([data-shift="day"])': { ...variables(night), colorScheme: 'dark' },
+        },
         ':root[data-shift="night"]': { ...variables(night), colorScheme: 'dark' },
       });
     }),

@@ -7,9 +7,6 @@ import { defineConfig } from 'vitest/config';
 const api = process.env.BENCHLEAF_API ?? 'http://127.0.0.1:3000';
 const { TLS_CERT: certificate, TLS_KEY: key } = process.env;
 
-/** A file with a database of its own waits its turn: two cores carry one cluster and two files at a time. */
-const onePerCore = { maxWorkers: 2 };
-
 export default defineConfig({
   plugins: [react(), tailwindcss()],
   worker: { format: 'es' },
@@ -25,7 +22,8 @@ export default defineConfig({
     ...(certificate && key ? { https: { cert: readFileSync(certificate), key: readFileSync(key) } } : {}),
   },
   test: {
-    ...onePerCore,
+    // Two cores carry two files at a time, the database between them.
+    maxWorkers: 2,
     projects: [
       {
         extends: true,

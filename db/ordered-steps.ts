@@ -44,7 +44,10 @@ export async function withOrderedSteps<T>(
     pool: { max: 1, min: 1, idle: 3_600_000, evict: 3_600_000 },
   });
   try {
-    await sequelize.query('SELECT pg_advisory_lock(:key)', { replacements: { key: LOCK_KEY }, type: QueryTypes.SELECT });
+    await sequelize.query('SELECT pg_advisory_lock(:key)', {
+      replacements: { key: LOCK_KEY },
+      type: QueryTypes.SELECT,
+    });
     const umzug = new Umzug({
       context: sequelize.getQueryInterface(),
       storage: new SequelizeStorage({ sequelize, tableName: table, modelName: table, timestamps: false }),
@@ -53,7 +56,8 @@ export async function withOrderedSteps<T>(
         name,
         path,
         up: ({ context }) => inTransaction(sequelize, async () => (await load(path)).up({ name, context })),
-        down: ({ context }) => inTransaction(sequelize, async () => (await load(path)).down?.({ name, context })),
+        down: ({ context }) =>
+          inTransaction(sequelize, async () => (await load(path)).down?.({ name, context })),
       })),
     });
     return await work({

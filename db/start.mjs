@@ -69,14 +69,21 @@ async function start() {
     ...(settings.tlsCert ? { TLS_CERT: settings.tlsCert, TLS_KEY: settings.tlsKey } : {}),
   });
   const logPath = join(data, 'server.log');
-  const tasks = dev ? await startForWork(settings, port, env, logPath) : await startServer(settings, port, env, logPath);
-  for (const task of tasks) void task.exited.then((result) => isEnding() || fail(new Fault(whyEnded(task, result))));
-  database.cluster?.exited.then(() => isEnding() || fail(new Fault(`The database ended. Its log is ${join(data, 'postgres.log')}.`)));
+  const tasks = dev
+    ? await startForWork(settings, port, env, logPath)
+    : await startServer(settings, port, env, logPath);
+  for (const task of tasks)
+    void task.exited.then((result) => isEnding() || fail(new Fault(whyEnded(task, result))));
+  database.cluster?.exited.then(
+    () => isEnding() || fail(new Fault(`The database ended. Its log is ${join(data, 'postgres.log')}.`)),
+  );
 
   const address = localAddress(settings, port);
   claim.announce(address);
   for (const line of await demoSignIns(project)) say(line);
-  say(`Benchleaf answers at ${address}${settings.publicUrl ? ` (for everybody else ${settings.publicUrl})` : ''}`);
+  say(
+    `Benchleaf answers at ${address}${settings.publicUrl ? ` (for everybody else ${settings.publicUrl})` : ''}`,
+  );
 }
 
 async function startDatabase(data, passwords, passwordsAreNew) {
@@ -115,19 +122,26 @@ async function startForWork(settings, port, env, logPath) {
 
 /** Runs one of db's programs to its end; what it throws becomes one sentence. */
 async function runStep(file, env, failure) {
-  if (!existsSync(join(project, file))) throw new Fault(`${file} is missing: the copy of Benchleaf is not whole.`);
+  if (!existsSync(join(project, file)))
+    throw new Fault(`${file} is missing: the copy of Benchleaf is not whole.`);
   const result = await run(process.execPath, ['--import', 'tsx', file], { cwd: project, env, capture: true });
   if (result.code === 0) return;
   const lines = result.errors.split('\n');
   const thrown = lines.find((line) => /^\w*(Error|Exception)\b.*: /.test(line)) ?? firstLine(result.errors);
-  const reason = thrown.replace(/^\w*Error\b[^:]*: /, '').replace(/^Migration (\S+) \(up\) failed: Original error: /, 'in $1, ');
+  const reason = thrown
+    .replace(/^\w*Error\b[^:]*: /, '')
+    .replace(/^Migration (\S+) \(up\) failed: Original error: /, 'in $1, ');
   throw new Fault(`${failure}: ${reason.replace(/\.$/, '')}.`);
 }
 
 async function fail(error) {
   if (isEnding() || error instanceof Ending) return;
   // Whatever it was, people get a sentence. The stack is for whoever works on the start itself.
-  console.error(error instanceof Fault ? error.message : `Benchleaf could not start: ${firstLine(error?.message ?? error)}.`);
+  console.error(
+    error instanceof Fault
+      ? error.message
+      : `Benchleaf could not start: ${firstLine(error?.message ?? error)}.`,
+  );
   if (process.env.BENCHLEAF_TRACE) console.error(error);
   await leave(1);
 }

@@ -32,12 +32,18 @@ export async function ensureClient(projectFolder, say) {
   orFault(`write to ${cache}`, () => mkdirSync(cache, { recursive: true }));
   try {
     const vite = join(projectFolder, 'node_modules', 'vite', 'bin', 'vite.js');
-    const result = await run(process.execPath, [vite, 'build', '--outDir', fresh, '--emptyOutDir', '--logLevel', 'error'], {
-      cwd: projectFolder,
-      capture: true,
-    });
+    const result = await run(
+      process.execPath,
+      [vite, 'build', '--outDir', fresh, '--emptyOutDir', '--logLevel', 'error'],
+      {
+        cwd: projectFolder,
+        capture: true,
+      },
+    );
     if (result.code !== 0) {
-      throw new Fault(`The pages could not be built: ${firstLine(result.errors || result.output)}. Run "npm run build" to see it whole.`);
+      throw new Fault(
+        `The pages could not be built: ${firstLine(result.errors || result.output)}. Run "npm run build" to see it whole.`,
+      );
     }
     orFault(`put the built pages into ${built}`, () => {
       writeFileSync(join(fresh, MARK), print);

@@ -25,7 +25,9 @@ export function placeCluster(dataFolder, say) {
   const log = join(dataFolder, 'postgres.log');
   if (canReach(account, dataFolder)) return { folder: inside, log, account };
   const outside = clusterOutside(dataFolder);
-  say(`The account ${account?.name ?? 'of this user'} cannot reach ${dataFolder}, so the database is kept in ${outside}.`);
+  say(
+    `The account ${account?.name ?? 'of this user'} cannot reach ${dataFolder}, so the database is kept in ${outside}.`,
+  );
   orFault(`make the folder ${outside}`, () => mkdirSync(outside, { recursive: true, mode: 0o711 }));
   return { folder: join(outside, 'postgres'), log, account };
 }

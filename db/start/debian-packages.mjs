@@ -17,7 +17,9 @@ export async function installDebianPackages(packages, purpose, say) {
   const isRoot = process.getuid?.() === 0;
   const command = `apt-get update && apt-get install -y --no-install-recommends ${names}`;
   if (!existsSync('/usr/bin/apt-get')) {
-    throw new Fault(`Benchleaf needs ${names} for ${purpose}. Install it with this system's package manager and start again.`);
+    throw new Fault(
+      `Benchleaf needs ${names} for ${purpose}. Install it with this system's package manager and start again.`,
+    );
   }
   const sudo = isRoot ? [] : ['sudo', '-n'];
   if (!isRoot && !maySudo()) {
@@ -57,7 +59,8 @@ function maySudo() {
 /** Debian's package makes and starts a cluster of its own unless told not to; an existing setting is left as it is. */
 async function keepDebiansClusterOut(sudo) {
   if (existsSync(CREATE_CLUSTER_SETTINGS)) return;
-  const text = '# No cluster of Debian\'s own: programs here make and start theirs.\ncreate_main_cluster = false\n';
+  const text =
+    "# No cluster of Debian's own: programs here make and start theirs.\ncreate_main_cluster = false\n";
   if (sudo.length === 0) {
     mkdirSync('/etc/postgresql-common', { recursive: true });
     writeFileSync(CREATE_CLUSTER_SETTINGS, text);

@@ -7,5 +7,8 @@ export async function demoSignIns(projectFolder) {
   const path = join(projectFolder, 'db', 'seeders', 'demo-people.json');
   if (!existsSync(path)) return [];
   const { people, password } = JSON.parse(readFileSync(path, 'utf8'));
-  return [`Demo sign-ins, all with the password ${password}:`, ...people.map(({ role, email }) => `  ${role.padEnd(10)} ${email}`)];
+  return [
+    `Demo sign-ins, all with the password ${password}:`,
+    ...people.map(({ role, email }) => `  ${role.padEnd(10)} ${email}`),
+  ];
 }

@@ -18,13 +18,18 @@ export async function ensureNpmPackages(projectFolder, say) {
   const result = await run(program, rest, { cwd: projectFolder, capture: true });
   if (result.code === 0) return;
   const reason = result.error?.message ?? result.errors.replace(/npm (error|ERR!) ?/g, '');
-  throw new Fault(`npm ci failed: ${firstLine(reason)}. Run "npm ci" in ${projectFolder} to see it whole, then start again.`);
+  throw new Fault(
+    `npm ci failed: ${firstLine(reason)}. Run "npm ci" in ${projectFolder} to see it whole, then start again.`,
+  );
 }
 
 /** The reason an install is needed, or undefined when node_modules is as the lock says. */
 export function whyStale(projectFolder) {
   const wanted = readLock(join(projectFolder, 'package-lock.json'));
-  if (!wanted) throw new Fault(`There is no readable package-lock.json in ${projectFolder}: the copy of Benchleaf is not whole.`);
+  if (!wanted)
+    throw new Fault(
+      `There is no readable package-lock.json in ${projectFolder}: the copy of Benchleaf is not whole.`,
+    );
   const installedPath = join(projectFolder, 'node_modules', '.package-lock.json');
   if (!existsSync(installedPath)) return 'none are installed';
   const installed = readLock(installedPath);

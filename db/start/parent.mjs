@@ -14,7 +14,11 @@ export function whenParentIsGone(callback) {
   if (!npm) return;
   const watched = line.slice(0, line.indexOf(npm) + 1);
   const timer = setInterval(() => {
-    if (process.ppid === watched[0].pid && watched.every(({ pid, began }) => readProcess(pid)?.began === began)) return;
+    if (
+      process.ppid === watched[0].pid &&
+      watched.every(({ pid, began }) => readProcess(pid)?.began === began)
+    )
+      return;
     clearInterval(timer);
     callback();
   }, LOOK_EVERY_MS);
@@ -24,7 +28,7 @@ export function whenParentIsGone(callback) {
 /** Parent, grandparent and so on, up to four. */
 function ancestors() {
   const found = [];
-  for (let pid = process.ppid; pid > 1 && found.length < 4; ) {
+  for (let pid = process.ppid; pid > 1 && found.length < 4;) {
     const entry = readProcess(pid);
     if (!entry) break;
     found.push(entry);

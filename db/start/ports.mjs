@@ -35,7 +35,8 @@ export async function choosePort(host, asked, say) {
     }
     if (port === 0) return freeLoopbackPort();
     const refused = await whyTaken(host, port);
-    if (refused) throw new Fault(`${refusal(refused, host, port)} Give another with PORT, or leave PORT out.`);
+    if (refused)
+      throw new Fault(`${refusal(refused, host, port)} Give another with PORT, or leave PORT out.`);
     return port;
   }
   const first = 3000;

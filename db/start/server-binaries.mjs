@@ -11,7 +11,9 @@ const OLDEST_MAJOR = 14;
  * @returns {{ folder: string, major: number } | undefined} folder holds postgres and initdb
  */
 export function findServerBinaries(major) {
-  return candidates().find((found) => (major === undefined ? found.major >= OLDEST_MAJOR : found.major === major));
+  return candidates().find((found) =>
+    major === undefined ? found.major >= OLDEST_MAJOR : found.major === major,
+  );
 }
 
 function candidates() {

@@ -27,13 +27,15 @@ export async function waitForAnswer(task, { host, port, tls, path = '/' }) {
   let ended;
   void task.exited.then((result) => (ended = result));
   const reach = { '0.0.0.0': '127.0.0.1', '::': '::1' }[host] ?? host;
-  for (const from = Date.now(); Date.now() - from < ANSWER_LIMIT_MS; ) {
+  for (const from = Date.now(); Date.now() - from < ANSWER_LIMIT_MS;) {
     if (ended) throw new Fault(whyEnded(task, ended));
     const status = await ask({ host: reach, port, path }, tls);
     if (status !== undefined && status < 500) return;
     await new Promise((done) => setTimeout(done, 100));
   }
-  throw new Fault(`The server did not answer within ${ANSWER_LIMIT_MS / 1000} seconds. Its log is ${task.logPath}.`);
+  throw new Fault(
+    `The server did not answer within ${ANSWER_LIMIT_MS / 1000} seconds. Its log is ${task.logPath}.`,
+  );
 }
 
 export function whyEnded(task, { code, signal, error }) {
@@ -72,9 +74,15 @@ function lastWords(path) {
   } catch {
     return '';
   }
-  const thrown = lines.findLast((line) => /^[A-Z]\w*Error\b.*: /.test(line)) ?? lines.findLast((line) => !/^\s|^Node\.js v/.test(line)) ?? '';
+  const thrown =
+    lines.findLast((line) => /^[A-Z]\w*Error\b.*: /.test(line)) ??
+    lines.findLast((line) => !/^\s|^Node\.js v/.test(line)) ??
+    '';
   const text = thrown.startsWith('{') ? messageOf(thrown) : thrown;
-  return text.replace(/^\w*Error\b[^:]*: /, '').replace(/\.$/, '').slice(0, 300);
+  return text
+    .replace(/^\w*Error\b[^:]*: /, '')
+    .replace(/\.$/, '')
+    .slice(0, 300);
 }
 
 function messageOf(line) {

@@ -26,7 +26,9 @@ export function readSettings(projectFolder, env) {
     throw new Fault('DATABASE_OWNER_URL is given without DATABASE_URL. Give both, or neither.');
   }
   if (Boolean(settings.tlsCert) !== Boolean(settings.tlsKey)) {
-    throw new Fault(`${settings.tlsCert ? 'TLS_CERT' : 'TLS_KEY'} is given alone. For https give TLS_CERT and TLS_KEY, the paths of two PEM files.`);
+    throw new Fault(
+      `${settings.tlsCert ? 'TLS_CERT' : 'TLS_KEY'} is given alone. For https give TLS_CERT and TLS_KEY, the paths of two PEM files.`,
+    );
   }
   for (const name of ['tlsCert', 'tlsKey']) {
     if (!settings[name]) continue;
@@ -34,7 +36,9 @@ export function readSettings(projectFolder, env) {
     try {
       readFileSync(settings[name]);
     } catch (error) {
-      throw new Fault(sentenceFor(error, `read ${name === 'tlsCert' ? 'TLS_CERT' : 'TLS_KEY'} ${settings[name]}`));
+      throw new Fault(
+        sentenceFor(error, `read ${name === 'tlsCert' ? 'TLS_CERT' : 'TLS_KEY'} ${settings[name]}`),
+      );
     }
   }
   return settings;
@@ -42,7 +46,11 @@ export function readSettings(projectFolder, env) {
 
 /** The address people type on this machine. */
 export function localAddress({ host, tlsCert }, port) {
-  const name = ['127.0.0.1', '0.0.0.0', '::', '::1', 'localhost'].includes(host) ? 'localhost' : host.includes(':') ? `[${host}]` : host;
+  const name = ['127.0.0.1', '0.0.0.0', '::', '::1', 'localhost'].includes(host)
+    ? 'localhost'
+    : host.includes(':')
+      ? `[${host}]`
+      : host;
   return `${tlsCert ? 'https' : 'http'}://${name}:${port}`;
 }
 
@@ -65,7 +73,10 @@ function checkAddress(name, value, protocols) {
   try {
     url = new URL(value);
   } catch {
-    throw new Fault(`${name} is "${value.replace(/:[^:@/]*@/, ':…@')}", which is no address. It must begin with ${protocols[0]}//.`);
+    throw new Fault(
+      `${name} is "${value.replace(/:[^:@/]*@/, ':…@')}", which is no address. It must begin with ${protocols[0]}//.`,
+    );
   }
-  if (!protocols.includes(url.protocol)) throw new Fault(`${name} begins with ${url.protocol}//. It must begin with ${protocols[0]}//.`);
+  if (!protocols.includes(url.protocol))
+    throw new Fault(`${name} begins with ${url.protocol}//. It must begin with ${protocols[0]}//.`);
 }
