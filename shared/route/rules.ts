@@ -36,7 +36,7 @@ export const LIMITS = {
   bendRough: limit('bend-rough', 0.3, 'mm', 'Most that the work may bend under a roughing cut (depth over the light depth).', JUDGEMENT),
   bendFinish: limit('bend-finish', 0.1, 'mm', 'Most that the work may bend under a light, finishing cut.', JUDGEMENT),
   tailFactor: limit('tail-factor', 0.1, 'ratio', 'Share of the free bending that is left when a centre stands in the end.', JUDGEMENT),
-  roughAllowance: limit('rough-allowance', 0.3, 'mm', 'Metal a side that roughing leaves for the finishing cut.'),
+  roughAllowance: limit('rough-allowance', 0.25, 'mm', 'Metal a side that roughing leaves for the finishing cut: one light cut.'),
   roughDepth: limit('rough-depth', 1.5, 'mm', 'Usual radial depth of a roughing pass on a small lathe in steel.', JUDGEMENT),
   faceAllowance: limit('face-allowance', 1, 'mm', 'Metal left at a sawn or parted end to face off.'),
   partedAllowance: limit('parted-allowance', 0.5, 'mm', 'Extra length left when a parted end is faced afterwards.'),
