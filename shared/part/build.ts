@@ -1,6 +1,8 @@
 import type { Body, Generator } from './body';
 import { STATION_TOLERANCE } from './body';
+import { placeCentreHole } from './centre-hole';
 import { cutCrown, placeCrown } from './crown';
+import { maxInner } from './envelope';
 import { featuresOf, placeThread } from './features';
 import type { PlacedInputs } from './features';
 import { constant, joined, largestRadius } from './generator';
@@ -32,7 +34,7 @@ export function buildPart(input: PartInput): BuiltPart {
   outer = joined(crowns.reduce(cutCrown, outer));
   const threads = collect(input.threads, (thread) => placeThread(thread, placed), 'thread', problems);
   const flats = collect(input.flats, (flat) => placeFlats(flat, outer), 'flats', problems);
-  for (const hole of input.centreHoles) problems.push({ input: hole.id, message: 'Centre holes are not cut yet; leave it out.' });
+  const centreHoles = collect(input.centreHoles, (hole) => placeCentreHole(hole, outer), 'hole', problems);
   if (problems.length > 0) return { problems };
 
   const length = last.to;
@@ -40,11 +42,11 @@ export function buildPart(input: PartInput): BuiltPart {
     x0: 0,
     x1: length,
     outer,
-    inner: constant(0, length, 0),
+    inner: centreHoles.reduce((inner, hole) => maxInner(inner, hole.envelope), constant(0, length, 0)),
     cuts: flats.map((flat) => flat.cut),
     treatments: threads.map((thread) => thread.treatment),
   };
-  const inputs: PlacedInputs = { length, lengths: placed, chamfers, crowns, threads, flats };
+  const inputs: PlacedInputs = { length, lengths: placed, chamfers, crowns, threads, flats, centreHoles };
   const stations = stationsOf(inputs);
   const datum = stations.find((station) => Math.abs(station.x - input.datum) <= STATION_TOLERANCE);
   if (!datum) throw new Error(`The datum at ${input.datum} is no station of the part`);

@@ -1,7 +1,9 @@
+import { formatThread } from '../standards/threads';
 import type { ThreadTreatment } from './body';
 import type { Feature } from './part';
 import type { ThreadInput } from './part-input';
 import type { PlacedChamfer, PlacedLength } from './outline';
+import type { PlacedCentreHole } from './centre-hole';
 import type { PlacedCrown } from './crown';
 import type { PlacedFlats } from './place-flats';
 import type { InputProblem } from './input-problem';
@@ -38,7 +40,7 @@ export function placeThread(
         from,
         to: input.end === 'right' ? on.to : Math.min(on.to, on.from + full),
         internal: false,
-        designation: spec.class ? `${spec.designation}-${spec.class}` : spec.designation,
+        designation: formatThread(spec),
         major: spec.major,
         pitchDiameter: spec.pitchDiameter,
         root: spec.root,
@@ -98,6 +100,7 @@ export interface PlacedInputs {
   crowns: readonly PlacedCrown[];
   threads: readonly PlacedThread[];
   flats: readonly PlacedFlats[];
+  centreHoles: readonly PlacedCentreHole[];
 }
 
 /** Every feature with its span resolved: faces first, then lengths in order, then what is cut on them. */
@@ -123,5 +126,15 @@ export function featuresOf(placed: PlacedInputs): Feature[] {
     ),
     ...placed.threads.map(threadFeature),
     ...placed.flats.map(flatsFeature),
+    ...placed.centreHoles.map(
+      ({ input, from, to }): Feature => ({
+        kind: 'centre-hole',
+        id: input.id,
+        from,
+        to,
+        end: input.end,
+        designation: input.designation,
+      }),
+    ),
   ];
 }

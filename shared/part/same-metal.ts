@@ -46,7 +46,7 @@ export function canonical(body: Body): CanonicalBody {
     outer: joined(outer),
     inner: joined(body.inner),
     flats: visibleFlats(outer, flats, body),
-    treatments: merged(body.treatments.map(treatmentMark)),
+    treatments: merged(body.treatments.map((treatment) => treatmentMark(treatment, body)).filter((mark) => mark.to > mark.from)),
   };
 }
 
@@ -75,8 +75,9 @@ function rounded(value: number): string {
   return (Math.round(value * 1e5) / 1e5).toString();
 }
 
-function treatmentMark(treatment: Treatment): Marked {
-  const { from, to } = treatment;
+function treatmentMark(treatment: Treatment, body: Body): Marked {
+  const from = Math.max(treatment.from, body.x0);
+  const to = Math.min(treatment.to, body.x1);
   if (treatment.kind === 'knurl') return { from, to, key: `knurl ${treatment.pattern} ${rounded(treatment.pitch)}` };
   const place = treatment.internal ? 'internal' : 'external';
   const figures = [treatment.major, treatment.pitchDiameter, treatment.lead].map(rounded).join(' ');
