@@ -1,0 +1,46 @@
+import type { Body } from '../part/body';
+import { LIGHT_METHODS, LIMITS, SIDE_METHODS } from './rules';
+import { bendPerDepth, smallestDiameter } from './stiffness';
+import type { Method } from './route';
+
+export interface SupportAsked {
+  method: Method;
+  /** Stage before the cut, free end to the right. */
+  stage: Body;
+  gripEdge: number;
+  /** Far end of the cut, towards the free end. */
+  farEnd: number;
+  /** A centre stands in the free end. */
+  tail: boolean;
+  /** Depth that is wished for, radial (mm). */
+  wish: number;
+}
+
+export type SupportAnswer = { depth: number; ratio: number } | { depth: null; ratio: number; rule: 'support-overhang' | 'support-bend' };
+
+const LEAST_DEPTH = 0.05;
+
+/**
+ * The radial depth a cut may have on this stage: what is wished for, less where the work would bend more than its
+ * limit, or null with the rule that stands against it (no centre where one is needed, or too slender with one).
+ */
+export function depthAllowed(asked: SupportAsked): SupportAnswer {
+  const { method, stage, gripEdge, farEnd, tail, wish } = asked;
+  const side = (SIDE_METHODS as readonly string[]).includes(method);
+  const light = (LIGHT_METHODS as readonly string[]).includes(method);
+  if (!side && !light) return { depth: wish, ratio: 0 };
+  const free = Math.max(0, farEnd - gripEdge);
+  const ratio = free <= 0 ? 0 : free / smallestDiameter(stage, gripEdge, farEnd);
+  if (side && !tail && ratio > LIMITS.overhang.value) return { depth: null, ratio, rule: 'support-overhang' };
+  const perDepth = bendPerDepth(stage, gripEdge, farEnd) * (tail ? LIMITS.tailFactor.value : 1);
+  const ceiling = light && ratio > LIMITS.overhang.value ? LIMITS.lightDepth.value : wish;
+  let depth = Math.min(wish, ceiling);
+  if (depth > LIMITS.lightDepth.value && perDepth * depth > LIMITS.bendRough.value) {
+    depth = Math.floor((LIMITS.bendRough.value / perDepth) * 20) / 20;
+    if (depth <= LIMITS.lightDepth.value) depth = LIMITS.lightDepth.value;
+  }
+  if (depth <= LIMITS.lightDepth.value && perDepth * depth > LIMITS.bendFinish.value) {
+    depth = Math.floor((LIMITS.bendFinish.value / perDepth) * 100) / 100;
+  }
+  return depth >= LEAST_DEPTH || depth >= wish ? { depth, ratio } : { depth: null, ratio, rule: 'support-bend' };
+}
