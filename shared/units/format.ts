@@ -32,6 +32,14 @@ export function roundTo(value: number, decimals: number): number {
   return value < 0 && rounded !== 0 ? -rounded : rounded;
 }
 
+/** Rounds halves to the even digit, as inch thread tables are rounded (ASME B1.30). */
+export function roundHalfEven(value: number, decimals: number): number {
+  const scaled = roundTo(value, decimals + 6) * 10 ** decimals;
+  const below = Math.floor(scaled);
+  const isHalf = Math.abs(scaled - below - 0.5) < 1e-6;
+  return isHalf ? (below % 2 === 0 ? below : below + 1) / 10 ** decimals : roundTo(value, decimals);
+}
+
 function fixedText(value: number, decimals: number): string {
   return roundTo(value, decimals).toFixed(decimals);
 }

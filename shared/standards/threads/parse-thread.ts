@@ -1,11 +1,32 @@
 import { quoteGiven, refuse } from '../../units/parsed';
-import { MAX_TYPED_LENGTH, readHand } from './designation';
+import { MAX_TYPED_LENGTH, readHand, type HandedText } from './designation';
 import { parseMetricThread } from './metric';
-import { parseUnifiedThread, looksUnified } from './unified';
 import type { ParsedThread, ThreadSpec } from './thread-spec';
+import { looksAcme, looksTrapezoidal, parseAcmeThread, parseTrapezoidalThread } from './trapezoidal';
+import { looksUnified, parseUnifiedThread } from './unified';
+import {
+  looksBritishAssociation,
+  looksPipe,
+  looksWhitworth,
+  parseBritishAssociationThread,
+  parsePipeThread,
+  parseWhitworthThread,
+} from './whitworth';
+
+/** Each series with how it is told from the others, asked in this order; unified last, since its size alone names no series. */
+const SERIES: readonly { looks: (text: string) => boolean; parse: (handed: HandedText) => ParsedThread }[] = [
+  { looks: (text) => /^M ?[\d.,]/i.test(text), parse: parseMetricThread },
+  { looks: looksTrapezoidal, parse: parseTrapezoidalThread },
+  { looks: looksAcme, parse: parseAcmeThread },
+  { looks: looksWhitworth, parse: parseWhitworthThread },
+  { looks: looksBritishAssociation, parse: parseBritishAssociationThread },
+  { looks: looksPipe, parse: parsePipeThread },
+  { looks: looksUnified, parse: parseUnifiedThread },
+];
 
 /**
- * Reads a thread as designated: `M10`, `M10x1.25-6g`, `M20x1.5 LH`, `3/8-16 UNC-2A`, `1/4-20`, `#10-24`.
+ * Reads a thread as designated: `M10`, `M10x1.25-6g`, `M20x1.5 LH`, `3/8-16 UNC-2A`, `1/4-20`, `#10-24`, `1/2 BSW`, `2 BA`,
+ * `G1/4`, `Tr20x8 (P4)`, `3/4-6 ACME`.
  * @returns basic sizes in mm, or a sentence naming what is allowed
  */
 export function parseThread(text: string): ParsedThread {
@@ -18,10 +39,10 @@ export function parseThread(text: string): ParsedThread {
   const handed = readHand(text);
   if (handed.text === '')
     return refuse('No thread was given. Type a designation such as M10, M10x1.25 or 3/8-16 UNC.');
-  if (/^M ?[\d.,]/i.test(handed.text)) return parseMetricThread(handed);
-  if (looksUnified(handed.text)) return parseUnifiedThread(handed);
+  const series = SERIES.find(({ looks }) => looks(handed.text));
+  if (series) return series.parse(handed);
   return refuse(
-    `${quoteGiven(text)} is not a thread that is read. Type a designation such as M10, M10x1.25-6g, 3/8-16 UNC-2A or #10-24.`,
+    `${quoteGiven(text)} is not a thread that is read. Type a designation such as M10, M10x1.25-6g, 3/8-16 UNC-2A, #10-24, 1/2 BSW, 2 BA, G1/4 or Tr20x4.`,
   );
 }
 

@@ -1,5 +1,5 @@
 import { inchesToMm, MM_PER_INCH } from '../../units/length';
-import { roundTo } from '../../units/format';
+import { roundHalfEven } from '../../units/format';
 import { unifiedBasicSizes } from './unified';
 import type { Limits, ThreadSeries } from './thread-spec';
 
@@ -14,7 +14,7 @@ const PITCH_FACTOR: Readonly<Record<string, number>> = {
 };
 
 /** Inch limits are tabled to four decimals, each quantity rounded before it is added; so are these. */
-const table = (inches: number): number => roundTo(inches, 4);
+const table = (inches: number): number => roundHalfEven(inches, 4);
 
 /** Length of engagement the tolerance is reckoned for: one diameter in the graded and the coarse constant series, else nine pitches. */
 function engagement(series: ThreadSeries, major: number, tpi: number): number {
@@ -40,7 +40,7 @@ export function unifiedExternalLimits(
 ): { major: Limits; pitch: Limits } | null {
   const factor = threadClass.endsWith('A') ? PITCH_FACTOR[threadClass] : undefined;
   if (factor === undefined) return null;
-  const major = roundTo(majorMm / MM_PER_INCH, 4);
+  const major = roundHalfEven(majorMm / MM_PER_INCH, 4);
   const base = pitchTolerance2A(series, majorMm / MM_PER_INCH, tpi);
   const allowance = threadClass === '3A' ? 0 : table(0.3 * base);
   const crest = table((threadClass === '1A' ? 0.09 : 0.06) * tpi ** (-2 / 3));
@@ -76,9 +76,15 @@ export function unifiedInternalLimits(
   const inches = majorMm / MM_PER_INCH;
   const basic = unifiedBasicSizes(inches, 1 / tpi);
   const minorMin = table(basic.minor);
+  const minorMax = minorMin + table(minorTolerance(inches, tpi, threadClass));
+  // The standard prints minor limits to three decimals from #6 up; only the largest of class 3B keeps its fourth.
+  const places = inches < 0.138 ? 4 : 3;
   const pitchMin = table(basic.pitchDiameter);
   return {
-    minor: inMm({ min: minorMin, max: minorMin + table(minorTolerance(inches, tpi, threadClass)) }),
+    minor: inMm({
+      min: roundHalfEven(minorMin, places),
+      max: roundHalfEven(minorMax, threadClass === '3B' ? 4 : places),
+    }),
     pitch: inMm({ min: pitchMin, max: pitchMin + table(factor * pitchTolerance2A(series, inches, tpi)) }),
   };
 }
