@@ -1,5 +1,6 @@
 import type { Advice, Problem } from '../problem';
 import type { LengthUnit } from '../units/length';
+import type { Tolerance } from '../units/tolerance';
 import type { Part } from '../part/part';
 import type { SizeKind } from '../scheme/scheme';
 
@@ -31,7 +32,8 @@ export interface ParameterBase {
   /** Bounds in mm, radians or plain figures; expressions may use other parameters. */
   minimum?: Expression;
   maximum?: Expression;
-  choices?: readonly { id: string; label: string }[];
+  /** `notYet` on one choice refuses that choice alone. */
+  choices?: readonly { id: string; label: string; notYet?: string }[];
   /** Shown only where this holds. */
   when?: Expression;
   /** Not built yet: any non-empty value is refused at its field with this sentence. */
@@ -45,6 +47,8 @@ export interface TableParameter extends ParameterBase {
   minimumRows: number;
   maximumRows: number;
   columns: readonly ParameterBase[];
+  /** Rows of a drawing that says nothing of the table; bare numbers in mm. */
+  defaultRows?: readonly TypedRow[];
 }
 
 export type Parameter = ParameterBase | TableParameter;
@@ -52,27 +56,48 @@ export type Parameter = ParameterBase | TableParameter;
 export interface Derived {
   id: string;
   value: Expression;
+  /** Once for every row of this table: read as `row.id`. */
+  each?: string;
 }
 
 export interface Constraint {
   /** Must be true; evaluated when all its parameters are good. */
   holds: Expression;
-  /** Where the sentence appears. */
+  /** Where the sentence appears; a column's name when `each`. */
   parameter: string;
-  /** `{name}` is replaced by the value formatted in the entry unit; `{=expression}` by its length in the entry unit. */
+  /**
+   * `{name}` is replaced by the value formatted in the entry unit, `{=expression}` by its length in the entry unit,
+   * `{>=expression}` and `{<=expression}` by a bound that may itself be typed (rounded to the safe side),
+   * `{range:low|high}` by `8 to 500 mm`, `{#expression}` by a plain figure or text.
+   */
   message: string;
   when?: Expression;
+  /** Judged for every row of this table, bound as `row` and `index`. */
+  each?: string;
 }
 
-/** One feature, its figures as expressions; `each` repeats it over a table's rows (bound as `row`, `index`). */
+export type FeatureTemplateKind = 'cylinder' | 'cone' | 'chamfer' | 'crown' | 'thread' | 'flats' | 'centre-hole';
+
+/**
+ * One feature, its figures as expressions; `each` repeats it over a table's rows (bound as `row`, `index`),
+ * and `{key}` in its id stands for the row's own key. Lengths are laid end to end in the order written.
+ */
 export interface FeatureTemplate {
-  kind: string;
+  kind: FeatureTemplateKind;
   id: string;
+  /** Where a remark about this feature appears: a parameter, or a column when `each`. */
+  parameter?: string;
   each?: string;
   when?: Expression;
   figures: Readonly<Record<string, Expression>>;
 }
 
+/**
+ * One shown size. `{key}` in `id` and `features` stands for the row's key when `each`.
+ * Figures, as expressions: `nominal` (mm; degrees for an angle) always;
+ * length: `from`, `to`; diameter and thread: `from`, `to`, `diameter`, and `at` where it can be read at one station only.
+ * Chamfers, crowns and flats are read from the part's own features. `lastRow` (an index) says that rows up to it are one face.
+ */
 export interface SizeTemplate {
   id: string;
   kind: SizeKind;
@@ -97,8 +122,19 @@ export interface Template {
   constraints: readonly Constraint[];
   features: readonly FeatureTemplate[];
   sizes: readonly SizeTemplate[];
+  /** x of the datum face. */
   datum: Expression;
   example: TypedValues;
+  /** Further worked examples; the first is the same as `example`. */
+  examples?: readonly WorkedExample[];
+}
+
+export interface WorkedExample {
+  id: string;
+  name: string;
+  /** What bare numbers in it mean. */
+  entryUnit: LengthUnit;
+  values: TypedValues;
 }
 
 /** What a person typed, as the form and the headless command hold it. Row keys are hidden and stable. */
@@ -115,6 +151,8 @@ export interface EvaluatedValue {
   text: string;
   unit?: LengthUnit | 'deg' | 'none';
   value: number | string | boolean | null;
+  /** A tolerance typed with the size (`14 h9`), or the value of a `fit` parameter. */
+  tolerance?: Tolerance;
 }
 export interface EvaluatedRow {
   key: string;
