@@ -26,6 +26,7 @@ function limit(id: string, value: number, unit: Limit['unit'], reason: string, s
 
 export const LIMITS = {
   gripMinimum: limit('grip-minimum', 5, 'mm', 'Jaws or a collet need this much of a plain cylinder to hold at all.', JUDGEMENT),
+  gripMost: limit('grip-most', 60, 'mm', 'Longest length of work that jaws or a collet really close on; more is bar in the spindle, not a grip.', JUDGEMENT),
   gripRatio: limit('grip-ratio', 0.35, 'ratio', 'A grip shorter than this share of its diameter lets the work rock; the longer of this and the least grip rules.', JUDGEMENT),
   partingClear: limit('parting-clear', 3, 'mm', 'Least distance between the jaws and the near side of the parting blade.', JUDGEMENT),
   overhang: limit('overhang', 3, 'ratio', 'Free length from the hold to the far end of the cut, over the smallest diameter between them on the stage before the cut: above this the work wants a centre or a steady.'),
@@ -138,6 +139,10 @@ export const RULES = {
   'figures-fit': rule('figures-fit', 'Depth, angle, faces, passes and stops agree with the metal.'),
   'removes-metal': rule('removes-metal', 'A cut removes metal, and as much as it says.'),
   'not-below-part': rule('not-below-part', 'No operation cuts into the finished part.'),
+  'can-be-replayed': rule('can-be-replayed', 'Every cut is data that a body can take, in the order of the operations’ numbers.'),
+  'stages-recorded': rule('stages-recorded', 'The recorded stages are what the cuts leave.'),
+  'named-features': rule('named-features', 'Each operation names the features whose metal it changes.'),
+  'waits-for-earlier': rule('waits-for-earlier', 'What an operation waits for has a smaller number.'),
   'finished-once': rule('finished-once', 'Each feature is finished once.'),
   'stage-is-part': rule('stage-is-part', 'What is left at the end is the part.'),
   'volumes-balance': rule('volumes-balance', 'Blank = chips + kerf + remnant + part.'),
