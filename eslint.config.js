@@ -34,7 +34,7 @@ const FLOORS = [
   { from: 'src/lib/', may: ['src/lib/', 'src/engine/', 'shared/', 'templates/'] },
   {
     from: /^src\/features\/[^/]+\//,
-    may: ['src/components/', 'src/lib/', 'src/engine/', 'src/app/', 'shared/', 'templates/'],
+    may: ['src/components/', 'src/lib/', 'src/engine/', 'src/revision/', 'src/app/', 'shared/', 'templates/'],
     own: true,
   },
   { from: 'src/', may: ['src/', 'shared/', 'templates/'] },

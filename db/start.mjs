@@ -10,6 +10,7 @@ import { ensureClient } from './start/client.mjs';
 import { placeCluster, prepareDataFolder } from './start/data-folder.mjs';
 import { installDebianPackages } from './start/debian-packages.mjs';
 import { demoSignIns } from './start/demo.mjs';
+import { useExistingServer } from './start/existing-server.mjs';
 import { Ending, Fault, firstLine } from './start/fault.mjs';
 import { ensureNpmPackages } from './start/npm-packages.mjs';
 import { claimFolder } from './start/one-start.mjs';
@@ -48,7 +49,7 @@ async function start() {
 
   const { secrets, fresh } = keepSecrets(join(data, 'secrets.json'));
   const database = settings.databaseUrl
-    ? { appUrl: settings.databaseUrl, ownerUrl: settings.databaseOwnerUrl ?? settings.databaseUrl }
+    ? await useExistingServer(settings, secrets.appPassword, say)
     : await startDatabase(data, secrets, fresh);
   const ownerEnv = { ...process.env, DATABASE_URL: database.appUrl, DATABASE_OWNER_URL: database.ownerUrl };
   await runStep('db/migrate.ts', ownerEnv, 'The tables could not be brought up to date');

@@ -1,6 +1,6 @@
 /** The ignored folder everything of one installation is kept in: the cluster, the secrets, the store, the logs. */
 import { existsSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
-import { join } from 'node:path';
+import { dirname, join } from 'node:path';
 import { canReach, databaseAccount } from './accounts.mjs';
 import { orFault } from './fault.mjs';
 import { clusterOutside } from './settings.mjs';
@@ -9,7 +9,7 @@ import { clusterOutside } from './settings.mjs';
 export function prepareDataFolder(dataFolder) {
   const advice = 'Give another folder with BENCHLEAF_DATA, or make that one writable.';
   const mode = process.getuid?.() === 0 ? 0o711 : 0o700;
-  orFault(`make the folder ${dataFolder}`, () => mkdirSync(dataFolder, { recursive: true, mode }), advice);
+  orFault(`make the folder ${dataFolder}`, () => makeFolder(dataFolder, mode), advice);
   const probe = join(dataFolder, `.writable-${process.pid}`);
   orFault(`write to ${dataFolder}`, () => writeFileSync(probe, ''), advice);
   rmSync(probe, { force: true });
@@ -28,6 +28,13 @@ export function placeCluster(dataFolder, say) {
   say(
     `The account ${account?.name ?? 'of this user'} cannot reach ${dataFolder}, so the database is kept in ${outside}.`,
   );
-  orFault(`make the folder ${outside}`, () => mkdirSync(outside, { recursive: true, mode: 0o711 }));
+  orFault(`make the folder ${outside}`, () => makeFolder(outside, 0o711));
   return { folder: join(outside, 'postgres'), log, account };
+}
+
+/** Folder by folder: mkdir's own `recursive` never comes back where nothing can be made, as under /proc. */
+function makeFolder(folder, mode) {
+  if (existsSync(folder)) return;
+  if (dirname(folder) !== folder) makeFolder(dirname(folder), mode);
+  mkdirSync(folder, { mode });
 }

@@ -33,11 +33,10 @@ export async function choosePort(host, asked, say) {
     if (!/^\d+$/.test(asked) || port > 65_535) {
       throw new Fault(`PORT is "${asked}". It must be a whole number from 0 to 65535.`);
     }
-    if (port === 0) return freeLoopbackPort();
     const refused = await whyTaken(host, port);
     if (refused)
       throw new Fault(`${refusal(refused, host, port)} Give another with PORT, or leave PORT out.`);
-    return port;
+    return port === 0 ? freeLoopbackPort() : port;
   }
   const first = 3000;
   for (let port = first; port < first + 100; port += 1) {
