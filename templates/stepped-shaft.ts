@@ -149,6 +149,13 @@ export const steppedShaft = defineTemplate({
       message: 'A threaded step takes its limits from the class of its thread, such as M16-6g. Leave the tolerance out.',
     },
     {
+      each: 'steps',
+      parameter: 'length',
+      when: 'row.continues or valueAt("steps", "continues", index + 1)',
+      holds: 'toleranceAt("steps", "length", index) == ""',
+      message: 'This step and its neighbour are both {row.size} across, so nothing shows where one ends. Make them one step to give its length a tolerance.',
+    },
+    {
       parameter: 'steps',
       holds: 'overall <= 3000',
       message: 'The steps come to {overall}. Keep the whole length to {=3000} or less.',

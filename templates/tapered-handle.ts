@@ -36,7 +36,7 @@ export const taperedHandle = defineTemplate({
       parameter: 'acrossFlats',
       when: 'isHex',
       // A corner upwards, so that the axis view shows three faces and the round of the bar at its outline.
-      figures: { from: 'gripFrom', length: 'min(flatsSpan, gripLength + taperLength)', count: '6', acrossFlats: 'acrossFlats', phase: 'pi / 6' },
+      figures: { from: 'gripFrom', length: 'flatsEndIsGiven ? flatsSpan : (flatsSpan > gripLength + 1e-6 ? flatsRunOut : gripLength)', count: '6', acrossFlats: 'acrossFlats', phase: 'pi / 6' },
     },
     { kind: 'crown', id: 'endCrown', parameter: 'endSize', when: 'crowned', figures: { end: '"right"', radius: 'end' } },
     { kind: 'chamfer', id: 'endChamfer', parameter: 'endSize', when: 'chamfered', figures: { on: '"taper"', end: '"right"', leg: 'end' } },

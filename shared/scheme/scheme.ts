@@ -25,13 +25,17 @@ export type SizeKind =
 export type SizeAnchor =
   /** Along the axis between two stations. */
   | { kind: 'span'; from: number; to: number }
-  /** Across a cylinder that is visible from `from` to `to`; `at` is set where it can only be read at one station (a cone's end). */
+  /**
+   * Across a cylinder whose outline is visible from `from` to `to` (chamfers and crowns left out). `at` is set where it
+   * holds at one station only, a cone's end; a crown or chamfer may have taken the metal there, so the point may be a
+   * theoretical one: the cone's own slope carried on from `from`..`to` to `at`.
+   */
   | { kind: 'across'; from: number; to: number; diameter: number; internal: boolean; at?: number }
-  /** At a corner of the outline: chamfers, radii. */
+  /** On the slope of a chamfer: the middle of it, a point of the outline. */
   | { kind: 'corner'; x: number; r: number; end: 'left' | 'right' }
-  /** An arc of the outline (a crown), from x to x. */
+  /** An arc of the outline (a crown) over x; its middle is a point of the outline, its apex lies on the axis at the `end`. */
   | { kind: 'arc'; from: number; to: number; radius: number; end: 'left' | 'right' }
-  /** Between opposite flats, read in an end view or a removed section. */
+  /** Between opposite flats, read in an end view or a removed section; the flats really stand from `from` to `to`. */
   | { kind: 'flats'; feature: string; from: number; to: number; acrossFlats: number; phase: number }
   /** A cone's angle to the axis, read on its outline. */
   | { kind: 'slope'; from: number; to: number; startDiameter: number; endDiameter: number };

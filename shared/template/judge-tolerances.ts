@@ -22,25 +22,23 @@ export function judgeTolerances(
   });
 }
 
-function impossible(size: SizeInstance, unit: LengthUnit): string | undefined {
-  for (const tolerance of size.tolerances) {
-    if (tolerance.kind === 'none') continue;
-    if (tolerance.kind === 'fit') {
-      const { code } = tolerance;
-      if (code !== code.toLowerCase()) {
-        return `${code} is a fit for a hole. This is an outside size: give it in small letters, such as ${code.toLowerCase()}.`;
-      }
-      const limits = fitLimits(code, size.nominal);
-      if (!limits.ok) return limits.message;
-      if (limits.value.lower <= -size.nominal) return `${code} leaves nothing of a size of ${lengthInWords(size.nominal, unit)}. Give a finer fit.`;
-      continue;
+function impossible({ tolerance, nominal }: SizeInstance, unit: LengthUnit): string | undefined {
+  if (tolerance.kind === 'none') return undefined;
+  if (tolerance.kind === 'fit') {
+    const { code } = tolerance;
+    if (code !== code.toLowerCase()) {
+      return `${code} is a fit for a hole. This is an outside size: give it in small letters, such as ${code.toLowerCase()}.`;
     }
-    const widest = Math.max(Math.abs(tolerance.upper), Math.abs(tolerance.lower));
-    if (widest >= size.nominal) {
-      return `A tolerance of ${lengthInWords(widest, unit)} is as large as the size of ${lengthInWords(size.nominal, unit)} itself. Give a smaller tolerance.`;
-    }
+    const limits = fitLimits(code, nominal);
+    if (!limits.ok) return limits.message;
+    return limits.value.lower <= -nominal
+      ? `${code} leaves nothing of a size of ${lengthInWords(nominal, unit)}. Give a finer fit.`
+      : undefined;
   }
-  return undefined;
+  const widest = Math.max(Math.abs(tolerance.upper), Math.abs(tolerance.lower));
+  return widest >= nominal
+    ? `A tolerance of ${lengthInWords(widest, unit)} is as large as the size of ${lengthInWords(nominal, unit)} itself. Give a smaller tolerance.`
+    : undefined;
 }
 
 /** A fit typed beside the size and another in the fit's own field. */

@@ -17,8 +17,8 @@ export interface SizeInstance {
   typed: string;
   /** Inch or millimetre as typed, where it was a length. */
   unit?: EvaluatedValue['unit'];
-  /** Tolerances as typed: one, or one a row where a size spans several rows that are one face. */
-  tolerances: Tolerance[];
+  /** As typed beside the size or in its fit's own field. */
+  tolerance: Tolerance;
   figures: Readonly<Record<string, ExpressionValue>>;
 }
 
@@ -70,7 +70,7 @@ function instance(
       nominal,
       typed: merged ? span.map(({ values }) => values[size.parameter ?? '']?.text.trim() ?? '').join(' + ') : (own?.text.trim() ?? ''),
       ...(own?.unit ? { unit: own.unit } : {}),
-      tolerances: merged ? span.map(({ values }) => typedIn(values)) : [typedIn(row ? (span[0]?.values ?? {}) : parameters.values)],
+      tolerance: typedIn(row ? (span[0]?.values ?? {}) : parameters.values),
       figures,
     },
   ];
