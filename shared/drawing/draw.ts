@@ -1,0 +1,150 @@
+import type { Part } from '../part/part';
+import type { Problem } from '../problem';
+import type { Scheme } from '../scheme/scheme';
+import { SHEET_SIZES } from '../standards/sheets';
+import { formatLength } from '../units/format';
+import type { Box } from './geometry/box';
+import { moveMarks } from './move';
+import { notesOf } from './notes/notes';
+import { arrange } from './passes/arrange';
+import type { Arrangement } from './passes/arrange';
+import { attemptsFor } from './passes/choose-sheet';
+import type { Attempt } from './passes/choose-sheet';
+import { notesColumn } from './passes/notes-column';
+import { foot, frameBox } from './passes/title-block';
+import type { Foot } from './passes/title-block';
+import { stampGroup } from './passes/stamp';
+import type { DrawingOptions, Group, Sheet } from './sheet';
+import type { Writing } from './size-text';
+
+/** Clean layouts compared before the best is taken; counted in work, so that the same values give the same bytes. */
+const COMPARED = 4;
+const MOST_TRIED = 14;
+const SCORE_WEIGHT = 4;
+const PRICE_WEIGHT = 1.2;
+const EDGE = 4;
+const OVER_FOOT = 4;
+
+interface Tried {
+  attempt: Attempt;
+  arrangement: Arrangement;
+  ground: Ground;
+  place: { dx: number; dy: number } | null;
+  rank: number;
+}
+
+/** What stands on a sheet before the views do, and the rectangles left for them. */
+interface Ground {
+  foot: Foot;
+  notes: Group;
+  rooms: readonly Box[];
+}
+
+function ground(attempt: Attempt, part: Part, options: DrawingOptions, writing: Writing): Ground {
+  const strip = foot({
+    size: attempt.sheet,
+    style: options.style,
+    unit: options.unit,
+    scaleText: attempt.scale.text,
+    title: options.titleBlock,
+  });
+  const [x0, y0, x1] = frameBox(attempt.sheet);
+  const said = strip.overflow.map(({ label, text }) => `${label.charAt(0)}${label.slice(1).toLowerCase()}: ${text}`);
+  const bottom = strip.block[1];
+  const notes = notesColumn([...said, ...notesOf(part, writing)], options.unit, x0 + EDGE, bottom);
+  const over: Box = [x0 + EDGE, y0 + EDGE, x1 - EDGE, notes.box[1] - 3];
+  const beside: Box = [notes.box[2] + 5, y0 + EDGE, x1 - EDGE, strip.block[1] - OVER_FOOT];
+  return { foot: strip, notes: notes.group, rooms: [over, beside] };
+}
+
+/** Where the drawing goes: the middle of the first room that holds it, or nowhere. */
+function placeIn(rooms: readonly Box[], bounds: Box): { dx: number; dy: number } | null {
+  const w = bounds[2] - bounds[0];
+  const h = bounds[3] - bounds[1];
+  const room = rooms.find((r) => w <= r[2] - r[0] && h <= r[3] - r[1]);
+  if (!room) return null;
+  return { dx: (room[0] + room[2] - w) / 2 - bounds[0], dy: (room[1] + room[3] - h) / 2 - bounds[1] };
+}
+
+function better(a: Tried, b: Tried | null): boolean {
+  if (!b) return true;
+  const fits = Number(a.place === null) - Number(b.place === null);
+  if (fits !== 0) return fits < 0;
+  const clashes = a.arrangement.clashes - b.arrangement.clashes;
+  return clashes !== 0 ? clashes < 0 : a.rank < b.rank;
+}
+
+function search(part: Part, scheme: Scheme, options: DrawingOptions, writing: Writing): Tried | null {
+  const cache = new Map<string, Arrangement>();
+  const tooBig = new Map<string, number>();
+  let best: Tried | null = null;
+  let clean = 0;
+  let tried = 0;
+  for (const attempt of attemptsFor(part, options)) {
+    if (best && best.place && best.arrangement.clashes === 0 && SCORE_WEIGHT * attempt.score >= best.rank) break;
+    const key = JSON.stringify(attempt.map);
+    const kind = `${attempt.sheet} ${attempt.map.breaks.length}`;
+    if (attempt.scale.factor >= (tooBig.get(kind) ?? Infinity)) continue;
+    if (!cache.has(key) && ++tried > MOST_TRIED) break;
+    const arrangement = cache.get(key) ?? arrange(part, scheme, attempt.map, writing, options.balloons);
+    cache.set(key, arrangement);
+    const base = ground(attempt, part, options, writing);
+    const place = placeIn(base.rooms, arrangement.bounds);
+    if (!place) tooBig.set(kind, attempt.scale.factor);
+    const now: Tried = { attempt, arrangement, ground: base, place, rank: SCORE_WEIGHT * attempt.score + PRICE_WEIGHT * arrangement.price };
+    if (better(now, best)) best = now;
+    if (place && arrangement.clashes === 0 && ++clean >= COMPARED) break;
+  }
+  return best;
+}
+
+function assemble(tried: Tried, options: DrawingOptions, writing: Writing): Sheet {
+  const { attempt, arrangement, ground: base } = tried;
+  const { dx, dy } = tried.place ?? { dx: 0, dy: 0 };
+  const { width, height } = SHEET_SIZES[attempt.sheet];
+  const stamp = options.stamp ? [stampGroup(options.stamp, frameBox(attempt.sheet), base.foot.block[1])] : [];
+  return {
+    schemaVersion: 1,
+    size: attempt.sheet,
+    width,
+    height,
+    frame: frameBox(attempt.sheet),
+    style: options.style,
+    unit: options.unit,
+    decimalSign: writing.decimalSign,
+    scale: attempt.scale.factor,
+    scaleText: attempt.scale.text,
+    groups: [
+      ...stamp,
+      ...base.foot.groups,
+      base.notes,
+      ...arrangement.groups.map((g) => ({ ...g, marks: moveMarks(g.marks, dx, dy) })),
+    ],
+    maps: arrangement.maps.map((m) => ({
+      ...m,
+      axisY: m.axisY + dy,
+      ...(m.centreX === undefined ? {} : { centreX: m.centreX + dx }),
+      knots: m.knots.map(([x, paper]) => [x, paper + dx] as const),
+    })),
+    choice: `${attempt.sheet} at ${attempt.scale.text}${attempt.map.breaks.length > 0 ? ', interrupted' : ''}`,
+  };
+}
+
+function nothingFits(part: Part, options: DrawingOptions, writing: Writing): Problem {
+  const say = (mm: number): string => `${formatLength(mm, { unit: writing.unit, style: writing.style })} ${writing.unit}`;
+  const size = `${say(part.length)} long and ${say(part.maxDiameter)} in diameter`;
+  const path = options.sheet !== 'auto' ? '--sheet' : options.scale !== 'auto' ? '--scale' : 'sheet';
+  const asked = options.sheet === 'auto' && options.scale === 'auto' ? 'any listed sheet at any listed scale' : 'the sheet and scale asked for';
+  return { path, message: `The part is ${size} and does not fit ${asked}. Choose a larger sheet, a smaller scale, or let both be chosen.` };
+}
+
+/**
+ * Part and scheme to a finished sheet: views, sizes, balloons, notes, title block, the stamp of an unreleased sheet.
+ * A problem when nothing listed holds the part. The same input gives the same sheet anywhere.
+ */
+export function drawSheet(part: Part, scheme: Scheme, options: DrawingOptions): { sheet: Sheet } | { problem: Problem } {
+  const writing: Writing = { style: options.style, unit: options.unit, decimalSign: options.decimalSign ?? '.' };
+  const best = search(part, scheme, options, writing);
+  if (!best || !best.place) return { problem: nothingFits(part, options, writing) };
+  return { sheet: assemble(best, options, writing) };
+}

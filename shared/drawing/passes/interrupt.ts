@@ -1,0 +1,63 @@
+/** Extension lines give way: cut where a foreign text or arrowhead lies on them. Afterwards none crosses either. */
+import { boxesMeet, growBox } from '../geometry/box';
+import type { Box } from '../geometry/box';
+import { segmentWithinBox } from '../geometry/segment';
+import type { LineMark, Mark } from '../sheet';
+import { strokesOf, strokeBox, textBoxesOf } from '../strokes';
+import { boxAround } from '../geometry/box';
+
+const TEXT_AIR = 0.6;
+const ARROW_AIR = 0.4;
+const LEAST_PIECE = 0.4;
+
+function arrowBoxes(marks: readonly Mark[]): Box[] {
+  return marks.flatMap((mark) => {
+    if (mark.type !== 'polyline' || mark.line !== 'arrow') return [];
+    const box = boxAround(strokesOf([mark]).map(strokeBox));
+    return box ? [box] : [];
+  });
+}
+
+/** Boxes that an extension line of another size must stop at. */
+export function keepClear(marks: readonly Mark[]): Box[] {
+  return [...textBoxesOf(marks).map((b) => growBox(b, TEXT_AIR)), ...arrowBoxes(marks).map((b) => growBox(b, ARROW_AIR))];
+}
+
+function cut(line: LineMark, boxes: readonly Box[]): LineMark[] {
+  const dx = line.x2 - line.x1;
+  const dy = line.y2 - line.y1;
+  const length = Math.hypot(dx, dy);
+  const own: Box = [Math.min(line.x1, line.x2), Math.min(line.y1, line.y2), Math.max(line.x1, line.x2), Math.max(line.y1, line.y2)];
+  let kept: [number, number][] = [[0, 1]];
+  for (const box of boxes) {
+    if (!boxesMeet(own, box, 0.001)) continue;
+    const hole = segmentWithinBox(line, box);
+    if (!hole) continue;
+    kept = kept.flatMap(([a, b]): [number, number][] => {
+      const pieces: [number, number][] = [];
+      if (hole[0] > a) pieces.push([a, Math.min(b, hole[0])]);
+      if (hole[1] < b) pieces.push([Math.max(a, hole[1]), b]);
+      return pieces;
+    });
+  }
+  return kept
+    .filter(([a, b]) => (b - a) * length >= LEAST_PIECE)
+    .map(([a, b]) => ({ ...line, x1: line.x1 + dx * a, y1: line.y1 + dy * a, x2: line.x1 + dx * b, y2: line.y1 + dy * b }));
+}
+
+/** The sizes' marks with their extension lines cut at one another's writing; `cuts` counts the holes made. */
+export function interrupt(sizes: readonly (readonly Mark[])[]): { marks: Mark[][]; cuts: number } {
+  const boxes = sizes.map(keepClear);
+  let cuts = 0;
+  const marks = sizes.map((own, i) => {
+    const foreign = boxes.flatMap((list, j) => (j === i ? [] : list));
+    return own.flatMap((mark) => {
+      if (mark.type !== 'line' || mark.line !== 'extension') return [mark];
+      const pieces = cut(mark, foreign);
+      const first = pieces[0];
+      if (pieces.length !== 1 || !first || first.x1 !== mark.x1 || first.y1 !== mark.y1 || first.x2 !== mark.x2 || first.y2 !== mark.y2) cuts++;
+      return pieces;
+    });
+  });
+  return { marks, cuts };
+}
