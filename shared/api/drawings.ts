@@ -49,8 +49,16 @@ export const saveRevisionRequest = z.object({
   entryUnit: lengthUnit,
   settings: sheetSettings,
   values: typedValues,
+  /** What this revision changes, as the sheet's revision table prints it; left out, it stays as it is. */
+  change: z.string().trim().min(1).max(limits.titleLength).optional(),
 });
 export type SaveRevisionRequest = z.infer<typeof saveRevisionRequest>;
+
+/** POST /api/shops/:shop/drawings/:drawing/revisions. */
+export const startRevisionRequest = z.object({
+  change: z.string().trim().min(1).max(limits.titleLength).default('changed'),
+});
+export type StartRevisionRequest = z.input<typeof startRevisionRequest>;
 
 /** POST …/submit and …/take-back. */
 export const versionRequest = z.object({ version: z.number().int().nonnegative() });

@@ -1,0 +1,37 @@
+import type { ErrorRequestHandler } from 'express';
+import type { ErrorCode } from '../errors';
+import { Refusal } from '../errors';
+
+/** The one exit of everything that is not a success. What is no refusal is our fault: written to the log, told without its inside. */
+export const answerErrors: ErrorRequestHandler = (error: unknown, request, response, next) => {
+  if (response.headersSent) return next(error);
+  const refusal = refusalOf(error);
+  if (refusal.code === 'internal') request.log?.error({ err: error }, 'a request failed');
+  response.status(refusal.status).json(refusal.answer());
+};
+
+/** Codes of the body reader and of the router, by their stable `type`. */
+const READER_CODES: Readonly<Record<string, ErrorCode>> = {
+  'entity.parse.failed': 'broken-json',
+  'entity.verify.failed': 'broken-json',
+  'request.aborted': 'broken-json',
+  'request.size.invalid': 'broken-json',
+  'entity.too.large': 'too-large',
+  'parameters.too.many': 'too-large',
+  'encoding.unsupported': 'unknown-encoding',
+  'charset.unsupported': 'unknown-encoding',
+};
+
+function refusalOf(error: unknown): Refusal {
+  if (error instanceof Refusal) return error;
+  if (statusOf(error) === 404) return new Refusal('not-found');
+  // An address such as /api/shops/%ff cannot be read at all, so there is nothing there.
+  if (error instanceof URIError) return new Refusal('not-found');
+  const type = typeof error === 'object' && error !== null && 'type' in error ? error.type : undefined;
+  return new Refusal((typeof type === 'string' && READER_CODES[type]) || 'internal');
+}
+
+/** The file server's own errors carry a status and no type. */
+function statusOf(error: unknown): unknown {
+  return typeof error === 'object' && error !== null && 'status' in error ? error.status : undefined;
+}

@@ -1,0 +1,50 @@
+import PDFDocument from 'pdfkit';
+import SVGtoPDF from 'svg-to-pdfkit';
+import { faces } from './faces';
+
+const POINTS_PER_MM = 72 / 25.4;
+
+export interface PdfFacts {
+  title: string;
+  /** Moment the document says it was made; the same facts and sheets then give the same bytes. */
+  date?: Date;
+}
+
+/**
+ * Sheets as one PDF, a page each, in true size and as vectors. Each SVG must be one of ours: sized in mm.
+ * @throws Error when an SVG has no size in mm.
+ */
+export function sheetPdf(svgs: readonly string[], facts: PdfFacts): Promise<Uint8Array> {
+  const { regular, bold } = faces();
+  return new Promise((resolve, reject) => {
+    const info = { Title: facts.title, Producer: 'Benchleaf', Creator: 'Benchleaf', CreationDate: facts.date ?? new Date(0) };
+    const document = new PDFDocument({ autoFirstPage: false, margin: 0, info, lang: 'en-GB' });
+    const chunks: Buffer[] = [];
+    document.on('data', (chunk: Buffer) => chunks.push(chunk));
+    document.on('end', () => resolve(Buffer.concat(chunks)));
+    document.on('error', reject);
+    document.registerFont('regular', regular);
+    document.registerFont('bold', bold);
+    try {
+      for (const svg of svgs) {
+        const { width, height } = sizeOf(svg);
+        document.addPage({ size: [width * POINTS_PER_MM, height * POINTS_PER_MM], margin: 0 });
+        // Its types ask for the class where the function takes a document.
+        SVGtoPDF(document as unknown as typeof PDFDocument, svg, 0, 0, {
+          fontCallback: (_family: string, isBold: boolean) => (isBold ? 'bold' : 'regular'),
+        });
+      }
+      document.end();
+    } catch (error) {
+      reject(error instanceof Error ? error : new Error(String(error)));
+    }
+  });
+}
+
+/** Millimetres, from the root's own attributes. */
+function sizeOf(svg: string): { width: number; height: number } {
+  const match = /^<svg [^>]*?width="([\d.]+)mm" height="([\d.]+)mm"/.exec(svg);
+  const [width, height] = [Number(match?.[1]), Number(match?.[2])];
+  if (!(width > 0) || !(height > 0)) throw new Error('This SVG has no size in millimetres.');
+  return { width, height };
+}
