@@ -23,8 +23,10 @@ export function placeCluster(dataFolder, say) {
   const inside = join(dataFolder, 'postgres');
   const account = databaseAccount(existsSync(inside) ? inside : undefined);
   const log = join(dataFolder, 'postgres.log');
-  if (canReach(account, dataFolder)) return { folder: inside, log, account };
   const outside = clusterOutside(dataFolder);
+  // One that was put outside before stays there, even when the way in has been opened since: its data is the shop's.
+  const wasOutside = !existsSync(inside) && existsSync(join(outside, 'postgres'));
+  if (!wasOutside && canReach(account, dataFolder)) return { folder: inside, log, account };
   say(
     `The account ${account?.name ?? 'of this user'} cannot reach ${dataFolder}, so the database is kept in ${outside}.`,
   );
