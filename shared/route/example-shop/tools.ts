@@ -69,6 +69,7 @@ const taps: readonly Tool[] = TAPS.map(([designation, major, pitch]) => ({
 }));
 
 const CENTRE_DRILLS: readonly (readonly [string, number, number])[] = [
+  ['A0.8', 0.8, 1.7],
   ['A1', 1, 2.12],
   ['A1.6', 1.6, 3.35],
   ['A2', 2, 4.25],

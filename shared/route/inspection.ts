@@ -1,0 +1,114 @@
+import type { Scheme, Size } from '../scheme/scheme';
+import type { DraftNeed, DraftOperation } from './draft';
+import type { Instrument, Register } from './register';
+import type { Method } from './route';
+import { alternative, held, mm, short } from './shop';
+
+/** Which kinds of size an operation brings to its figure. */
+const BROUGHT: Partial<Record<Method, readonly Size['kind'][]>> = {
+  face: ['length'],
+  turn: ['diameter', 'length', 'groove'],
+  groove: ['diameter', 'length', 'groove'],
+  'taper-turn': ['taper', 'angle', 'diameter', 'length'],
+  'form-turn': ['radius'],
+  chamfer: ['chamfer'],
+  'thread-die': ['thread'],
+  'thread-single-point': ['thread'],
+  'mill-flat': ['across-flats', 'length'],
+  'centre-drill': ['centre-hole'],
+  'part-off': ['length'],
+};
+
+/**
+ * Sizes an operation is the one to bring about, by its features and kind. A diameter belongs to the operation on the
+ * first of its features that is turned; a length to the last operation on one of its features.
+ */
+export function sizesOf(operations: readonly DraftOperation[], scheme: Scheme): Map<string, Size[]> {
+  const found = new Map<string, Size[]>();
+  for (const size of scheme.sizes) {
+    if (size.reference) continue;
+    const makers = operations.filter(
+      (o) => BROUGHT[o.method]?.includes(size.kind) && o.features.some((id) => size.features.includes(id)),
+    );
+    // A size read across one station of a cone is the cone's; any other diameter is its cylinder's.
+    const atCone = size.anchor.kind === 'across' && size.anchor.at !== undefined;
+    const maker =
+      size.kind === 'length'
+        ? makers[makers.length - 1]
+        : (makers.find((o) => (o.method === 'taper-turn') === atCone) ?? makers[0]);
+    if (!maker) continue;
+    found.set(maker.key, [...(found.get(maker.key) ?? []), size]);
+  }
+  return found;
+}
+
+export interface Measuring {
+  text: string;
+  need: DraftNeed;
+}
+
+const KINDS: Partial<Record<Size['kind'], readonly Instrument['kind'][]>> = {
+  length: ['caliper', 'depth', 'micrometer', 'rule'],
+  diameter: ['micrometer', 'caliper'],
+  'across-flats': ['micrometer', 'caliper'],
+  groove: ['caliper', 'micrometer'],
+  radius: ['radius-gauge'],
+  angle: ['protractor'],
+  taper: ['micrometer', 'protractor'],
+  chamfer: ['rule', 'caliper'],
+  thread: ['ring-gauge', 'thread-wires'],
+  'centre-hole': ['caliper'],
+};
+
+/**
+ * The instrument for a size: the coarsest whose permissible error is a tenth of the tolerance; else one at the shop's
+ * own ratio, with a note; else a short that names what is wanted. Null for sizes nobody measures.
+ */
+export function instrumentFor(register: Register, size: Size): Measuring | null {
+  const kinds = KINDS[size.kind];
+  if (!kinds) return null;
+  const spec = `measure ${size.typed || mm(size.nominal)}`;
+  if (size.kind === 'thread') return threadGauge(register, size, spec);
+  const width = size.upperLimit - size.lowerLimit;
+  const reach = register.instruments.filter(
+    (i) => kinds.includes(i.kind) && (i.kind === 'protractor' || (i.minimum <= size.nominal + 1e-9 && size.nominal <= i.maximum + 1e-9)),
+  );
+  if (size.kind === 'radius' || size.kind === 'angle' || size.kind === 'taper' || size.kind === 'chamfer') {
+    const first = reach[0];
+    return first ? { text: first.name.toLowerCase(), need: held('instrument', spec, first.id, `${first.name}, ${first.place}.`) } : missing(spec, width);
+  }
+  const coarse = [...reach].sort((a, b) => b.permissibleError - a.permissibleError);
+  const tenth = coarse.find((i) => i.permissibleError <= width / 10 + 1e-12);
+  if (tenth) return { text: tenth.name.toLowerCase(), need: held('instrument', spec, tenth.id, `${tenth.name}: ${mm(tenth.permissibleError)} is a tenth of ${mm(width)} or less.`) };
+  const ratio = Math.max(0.1, register.settings.instrumentRatio);
+  const allowed = coarse.find((i) => i.permissibleError <= width * ratio + 1e-12);
+  if (allowed)
+    return {
+      text: `${allowed.name.toLowerCase()}, twice`,
+      need: held('instrument', spec, allowed.id, `${allowed.name}: ${mm(allowed.permissibleError)} is more than a tenth of ${mm(width)} but within ${mm(ratio)} of it, which the shop allows; measure twice.`),
+    };
+  return missing(spec, width);
+}
+
+function missing(spec: string, width: number): Measuring {
+  return {
+    text: 'no instrument fine enough',
+    need: short('instrument', spec, `Nothing in the register reads it to a tenth of ${mm(width)}, nor to the shop’s own share.`, [
+      'borrow or buy a finer instrument',
+      'gauge it against a master piece',
+    ]),
+  };
+}
+
+function threadGauge(register: Register, size: Size, spec: string): Measuring {
+  const name = (size.designation ?? '').replace(/-\d*[a-zA-Z0-9]+$/, '');
+  const gauge = register.instruments.find((i) => i.kind === 'ring-gauge' && i.designation !== undefined && name.startsWith(i.designation) && (name.length === i.designation.length || !/[x0-9.]/i.test(name.charAt(i.designation.length))));
+  if (gauge) return { text: gauge.name.toLowerCase(), need: held('instrument', spec, gauge.id, `${gauge.name}, ${gauge.place}.`) };
+  const wires = register.instruments.find((i) => i.kind === 'thread-wires');
+  if (wires)
+    return { text: `${wires.name.toLowerCase()}, or the mate`, need: held('instrument', spec, wires.id, `No ring gauge for it: over ${wires.name.toLowerCase()} with a micrometer, and in the mate.`) };
+  return {
+    text: 'the mate',
+    need: alternative('instrument', spec, undefined, 'No ring gauge and no wires: it is tried in the mate.', ['try it in the mate', 'buy a ring gauge']),
+  };
+}

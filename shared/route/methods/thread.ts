@@ -1,0 +1,157 @@
+import { radiusAt } from '../../part/generator';
+import type { ThreadFeature } from '../../part/part';
+import { addOperation, RuledOut } from '../draft';
+import type { DraftNeed } from '../draft';
+import type { Row } from '../features';
+import { LIMITS } from '../rules';
+import type { RuleId } from '../rules';
+import { alternative, dieFor, dieHolderFor, gearboxCuts, held, mm, short, threadingTool } from '../shop';
+import { depthFor, keyOf, passesFor, stageOf } from '../session';
+import type { Session } from '../session';
+import { rowsWorked } from './turn';
+
+/** Threads on rows worked here, nearest the free end first: by die where the shop cuts the size so, else single point. */
+export function cutThreads(session: Session): void {
+  for (const row of [...rowsWorked(session)].reverse()) {
+    if (row.thread) cutThread(session, row, row.thread);
+  }
+}
+
+/** True where a die can do it and the shop has it, or none of it needs the tail: the tail must be out for a die. */
+export function byDie(session: Session, row: Row, thread: ThreadFeature): boolean {
+  const { register } = session.build;
+  const die = dieFor(register, thread);
+  return (
+    die !== undefined &&
+    dieHolderFor(register, die) !== undefined &&
+    thread.starts === 1 &&
+    thread.major <= register.settings.dieLimit + 1e-6 &&
+    openToFreeEnd(session, row, thread)
+  );
+}
+
+function openToFreeEnd(session: Session, row: Row, thread: ThreadFeature): boolean {
+  const beyond = session.view.rows.filter((other) => other.from >= row.to - 1e-9);
+  return beyond.every((other) => Math.max(other.startR, other.endR) <= thread.root / 2 + 1e-6);
+}
+
+/** Plain length between the thread and what it runs into: infinite where a smaller neighbour lets the tool out. */
+function runOutOf(session: Session, row: Row, thread: ThreadFeature): number {
+  const stage = stageOf(session);
+  const spare = thread.from - row.from;
+  if (row.from <= stage.x0 + 1e-9) return Infinity;
+  return radiusAt(stage.outer, row.from, 'left') <= thread.root / 2 + 1e-6 ? Infinity : spare;
+}
+
+function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
+  const { build, view } = session;
+  const { register } = build;
+  if (!openToFreeEnd(session, row, thread))
+    throw new RuledOut(
+      'way-in',
+      `${thread.designation} stands behind a larger diameter from this end: no die passes over it and no tool can run in.`,
+    );
+  const exit = runOutOf(session, row, thread);
+  const die = dieFor(register, thread);
+  const holder = die && dieHolderFor(register, die);
+  const useDie = byDie(session, row, thread);
+  const after: { key: string; rule: RuleId }[] = [];
+  const chamfer = session.done.get(`chamfer.${row.id}`);
+  if (chamfer) after.push({ key: chamfer, rule: 'chamfer-before-thread' });
+  else {
+    const turned = session.done.get(`row.${row.id}`);
+    if (turned) after.push({ key: turned, rule: 'blank-before-thread' });
+  }
+  const key = keyOf(session, `thread.${thread.id}`);
+  const treatment = view.part.body.treatments.find((t) => t.id === thread.id);
+  if (!treatment) throw new Error(`the part has no thread called ${thread.id}`);
+  const common = {
+    key,
+    features: [thread.id],
+    pitch: thread.lead,
+    cut: { kind: 'treatment' as const, treatment },
+    after,
+    stops: [{ toX: thread.from }],
+  };
+  const depth = (thread.major - thread.root) / 2;
+  if (useDie && die && holder) {
+    const turnRound = exit < LIMITS.dieLead.value * thread.pitch;
+    addOperation(build, view, {
+      ...common,
+      method: 'thread-die',
+      title: `thread ${thread.designation} by die`,
+      tool: `${die.name}, ${holder.name.toLowerCase()}`,
+      toolItem: die.id,
+      toolFigures: die.figures,
+      figures: { diameter: thread.major, travel: thread.to - thread.from, depth, passes: 1 },
+      reasons: turnRound ? ['die-when-held', 'die-turned-round'] : ['die-when-held'],
+      notes: turnRound
+        ? [`No run-out at the shoulder: turn the die round for the last threads; about one pitch (${mm(thread.pitch)}) stays incomplete.`]
+        : ['Start square, oil, and stop at the length with the spindle turned by hand.'],
+      check: `ring gauge ${thread.designation}, or the mate`,
+      needs: [
+        held('tool', `die ${thread.designation}`, die.id, `${die.name}, ${die.place}.`),
+        held('holder', `die holder ${mm(die.figures['outside'] ?? 0)}`, holder.id, `${holder.name}, ${holder.place}.`),
+      ],
+      handling: turnRound ? 4 : 3,
+    });
+    session.done.set('thread', key);
+    return;
+  }
+  singlePoint(session, thread, exit, common, depth);
+  session.done.set('thread', key);
+}
+
+function singlePoint(
+  session: Session,
+  thread: ThreadFeature,
+  exit: number,
+  common: Pick<Parameters<typeof addOperation>[2], 'key' | 'features' | 'pitch' | 'cut' | 'after' | 'stops'>,
+  depth: number,
+): void {
+  const { build, view } = session;
+  const { register, lathe } = build;
+  const tool = threadingTool(register, thread);
+  const needs: DraftNeed[] = [tool.need];
+  const spec = `lead ${mm(thread.lead)} in the gearbox`;
+  const dieHeld = dieFor(register, thread) !== undefined;
+  const why = dieHeld
+    ? `Over the ${mm(register.settings.dieLimit)} the shop cuts by die.`
+    : `No ${thread.designation} die in the register.`;
+  if (!gearboxCuts(lathe, thread.lead)) {
+    needs.push(short('machine', spec, `${lathe.name} does not cut this lead, and ${why.charAt(0).toLowerCase()}${why.slice(1)}`, ['buy the die', 'change wheels']));
+  } else if (!dieHeld && thread.major <= register.settings.dieLimit + 1e-6) {
+    needs.push(
+      alternative('tool', `die ${thread.designation}`, lathe.id, `${why} Single point: ${lathe.name} cuts ${mm(thread.lead)}.`, [
+        `single point on ${lathe.name}, about 15 min more`,
+        'buy the die',
+      ]),
+    );
+  } else needs.push(held('machine', spec, lathe.id, `${why} ${lathe.name} cuts ${mm(thread.lead)}.`));
+  if (exit < LIMITS.threadExit.value * thread.pitch) {
+    throw new RuledOut(
+      'thread-run-out',
+      `${thread.designation} runs right up to a shoulder and is cut with a single-point tool, which needs at least a pitch (${mm(thread.pitch)}) of run-out or a relief there.`,
+    );
+  }
+  const allowed = depthFor(session, 'thread-single-point', thread.to, Math.min(0.2, depth), `Thread ${thread.designation}`);
+  const cut = passesFor(depth, allowed);
+  addOperation(build, view, {
+    ...common,
+    method: 'thread-single-point',
+    title: `thread ${thread.designation}, single point`,
+    tool: tool.name,
+    toolItem: tool.item?.id,
+    toolFigures: tool.item?.figures,
+    figures: { diameter: thread.major, travel: thread.to - thread.from + 3 * thread.pitch, depth: cut.depth, passes: cut.passes + 2 },
+    reasons: ['single-point'],
+    notes: [
+      `Gearbox to ${mm(thread.lead)}; infeed ${mm(Math.round(depth * 1000) / 1000)} in all, two spring passes.`,
+      ...(thread.hand === 'left' ? ['Left hand: the tool travels away from the chuck.'] : []),
+      ...(thread.starts > 1 ? [`${thread.starts} starts, each a pitch of ${mm(thread.pitch)} on.`] : []),
+    ],
+    check: `thread wires, or the mate`,
+    needs,
+    handling: 8,
+  });
+}

@@ -1,0 +1,180 @@
+import type { Part } from '../part/part';
+import type { Scheme } from '../scheme/scheme';
+import { RuledOut } from './draft';
+import type { Build } from './draft';
+import { unplannedKinds, viewsOf } from './features';
+import type { View } from './features';
+import { finishRoute, needList, weigh } from './finish-route';
+import type { WeighedPlan } from './finish-route';
+import { valleysOf } from './methods/turn';
+import { planNeeds } from './needs';
+import type { Lathe, Register } from './register';
+import type { Capacity, Need, Route } from './route';
+import { compareScores, whyWorse } from './score';
+import type { Score } from './score';
+import { buildCandidate, candidateText } from './setups/candidate';
+import type { Candidate } from './setups/candidate';
+import { mm } from './shop';
+import { stockFor } from './stock';
+import type { StockAnswer, StockOption } from './stock';
+import { verdictOf } from './verdict';
+
+export interface PlanAsked {
+  quantity: number;
+  /** Id of the materials table; the part's own when it is the same. */
+  material: string;
+}
+
+export type PlanAnswer = { route: Route; capacity: Capacity } | { route: null; capacity: Capacity };
+
+const MOST_CANDIDATES = 40;
+
+interface Weighed {
+  candidate: Candidate;
+  plan: WeighedPlan;
+  needs: Need[];
+  score: Score;
+}
+
+/**
+ * The best plan that makes the part in this shop, with what it needs, what is short and the plans that lost. The route
+ * is null only when no plan exists at all; the capacity then says why, in words. Same answer every time.
+ */
+export function planRoute(part: Part, scheme: Scheme, register: Register, asked: PlanAsked): PlanAnswer {
+  const unplanned = unplannedKinds(part);
+  if (unplanned.length > 0)
+    return noRoute([`No method here cuts a ${unplanned.join(' or a ')} yet.`]);
+  if (register.lathes.length === 0) return noRoute(['The register has no lathe.'], 'machine', 'a lathe');
+  const made = { ...part, material: asked.material };
+  const views = viewsOf(made);
+  const stock = stockFor(made, scheme, register, asked.material);
+  const weighed: Weighed[] = [];
+  const failures: { text: string; why: string }[] = [];
+  for (const lathe of lathesFor(register, stock)) {
+    for (const candidate of candidatesFor(views, stock, lathe)) {
+      try {
+        weighed.push(weighCandidate(made, scheme, register, candidate, stock, asked.quantity));
+      } catch (error) {
+        if (!(error instanceof RuledOut)) throw error;
+        failures.push({ text: candidateText(candidate), why: error.message });
+      }
+    }
+    // The other lathe is only asked where this one leaves something short.
+    if (weighed.some((w) => w.score.shorts === 0)) break;
+  }
+  weighed.sort((a, b) => compareScores(a.score, b.score));
+  const best = weighed[0];
+  if (!best) return noRoute([...new Set(failures.map((f) => f.why))].slice(0, 4));
+  const others = [
+    ...weighed.slice(1, 9).map((w) => ({ text: candidateText(w.candidate), why: whyWorse(best.score, w.score) })),
+    ...failures.slice(0, 8),
+  ];
+  const route = finishRoute(best.plan, {
+    part: made,
+    scheme,
+    bar: best.candidate.stock.bar,
+    quantity: asked.quantity,
+    others,
+  });
+  return { route, capacity: { verdict: verdictOf(best.needs), needs: best.needs } };
+}
+
+function noRoute(reasons: readonly string[], kind: Need['kind'] = 'geometry', need = 'a way to make the part'): PlanAnswer {
+  return {
+    route: null,
+    capacity: {
+      verdict: 'cannot',
+      needs: reasons.map((why) => ({ operation: 0, kind, need, state: 'short', why, alternatives: [] })),
+    },
+  };
+}
+
+/** Lathes whose slide the bar clears, the smallest first; all of them when none does, so that the short can be said. */
+function lathesFor(register: Register, stock: StockAnswer): Lathe[] {
+  const diameter = stock.options[0]?.size ?? 0;
+  const sorted = [...register.lathes].sort((a, b) => b.swingOverSlide - a.swingOverSlide || (a.id < b.id ? -1 : 1));
+  const fit = sorted.filter((lathe) => lathe.swingOverSlide >= diameter);
+  return fit.length > 0 ? fit : sorted;
+}
+
+function candidatesFor(views: { right: View; left: View }, stock: StockAnswer, lathe: Lathe): Candidate[] {
+  const found: Candidate[] = [];
+  const option: StockOption | undefined = stock.options[0];
+  if (!option) return found;
+  for (const first of ['right', 'left'] as const) {
+    const view = views[first];
+    if (mayPartToLength(view)) found.push({ first, kind: 'stick', meets: 0, secondEnd: false, lathe, stock: option });
+    const boundaries = meetingPoints(view);
+    for (const meets of [0, ...boundaries]) {
+      for (const kind of ['stick', 'blank'] as const) {
+        if (kind === 'blank' && meets === 0) continue;
+        found.push({ first, kind, meets, secondEnd: true, lathe, stock: option });
+      }
+    }
+  }
+  return found.slice(0, MOST_CANDIDATES);
+}
+
+/** Parted to length and never turned round: nothing is drawn on the far end but a chamfer that a tool can reach beside the blade. */
+function mayPartToLength(view: View): boolean {
+  const row = view.rows[0];
+  return row !== undefined && row.kind === 'cylinder' && !row.thread && !view.crownLeft && !view.centreLeft;
+}
+
+/** Stations where the work of the two ends may meet: between rows, on either side of the largest. */
+function meetingPoints(view: View): number[] {
+  return view.rows.slice(1).map((row) => row.from);
+}
+
+function weighCandidate(
+  part: Part,
+  scheme: Scheme,
+  register: Register,
+  candidate: Candidate,
+  stock: StockAnswer,
+  quantity: number,
+): Weighed {
+  const build = buildCandidate(part, register, candidate);
+  const plan = weigh(build, scheme, planNeeds(build, stock, candidate.stock.bar, quantity));
+  const needs = needList(plan);
+  return { candidate, plan, needs, score: scoreOf(build, plan, needs, candidate, scheme) };
+}
+
+function scoreOf(build: Build, plan: WeighedPlan, needs: readonly Need[], candidate: Candidate, scheme: Scheme): Score {
+  const radius = build.stockRadius;
+  return {
+    shorts: needs.filter((n) => n.state === 'short').length,
+    setups: build.setups.length,
+    awkward: awkwardRows(build, candidate),
+    apart: fitsApart(build, candidate, scheme),
+    alternatives: needs.filter((n) => n.state === 'alternative').length,
+    minutes: plan.setupMinutes + plan.runMinutes,
+    blank: Math.PI * radius * radius * (build.blank.x1 - build.blank.x0),
+  };
+}
+
+/** Rows cut behind a collar, in both holdings. */
+function awkwardRows(build: Build, candidate: Candidate): number {
+  const view = build.views[candidate.first];
+  const other = candidate.first === 'right' ? build.views.left : build.views.right;
+  const first = view.rows.filter((row) => row.from >= candidate.meets - 1e-9);
+  const second = candidate.secondEnd ? other.rows.filter((row) => row.from >= view.length - candidate.meets - 1e-9) : [];
+  return valleysOf(first).length + valleysOf(second).length;
+}
+
+/** Pairs of holdings that share the part's fits between them, less one: 0 where all fits are turned together. */
+function fitsApart(build: Build, candidate: Candidate, scheme: Scheme): number {
+  const fitted = new Set(
+    scheme.sizes.filter((s) => s.kind === 'diameter' && s.tolerance.kind === 'fit').flatMap((s) => s.features),
+  );
+  const view = build.views[candidate.first];
+  const rows = view.rows.filter((row) => fitted.has(row.id));
+  const first = rows.some((row) => row.from >= candidate.meets - 1e-9);
+  const second = rows.some((row) => row.from < candidate.meets - 1e-9);
+  return candidate.secondEnd && first && second ? 1 : 0;
+}
+
+/** For the record of a plan in words: `M10 stick of 25, 186 long`. */
+export function stockText(route: Route): string {
+  return `${mm(route.stock.size)} ${route.stock.shape}, ${mm(Math.round(route.blankLength * 10) / 10)} long`;
+}
