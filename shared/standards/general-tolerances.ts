@@ -39,8 +39,8 @@ const ANGLES: readonly Row[] = [
 ];
 
 function lookUp(rows: readonly Row[], size: number, cls: GeneralToleranceClass): number | null {
-  // The first row takes its lower bound in; every other row is over one bound and up to the next.
-  const row = rows.find(([over, upTo], index) => (index === 0 ? size >= over : size > over) && size <= upTo);
+  // Ranges are over one bound and up to the next: a size on a bound belongs to the row below, which comes first.
+  const row = rows.find(([over, upTo]) => size >= over && size <= upTo);
   return row?.[COLUMN[cls]] ?? null;
 }
 
