@@ -4,7 +4,7 @@ import type { EvaluatedParameters } from './template/template';
 import type { Part } from './part/part';
 import { partMass, volume } from './part/volume';
 import { materialById } from './standards/materials';
-import { degreesFrom } from './units/angle';
+import { toDegrees } from './units/angle';
 
 /** Features whose own figures are radians inside and degrees in the JSON. */
 const ANGULAR_FIGURES = new Set(['halfAngle', 'angle', 'phase']);
@@ -93,7 +93,7 @@ function partOf(part: Part): DrawResult['part'] {
     features: part.features.map((feature) => {
       const figures = Object.entries(feature).map(([name, value]) => [
         name,
-        ANGULAR_FIGURES.has(name) && typeof value === 'number' ? degreesFrom(value) : value,
+        ANGULAR_FIGURES.has(name) && typeof value === 'number' ? toDegrees(value) : value,
       ]);
       return Object.fromEntries(figures) as DrawResult['part']['features'][number];
     }),

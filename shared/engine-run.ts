@@ -4,7 +4,6 @@ import type { Evaluation } from './template/template';
 import type { Part } from './part/part';
 import { checkSheet } from './drawing/check/check-sheet';
 import { drawSheet } from './drawing/draw';
-import { generalToleranceFor } from './scheme/general-tolerance';
 import { renderSvg } from './render/svg';
 import { planRoute } from './route/plan';
 import { buildScheme } from './scheme/build';
@@ -39,7 +38,7 @@ function drawAndPlan(request: EngineRequest, evaluation: Evaluation & { part: Pa
   if (!template) throw new UnknownTemplate(request.template);
   const { part } = evaluation;
   const scheme = buildScheme(template, evaluation, {
-    generalTolerance: generalToleranceFor(request.style, request.unit),
+    generalTolerance: generalToleranceOf(request),
     balloons: request.frozenBalloons,
   });
   const plan = planRoute(part, scheme, request.register, {
@@ -75,4 +74,9 @@ function drawAndPlan(request: EngineRequest, evaluation: Evaluation & { part: Pa
 function quantityOf(evaluation: Evaluation): number {
   const typed = evaluation.parameters.values['quantity']?.value;
   return typeof typed === 'number' && typed >= 1 ? typed : 1;
+}
+
+/** Inch sheets of the `asme` style are governed by the shop's block of decimals; every other by ISO 2768-1, class m. */
+function generalToleranceOf({ style, unit }: EngineRequest): string {
+  return style === 'asme' && unit === 'in' ? 'shop-inch' : 'ISO 2768-m';
 }
