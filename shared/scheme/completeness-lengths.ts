@@ -9,15 +9,12 @@ interface Node {
   words: string;
 }
 
-/** Features that one size calls one face have no station between them. */
-export type Faces = readonly (readonly string[])[];
-
 /**
  * Whether the lengths fix every station once: stations are nodes, shown lengths edges, and the edges must be a spanning
  * tree. Chamfer and crown edges are fixed by their own sizes, run-outs by the shapes that meet.
  */
-export function lengthsCompleteness(part: Part, sizes: readonly Size[], faces: Faces): Completeness {
-  const nodes = stationsToFix(part, faces);
+export function lengthsCompleteness(part: Part, sizes: readonly Size[]): Completeness {
+  const nodes = stationsToFix(part);
   const group = nodes.map((_, index) => index);
   const root = (index: number): number => {
     const parent = group[index] ?? index;
@@ -42,17 +39,16 @@ export function lengthsCompleteness(part: Part, sizes: readonly Size[], faces: F
 }
 
 /** Stations that only a length can fix, from the left. */
-function stationsToFix(part: Part, faces: Faces): Node[] {
+function stationsToFix(part: Part): Node[] {
   const nodes: Node[] = [{ x: 0, words: 'the left face' }];
   const add = (x: number, words: string): void => {
     if (!nodes.some((node) => Math.abs(node.x - x) <= STATION_TOLERANCE)) nodes.push({ x, words });
   };
   add(part.length, 'the right face');
-  const joins = new Set(faces.flatMap((face) => face.slice(0, -1)));
   for (const feature of part.features) {
     if (feature.kind === 'cylinder' || feature.kind === 'cone') {
-      if (!joins.has(feature.id)) add(feature.to, `the right end of ${feature.id}`);
-    } else if (feature.kind === 'thread' && !joins.has(feature.id)) {
+      add(feature.to, `the right end of ${feature.id}`);
+    } else if (feature.kind === 'thread') {
       add(feature.from, `the left end of ${feature.id}`);
       add(feature.to, `the right end of ${feature.id}`);
     } else if (feature.kind === 'flats') addFlatsEnds(part, feature, add);

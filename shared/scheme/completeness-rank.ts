@@ -1,6 +1,5 @@
 import { STATION_TOLERANCE } from '../part/body';
 import type { Feature, Part } from '../part/part';
-import type { Faces } from './completeness-lengths';
 import type { Completeness, Size, SizeAnchor } from './scheme';
 
 /** A figure of the part that sizes must fix, besides its stations. */
@@ -20,8 +19,8 @@ const NOTHING = 1e-6;
  * function of the part's free figures, and their Jacobian must have full rank with no row to spare.
  * Stations count as known here; `lengthsCompleteness` judges them.
  */
-export function rankCompleteness(part: Part, sizes: readonly Size[], faces: Faces): Completeness {
-  const { unknowns, indexOf } = freeFigures(part, faces);
+export function rankCompleteness(part: Part, sizes: readonly Size[]): Completeness {
+  const { unknowns, indexOf } = freeFigures(part);
   const at = unknowns.map(({ value }) => value);
   const basis: number[][] = [];
   const redundant: string[] = [];
@@ -75,11 +74,10 @@ interface FreeFigures {
   indexOf: ReadonlyMap<string, number>;
 }
 
-/** Diameters that are one face, or that meet at a corner without a step, are one figure. */
-function freeFigures(part: Part, faces: Faces): FreeFigures {
+/** Diameters of a cone and its neighbour that meet at a corner without a step are one figure. */
+function freeFigures(part: Part): FreeFigures {
   const unknowns: Unknown[] = [];
   const indexOf = new Map<string, number>();
-  const faceOf = new Map(faces.flatMap((face) => face.map((id): [string, string] => [id, face[0] ?? id])));
   let before: { x: number; diameter: number; index: number } | undefined;
   const add = (name: string, words: string, value: number, shared?: number): number => {
     const index = shared ?? unknowns.push({ words, value }) - 1;
@@ -92,13 +90,11 @@ function freeFigures(part: Part, faces: Faces): FreeFigures {
       : undefined;
   for (const feature of part.features) {
     const { id } = feature;
-    const first = faceOf.get(id);
     switch (feature.kind) {
       case 'cylinder': {
         const { from, to, diameter } = feature;
-        const face = first !== undefined && first !== id ? indexOf.get(`${first}.diameter`) : undefined;
         const corner = isCone(part, before?.x) ? meeting(from, diameter) : undefined;
-        const index = add(`${id}.diameter`, `the diameter of ${id}`, diameter, face ?? corner);
+        const index = add(`${id}.diameter`, `the diameter of ${id}`, diameter, corner);
         before = { x: to, diameter, index };
         break;
       }
@@ -119,8 +115,6 @@ function freeFigures(part: Part, faces: Faces): FreeFigures {
         add(`${id}.acrossFlats`, `the size across ${id}`, feature.acrossFlats);
         break;
       case 'thread':
-        add(`${id}.designation`, `the designation of ${id}`, 0, first !== undefined && first !== id ? indexOf.get(`${first}.designation`) : undefined);
-        break;
       case 'knurl':
       case 'centre-hole':
         add(`${id}.designation`, `the designation of ${id}`, 0);

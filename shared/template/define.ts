@@ -144,9 +144,10 @@ function unknownNames(template: Template): string[] {
     }
   };
   for (const derived of template.derived) {
+    // A row's derived value may read the same one of the rows before it.
+    if (derived.each !== undefined) columns.get(derived.each)?.add(derived.id);
     look(derived.value, derived.each);
     if (derived.each === undefined) names.add(derived.id);
-    else columns.get(derived.each)?.add(derived.id);
   }
   for (const parameter of template.parameters) {
     const inner = parameter.kind === 'table' && 'columns' in parameter ? parameter.columns : [];

@@ -17,5 +17,5 @@ export interface Scope {
 
 export function atRow(scope: Scope, table: string, index: number): Scope {
   const row = scope.tables.get(table)?.[index];
-  return row ? { ...scope, row, index } : scope;
+  return row ? { values: scope.values, tables: scope.tables, row, index } : scope;
 }

@@ -64,9 +64,7 @@ function instance(
       id: withKey(size.id, scope),
       parameter: path(size.parameter),
       fitParameter: path(cell(size.fit)?.tolerance ? size.fit : size.parameter),
-      features: size.features.flatMap((id) =>
-        span.length > 1 ? span.map(({ key }) => id.replaceAll('{key}', key)) : withKey(id, scope),
-      ),
+      features: size.features.map((id) => withKey(id, scope)),
       nominal,
       typed: merged ? span.map(({ values }) => values[size.parameter ?? '']?.text.trim() ?? '').join(' + ') : (own?.text.trim() ?? ''),
       ...(own?.unit ? { unit: own.unit } : {}),

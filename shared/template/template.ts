@@ -96,7 +96,8 @@ export interface FeatureTemplate {
  * One shown size. `{key}` in `id` and `features` stands for the row's key when `each`.
  * Figures, as expressions: `nominal` (mm; degrees for an angle) always;
  * length: `from`, `to`; diameter and thread: `from`, `to`, `diameter`, and `at` where it can be read at one station only.
- * Chamfers, crowns and flats are read from the part's own features. `lastRow` (an index) says that rows up to it are one face.
+ * Chamfers, crowns and flats are read from the part's own features. `lastRow` (an index) says that
+ * a length spans the rows up to it, so that all their typed texts are shown.
  */
 export interface SizeTemplate {
   id: string;
