@@ -1,0 +1,31 @@
+import type { OneRow } from './field-rows';
+import { SizeInput } from './size-input';
+import { useSizeForm } from './size-form';
+
+/** Fields that cannot be used yet. One that holds something is a field to empty; the rest only say their sentence. */
+export function NotYetRows({ rows }: { rows: readonly OneRow[] }) {
+  const form = useSizeForm();
+  if (rows.length === 0) return null;
+  return (
+    <div className="not-yet">
+      {rows.map(({ path, parameter }) => {
+        const filled = form.textOf(path) !== '';
+        return (
+          <div key={path} className="not-yet-row" data-wrong={filled ? '' : undefined}>
+            {filled ? (
+              <>
+                <label htmlFor={`field-${path}`}>{parameter.label}</label>
+                <SizeInput path={path} parameter={parameter} describedBy={`under-${path}`} />
+              </>
+            ) : (
+              <b>{parameter.label}</b>
+            )}
+            <p id={`under-${path}`} className={filled ? 'is-wrong-text' : ''}>
+              {form.problemOf(path) ?? parameter.notYet}
+            </p>
+          </div>
+        );
+      })}
+    </div>
+  );
+}

@@ -1,0 +1,46 @@
+import { Link } from 'react-router-dom';
+import { Plate } from '../../components/plate';
+import { SetUpPictures } from '../../components/set-up-pictures';
+import { countOf } from '../../components/verdict';
+import { paths } from '../../lib/paths';
+import { useOpenRevision } from '../../revision/open-revision';
+import { cardsOf } from '../../revision/set-up-stages';
+
+/** From bar to part: the set-ups small, pictures left, words right. */
+export function SmallCards() {
+  const { good, address } = useOpenRevision();
+  const { shop, drawing, revision } = address;
+  const route = good?.route;
+  if (!route)
+    return (
+      <Plate head="From bar to part">
+        <p className="empty-words">
+          {good ? 'There is no route yet. Can we make it? says why.' : 'Drawn when there is a sheet.'}
+        </p>
+      </Plate>
+    );
+  const minutes = Math.round(route.minutes.setup + route.minutes.run);
+  const aside = `${countOf(route.setups.length, 'set-up')}, ${countOf(route.operations.length, 'operation')}, ${minutes} min`;
+  return (
+    <Plate head="From bar to part" aside={aside}>
+      <ol className="small-cards">
+        {cardsOf(route).map((card, index) => (
+          <li key={card.setUp.id}>
+            <span className="card-number">{index + 1}</span>
+            <SetUpPictures card={card} label={`Set-up ${index + 1}, before and after`} />
+            <p>
+              <Link to={`${paths.revision(shop, drawing, revision, 'route')}#${card.setUp.id}`}>
+                {card.setUp.machine}, {card.setUp.holding}
+              </Link>
+              {card.operations.map((operation) => (
+                <span key={operation.number}>
+                  {operation.number} {operation.title}
+                </span>
+              ))}
+            </p>
+          </li>
+        ))}
+      </ol>
+    </Plate>
+  );
+}

@@ -1,0 +1,50 @@
+import type { Operation, Target } from '../../../shared/route/route';
+import type { Size } from '../../../shared/scheme/scheme';
+import { formatAngle, formatLength, formatNumber, type LengthFormat } from '../../../shared/units/format';
+import { toRadians } from '../../../shared/units/angle';
+
+/** Stop lengths from the set-up's datum, in the order they are met. */
+export function stopWords({ stops }: Operation, format: LengthFormat): string {
+  return stops.map(({ length }) => formatLength(length, format)).join(', ');
+}
+
+const ACROSS: ReadonlySet<string> = new Set(['diameter', 'thread', 'knurl', 'hole']);
+
+/** What to reach, with limits: `Ø14 14.000 / 13.957`. */
+export function targetWords(
+  operation: Operation,
+  sizes: ReadonlyMap<string, Size>,
+  format: LengthFormat,
+): string {
+  const parts = operation.target.map((target) => oneTarget(target, sizes.get(target.size), format));
+  if (operation.blankDiameter !== undefined)
+    parts.push(`blank Ø${formatLength(operation.blankDiameter, format)}`);
+  if (operation.faces !== undefined && operation.depth !== undefined)
+    parts.push(`${operation.faces} × ${formatLength(operation.depth, format)} deep`);
+  if (operation.halfAngle !== undefined) {
+    const angle = toRadians(operation.halfAngle);
+    parts.push(`half angle ${formatAngle(angle)}, ${formatAngle(angle, { style: 'minutes' })}`);
+  }
+  if (operation.slantLength !== undefined) parts.push(`slant ${formatLength(operation.slantLength, format)}`);
+  if (operation.settings !== undefined && operation.settings > 1)
+    parts.push(`${operation.settings} settings`);
+  return parts.join(', ');
+}
+
+function oneTarget(target: Target, size: Size | undefined, format: LengthFormat): string {
+  if (size?.designation) return size.designation;
+  const sign = size && ACROSS.has(size.kind) ? 'Ø' : '';
+  if (size?.kind === 'angle') return `${formatNumber(target.nominal, 3)}°`;
+  const nominal = `${sign}${formatLength(target.nominal, format)}`;
+  if (target.upperLimit === target.lowerLimit) return nominal;
+  const decimals = format.unit === 'in' ? 4 : 3;
+  const limit = (mm: number) =>
+    formatNumber(format.unit === 'in' ? mm / 25.4 : mm, decimals, { fixed: true });
+  return `${nominal}  ${limit(target.upperLimit)} / ${limit(target.lowerLimit)}`;
+}
+
+export function feedWords({ feed, feedPer }: Operation, format: LengthFormat): string {
+  if (feed <= 0) return 'by hand';
+  const text = formatLength(feed, { ...format, style: 'iso' });
+  return feedPer === 'min' ? `${text}/min` : text;
+}

@@ -1,0 +1,110 @@
+import { CautionLine } from '../../components/lines';
+import { WithDiameters } from '../../components/diameter';
+import { SetUpPictures } from '../../components/set-up-pictures';
+import type { Size } from '../../../shared/scheme/scheme';
+import type { LengthFormat } from '../../../shared/units/format';
+import type { CardFacts } from '../../revision/set-up-stages';
+import { feedWords, stopWords, targetWords } from './operation-words';
+
+interface SetUpCardProps {
+  card: CardFacts;
+  number: number;
+  sizes: ReadonlyMap<string, Size>;
+  format: LengthFormat;
+}
+
+/** A set-up as a ruled plate: the work before and after on one datum, how it is held, and its operations. */
+export function SetUpCard({ card, number, sizes, format }: SetUpCardProps) {
+  const { setUp, operations } = card;
+  const minutes = operations.reduce((sum, operation) => sum + operation.minutes, 0);
+  return (
+    <article className="set-up-card" id={setUp.id} aria-labelledby={`${setUp.id}-name`}>
+      <header>
+        <span className="card-plate">{number}</span>
+        <h2 id={`${setUp.id}-name`}>
+          {setUp.machine}, {setUp.holding}
+        </h2>
+        <span className="aside">
+          {Math.round(setUp.minutes)} min to set, {Math.round(minutes)} min a piece
+        </span>
+      </header>
+      <div className="card-top">
+        <div className="card-pictures">
+          <span className="aside">before</span>
+          <span className="aside">after</span>
+          <SetUpPictures card={card} label={`The work before and after set-up ${number}`} />
+        </div>
+        <dl>
+          <dt className="engraved">Held</dt>
+          <dd>{setUp.heldText}</dd>
+          <dt className="engraved">Datum</dt>
+          <dd>{setUp.datumText}</dd>
+        </dl>
+      </div>
+      <table className="operations">
+        <thead>
+          <tr>
+            <th scope="col" className="figure">
+              no
+            </th>
+            <th scope="col">operation</th>
+            <th scope="col" className="figure">
+              stop
+            </th>
+            <th scope="col">target and limits</th>
+            <th scope="col">tool</th>
+            <th scope="col" className="figure">
+              rpm
+            </th>
+            <th scope="col" className="figure">
+              feed
+            </th>
+            <th scope="col">passes</th>
+            <th scope="col">check with</th>
+            <th scope="col">
+              <span className="sr-list">done</span>
+            </th>
+          </tr>
+        </thead>
+        {operations.map((operation) => (
+          <tbody key={operation.number}>
+            <tr>
+              <td className="figure op-number">{operation.number}</td>
+              <th scope="row">{operation.title}</th>
+              <td className="figure op-stop" data-word="stop">
+                {stopWords(operation, format)}
+              </td>
+              <td className="op-target">
+                <WithDiameters text={targetWords(operation, sizes, format)} />
+              </td>
+              <td className="op-tool">{operation.tool}</td>
+              <td className="figure op-rpm" data-word="rpm">
+                {operation.speed > 0 ? Math.round(operation.speed) : ''}
+              </td>
+              <td className="figure op-feed" data-word="feed">
+                {operation.cut ? feedWords(operation, format) : ''}
+              </td>
+              <td className="op-passes" data-word="passes">
+                {operation.passes > 0 ? operation.passes : ''}
+              </td>
+              <td className="op-check" data-word="check">
+                {operation.check}
+              </td>
+              <td className="op-done">
+                <span className="paper-square" aria-hidden="true" />
+              </td>
+            </tr>
+            {operation.cautions.map((caution) => (
+              <tr key={caution} className="op-caution">
+                <td />
+                <td colSpan={9}>
+                  <CautionLine>{caution}</CautionLine>
+                </td>
+              </tr>
+            ))}
+          </tbody>
+        ))}
+      </table>
+    </article>
+  );
+}
