@@ -70,6 +70,9 @@ export interface DraftOperation {
   needs: DraftNeed[];
 }
 
+/** A set-up, and whether long work hangs on a short grip in it. */
+export type DraftSetUp = SetUp & { rocks: boolean };
+
 /** A plan while it is being made. Bodies are in the part's own x, whatever end is free. */
 export interface Build {
   register: Register;
@@ -81,7 +84,7 @@ export interface Build {
   views: { right: View; left: View };
   blank: Body;
   stage: Body;
-  setups: SetUp[];
+  setups: DraftSetUp[];
   operations: DraftOperation[];
   planNeeds: DraftNeed[];
   notes: string[];

@@ -51,7 +51,8 @@ export function ratesFor(build: Build, operation: DraftOperation, maximumSpeed: 
   const wanted = spindleSpeed(wantedSpeed, Math.max(figures.diameter, 1));
   const milling = method === 'mill-flat';
   const speeds = milling ? (build.mill?.speeds ?? []) : build.lathe.speeds;
-  const speed = nearestSpeed(speeds.length > 0 ? speeds : [Math.floor(wanted)], Math.min(wanted, maximumSpeed));
+  const strong = milling ? Infinity : spindleSpeed(speedForPower(build, material, figures, method), Math.max(figures.diameter, 1));
+  const speed = nearestSpeed(speeds.length > 0 ? speeds : [Math.floor(wanted)], Math.min(wanted, maximumSpeed, strong));
   const { feed, feedPer } = feedFor(build, operation, material, speed, milling);
   const perMinute = feedPer === 'min' ? feed : feed * Math.max(speed, 1);
   const sides = milling ? (operation.faces ?? 1) : 1;
@@ -67,6 +68,16 @@ export function ratesFor(build: Build, operation: DraftOperation, maximumSpeed: 
     minutes,
     how: `${round(wantedSpeed)} m/min for ${material.name} (common practice) at Ø${round(figures.diameter)} wants ${Math.round(wanted)} rpm; nearest not above: ${speed}. ${round(figures.travel)} mm × ${figures.passes * sides} at ${round(perMinute)} mm/min, ${round(operation.handling)} min by hand.`,
   };
+}
+
+/** Share of the motor's power that reaches the cut. Common practice. */
+const EFFICIENCY = 0.75;
+
+/** Surface speed (m/min) at which a turning cut takes all the motor gives: P = kc · depth · feed · v / 60 000 (kW). */
+function speedForPower(build: Build, material: Material, figures: { depth: number }, method: Method): number {
+  if (method !== 'rough-turn' && method !== 'turn' && method !== 'taper-turn') return Infinity;
+  const feed = turningFeed(method === 'rough-turn' ? 'roughing' : 'finishing', material.group);
+  return (60_000 * build.lathe.powerKw * EFFICIENCY) / (material.kc * Math.max(figures.depth, 0.05) * feed);
 }
 
 function feedFor(

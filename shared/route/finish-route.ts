@@ -34,12 +34,14 @@ export function weigh(build: Build, scheme: Scheme, whole: readonly DraftNeed[])
     const hold = build.setups.find((s) => s.id === operation.setup)?.holdingItem;
     rates.set(operation.key, ratesFor(build, operation, hold ? (maximum.get(hold) ?? Infinity) : Infinity));
   }
-  const targets = sizesOf(ordered, scheme);
+  const targets = sizesOf(ordered, scheme, build.views.right.length);
+  for (const operation of ordered) if (operation.method === 'inspect') targets.set(operation.key, sizesToInspect(ordered, operation, targets, scheme));
   const needs = [
     ...[...whole, ...build.planNeeds].map((need) => ({ key: '', need })),
     ...ordered.flatMap((o) => o.needs.map((need) => ({ key: o.key, need }))),
   ];
   for (const operation of ordered) {
+    if (operation.method === 'inspect' && operation.key !== 'final') continue;
     for (const size of targets.get(operation.key) ?? []) {
       const measuring = instrumentFor(build.register, size);
       if (measuring) needs.push({ key: operation.key, need: measuring.need });
@@ -48,6 +50,17 @@ export function weigh(build: Build, scheme: Scheme, whole: readonly DraftNeed[])
   const setupMinutes = build.setups.reduce((sum, s) => sum + s.minutes, 0);
   const runMinutes = ordered.reduce((sum, o) => sum + (rates.get(o.key)?.minutes ?? 0), 0);
   return { build, ordered, rates, needs, targets, setupMinutes, runMinutes };
+}
+
+/** The last check measures every size; one in between what its own set-up brought about. */
+function sizesToInspect(
+  ordered: readonly DraftOperation[],
+  operation: DraftOperation,
+  targets: ReadonlyMap<string, Size[]>,
+  scheme: Scheme,
+): Size[] {
+  if (operation.key === 'final') return scheme.sizes.filter((s) => !s.reference);
+  return ordered.filter((o) => o.setup === operation.setup && o.method !== 'inspect').flatMap((o) => targets.get(o.key) ?? []);
 }
 
 /** Needs that say the same thing are one, at the first operation that has it; shorts and makeshifts are never dropped. */
@@ -103,7 +116,7 @@ export function finishRoute(plan: WeighedPlan, extras: RouteExtras): Route {
     stock: build.stock,
     blankLength,
     blank: build.blank,
-    setups: build.setups,
+    setups: build.setups.map(({ rocks: _rocks, ...setup }) => setup),
     operations,
     stages,
     volumes,
@@ -142,7 +155,7 @@ function operationOf(
   const setup = plan.build.setups.find((s) => s.id === draft.setup);
   const sizes = plan.targets.get(draft.key) ?? [];
   const measuring = sizes.map((size) => instrumentFor(plan.build.register, size)?.text).filter((t) => t !== undefined);
-  const checks = [...new Set([...measuring, ...(draft.check ? [draft.check] : [])])];
+  const checks = measuring.length > 0 ? [...new Set(measuring)] : draft.check ? [draft.check] : [];
   const behind = setup ? behindSpindle(plan.build, setup.gripFrom, setup.gripTo, setup.freeEnd) : 0;
   return {
     number,

@@ -20,26 +20,54 @@ const BROUGHT: Partial<Record<Method, readonly Size['kind'][]>> = {
 };
 
 /**
- * Sizes an operation is the one to bring about, by its features and kind. A diameter belongs to the operation on the
- * first of its features that is turned; a length to the last operation on one of its features.
+ * Sizes by the operation that brings each to its figure; reference sizes and what the bar already is belong to none.
  */
-export function sizesOf(operations: readonly DraftOperation[], scheme: Scheme): Map<string, Size[]> {
+export function sizesOf(operations: readonly DraftOperation[], scheme: Scheme, length: number): Map<string, Size[]> {
   const found = new Map<string, Size[]>();
   for (const size of scheme.sizes) {
     if (size.reference) continue;
-    const makers = operations.filter(
-      (o) => BROUGHT[o.method]?.includes(size.kind) && o.features.some((id) => size.features.includes(id)),
-    );
-    // A size read across one station of a cone is the cone's; any other diameter is its cylinder's.
-    const atCone = size.anchor.kind === 'across' && size.anchor.at !== undefined;
-    const maker =
-      size.kind === 'length'
-        ? makers[makers.length - 1]
-        : (makers.find((o) => (o.method === 'taper-turn') === atCone) ?? makers[0]);
+    const maker = size.kind === 'length' ? lengthMaker(operations, size, length) : figureMaker(operations, size);
     if (!maker) continue;
     found.set(maker.key, [...(found.get(maker.key) ?? []), size]);
   }
   return found;
+}
+
+/** A size read across one station of a cone is the cone's; any other diameter is its cylinder's, or the bar's own. */
+function figureMaker(operations: readonly DraftOperation[], size: Size): DraftOperation | undefined {
+  const atCone = size.anchor.kind === 'across' && size.anchor.at !== undefined;
+  return operations.find(
+    (o) =>
+      BROUGHT[o.method]?.includes(size.kind) &&
+      o.features.some((id) => size.features.includes(id)) &&
+      (size.kind !== 'diameter' || (o.method === 'taper-turn') === atCone),
+  );
+}
+
+/** A length is brought about by the last cut at one of its shoulders; only where both are ends of the part by a facing. */
+function lengthMaker(operations: readonly DraftOperation[], size: Size, length: number): DraftOperation | undefined {
+  if (size.anchor.kind !== 'span') return undefined;
+  const stations = [size.anchor.from, size.anchor.to];
+  const shoulders = stations.filter((x) => x > 1e-6 && x < length - 1e-6);
+  const wanted = shoulders.length > 0 ? shoulders : stations;
+  const makers = operations.filter(
+    (o) => BROUGHT[o.method]?.includes('length') && edgesOf(o).some((e) => wanted.some((x) => Math.abs(e - x) < 0.005)),
+  );
+  return makers[makers.length - 1];
+}
+
+function edgesOf({ cut }: DraftOperation): number[] {
+  switch (cut?.kind) {
+    case 'outer':
+      return [cut.envelope[0]?.from ?? NaN, cut.envelope[cut.envelope.length - 1]?.to ?? NaN];
+    case 'trim':
+    case 'sever':
+      return [cut.from, cut.to];
+    case 'cut':
+      return cut.cut.kind === 'cross-hole' ? [] : [cut.cut.from, cut.cut.to];
+    default:
+      return [];
+  }
 }
 
 export interface Measuring {

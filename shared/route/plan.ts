@@ -103,12 +103,14 @@ function candidatesFor(views: { right: View; left: View }, stock: StockAnswer, l
   if (!option) return found;
   for (const first of ['right', 'left'] as const) {
     const view = views[first];
-    if (mayPartToLength(view)) found.push({ first, kind: 'stick', meets: 0, secondEnd: false, lathe, stock: option });
+    if (mayPartToLength(view)) found.push({ first, kind: 'stick', meets: 0, secondEnd: false, lathe, stock: option, flatsWith: 'first' });
     const boundaries = meetingPoints(view);
     for (const meets of [0, ...boundaries]) {
       for (const kind of ['stick', 'blank'] as const) {
         if (kind === 'blank' && meets === 0) continue;
-        found.push({ first, kind, meets, secondEnd: true, lathe, stock: option });
+        found.push({ first, kind, meets, secondEnd: true, lathe, stock: option, flatsWith: 'first' });
+        if (view.flats.length > 0 && option.asDrawn.length > 0)
+          found.push({ first, kind, meets, secondEnd: true, lathe, stock: option, flatsWith: 'second' });
       }
     }
   }
@@ -144,13 +146,24 @@ function scoreOf(build: Build, plan: WeighedPlan, needs: readonly Need[], candid
   const radius = build.stockRadius;
   return {
     shorts: needs.filter((n) => n.state === 'short').length,
-    setups: build.setups.length,
+    rocks: rockingHolds(build),
+    setups: build.setups.length - pulledOut(build) / 2,
     awkward: awkwardRows(build, candidate),
     apart: fitsApart(build, candidate, scheme),
     alternatives: needs.filter((n) => n.state === 'alternative').length,
     minutes: plan.setupMinutes + plan.runMinutes,
     blank: Math.PI * radius * radius * (build.blank.x1 - build.blank.x0),
   };
+}
+
+/** Set-ups in which long work hangs on a short grip. */
+function rockingHolds(build: Build): number {
+  return build.setups.filter((s) => s.rocks).length;
+}
+
+/** Settings that only pull the same bar further out: quickly done. */
+function pulledOut(build: Build): number {
+  return build.operations.filter((o) => o.reasons.includes('pull-out')).length;
 }
 
 /** Rows cut behind a collar, in both holdings. */

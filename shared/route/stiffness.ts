@@ -1,9 +1,8 @@
 import type { Body } from '../part/body';
-import { radiusAt, smallestRadius } from '../part/generator';
+import { breaks, radiusAt, smallestRadius } from '../part/generator';
 import { flatsSpan } from '../part/flats';
+import { integrate } from '../part/quadrature';
 import { LIMITS } from './rules';
-
-const STATIONS = 24;
 
 /** Smallest diameter of a body over [from, to], flats counted across them (mm). */
 export function smallestDiameter(body: Body, from: number, to: number): number {
@@ -29,31 +28,27 @@ function carryingRadius(body: Body, x: number): number {
 
 /**
  * Bend at the cut for each millimetre of radial depth (mm/mm): F/E · ∫ (xc − x)² / I dx from the grip's edge to the
- * far end of the cut, with nothing at the free end. Simpson's rule within each length of the outline.
+ * far end of the cut, with nothing at the free end; integrated within each length of the outline.
  * Source: the cantilever of any handbook; the force is the named judgement figure.
  */
 export function bendPerDepth(body: Body, gripEdge: number, cut: number): number {
   const from = Math.max(gripEdge, body.x0);
   const to = Math.min(cut, body.x1);
   if (to <= from) return 0;
-  const breaks = [from, to, ...body.outer.map((piece) => piece.from)];
-  for (const flats of body.cuts) if (flats.kind === 'flats') breaks.push(flats.from, flats.to);
-  const stations = [...new Set(breaks.filter((x) => x >= from && x <= to))].sort((a, b) => a - b);
+  const marks = [from, to, ...breaks(body.outer), ...breaks(body.inner)];
+  for (const flats of body.cuts) if (flats.kind === 'flats') marks.push(flats.from, flats.to);
+  const stations = marks.filter((x) => x >= from && x <= to).sort((a, b) => a - b);
+  const compliance = (x: number): number => {
+    const r = carryingRadius(body, x);
+    const bore = Math.min(radiusAt(body.inner, x), 0.95 * r);
+    return (to - x) ** 2 / Math.max(1e-9, (Math.PI * (r ** 4 - bore ** 4)) / 4);
+  };
   let sum = 0;
   for (let i = 0; i + 1 < stations.length; i += 1) {
     const a = stations[i] ?? from;
     const b = stations[i + 1] ?? to;
     if (b - a < 1e-9) continue;
-    const n = 2 * Math.max(1, Math.ceil((STATIONS * (b - a)) / (to - from) / 2));
-    const h = (b - a) / n;
-    for (let k = 0; k <= n; k += 1) {
-      const x = k === 0 ? a + 1e-9 : k === n ? b - 1e-9 : a + k * h;
-      const r = carryingRadius(body, x);
-      const bore = radiusAt(body.inner, x);
-      const inertia = Math.max(1e-9, (Math.PI * (r ** 4 - Math.min(bore, 0.95 * r) ** 4)) / 4);
-      const weight = k === 0 || k === n ? 1 : k % 2 === 1 ? 4 : 2;
-      sum += ((weight * h) / 3) * ((to - x) ** 2 / inertia);
-    }
+    sum += integrate(compliance, a, b);
   }
   return (LIMITS.forcePerDepth.value / LIMITS.elasticModulus.value) * sum;
 }

@@ -8,6 +8,7 @@ import type { RuleId } from '../rules';
 import { centreDrill, chamferTool, facingTool, formTool, mm } from '../shop';
 import { depthFor, keyOf, metalOver, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
+import type { View } from '../features';
 
 /** Faces the free end to where the length with the centre hole ends, or to the part's own end. */
 export function faceEnd(session: Session, to: number, finishes: boolean): void {
@@ -51,24 +52,31 @@ export function faceEnd(session: Session, to: number, finishes: boolean): void {
 }
 
 /** The centre a drawn hole names, or the usual one for the diameter that is left. */
-export function centreFor(session: Session): CentreHole {
-  const drawn = session.view.centreRight;
+export function centreFor(view: View): CentreHole {
+  const drawn = view.centreRight;
   if (drawn) {
     const parsed = parseCentreHole(drawn.designation);
     if (parsed.ok && parsed.value) return parsed.value;
   }
-  const last = session.view.rows[session.view.rows.length - 1];
+  const last = view.rows[view.rows.length - 1];
   if (!last) return centreHoleForWork(10);
   const slope = (last.endR - last.startR) / (last.to - last.from);
-  const radius = last.endR + Math.min(0, slope) * session.trim;
-  // A larger pilot than this would stand deeper than the length that is cut away with it.
+  const radius = last.endR + Math.min(0, slope) * BEYOND;
   return centreHoleForWork(Math.max(2, Math.min(2 * radius, 49)));
+}
+
+/** A taper goes on falling over the length that the centre stands in; about this much of it (mm). */
+const BEYOND = 8;
+
+/** Length beyond the part that a centre hole stands in and is cut away with; 0 where the hole is on the drawing. */
+export function trimFor(view: View): number {
+  return view.centreRight ? 0 : Math.ceil(centreFor(view).depth + LIMITS.centreTrim.value);
 }
 
 /** Drills the centre that the tail enters; on the drawing it stays, else it is faced off later. */
 export function drillCentre(session: Session): void {
   const stage = stageOf(session);
-  const hole = centreFor(session);
+  const hole = centreFor(session.view);
   const drawn = session.view.centreRight;
   const tool = centreDrill(session.build.register, hole.pilotDiameter, hole.designation);
   const envelope = drawn

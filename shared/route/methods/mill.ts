@@ -100,13 +100,14 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
     reasons: ['flats-before-taper', indexing.rule],
     notes: [
       indexing.text,
+      ...(flats.count % 2 === 0 ? [`Measure over all ${flats.count / 2} pairs of flats.`] : []),
       `Touch the cutter on the Ø${mm(2 * round)}, then ${mm(metal)} down a face.`,
       arc > 0.02
         ? `The corners stay round, ${mm(Math.round(arc * 100) / 100)} of arc at each; a face is ${mm(Math.round(2 * half * 100) / 100)} wide.`
         : `The corners come up sharp; a face is ${mm(Math.round(2 * half * 100) / 100)} wide.`,
-      ...(to > flats.to + 1e-6 ? ['The flats run on past their length; the taper cut trims their ends.'] : []),
+      ...(to > cut.to + 1e-6 || flats.runOutTo > flats.to + 1e-6 ? ['The flats run on past their length; the taper cut trims their ends.'] : []),
     ],
-    check: `micrometer over opposite flats, ${Math.max(1, Math.floor(flats.count / 2))} pairs`,
+    check: 'over opposite flats',
     needs: [
       tool.need,
       indexing.need,

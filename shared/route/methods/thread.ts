@@ -88,7 +88,7 @@ function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
       notes: turnRound
         ? [`No run-out at the shoulder: turn the die round for the last threads; about one pitch (${mm(thread.pitch)}) stays incomplete.`]
         : ['Start square, oil, and stop at the length with the spindle turned by hand.'],
-      check: `ring gauge ${thread.designation}, or the mate`,
+      check: 'the mate',
       needs: [
         held('tool', `die ${thread.designation}`, die.id, `${die.name}, ${die.place}.`),
         held('holder', `die holder ${mm(die.figures['outside'] ?? 0)}`, holder.id, `${holder.name}, ${holder.place}.`),
@@ -150,7 +150,7 @@ function singlePoint(
       ...(thread.hand === 'left' ? ['Left hand: the tool travels away from the chuck.'] : []),
       ...(thread.starts > 1 ? [`${thread.starts} starts, each a pitch of ${mm(thread.pitch)} on.`] : []),
     ],
-    check: `thread wires, or the mate`,
+    check: 'the mate',
     needs,
     handling: 8,
   });

@@ -7,6 +7,7 @@ import { rowMax, viewsOf } from '../features';
 import type { View } from '../features';
 import { gripsOf, longEnough } from '../grips';
 import type { Grip } from '../grips';
+import { trimFor } from '../methods/ends';
 import { bladeFor, chamferHeldEnd, partOff } from '../methods/part-off';
 import { LIMITS } from '../rules';
 import type { Lathe, Register } from '../register';
@@ -29,6 +30,8 @@ export interface Candidate {
   secondEnd: boolean;
   lathe: Lathe;
   stock: StockOption;
+  /** Which end's holding the flats are milled in, where the bar is already their round. */
+  flatsWith: 'first' | 'second';
 }
 
 interface Tails {
@@ -68,8 +71,8 @@ function attemptPlan(part: Part, register: Register, candidate: Candidate, tails
   const view = candidate.first === 'right' ? views.right : views.left;
   const other = candidate.first === 'right' ? views.left : views.right;
   const trims = {
-    first: tails.first && !view.centreRight ? LIMITS.centreTrim.value : 0,
-    second: tails.second && !other.centreRight ? LIMITS.centreTrim.value : 0,
+    first: tails.first ? trimFor(view) : 0,
+    second: tails.second ? trimFor(other) : 0,
   };
   const layout = layOut(register, view, candidate, trims);
   const build: Build = {
@@ -172,8 +175,10 @@ function shareFlats(view: View, candidate: Candidate): { first: FlatsFeature[]; 
     const round = under.filter((row) => row.kind === 'cylinder');
     const inFirst = (row: { from: number }) => row.from >= candidate.meets - 1e-9;
     const bar = (row: { id: string }) => candidate.stock.asDrawn.includes(row.id);
-    if (round.every((row) => inFirst(row) || bar(row))) first.push(flats);
-    else if (round.every((row) => !inFirst(row) || bar(row))) second.push(flats);
+    const mayFirst = round.every((row) => inFirst(row) || bar(row));
+    const maySecond = candidate.secondEnd && round.every((row) => !inFirst(row) || bar(row));
+    if (mayFirst && (candidate.flatsWith === 'first' || !maySecond)) first.push(flats);
+    else if (maySecond) second.push(flats);
     else throw new RuledOut('turn-before-mill', 'The flats lie over lengths that are turned from different ends.');
   }
   return { first, second };
@@ -190,7 +195,8 @@ function firstEnd(
 ): Session {
   const { lathe } = build;
   const diameter = layout.grip.diameter;
-  const hold = latheHold(build, diameter, false);
+  const keeps = view.rows.some((row) => candidate.stock.asDrawn.includes(row.id) && row.from < layout.grip.to && row.to > layout.grip.from);
+  const hold = latheHold(build, diameter, keeps);
   const passes = diameter <= lathe.spindleBore + 1e-9;
   if (candidate.kind === 'bar' && !passes)
     throw new RuledOut('bar-through-spindle', `Ø${mm(diameter)} does not pass the spindle, bore ${mm(lathe.spindleBore)}.`);

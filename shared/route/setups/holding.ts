@@ -32,6 +32,7 @@ export function openSetUp(build: Build, wish: SetUpWish, before: { trim: number;
   const id = `S${number}`;
   const last = build.operations[build.operations.length - 1];
   const flipped = view.flipped;
+  const free = stageIn(build, view).x1 - grip.to;
   build.setups.push({
     id,
     machine: wish.machine,
@@ -44,6 +45,7 @@ export function openSetUp(build: Build, wish: SetUpWish, before: { trim: number;
     heldText: wish.how,
     datumText: wish.datum,
     minutes: wish.minutes,
+    rocks: free > LIMITS.gripLeverage.value * (grip.to - grip.from),
   });
   const session: Session = {
     build,
