@@ -35,6 +35,17 @@ export interface CanonicalBody {
  * flats only where r exceeds their distance, compared by number, phase within a face, distance and spans.
  */
 export function canonical(body: Body): CanonicalBody {
+  const known = KNOWN.get(body);
+  if (known) return known;
+  const form = canonicalForm(body);
+  KNOWN.set(body, form);
+  return form;
+}
+
+/** Bodies never change, and a stage is compared many times: each form is worked out once. */
+const KNOWN = new WeakMap<Body, CanonicalBody>();
+
+function canonicalForm(body: Body): CanonicalBody {
   const flats = flatsOf(body);
   let outer = body.outer;
   for (const cut of flats) {
