@@ -40,15 +40,18 @@ async function pdfOf(work: ShopWork, at: RevisionAt, card: boolean): Promise<Uin
     return kept;
   }
   const pages = [await svgOf(work, at)];
-  if (card && revision.route) {
-    const cards = routeCard(revision.route, {
+  if (card && revision.route && revision.scheme && revision.sheet) {
+    const cards = routeCard(revision.route, revision.scheme, {
       number: drawing.number,
       letter: revision.letter,
       title: revision.title,
       state: stateText(work, at),
       stamp: stampAcross(revision),
-      unit: revision.settings.unit,
-      style: revision.settings.style,
+      format: {
+        unit: revision.settings.unit,
+        style: revision.settings.style,
+        decimalSign: revision.sheet.decimalSign,
+      },
       register: (await registerOf(work, revision.registerId)).content,
     });
     pages.push(...cards.map(renderSvg));

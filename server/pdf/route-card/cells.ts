@@ -1,0 +1,65 @@
+import type { Operation } from '../../../shared/route/route';
+import type { Scheme, Size } from '../../../shared/scheme/scheme';
+import type { LengthFormat } from '../../../shared/units/format';
+import { formatLength, formatNumber } from '../../../shared/units/format';
+import type { Column } from './measures';
+
+/** `Ø` stands for the diameter sign, which is drawn. */
+export type Cells = Readonly<Record<Column['id'], string>>;
+
+const ACROSS = new Set<Size['kind']>(['diameter', 'hole', 'groove']);
+
+/** What one operation says in each column. */
+export function cellsOf(operation: Operation, scheme: Scheme, format: LengthFormat): Cells {
+  const length = (mm: number) => formatLength(mm, format);
+  return {
+    number: String(operation.number),
+    operation: operation.title,
+    stop: operation.stops.map((stop) => length(stop.length)).join(' '),
+    target: targetText(operation, scheme, format),
+    tool: operation.tool,
+    speed: operation.speed > 0 ? String(Math.round(operation.speed)) : '',
+    feed: feedText(operation, format),
+    passes: operation.passes > 0 && operation.cut ? String(operation.passes) : '',
+    check: operation.check,
+    tick: '',
+  };
+}
+
+function targetText(operation: Operation, scheme: Scheme, format: LengthFormat): string {
+  const own = ownFigures(operation, format);
+  const sizes = new Map(scheme.sizes.map((size) => [size.id, size]));
+  const targets = operation.target.map((target) => {
+    const size = sizes.get(target.size);
+    const limit = (value: number) => (size?.kind === 'angle' ? degrees(value, format) : formatLength(value, format));
+    const sign = size && ACROSS.has(size.kind) ? 'Ø' : '';
+    const name = size?.designation ?? `${sign}${limit(target.nominal)}`;
+    const limits = target.upperLimit === target.lowerLimit ? '' : ` ${limit(target.upperLimit)}/${limit(target.lowerLimit)}`;
+    return size?.kind === 'thread' ? name : `${name}${limits}`;
+  });
+  return [...own, ...targets].join(', ');
+}
+
+function degrees(value: number, { decimalSign }: LengthFormat): string {
+  return `${formatNumber(value, 2, { decimalSign })}°`;
+}
+
+/** Figures that belong to the method: how deep a flat, which angle on the slide, what a thread is turned to first. */
+function ownFigures(operation: Operation, format: LengthFormat): string[] {
+  const length = (mm: number) => formatLength(mm, format);
+  const { method, depth, faces, halfAngle, settings, slantLength, blankDiameter } = operation;
+  const figures: string[] = [];
+  if (blankDiameter !== undefined) figures.push(`blank Ø${length(blankDiameter)}`);
+  if (method === 'mill-flat' && depth !== undefined) figures.push(`${faces ?? 1} × ${length(depth)} deep`);
+  else if (depth !== undefined) figures.push(`${length(depth)} deep`);
+  if (halfAngle !== undefined) figures.push(`half angle ${degrees(halfAngle, format)}`);
+  if (slantLength !== undefined) figures.push(`slant ${length(slantLength)}`);
+  if (settings !== undefined && settings > 1) figures.push(`${settings} settings`);
+  return figures;
+}
+
+function feedText(operation: Operation, format: LengthFormat): string {
+  if (operation.feed <= 0) return operation.cut ? 'by hand' : '';
+  const figure = formatLength(operation.feed, { ...format, decimals: format.unit === 'in' ? 4 : 2 });
+  return operation.feedPer === 'min' ? `${figure}/min` : figure;
+}
