@@ -5,6 +5,7 @@ import { join } from 'node:path';
 import { QueryTypes, Sequelize } from 'sequelize';
 import type { QueryInterface } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
+import type { RunnableMigration } from 'umzug';
 import { sequelizeOptions } from './config';
 
 export interface StepParams {
@@ -52,7 +53,7 @@ export async function withOrderedSteps<T>(
       context: sequelize.getQueryInterface(),
       storage: new SequelizeStorage({ sequelize, tableName: table, modelName: table, timestamps: false }),
       logger: undefined,
-      migrations: stepFiles(folder).map(({ name, path }) => ({
+      migrations: stepFiles(folder).map(({ name, path }): RunnableMigration<QueryInterface> => ({
         name,
         path,
         up: ({ context }) => inTransaction(sequelize, async () => (await load(path)).up({ name, context })),

@@ -71,7 +71,7 @@ async function start() {
   });
   const logPath = join(data, 'server.log');
   const tasks = dev
-    ? await startForWork(settings, port, env, logPath)
+    ? await startForWork(settings, port, env)
     : await startServer(settings, port, env, logPath);
   for (const task of tasks)
     void task.exited.then((result) => isEnding() || fail(new Fault(whyEnded(task, result))));
@@ -99,24 +99,32 @@ async function startServer(settings, port, env, logPath) {
   return [server];
 }
 
-/** Two programs behind one address: the pages straight from their sources, which pass /api on to the server. */
-async function startForWork(settings, port, env, logPath) {
+/**
+ * Two programs behind one address: the pages straight from their sources, which pass /api on to the server. Both write to the terminal.
+ * The server is not waited for: it may well be broken at the moment, and starts again by itself when a file is saved.
+ */
+async function startForWork(settings, port, env) {
   const apiPort = await freeLoopbackPort();
-  const tsx = join(project, 'node_modules', 'tsx', 'dist', 'cli.mjs');
+  const bin = (...path) => join(project, 'node_modules', ...path);
   const server = launchNode(
     project,
-    [tsx, 'watch', '--clear-screen=false', 'server/index.ts'],
+    [bin('tsx', 'dist', 'cli.mjs'), 'watch', '--clear-screen=false', 'server/index.ts'],
     { ...env, HOST: '127.0.0.1', PORT: String(apiPort), TLS_CERT: '', TLS_KEY: '' },
-    logPath,
   );
-  const vite = join(project, 'node_modules', 'vite', 'bin', 'vite.js');
   const pages = launchNode(
     project,
-    [vite, '--host', settings.host, '--port', String(port), '--strictPort', '--clearScreen', 'false'],
+    [
+      bin('vite', 'bin', 'vite.js'),
+      '--host',
+      settings.host,
+      '--port',
+      String(port),
+      '--strictPort',
+      '--logLevel',
+      'warn',
+    ],
     { ...env, BENCHLEAF_API: `http://127.0.0.1:${apiPort}` },
-    join(settings.dataFolder, 'pages.log'),
   );
-  await waitForAnswer(server, { host: '127.0.0.1', port: apiPort, tls: false });
   await waitForAnswer(pages, { host: settings.host, port, tls: Boolean(settings.tlsCert) });
   return [server, pages];
 }

@@ -42,7 +42,7 @@ export async function ensureClient(projectFolder, say) {
     );
     if (result.code !== 0) {
       throw new Fault(
-        `The pages could not be built: ${firstLine(result.errors || result.output)}. Run "npm run build" to see it whole.`,
+        `The pages could not be built: ${whyNotBuilt(result.errors || result.output)}. Run "npm run build" to see it whole.`,
       );
     }
     orFault(`put the built pages into ${built}`, () => {
@@ -73,6 +73,11 @@ export function fingerprint(projectFolder) {
   };
   MADE_OF.forEach(add);
   return hash.digest('hex');
+}
+
+/** The bundler opens with how many faults there are; the first of them says more. */
+function whyNotBuilt(text) {
+  return firstLine(text.split('\n').find((line) => /^\[[A-Z_]+\] /.test(line)) ?? text);
 }
 
 function readMark(built) {

@@ -9,10 +9,16 @@ const ANSWER_LIMIT_MS = 120_000;
 const LOG_LIMIT_BYTES = 10_000_000;
 
 /**
- * Starts a Node program of the project, its words going into a log file.
+ * Starts a Node program of the project, its words going into a log file, or to the terminal when none is named.
  * @param {string[]} args after `node`
  */
 export function launchNode(projectFolder, args, env, logPath) {
+  if (!logPath)
+    return launch(process.execPath, args, {
+      cwd: projectFolder,
+      env,
+      stdio: ['ignore', 'inherit', 'inherit'],
+    });
   const log = openLog(logPath);
   const task = launch(process.execPath, args, { cwd: projectFolder, env, stdio: ['ignore', log, log] });
   closeSync(log);
@@ -34,14 +40,18 @@ export async function waitForAnswer(task, { host, port, tls, path = '/' }) {
     await new Promise((done) => setTimeout(done, 100));
   }
   throw new Fault(
-    `The server did not answer within ${ANSWER_LIMIT_MS / 1000} seconds. Its log is ${task.logPath}.`,
+    `The server did not answer within ${ANSWER_LIMIT_MS / 1000} seconds.${whereItsLogIs(task)}`,
   );
 }
 
 export function whyEnded(task, { code, signal, error }) {
   const how = error ? firstLine(error.message) : signal ? `by ${signal}` : `with code ${code}`;
-  const words = lastWords(task.logPath);
-  return `The server ended ${how}${words ? `: ${words}` : ''}. Its log is ${task.logPath}.`;
+  const words = task.logPath ? lastWords(task.logPath) : '';
+  return `The server ended ${how}${words ? `: ${words}` : ''}.${whereItsLogIs(task)}`;
+}
+
+function whereItsLogIs({ logPath }) {
+  return logPath ? ` Its log is ${logPath}.` : '';
 }
 
 function ask(where, tls) {

@@ -167,7 +167,6 @@ describe('npm start', () => {
 
   it('says in a sentence that a cluster is damaged, and changes nothing in it', async () => {
     const control = join(data, 'postgres', 'global', 'pg_control');
-    const whole = readFileSync(control);
     truncateSync(control, 100);
     const benchleaf = start();
     expect(await benchleaf.ended).toBe(1);
@@ -211,10 +210,12 @@ describe('npm run dev', () => {
     const data = mkdtempSync(join(tmpdir(), 'benchleaf-start-'));
     chmodSync(data, 0o711);
     const benchleaf = startBenchleaf({ BENCHLEAF_DATA: data, PORT: '0' }, 'dev');
-    const [where] = await benchleaf.until(/http:\/\/localhost:\d+/);
+    const where = (await benchleaf.until(/answers at (http:\/\/localhost:\d+)/))[1] ?? '';
     const page = await fetch(where);
     expect(await page.text()).toMatch(/<div id="root">[^]*\/src\/main\.tsx/);
-    expect((await fetch(`${where}/api/drawings`)).status).toBe(401);
+    await expect
+      .poll(async () => (await fetch(`${where}/api/drawings`)).status, { timeout: 30_000 })
+      .toBe(401);
     benchleaf.signal('SIGTERM');
     await benchleaf.ended;
     expect(await leftBehind(data)).toEqual([]);
