@@ -51,9 +51,15 @@ async function start() {
   const database = settings.databaseUrl
     ? await useExistingServer(settings, secrets.appPassword, say)
     : await startDatabase(data, secrets, fresh);
-  const ownerEnv = { ...process.env, DATABASE_URL: database.appUrl, DATABASE_OWNER_URL: database.ownerUrl };
+  const store = join(data, 'store');
+  const ownerEnv = {
+    ...process.env,
+    DATABASE_URL: database.appUrl,
+    DATABASE_OWNER_URL: database.ownerUrl,
+    STORE_FOLDER: store,
+  };
   await runStep('db/migrate.ts', ownerEnv, 'The tables could not be brought up to date');
-  await runStep('db/seed.ts', ownerEnv, 'The demo shop could not be put in');
+  await seedDemo(ownerEnv);
   if (!dev) await ensureClient(project, say);
 
   const env = { ...process.env, NODE_ENV: dev ? 'development' : 'production' };
@@ -65,7 +71,7 @@ async function start() {
     DATABASE_URL: database.appUrl,
     JWT_SECRET: secrets.jwtSecret,
     COOKIE_SECRET: secrets.cookieSecret,
-    STORE_FOLDER: join(data, 'store'),
+    STORE_FOLDER: store,
     ...(settings.publicUrl ? { PUBLIC_URL: settings.publicUrl } : {}),
     ...(settings.tlsCert ? { TLS_CERT: settings.tlsCert, TLS_KEY: settings.tlsKey } : {}),
   });
@@ -81,7 +87,7 @@ async function start() {
 
   const address = localAddress(settings, port);
   claim.announce(address);
-  for (const line of await demoSignIns(project)) say(line);
+  for (const line of demoSignIns(project)) say(line);
   say(
     `Benchleaf answers at ${address}${settings.publicUrl ? ` (for everybody else ${settings.publicUrl})` : ''}`,
   );
@@ -127,6 +133,16 @@ async function startForWork(settings, port, env) {
   );
   await waitForAnswer(pages, { host: settings.host, port, tls: Boolean(settings.tlsCert) });
   return [server, pages];
+}
+
+/** A shop of one's own does not need the demo: without it the start goes on, and the next one tries again. */
+async function seedDemo(env) {
+  try {
+    await runStep('db/seed.ts', env, 'The demo shop could not be put in');
+  } catch (error) {
+    if (!(error instanceof Fault)) throw error;
+    say(`Caution: ${error.message} It is tried again at the next start.`);
+  }
 }
 
 /** Runs one of db's programs to its end; what it throws becomes one sentence. */

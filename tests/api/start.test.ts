@@ -64,6 +64,7 @@ describe('npm start', () => {
     const benchleaf = start({}, 'start');
     const address = await addressOf(benchleaf);
     expect(benchleaf.said().match(/https?:\/\//g)).toHaveLength(1);
+    expect(benchleaf.said()).toMatch(/password .*\n[^]*designer +designer@pellworth\.example[^]*http:/);
 
     const page = await fetch(`${address}/`);
     expect(page.status).toBe(200);
