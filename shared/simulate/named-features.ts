@@ -10,6 +10,7 @@ import type { Step } from './replay';
 const ABOUT: Partial<Record<Method, readonly FeatureKind[]>> = {
   face: ['face'],
   turn: ['cylinder', 'groove', 'thread'],
+  groove: ['cylinder', 'groove'],
   'taper-turn': ['cone'],
   'form-turn': ['crown'],
   chamfer: ['chamfer'],

@@ -1,7 +1,8 @@
-import { radiusAt, smallestRadius } from '../part/generator';
+import { largestRadius, radiusAt, smallestRadius } from '../part/generator';
 import { unequalSpans } from '../part/same-metal';
 import type { ChamferFeature, Feature, Part } from '../part/part';
-import type { Fault, Method } from '../route/route';
+import type { Fault, Method, Operation } from '../route/route';
+import { LIMITS } from '../route/rules';
 import type { RuleId } from '../route/rules';
 import { facesMade } from './datum';
 import { fault, mm } from './fault';
@@ -44,16 +45,26 @@ function judgeRoughing(step: Step, before: readonly Step[], say: Say): void {
   const here = before.filter((each) => each.setup.id === step.setup.id && each.changes.length > 0);
   const finished = here.find((each) => FINISHING.includes(each.operation.method));
   if (finished) say('rough-before-finish', `Operation ${finished.operation.number} has finished a surface in this set-up already.`);
-  const left = roughedTo(step);
-  const smaller = here.find((each) => each.operation.method === 'rough-turn' && roughedTo(each) < left - 1e-6);
+  const smaller = here.find((each) => each.operation.method === 'rough-turn' && isWeakerBeside(each, step));
   if (smaller) say('rough-large-first', `Operation ${smaller.operation.number} has roughed a smaller diameter already.`);
 }
 
-function roughedTo(step: Step): number {
-  return Math.min(
-    Infinity,
-    ...step.changes.filter((c) => c.kind === 'outer').map((c) => smallestRadius(step.after.outer, c.from, c.to)),
-  );
+/** True where `earlier` has gone to a smaller diameter, unless a collar parts it from this cut on the free side. */
+function isWeakerBeside(earlier: Step, step: Step): boolean {
+  const done = roughed(earlier);
+  const now = roughed(step);
+  if (!done || !now || done.radius >= now.radius - 1e-6) return false;
+  return done.from < now.to - 1e-6 || largestRadius(step.before.outer, now.to, done.from) <= now.radius + 1e-6;
+}
+
+function roughed(step: Step): { from: number; to: number; radius: number } | null {
+  const spans = step.changes.filter((change) => change.kind === 'outer');
+  if (spans.length === 0) return null;
+  return {
+    from: Math.min(...spans.map((span) => span.from)),
+    to: Math.max(...spans.map((span) => span.to)),
+    radius: Math.min(...spans.map((span) => smallestRadius(step.after.outer, span.from, span.to))),
+  };
 }
 
 function judgeFinishedThreads(step: Step, say: Say): void {
@@ -64,7 +75,7 @@ function judgeFinishedThreads(step: Step, say: Say): void {
         if (treatment.from < change.to - 1e-6 && treatment.to > change.from + 1e-6)
           say('nothing-after-finish', `The finished ${treatment.kind} from ${mm(treatment.from)} to ${mm(treatment.to)} is cut into.`);
     if (change.kind === 'thread' && change.treatment?.kind === 'thread' && !change.treatment.internal)
-      judgeThreadBlank(step, change.treatment, part, operation.method, say);
+      judgeThreadBlank(step, change.treatment, part, operation, say);
   }
 }
 
@@ -73,7 +84,7 @@ function judgeThreadBlank(
   step: Step,
   thread: { from: number; to: number; major: number; pitch: number },
   part: Part,
-  method: Method,
+  operation: Operation,
   say: Say,
 ): void {
   const { before } = step;
@@ -93,7 +104,8 @@ function judgeThreadBlank(
     const wanted = radiusAt(part.body.outer, beside);
     if (wanted < thread.major / 2 - 1e-6 && radiusAt(before.outer, beside) > wanted + 1e-6)
       say('relief-before-thread', `The smaller diameter beside the thread at ${mm(x)} is not there yet.`);
-    if (side === 'left' && method === 'thread-single-point' && wanted > thread.major / 2 + 1e-6)
+    const stated = (operation.runOut ?? 0) >= LIMITS.threadExit.value * thread.pitch - 1e-9;
+    if (side === 'left' && operation.method === 'thread-single-point' && wanted > thread.major / 2 + 1e-6 && !stated)
       say('thread-run-out', `The thread ends against a shoulder at ${mm(x)} with neither relief nor run-out.`);
   }
 }
@@ -118,9 +130,9 @@ function judgeChamfer(step: Step, chamfer: ChamferFeature, say: Say): void {
   if (atEnd && before.x1 > part.length + 1e-6) say('trim-before-end-form', 'The end is not to length before its chamfer is cut.');
   const on = part.features.find((each) => each.id === chamfer.on);
   if (!on || on.kind === 'face') return;
-  const ends = part.features.filter((each) => each.kind === 'chamfer' || each.kind === 'crown');
+  const ends = endForms(part);
   const raw = unequalSpans(before.outer, part.body.outer, Math.max(0, on.from), Math.min(part.length, on.to));
-  const unturned = raw.filter((span) => !ends.some((end) => span.from >= end.from - 1e-6 && span.to <= end.to + 1e-6));
+  const unturned = raw.filter((span) => !isCovered(span, ends));
   if (unturned.length > 0) say('row-before-chamfer', `${chamfer.on} is not at its size before its chamfer is cut.`);
 }
 
@@ -132,10 +144,11 @@ function judgeFlats(step: Step, later: readonly Step[], say: Say): void {
     .filter((each): each is Extract<Feature, { kind: 'flats' }> => each?.kind === 'flats');
   if (operation.method === 'mill-flat') {
     for (const feature of flats) {
+      const trimmed = trimmedSpans(part, feature);
       const round = unequalSpans(before.outer, part.body.outer, Math.max(0, feature.from), Math.min(part.length, feature.to));
-      if (round.some((span) => span.to - span.from > 1e-3 && !withinEndForm(part, span)))
-        say('turn-before-mill', 'The round that the flats are set from is not turned yet.');
-      for (const span of runOuts(feature))
+      const unturned = round.filter((span) => !isCovered(span, [...trimmed, ...endForms(part)]));
+      if (unturned.length > 0) say('turn-before-mill', 'The round that the flats are set from is not turned yet.');
+      for (const span of trimmed)
         if (unequalSpans(before.outer, part.body.outer, span.from, span.to).length === 0)
           say('flats-before-taper', 'The surface that should trim the ends of the flats is finished already.');
     }
@@ -144,23 +157,35 @@ function judgeFlats(step: Step, later: readonly Step[], say: Say): void {
   if (!trims) return;
   for (const feature of part.features) {
     if (feature.kind !== 'flats') continue;
-    const meets = runOuts(feature).some((span) => step.changes.some((c) => c.kind === 'outer' && c.from < span.to - 1e-6 && c.to > span.from + 1e-6));
+    const meets = trimmedSpans(part, feature).some((span) => step.changes.some((c) => c.kind === 'outer' && c.from < span.to - 1e-6 && c.to > span.from + 1e-6));
     const comes = later.some((each) => each.operation.method === 'mill-flat' && each.operation.features.includes(feature.id));
     if (meets && comes) say('flats-before-taper', `${feature.id} should be milled before the taper that trims its ends.`);
   }
 }
 
-function withinEndForm(part: Part, span: { from: number; to: number }): boolean {
-  return part.features.some(
-    (each) => (each.kind === 'chamfer' || each.kind === 'crown') && span.from >= each.from - 1e-6 && span.to <= each.to + 1e-6,
-  );
+interface Span {
+  from: number;
+  to: number;
 }
 
-/** Where flats go on past their declared ends. */
-function runOuts(feature: Extract<Feature, { kind: 'flats' }>): { from: number; to: number }[] {
-  const spans = [
-    { from: feature.runOutFrom, to: feature.from },
-    { from: feature.to, to: feature.runOutTo },
-  ];
-  return spans.filter((span) => span.to - span.from > 1e-6);
+function endForms(part: Part): Span[] {
+  return part.features.filter((each) => each.kind === 'chamfer' || each.kind === 'crown');
+}
+
+/** True where the spans together leave nothing of this one. */
+function isCovered(span: Span, spans: readonly Span[]): boolean {
+  let reached = span.from;
+  for (const each of [...spans].sort((a, b) => a.from - b.from))
+    if (each.from <= reached + 1e-6) reached = Math.max(reached, each.to);
+  return reached >= span.to - 1e-6;
+}
+
+/** Where flats that are set from a cylinder go on into cones and crowns, which trim them. */
+function trimmedSpans(part: Part, flats: Extract<Feature, { kind: 'flats' }>): Span[] {
+  const over = (kind: Feature['kind']): Span[] =>
+    part.features
+      .filter((each): each is Exclude<Feature, { kind: 'face' }> => each.kind === kind)
+      .map((each) => ({ from: Math.max(each.from, flats.runOutFrom), to: Math.min(each.to, flats.runOutTo) }))
+      .filter((span) => span.to - span.from > 1e-6);
+  return over('cylinder').length > 0 ? [...over('cone'), ...over('crown')] : [];
 }
