@@ -23,6 +23,7 @@ const MOST_TRIED = 14;
 const SCORE_WEIGHT = 4;
 const PRICE_WEIGHT = 1.2;
 const EDGE = 4;
+const NEARLY = 50;
 const OVER_FOOT = 4;
 
 interface Tried {
@@ -37,6 +38,8 @@ interface Tried {
 interface Ground {
   foot: Foot;
   notes: Group;
+  /** Where the notes end on the right. */
+  beside: number;
   rooms: readonly Box[];
 }
 
@@ -54,7 +57,7 @@ function ground(attempt: Attempt, part: Part, options: DrawingOptions, writing: 
   const notes = notesColumn([...said, ...notesOf(part, writing)], options.unit, x0 + EDGE, bottom);
   const over: Box = [x0 + EDGE, y0 + EDGE, x1 - EDGE, notes.box[1] - 3];
   const beside: Box = [notes.box[2] + 5, y0 + EDGE, x1 - EDGE, strip.block[1] - OVER_FOOT];
-  return { foot: strip, notes: notes.group, rooms: [over, beside] };
+  return { foot: strip, notes: notes.group, beside: notes.box[2], rooms: [over, beside] };
 }
 
 /** Where the drawing goes: the middle of the first room that holds it, or nowhere. */
@@ -64,6 +67,11 @@ function placeIn(rooms: readonly Box[], bounds: Box): { dx: number; dy: number }
   const room = rooms.find((r) => w <= r[2] - r[0] && h <= r[3] - r[1]);
   if (!room) return null;
   return { dx: (room[0] + room[2] - w) / 2 - bounds[0], dy: (room[1] + room[3] - h) / 2 - bounds[1] };
+}
+
+/** True where a narrower arrangement may still go in. */
+function nearlyFits(rooms: readonly Box[], bounds: Box): boolean {
+  return rooms.some((r) => bounds[3] - bounds[1] <= r[3] - r[1] && bounds[2] - bounds[0] <= r[2] - r[0] + NEARLY);
 }
 
 function better(a: Tried, b: Tried | null): boolean {
@@ -86,10 +94,15 @@ function search(part: Part, scheme: Scheme, options: DrawingOptions, writing: Wr
     const kind = `${attempt.sheet} ${attempt.map.breaks.length}`;
     if (attempt.scale.factor >= (tooBig.get(kind) ?? Infinity)) continue;
     if (!cache.has(key) && ++tried > MOST_TRIED) break;
-    const arrangement = cache.get(key) ?? arrange(part, scheme, attempt.map, writing, options.balloons);
+    let arrangement = cache.get(key) ?? arrange(part, scheme, attempt.map, writing, options.balloons);
     cache.set(key, arrangement);
     const base = ground(attempt, part, options, writing);
-    const place = placeIn(base.rooms, arrangement.bounds);
+    let place = placeIn(base.rooms, arrangement.bounds);
+    if (!place && nearlyFits(base.rooms, arrangement.bounds)) {
+      arrangement = cache.get(`narrow ${key}`) ?? arrange(part, scheme, attempt.map, writing, options.balloons, true);
+      cache.set(`narrow ${key}`, arrangement);
+      place = placeIn(base.rooms, arrangement.bounds);
+    }
     if (!place) tooBig.set(kind, attempt.scale.factor);
     const now: Tried = { attempt, arrangement, ground: base, place, rank: SCORE_WEIGHT * attempt.score + PRICE_WEIGHT * arrangement.price };
     if (better(now, best)) best = now;
@@ -102,7 +115,7 @@ function assemble(tried: Tried, options: DrawingOptions, writing: Writing): Shee
   const { attempt, arrangement, ground: base } = tried;
   const { dx, dy } = tried.place ?? { dx: 0, dy: 0 };
   const { width, height } = SHEET_SIZES[attempt.sheet];
-  const stamp = options.stamp ? [stampGroup(options.stamp, frameBox(attempt.sheet), base.foot.block[1])] : [];
+  const stamp = options.stamp ? [stampGroup(options.stamp, base.beside, frameBox(attempt.sheet)[2], base.foot.block[1])] : [];
   return {
     schemaVersion: 1,
     size: attempt.sheet,

@@ -38,7 +38,7 @@ export const draftingRules = {
   mergeOutlines: { iso: 0.7, asme: 0.7, unit: 'mm', reason: 'Two outlines closer than this print as one blot.', source: 'ISO 128-2, least space between lines' },
   textClearance: { iso: 0.45, asme: 0.45, unit: 'mm', reason: 'Layout keeps more air than the check asks.', source: PRACTICE },
   textApart: { iso: 0.8, asme: 0.8, unit: 'mm', reason: 'Two figures must not read as one.', source: PRACTICE },
-  balloonRadius: { iso: 2.8, asme: 2.8, unit: 'mm', reason: 'Holds two figures of 2.5 mm.', source: PRACTICE },
+  balloonRadius: { iso: 3, asme: 3, unit: 'mm', reason: 'Holds the whole box of two figures of 2.5 mm.', source: PRACTICE },
   breakGap: { iso: 3, asme: 3, unit: 'mm', reason: 'Air between the two break lines.', source: PRACTICE },
   breakSlenderness: { iso: 6, asme: 6, unit: 'ratio', reason: 'Only a slender part is interrupted.', source: PRACTICE },
   viewsApart: { iso: 12, asme: 12, unit: 'mm', reason: 'Views with their sizes stand clear of one another.', source: PRACTICE },

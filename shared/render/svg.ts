@@ -1,5 +1,6 @@
 import type { CircleMark, Group, LineMark, LineType, Mark, PathMark, PolylineMark, Sheet, TextMark } from '../drawing/sheet';
-import { lineLook } from './line-look';
+import { lineLook } from '../drawing/line-look';
+import type { Picture } from '../drawing/picture';
 
 const INK = '#000000';
 const FAINT = '#d9d9d9';
@@ -97,11 +98,18 @@ export function renderSvg(sheet: Sheet): string {
 }
 
 
+/** Line widths of a picture, in its own units: what was cut is twice as heavy as the rest. */
+const PICTURE_WIDTHS: Readonly<Record<string, number>> = { metal: 1, cut: 2.2, axis: 0.6, held: 0.7, centre: 0.9, stops: 0.8 };
+
 /** A picture as SVG that fills whatever holds it; its classes (`metal`, `cut`, `held` …) are for the screen's own colours. */
-export function renderPicture(picture: { width: number; height: number; parts: readonly { class: string; marks: readonly Mark[] }[] }): string {
-  const groups = picture.parts.map((part) => `<g class="${part.class}">${part.marks.map(markSvg).join('')}</g>`).join('');
+export function renderPicture(picture: Picture): string {
+  const groups = picture.parts.map((part) => {
+    const width = PICTURE_WIDTHS[part.class] ?? 1;
+    const marks = part.marks.map(markSvg).join('').replace(/stroke-width="[^"]*"/g, `stroke-width="${width}"`);
+    return `<g class="${part.class}">${marks}</g>`;
+  });
   return (
     `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 ${n(picture.width)} ${n(picture.height)}" ` +
-    `class="profile" role="img" ${ROOT_LOOK}>${groups}</svg>`
+    `class="profile" role="img" ${ROOT_LOOK}>${groups.join('')}</svg>`
   );
 }

@@ -14,15 +14,15 @@ import type { XMap } from '../x-map';
 import { axisView } from './axis-view';
 import { placeBalloons } from './balloons';
 import type { BalloonWish } from './balloons';
-import { choose, shortlist } from './choose';
-import { diameterCandidates } from './diameter-candidates';
+import { choose } from './choose';
+import { diameterDrafts } from './diameter-drafts';
 import { endView, metalBefore, needsEndView } from './end-view';
 import type { EndName, EndView } from './end-view';
 import { flatsSize } from './flats-size';
 import { interrupt } from './interrupt';
-import { noteCandidates } from './note-candidates';
+import { noteDrafts } from './note-drafts';
 import { stackLengths } from './stack-lengths';
-import { weigh } from './weigh';
+import { weighDrafts } from './weigh';
 
 export interface Arrangement {
   groups: readonly Group[];
@@ -36,6 +36,12 @@ export interface Arrangement {
 
 const CUT_PRICE = 0.25;
 const BALLOON_ROOM = 16;
+/** Clean candidates a size that the chooser gets, and how many are worked out to find them. */
+const PLAIN_WORK = { enough: 14, most: 60 } as const;
+const DENSE_WORK = { enough: 70, most: 260 } as const;
+/** Price of a millimetre past the ends of the view: little, or much where the sheet is narrow. */
+const OVERHANG = { roomy: 0.02, narrow: 0.3 } as const;
+const NARROW_APART = 8;
 
 interface Drawing {
   view: string;
@@ -43,17 +49,16 @@ interface Drawing {
   marks: readonly Mark[];
   text: Box;
   rotate?: -90;
+  onLine?: boolean;
 }
 
-function chooseSizes(paper: AxisPaper, readies: readonly ReadySize[], lengths: readonly PlacedSize[]) {
+function chooseSizes(paper: AxisPaper, readies: readonly ReadySize[], lengths: readonly PlacedSize[], narrow: boolean) {
   const fixed = lengths.map((l) => l.candidate.print);
   const attempt = (dense: boolean): { placed: PlacedSize[]; clashes: number; cost: number } => {
     const options = readies.map((ready) => {
-      const raw = ready.size.anchor.kind === 'across' ? diameterCandidates(paper, ready) : noteCandidates(paper, ready, dense);
-      return shortlist(
-        raw.map((c) => weigh(c, paper.print, fixed)),
-        dense ? 300 : 60,
-      );
+      const drafts = ready.size.anchor.kind === 'across' ? diameterDrafts(paper, ready) : noteDrafts(paper, ready, dense);
+      const { enough, most } = dense || narrow ? DENSE_WORK : PLAIN_WORK;
+      return weighDrafts(drafts, paper.print, fixed, { enough, most, overhang: narrow ? OVERHANG.narrow : OVERHANG.roomy });
     });
     const able = readies.map((_, i) => i).filter((i) => (options[i]?.length ?? 0) > 0);
     const choice = choose(able.map((i) => options[i] ?? []));
@@ -91,7 +96,7 @@ interface PlacedEnd {
   centre: number;
 }
 
-function placeEnd(part: Part, paper: AxisPaper, readies: readonly ReadySize[], bounds: Box): PlacedEnd {
+function placeEnd(part: Part, paper: AxisPaper, readies: readonly ReadySize[], bounds: Box, apart: number): PlacedEnd {
   const { rules, writing, map } = paper;
   const view = endView(part.body, endToShow(part, writing), map.scale, rules.mergeOutlines, rules.centrePast);
   const drawn = readies.flatMap((ready) => {
@@ -100,7 +105,7 @@ function placeEnd(part: Part, paper: AxisPaper, readies: readonly ReadySize[], b
   });
   const own = boxAround([footprintOf(view.marks).bounds, ...drawn.map((d) => d.candidate.print.bounds)]) ?? [0, 0, 0, 0];
   const right = standsRight(view.name, writing);
-  const centre = right ? bounds[2] + rules.viewsApart - own[0] : bounds[0] - rules.viewsApart - own[2];
+  const centre = right ? bounds[2] + apart - own[0] : bounds[0] - apart - own[2];
   return {
     view,
     centre,
@@ -129,15 +134,15 @@ function sizeGroup(drawing: Drawing): Group {
   };
 }
 
-/** Lays out the whole drawing at one scale; `balloons` also numbers the sizes. */
-export function arrange(part: Part, scheme: Scheme, map: XMap, writing: Writing, balloons: boolean): Arrangement {
+/** Lays out the whole drawing at one scale; `balloons` also numbers the sizes; `narrow` saves width where it can. */
+export function arrange(part: Part, scheme: Scheme, map: XMap, writing: Writing, balloons: boolean, narrow = false): Arrangement {
   const paper = axisView(part, map, writing);
   const readies = scheme.sizes.map((size): ReadySize => ({ size, label: sizeLabel(size, writing) }));
   const hasEnd = needsEndView(part.body);
   const inEnd = readies.filter((r) => hasEnd && r.size.anchor.kind === 'flats');
   const lengths = stackLengths(paper, readies.filter((r) => r.size.anchor.kind === 'span'));
   const others = readies.filter((r) => r.size.anchor.kind !== 'span' && !inEnd.includes(r));
-  const chosen = chooseSizes(paper, others, lengths);
+  const chosen = chooseSizes(paper, others, lengths, narrow);
   const placed = [...lengths, ...chosen.placed];
   const cutMarks = interrupt(placed.map((p) => p.candidate.marks));
   const drawings = placed.map(
@@ -147,10 +152,11 @@ export function arrange(part: Part, scheme: Scheme, map: XMap, writing: Writing,
       marks: cutMarks.marks[i] ?? p.candidate.marks,
       text: p.candidate.textBox,
       rotate: p.candidate.rotate,
+      onLine: p.candidate.form === 'lane' && writing.style === 'iso',
     }),
   );
   const axisBounds = boxAround([paper.print.bounds, ...drawings.map((d) => footprintOf(d.marks).bounds)]) ?? paper.print.bounds;
-  const end = hasEnd ? placeEnd(part, paper, inEnd, axisBounds) : null;
+  const end = hasEnd ? placeEnd(part, paper, inEnd, axisBounds, narrow ? NARROW_APART : paper.rules.viewsApart) : null;
   const lostFlats = end ? inEnd.filter((r) => !end.sizes.some((s) => s.ready === r)) : [];
   const all = [...drawings, ...(end?.sizes ?? [])].sort((a, b) => scheme.sizes.indexOf(a.ready.size) - scheme.sizes.indexOf(b.ready.size));
   const viewMarks = [...paper.marks, ...(end?.marks ?? [])];
@@ -180,7 +186,7 @@ export function arrange(part: Part, scheme: Scheme, map: XMap, writing: Writing,
 function number(all: readonly Drawing[], viewMarks: readonly Mark[], bounds: Box, r: number): { groups: Group[]; lost: readonly string[] } {
   const wishes = all
     .filter((d) => d.ready.size.balloon > 0)
-    .map((d): BalloonWish => ({ number: d.ready.size.balloon, sizeId: d.ready.size.id, text: d.text, rotate: d.rotate }));
+    .map((d): BalloonWish => ({ number: d.ready.size.balloon, sizeId: d.ready.size.id, text: d.text, rotate: d.rotate, onLine: d.onLine }));
   const marks = [...viewMarks, ...all.flatMap((d) => d.marks)];
   const room = (x: number, y: number, radius: number): boolean =>
     x - radius > bounds[0] - BALLOON_ROOM && x + radius < bounds[2] + BALLOON_ROOM && y - radius > bounds[1] - BALLOON_ROOM && y + radius < bounds[3] + BALLOON_ROOM;

@@ -1,7 +1,7 @@
 import type { Body, FlatsCut, ThreadTreatment } from '../../part/body';
 import { radiusAt } from '../../part/generator';
 import { lineMark } from '../arrow';
-import { faceAngles, faceHalfWidth, flatsOf } from '../profile';
+import { faceAngles, faceHalfWidth, flatsOf, reach } from '../profile';
 import type { ProfileSpan } from '../profile';
 import type { Mark, Point } from '../sheet';
 import { toPaper } from '../x-map';
@@ -138,6 +138,12 @@ function longEdges(cut: FlatsCut, body: Body, map: XMap, merge: number): Mark[] 
       const y = cut.distance * Math.cos(angle) - side * half(x) * Math.sin(angle);
       return { x: toPaper(map.knots, x), y: -y * map.scale };
     });
+  const outlineAt = (upper: boolean): Point[] =>
+    stations.map((x) => {
+      const r = x >= cut.to - SAME ? radiusAt(body.outer, x, 'left') : radiusAt(body.outer, x, 'right');
+      const { top, bottom } = reach(r, [cut]);
+      return { x: toPaper(map.knots, x), y: (upper ? -top : bottom) * map.scale };
+    });
   const draw = (points: readonly Point[]): void => {
     const straight = straightened(points);
     if (straight.length > 1) marks.push({ type: 'polyline', line: 'visible', points: straight });
@@ -147,8 +153,13 @@ function longEdges(cut: FlatsCut, body: Body, map: XMap, merge: number): Mark[] 
     if (next === undefined) return;
     const corner = angle + Math.PI / cut.count;
     if (cut.count >= 3) {
-      if (Math.sin(corner) < 0.02 || Math.abs(Math.cos(corner)) > 0.985) return;
-      drawCorner(edge(angle, 1), edge(next, -1), merge, draw);
+      const one = edge(angle, 1);
+      const two = edge(next, -1);
+      if (Math.abs(Math.cos(corner)) > 0.985) {
+        // A corner of the outline: only the face turned to the viewer shows its edge, once it leaves the outline.
+        const seen = Math.sin(angle) > 1e-6 ? one : Math.sin(next) > 1e-6 ? two : null;
+        if (seen) drawLeaving(seen, outlineAt(Math.cos(corner) > 0), merge, draw);
+      } else if (Math.sin(corner) >= 0.02) drawCorner(one, two, merge, draw);
     } else if (Math.sin(angle) > 1e-6) {
       draw(edge(angle, 1));
       draw(edge(angle, -1));
@@ -195,6 +206,23 @@ function drawCorner(one: readonly Point[], two: readonly Point[], merge: number,
     }
   });
   flush();
+}
+
+/** The parts of an edge that stand clear of the outline, each begun and ended on it. */
+function drawLeaving(edge: readonly Point[], outline: readonly Point[], merge: number, draw: (p: readonly Point[]) => void): void {
+  let run: Point[] = [];
+  edge.forEach((p, i) => {
+    const o = outline[i];
+    if (!o) return;
+    if (Math.abs(p.y - o.y) >= merge) {
+      if (run.length === 0 && i > 0) run.push(outline[i - 1] ?? o);
+      run.push(p);
+    } else if (run.length > 0) {
+      draw([...run, o]);
+      run = [];
+    }
+  });
+  draw(run);
 }
 
 function straightened(points: readonly Point[]): Point[] {

@@ -13,6 +13,8 @@ export interface BalloonWish {
   /** Box of the writing it belongs to. */
   text: Box;
   rotate?: -90;
+  /** Its writing stands on a line: the balloon stands under that line, as in a chain. */
+  onLine?: boolean;
 }
 export interface Ink {
   texts: readonly Box[];
@@ -20,6 +22,8 @@ export interface Ink {
 }
 
 const HUG = 0.9;
+/** From the bottom of a writing, past the line it stands on, to a balloon's edge. */
+const UNDER_LINE = 1.35;
 const CLEAR = 0.55;
 const STEMS = [6, 9, 12, 16, 20, 25, 31, 38];
 const STEM_ANGLES = [45, 60, 30, 75, 15, 90, 0];
@@ -104,7 +108,9 @@ function hugging(wish: BalloonWish, r: number): Circle[] {
   const over = { x: mx, y: y0 - o };
   const after = { x: x1 + o, y: my };
   const before = { x: x0 - o, y: my };
-  const base = wish.rotate ? [over, under, after, before] : [after, before, under, over];
+  const below = { x: mx, y: y1 + UNDER_LINE + r };
+  const upright = wish.onLine ? [below, after, before, under, over] : [after, before, under, over];
+  const base = wish.rotate ? [over, under, after, before] : upright;
   const slid: Circle[] = [];
   for (const d of [0.8, 1.6, 2.6]) {
     for (const p of base) {
@@ -125,7 +131,7 @@ function mark(wish: BalloonWish, at: Circle, r: number, stem: Mark[]): { sizeId:
     sizeId: wish.sizeId,
     marks: [
       ...stem,
-      { type: 'circle', line: 'symbol', cx: at.x, cy: at.y, r },
+      { type: 'circle', line: 'thin', cx: at.x, cy: at.y, r },
       { type: 'text', x: at.x, y: at.y + (CAP_HEIGHT * size) / 2, size, anchor: 'middle', text: String(wish.number) },
     ],
   };
@@ -155,10 +161,10 @@ export function placeBalloons(
       continue;
     }
     const { circle, from, to } = stemmed;
-    const stem = lineMark('leader', from.x, from.y, to.x, to.y);
+    const stem = lineMark('thin', from.x, from.y, to.x, to.y);
     balloons.push(mark(wish, circle, r, [stem]));
     keep(circle);
-    field.addStroke({ line: 'leader', x1: from.x, y1: from.y, x2: to.x, y2: to.y });
+    field.addStroke({ line: 'thin', x1: from.x, y1: from.y, x2: to.x, y2: to.y });
   }
   return { balloons, lost };
 }

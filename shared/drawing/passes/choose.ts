@@ -4,12 +4,12 @@
  */
 import { compareFootprints } from '../footprint';
 import type { Verdict } from '../footprint';
+import { boxesMeet } from '../geometry/box';
 import type { Candidate } from '../layout';
 
 const CLASH = 100;
-const KEEP = 70;
 const SWEEPS = 6;
-const ROUNDS = 40;
+const ROUNDS = 24;
 const BREAKOUT = 0.7;
 
 export interface Choice {
@@ -18,45 +18,40 @@ export interface Choice {
   cost: number;
 }
 
+const NOTHING: Verdict = { clashes: 0, cost: 0 };
+
+/** Verdicts of pairs, each worked out once; pairs that lie apart are never kept. */
 class Verdicts {
   private readonly known = new Map<number, Verdict>();
-  constructor(
-    private readonly options: readonly (readonly Candidate[])[],
-    private readonly offsets: readonly number[],
-    private readonly total: number,
-  ) {}
+  private readonly total: number;
+  private readonly offsets: number[] = [];
+  constructor(private readonly options: readonly (readonly Candidate[])[]) {
+    let sum = 0;
+    for (const list of options) {
+      this.offsets.push(sum);
+      sum += list.length;
+    }
+    this.total = sum + 1;
+  }
   between(i: number, a: number, j: number, b: number): Verdict {
+    const one = this.options[i]?.[a];
+    const two = this.options[j]?.[b];
+    if (!one || !two) return NOTHING;
+    if (!boxesMeet(one.print.bounds, two.print.bounds, 1.2)) return NOTHING;
     const p = (this.offsets[i] ?? 0) + a;
     const q = (this.offsets[j] ?? 0) + b;
     const key = p < q ? p * this.total + q : q * this.total + p;
     const found = this.known.get(key);
     if (found) return found;
-    const one = this.options[i]?.[a];
-    const two = this.options[j]?.[b];
-    const verdict = one && two ? compareFootprints(one.print, two.print) : { clashes: 0, cost: 0 };
+    const verdict = compareFootprints(one.print, two.print);
     this.known.set(key, verdict);
     return verdict;
   }
 }
 
-/** The best of each size's candidates, cheapest first, in the number the chooser looks at. */
-export function shortlist(candidates: readonly Candidate[], keep = KEEP): Candidate[] {
-  return candidates
-    .map((candidate, i) => ({ candidate, i }))
-    .sort((a, b) => a.candidate.clashes - b.candidate.clashes || a.candidate.cost - b.candidate.cost || a.i - b.i)
-    .slice(0, keep)
-    .map(({ candidate }) => candidate);
-}
-
 /** Chooses one candidate a size; `options` must hold at least one for each. */
 export function choose(options: readonly (readonly Candidate[])[]): Choice {
-  const offsets: number[] = [];
-  let total = 0;
-  for (const list of options) {
-    offsets.push(total);
-    total += list.length;
-  }
-  const verdicts = new Verdicts(options, offsets, total + 1);
+  const verdicts = new Verdicts(options);
   const n = options.length;
   const weights = new Map<number, number>();
   const chosen: number[] = options.map(() => -1);

@@ -1,6 +1,8 @@
 import type { Body, ThreadTreatment } from '../../part/body';
 import { breaks, radiusAt } from '../../part/generator';
 import { lineMark } from '../arrow';
+import { boxAround } from '../geometry/box';
+import { strokeBox, strokesOf } from '../strokes';
 import { faceAngles, faceHalfWidth, flatsOf, reach } from '../profile';
 import type { FlatsCut } from '../../part/body';
 import type { Mark, PathCommand, Point } from '../sheet';
@@ -25,7 +27,7 @@ export function needsEndView(body: Body): boolean {
 }
 
 /** Stations from the seen end inwards, each with the radius before and after it on the way in. */
-function wayIn(body: Body, end: EndName): { x: number; near: number; far: number; cuts: FlatsCut[] }[] {
+function wayIn(body: Body, end: EndName): { x: number; near: number; far: number; before: FlatsCut[]; cuts: FlatsCut[] }[] {
   const stations = [...breaks(body.outer), ...flatsOf(body).flatMap((c) => [c.from, c.to])].filter(
     (x) => x >= body.x0 - SAME && x <= body.x1 + SAME,
   );
@@ -36,11 +38,14 @@ function wayIn(body: Body, end: EndName): { x: number; near: number; far: number
     const last = i === sorted.length - 1;
     const beyond = sorted[i + 1] ?? x;
     const middle = (x + beyond) / 2;
+    const earlier = (x + (sorted[i - 1] ?? x)) / 2;
+    const over = (at: number): FlatsCut[] => flatsOf(body).filter((c) => c.from <= at && at <= c.to);
     return {
       x,
       near: i === 0 ? 0 : radiusAt(body.outer, x, nearSide),
       far: last ? 0 : radiusAt(body.outer, x, farSide),
-      cuts: last ? [] : flatsOf(body).filter((c) => c.from <= middle && middle <= c.to),
+      before: i === 0 ? [] : over(earlier),
+      cuts: last ? [] : over(middle),
     };
   });
 }
@@ -102,7 +107,7 @@ function seenFrom(body: Body, end: EndName): Seen {
     circle = r;
   };
   for (const station of stations) {
-    meet(station.near, [], station.x);
+    meet(station.near, station.before, station.x);
     meet(station.far, station.cuts, station.x);
   }
   return seen;
@@ -202,8 +207,8 @@ export function endView(body: Body, end: EndName, scale: number, merge: number, 
   for (const { cut, r } of seen.polygons) marks.push(polygonPath(cut, r, end, scale));
   for (const { r, cut } of seen.arcs) marks.push(...arcsPast(r, cut, end, scale, merge));
   const radius = outside * scale;
-  const far = radius + past;
-  marks.push(lineMark('centre', -far, 0, far, 0), lineMark('centre', 0, -far, 0, far));
+  const box = boxAround(strokesOf(marks).map(strokeBox)) ?? [-radius, -radius, radius, radius];
+  marks.push(lineMark('centre', box[0] - past, 0, box[2] + past, 0), lineMark('centre', 0, box[1] - past, 0, box[3] + past));
   const normals = seen.polygons.map(({ cut }) => ({
     cut: cut.id,
     angles: faceAngles(cut).map((a) => (end === 'end-left' ? a : -a)),

@@ -1,36 +1,43 @@
 /** Extension lines give way: cut where a foreign text or arrowhead lies on them. Afterwards none crosses either. */
-import { boxesMeet, growBox } from '../geometry/box';
+import { boxAround, boxesMeet, growBox } from '../geometry/box';
 import type { Box } from '../geometry/box';
-import { segmentWithinBox } from '../geometry/segment';
-import type { LineMark, Mark } from '../sheet';
+import { distanceToSegment, segmentWithinBox } from '../geometry/segment';
+import type { LineMark, Mark, Point } from '../sheet';
 import { strokesOf, strokeBox, textBoxesOf } from '../strokes';
-import { boxAround } from '../geometry/box';
 
 const TEXT_AIR = 0.6;
 const ARROW_AIR = 0.4;
 const LEAST_PIECE = 0.4;
+const ON_LINE = 0.05;
 
-function arrowBoxes(marks: readonly Mark[]): Box[] {
+interface Obstacle {
+  box: Box;
+  /** An arrow that ends on a line is no obstacle to it. */
+  tip?: Point;
+}
+
+function arrowBoxes(marks: readonly Mark[]): Obstacle[] {
   return marks.flatMap((mark) => {
     if (mark.type !== 'polyline' || mark.line !== 'arrow') return [];
     const box = boxAround(strokesOf([mark]).map(strokeBox));
-    return box ? [box] : [];
+    return box ? [{ box: growBox(box, ARROW_AIR), tip: mark.points[0] }] : [];
   });
 }
 
-/** Boxes that an extension line of another size must stop at. */
-export function keepClear(marks: readonly Mark[]): Box[] {
-  return [...textBoxesOf(marks).map((b) => growBox(b, TEXT_AIR)), ...arrowBoxes(marks).map((b) => growBox(b, ARROW_AIR))];
+/** What an extension line of another size must stop at. */
+function keepClear(marks: readonly Mark[]): Obstacle[] {
+  return [...textBoxesOf(marks).map((b) => ({ box: growBox(b, TEXT_AIR) })), ...arrowBoxes(marks)];
 }
 
-function cut(line: LineMark, boxes: readonly Box[]): LineMark[] {
+function cut(line: LineMark, obstacles: readonly Obstacle[]): LineMark[] {
   const dx = line.x2 - line.x1;
   const dy = line.y2 - line.y1;
   const length = Math.hypot(dx, dy);
   const own: Box = [Math.min(line.x1, line.x2), Math.min(line.y1, line.y2), Math.max(line.x1, line.x2), Math.max(line.y1, line.y2)];
   let kept: [number, number][] = [[0, 1]];
-  for (const box of boxes) {
+  for (const { box, tip } of obstacles) {
     if (!boxesMeet(own, box, 0.001)) continue;
+    if (tip && distanceToSegment(tip.x, tip.y, line) < ON_LINE) continue;
     const hole = segmentWithinBox(line, box);
     if (!hole) continue;
     kept = kept.flatMap(([a, b]): [number, number][] => {

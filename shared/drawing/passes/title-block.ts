@@ -161,7 +161,8 @@ function block(facts: BlockFacts, overflow: Overflow[]): Mark[] {
 
 function revisionTable(size: SheetSize, title: TitleBlock): { marks: Mark[]; top: number } {
   const [bx0, , , y1] = blockBox(size);
-  const x0 = Math.max(frameBox(size)[0], bx0 - REVISION_WIDTH);
+  const frameLeft = frameBox(size)[0];
+  const x0 = bx0 - REVISION_WIDTH < frameLeft + 3 ? frameLeft : bx0 - REVISION_WIDTH;
   const widths = [8.6, bx0 - x0 - 8.6 - 22.5 - 23.2, 22.5, 23.2];
   const lines = [
     ...title.revisions.slice(-MOST_REVISIONS).reverse().map((r) => [r.letter, r.change, r.by, r.date]),

@@ -1,18 +1,18 @@
 /** What a candidate costs against all that does not move: the view's own lines and the lengths. */
-import { boxesMeet, growBox } from '../geometry/box';
-import { segmentMeetsBox, segmentsCross, sideBySide } from '../geometry/segment';
-import { compareFootprints } from '../footprint';
-import type { Footprint } from '../footprint';
+import { boxesMeet } from '../geometry/box';
+import { segmentsCross, sideBySide } from '../geometry/segment';
+import { clashesWithItself, compareFootprints, strokeNearBox } from '../footprint';
+import type { Footprint, PrintStroke } from '../footprint';
 import type { Candidate } from '../layout';
-import { strokeBox } from '../strokes';
-import type { Stroke } from '../strokes';
+import { realise } from './candidate';
+import type { Draft } from './candidate';
 
 const PRICE = { leaderOverOutline: 9, extensionHugs: 7, extensionCrosses: 1.5, dimensionCrosses: 0.3, arrowOnEdge: 2 } as const;
 const TEXT_CLEAR = 0.6;
 const HUG = 1.2;
 const HUG_LENGTH = 4;
 
-function strokeOnView(stroke: Stroke, view: Stroke, verdict: { clashes: number; cost: number }): void {
+function strokeOnView(stroke: PrintStroke, view: PrintStroke, verdict: { clashes: number; cost: number }): void {
   if (view.line === 'centre') {
     if (stroke.line !== 'extension' && stroke.line !== 'arrow' && sideBySide(stroke, view, 0.8) > 0.5) verdict.clashes += 1;
     return;
@@ -36,25 +36,56 @@ function againstView(candidate: Candidate, view: Footprint): { clashes: number; 
   const verdict = { clashes: 0, cost: 0 };
   if (!boxesMeet(candidate.print.bounds, view.bounds, HUG)) return verdict;
   for (const text of candidate.print.texts) {
-    const grown = growBox(text, TEXT_CLEAR);
-    if (!boxesMeet(grown, view.bounds)) continue;
-    for (const stroke of view.strokes) if (segmentMeetsBox(stroke, grown)) verdict.clashes += 1;
+    if (!boxesMeet(text, view.bounds, TEXT_CLEAR)) continue;
+    for (const stroke of view.strokes) if (strokeNearBox(stroke, text, TEXT_CLEAR)) verdict.clashes += 1;
   }
-  for (const stroke of candidate.print.strokes) {
-    const box = growBox(strokeBox(stroke), HUG);
-    if (!boxesMeet(box, view.bounds)) continue;
-    for (const edge of view.strokes) if (boxesMeet(box, strokeBox(edge))) strokeOnView(stroke, edge, verdict);
+  const n = view.bounds;
+  for (const s of candidate.print.strokes) {
+    if (s.x0 >= n[2] + HUG || s.xe <= n[0] - HUG || s.y0 >= n[3] + HUG || s.ye <= n[1] - HUG) continue;
+    for (const e of view.strokes)
+      if (s.x0 < e.xe + HUG && s.xe > e.x0 - HUG && s.y0 < e.ye + HUG && s.ye > e.y0 - HUG) strokeOnView(s, e, verdict);
   }
   return verdict;
 }
 
-/** The candidate with the price and the clashes of its meetings with view and lengths added. */
-export function weigh(candidate: Candidate, view: Footprint, fixed: readonly Footprint[]): Candidate {
+/** How much work goes into one size, and what reaching past the ends of the view costs. */
+export interface Work {
+  enough: number;
+  most: number;
+  overhang: number;
+}
+
+function weigh(candidate: Candidate, view: Footprint, fixed: readonly Footprint[], overhang: number): Candidate {
   const verdict = againstView(candidate, view);
+  const { bounds } = candidate.print;
+  verdict.cost += overhang * (Math.max(0, view.bounds[0] - bounds[0]) + Math.max(0, bounds[2] - view.bounds[2]));
   for (const other of fixed) {
     const met = compareFootprints(candidate.print, other);
     verdict.clashes += met.clashes;
     verdict.cost += met.cost;
   }
   return { ...candidate, cost: candidate.cost + verdict.cost, clashes: candidate.clashes + verdict.clashes };
+}
+
+/**
+ * Drafts worked out and weighed, cheapest first, until `enough` are free of clashes with what is fixed; sorted by
+ * clashes, then price. `most` bounds the work; `overhang` is the price of a millimetre beyond the ends of the view.
+ */
+export function weighDrafts(drafts: readonly Draft[], view: Footprint, fixed: readonly Footprint[], work: Work): Candidate[] {
+  const { enough, most, overhang } = work;
+  const order = drafts.map((draft, i) => ({ draft, i })).sort((a, b) => a.draft.cost - b.draft.cost || a.i - b.i);
+  const weighed: Candidate[] = [];
+  let clean = 0;
+  for (const { draft } of order) {
+    if (clean >= enough || weighed.length >= most) break;
+    const candidate = realise(draft);
+    if (clashesWithItself(candidate.print)) continue;
+    const now = weigh(candidate, view, fixed, overhang);
+    if (now.clashes === 0) clean++;
+    weighed.push(now);
+  }
+  return weighed
+    .map((candidate, i) => ({ candidate, i }))
+    .sort((a, b) => a.candidate.clashes - b.candidate.clashes || a.candidate.cost - b.candidate.cost || a.i - b.i)
+    .map(({ candidate }) => candidate);
 }

@@ -1,4 +1,4 @@
-import type { LineType } from '../drawing/sheet';
+import type { LineType } from './sheet';
 
 /**
  * Width (mm) and dash pattern of each kind of line.

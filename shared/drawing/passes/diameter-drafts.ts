@@ -3,14 +3,13 @@
  * or by a leader. Afterwards: each candidate is complete and clean in itself.
  */
 import { arrowHead, lineMark } from '../arrow';
-import { clashesWithItself } from '../footprint';
 import { placeLabel } from '../label';
-import type { AxisPaper, Candidate, ReadySize } from '../layout';
+import type { AxisPaper, ReadySize } from '../layout';
 import { reachWithin } from '../layout';
 import type { Mark } from '../sheet';
 import { toPaper } from '../x-map';
-import { candidateOf } from './candidate';
-import { leaderCandidates } from './leader-candidates';
+import type { Draft } from './candidate';
+import { leaderDrafts } from './leader-drafts';
 
 /** Prices of the forms and of their variants. Source: trial sheets, looked at. */
 const PRICE = { inside: 0.5, end: 1, slot: 1.3, perMm: 0.03, through: 2.2, offMiddle: 1.5, leader: 3.2 } as const;
@@ -60,12 +59,12 @@ function crossLine(a: Across, x: number, inside: boolean, topTo: number, gap: re
   return marks;
 }
 
-function inside(a: Across): Candidate[] {
+function inside(a: Across): Draft[] {
   const { paper, ready, r } = a;
   if (a.at !== null) return [];
   const { label } = ready;
   const { style, rules } = paper;
-  const out: Candidate[] = [];
+  const out: Draft[] = [];
   const iso = style === 'iso';
   const room = iso ? rules.textLift + label.up + 3 + 2 : label.width + 3;
   if (a.x1 - a.x0 < room) return out;
@@ -76,26 +75,39 @@ function inside(a: Across): Candidate[] {
     if (!onOutline(a, x)) continue;
     const cost = PRICE.inside + Math.abs(t - 0.5) * PRICE.offMiddle;
     if (iso) {
-      const strokes = crossLine(a, x, true, 0, null);
-      out.push(candidateOf('inside', strokes, placeLabel(label, x - rules.textLift - Math.max(0, label.down - 1.06), -1.4, -90), cost, -90));
+      out.push({
+        form: 'inside',
+        cost,
+        rotate: -90,
+        build: () => ({
+          strokes: crossLine(a, x, true, 0, null),
+          writing: placeLabel(label, x - rules.textLift - Math.max(0, label.down - 1.06), -1.4, -90),
+        }),
+      });
     } else {
       const middle = -r / 2;
       const tall = (label.up + label.down) / 2;
-      const strokes = crossLine(a, x, true, 0, [middle - tall - rules.textGap, middle + tall + rules.textGap]);
-      out.push(candidateOf('inside', strokes, placeLabel(label, x - label.width / 2, middle + (label.up - label.down) / 2), cost));
+      out.push({
+        form: 'inside',
+        cost,
+        build: () => ({
+          strokes: crossLine(a, x, true, 0, [middle - tall - rules.textGap, middle + tall + rules.textGap]),
+          writing: placeLabel(label, x - label.width / 2, middle + (label.up - label.down) / 2),
+        }),
+      });
     }
   }
   return out;
 }
 
-function through(a: Across): Candidate[] {
+function through(a: Across): Draft[] {
   const { paper, ready, r } = a;
   if (a.at !== null) return [];
   const { label } = ready;
   const { style, rules } = paper;
   const iso = style === 'iso';
   const arrowsIn = 2 * r >= ARROWS_IN;
-  const out: Candidate[] = [];
+  const out: Draft[] = [];
   const shift = rules.textLift + Math.max(0, label.down - 1.06);
   for (const t of POSITIONS) {
     const x = a.x0 + (a.x1 - a.x0) * t;
@@ -107,12 +119,22 @@ function through(a: Across): Candidate[] {
       const start = -(base + lift);
       const cost = PRICE.through + Math.abs(t - 0.5) * PRICE.offMiddle + lift * 0.09 + (base - own) * 0.05;
       if (iso) {
-        const strokes = crossLine(a, x, arrowsIn, start - label.width - 0.3, null);
-        out.push(candidateOf('through', strokes, placeLabel(label, x - shift, start, -90), cost, -90));
+        out.push({
+          form: 'through',
+          cost,
+          rotate: -90,
+          build: () => ({ strokes: crossLine(a, x, arrowsIn, start - label.width - 0.3, null), writing: placeLabel(label, x - shift, start, -90) }),
+        });
       } else {
         const lineEnd = Math.min(start, arrowsIn ? -r - 2 : -r - TAIL);
-        const strokes = crossLine(a, x, arrowsIn, lineEnd, null);
-        out.push(candidateOf('through', strokes, placeLabel(label, x - label.width / 2, lineEnd - rules.textGap - label.down), cost));
+        out.push({
+          form: 'through',
+          cost,
+          build: () => ({
+            strokes: crossLine(a, x, arrowsIn, lineEnd, null),
+            writing: placeLabel(label, x - label.width / 2, lineEnd - rules.textGap - label.down),
+          }),
+        });
       }
     }
   }
@@ -126,7 +148,7 @@ function cornerTowards(a: Across, side: 1 | -1): number {
   return side > 0 ? a.x1 : a.x0;
 }
 
-function atEnd(a: Across, side: 1 | -1): Candidate[] {
+function atEnd(a: Across, side: 1 | -1): Draft[] {
   const { paper, ready, r } = a;
   const { label } = ready;
   const { style, rules } = paper;
@@ -139,7 +161,7 @@ function atEnd(a: Across, side: 1 | -1): Candidate[] {
   const iso = style === 'iso';
   const arrowsIn = 2 * r >= (iso ? ARROWS_IN - 1 : ARROWS_IN);
   const tall = label.up + label.down;
-  const out: Candidate[] = [];
+  const out: Draft[] = [];
   const shift = rules.textLift + Math.max(0, label.down - 1.06);
   const first = iso ? Math.max(rules.firstLine, side > 0 ? rules.centrePast + 0.8 + shift + label.up : rules.centrePast + 1.6) : Math.max(rules.firstLine, label.width / 2 + 4.6);
   const step = iso ? label.up + shift + 1.5 : label.width / 2 + 3.5;
@@ -149,44 +171,45 @@ function atEnd(a: Across, side: 1 | -1): Candidate[] {
     const hug = Math.abs(own - end) > 4 && between > r - 1.2 ? 7 : 0;
     const price = PRICE.end + slot * PRICE.slot + reach * PRICE.perMm + hug;
     const ext = (y: number): Mark => lineMark('extension', corner + side * rules.extensionGap, y, x + side * rules.extensionPast, y);
-    const strokes = [ext(-r), ext(r)];
-    const push = (more: Mark[], writing: Mark[], extra: number, rotate?: -90): void => {
-      out.push(candidateOf('end', [...strokes, ...more], writing, price + extra, rotate));
+    const push = (more: () => Mark[], writing: () => Mark[], extra: number, rotate?: -90): void => {
+      out.push({ form: 'end', cost: price + extra, rotate, build: () => ({ strokes: [ext(-r), ext(r), ...more()], writing: writing() }) });
     };
     if (iso) {
-      if (2 * r >= label.width + 1.6) push(crossLine(a, x, arrowsIn, 0, null), placeLabel(label, x - shift, label.width / 2, -90), 0, -90);
+      if (2 * r >= label.width + 1.6) push(() => crossLine(a, x, arrowsIn, 0, null), () => placeLabel(label, x - shift, label.width / 2, -90), 0, -90);
       else {
         const from = r + TURNED_TEXT_FROM_ARROW;
-        push(crossLine(a, x, arrowsIn, -from - label.width - 0.3, null), placeLabel(label, x - shift, -from, -90), 0.5, -90);
-        const low = crossLine(a, x, arrowsIn, 0, null);
-        low.push(lineMark('dimension', x, r, x, from + label.width + 0.3));
-        push(low, placeLabel(label, x - shift, from + label.width, -90), 0.7, -90);
+        push(() => crossLine(a, x, arrowsIn, -from - label.width - 0.3, null), () => placeLabel(label, x - shift, -from, -90), 0.5, -90);
+        push(
+          () => [...crossLine(a, x, arrowsIn, 0, null), lineMark('dimension', x, r, x, from + label.width + 0.3)],
+          () => placeLabel(label, x - shift, from + label.width, -90),
+          0.7,
+          -90,
+        );
       }
     } else {
       const gapHalf = tall / 2 + rules.textGap;
       if (2 * r >= 2 * gapHalf + (arrowsIn ? 7 : 1))
-        push(crossLine(a, x, arrowsIn, 0, [-gapHalf, gapHalf]), placeLabel(label, x - label.width / 2, (label.up - label.down) / 2), 0);
+        push(() => crossLine(a, x, arrowsIn, 0, [-gapHalf, gapHalf]), () => placeLabel(label, x - label.width / 2, (label.up - label.down) / 2), 0);
       else {
         const top = -(r + (arrowsIn ? 3 : TAIL));
-        push(crossLine(a, x, arrowsIn, top, null), placeLabel(label, x - label.width / 2, top - rules.textGap - label.down), 0.5);
+        push(() => crossLine(a, x, arrowsIn, top, null), () => placeLabel(label, x - label.width / 2, top - rules.textGap - label.down), 0.5);
       }
     }
   }
   return out;
 }
 
-function byLeader(a: Across): Candidate[] {
+function byLeader(a: Across): Draft[] {
   const { paper, ready, r } = a;
   const places = a.at !== null ? [a.at] : [0.5, 0.25, 0.75].map((t) => a.x0 + (a.x1 - a.x0) * t);
   return places.flatMap((x, i) =>
-    a.at === null && !onOutline(a, x) ? [] : leaderCandidates(paper, ready.label, { x, y: -r }, { cost: PRICE.leader + i * 0.4, lean: 0 }),
+    a.at === null && !onOutline(a, x) ? [] : leaderDrafts(paper, ready.label, { x, y: -r }, { cost: PRICE.leader + i * 0.4, lean: 0 }),
   );
 }
 
-/** All candidates of a diameter or a thread. */
-export function diameterCandidates(paper: AxisPaper, ready: ReadySize): Candidate[] {
+/** Every draft of a diameter or a thread. */
+export function diameterDrafts(paper: AxisPaper, ready: ReadySize): Draft[] {
   const across = acrossOf(paper, ready);
   if (!across) return [];
-  const all = [...inside(across), ...atEnd(across, 1), ...atEnd(across, -1), ...through(across), ...byLeader(across)];
-  return all.filter((candidate) => !clashesWithItself(candidate.print));
+  return [...inside(across), ...atEnd(across, 1), ...atEnd(across, -1), ...through(across), ...byLeader(across)];
 }

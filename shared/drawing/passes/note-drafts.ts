@@ -1,10 +1,10 @@
 /** Leaders for what is not read across or along: chamfers, crowns, tapers, and flats where no end view shows them. */
-import { clashesWithItself } from '../footprint';
-import type { AxisPaper, Candidate, ReadySize } from '../layout';
+import type { AxisPaper, ReadySize } from '../layout';
 import { reachWithin } from '../layout';
 import type { Point } from '../sheet';
 import { toPaper } from '../x-map';
-import { leaderCandidates } from './leader-candidates';
+import type { Draft } from './candidate';
+import { leaderDrafts } from './leader-drafts';
 
 const CORNER_COST = 1.5;
 
@@ -50,10 +50,8 @@ function tipsOf(paper: AxisPaper, ready: ReadySize): { tips: Tip[]; lean: -1 | 0
   }
 }
 
-/** All leader candidates of a note-like size. */
-export function noteCandidates(paper: AxisPaper, ready: ReadySize, dense: boolean): Candidate[] {
+/** Every leader of a note-like size. */
+export function noteDrafts(paper: AxisPaper, ready: ReadySize, dense: boolean): Draft[] {
   const { tips, lean } = tipsOf(paper, ready);
-  return tips
-    .flatMap((tip) => leaderCandidates(paper, ready.label, tip, { cost: CORNER_COST + tip.cost, lean, dense }))
-    .filter((candidate) => !clashesWithItself(candidate.print));
+  return tips.flatMap((tip) => leaderDrafts(paper, ready.label, tip, { cost: CORNER_COST + tip.cost, lean, dense }));
 }

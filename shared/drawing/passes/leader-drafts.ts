@@ -2,10 +2,10 @@
 import { arrowHead } from '../arrow';
 import type { Label } from '../label';
 import { placeLabel } from '../label';
-import type { AxisPaper, Candidate } from '../layout';
+import type { AxisPaper } from '../layout';
 import { reachWithin } from '../layout';
 import type { Mark, Point } from '../sheet';
-import { candidateOf } from './candidate';
+import type { Draft } from './candidate';
 
 const ANGLES = [60, 45, 70, 35];
 const DENSE_ANGLES = [60, 45, 70, 35, 53, 39, 66];
@@ -23,9 +23,9 @@ export interface LeaderWish {
   dense?: boolean;
 }
 
-/** Candidates that end with an arrow at `tip` on the upper outline. */
-export function leaderCandidates(paper: AxisPaper, label: Label, tip: Point, wish: LeaderWish): Candidate[] {
-  const out: Candidate[] = [];
+/** Drafts that end with an arrow at `tip` on the upper outline. */
+export function leaderDrafts(paper: AxisPaper, label: Label, tip: Point, wish: LeaderWish): Draft[] {
+  const out: Draft[] = [];
   const local = reachWithin(paper.top, tip.x - 12, tip.x + 12);
   const heights: { y: number; cost: number }[] = [];
   for (let row = 0; row < ROWS; row++) heights.push({ y: paper.reach + ROW_START + row * ROW_STEP, cost: row * PER_ROW });
@@ -39,13 +39,17 @@ export function leaderCandidates(paper: AxisPaper, label: Label, tip: Point, wis
         const run = rise * cot;
         if (rise < 4.5 || Math.hypot(run, rise) > paper.rules.longestLeader) continue;
         const lean = wish.lean !== 0 && wish.lean !== side ? 0.8 : 0;
-        out.push(leader(paper, label, tip, { x: tip.x + side * run, y: -y }, side, wish.cost + cost + i * 0.15 + lean));
+        out.push({
+          form: 'leader',
+          cost: wish.cost + cost + i * 0.15 + lean,
+          build: () => leader(paper, label, tip, { x: tip.x + side * run, y: -y }, side),
+        });
       }
   });
   return out;
 }
 
-function leader(paper: AxisPaper, label: Label, tip: Point, elbow: Point, side: 1 | -1, cost: number): Candidate {
+function leader(paper: AxisPaper, label: Label, tip: Point, elbow: Point, side: 1 | -1): { strokes: Mark[]; writing: Mark[] } {
   const iso = paper.style === 'iso';
   const shelf = iso ? label.width + 0.8 : ASME_SHELF;
   const end = { x: elbow.x + side * shelf, y: elbow.y };
@@ -57,5 +61,5 @@ function leader(paper: AxisPaper, label: Label, tip: Point, elbow: Point, side: 
   const writing = iso
     ? placeLabel(label, side > 0 ? elbow.x + 0.6 : elbow.x - label.width - 0.6, elbow.y - 0.5 - label.down)
     : placeLabel(label, side > 0 ? end.x + paper.rules.textGap : end.x - paper.rules.textGap - label.width, elbow.y + (label.up - label.down) / 2);
-  return candidateOf('leader', strokes, writing, cost);
+  return { strokes, writing };
 }
