@@ -1,4 +1,5 @@
 import { createBrowserRouter } from 'react-router-dom';
+import { Waiting } from '../components/waiting';
 import { SignInPage } from '../features/session/sign-in-page';
 import { FirstPage } from './first-page';
 import { NotFoundPage } from './not-found-page';
@@ -12,6 +13,7 @@ export const router = createBrowserRouter([
   {
     path: '/shops/:shop',
     element: <ShopLayout />,
+    hydrateFallbackElement: <Waiting words="Opening the shop" />,
     errorElement: <PageFault />,
     children: [
       {

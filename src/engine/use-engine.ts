@@ -15,15 +15,13 @@ export interface EngineState {
   fault: string | null;
 }
 
+interface Answered extends Omit<EngineState, 'drawing'> {
+  request: EngineRequest | null;
+}
+
 /** Draws a request in the worker; a newer request takes the place of one that still waits. Null asks nothing. */
 export function useEngine(request: EngineRequest | null): EngineState {
-  const [state, setState] = useState<EngineState>({
-    result: null,
-    good: null,
-    shown: null,
-    drawing: request !== null,
-    fault: null,
-  });
+  const [answered, setAnswered] = useState<Answered>({ request: null, result: null, good: null, shown: null, fault: null });
   const latest = useRef<Latest<EngineRequest> | null>(null);
 
   useEffect(() => {
@@ -31,12 +29,12 @@ export function useEngine(request: EngineRequest | null): EngineState {
     const queue = new Latest<EngineRequest>((job) => {
       void askEngine({ kind: 'draw', request: job }).then((answer) => {
         if (gone) return;
-        const drawing = queue.finished();
+        queue.finished();
         if (answer.kind === 'drawn') {
           const { result, shown } = answer;
-          setState((before) => ({ result, good: result.good ?? before.good, shown, drawing, fault: null }));
+          setAnswered((before) => ({ request: job, result, good: result.good ?? before.good, shown, fault: null }));
         } else if (answer.kind === 'fault') {
-          setState((before) => ({ ...before, drawing, fault: answer.message }));
+          setAnswered((before) => ({ ...before, request: job, fault: answer.message }));
         }
       });
     });
@@ -48,10 +46,9 @@ export function useEngine(request: EngineRequest | null): EngineState {
   }, []);
 
   useEffect(() => {
-    if (!request) return;
-    setState((before) => (before.drawing ? before : { ...before, drawing: true }));
-    latest.current?.submit(request);
+    if (request) latest.current?.submit(request);
   }, [request]);
 
-  return state;
+  const { request: of, ...state } = answered;
+  return { ...state, drawing: request !== null && of !== request };
 }
