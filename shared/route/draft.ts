@@ -61,6 +61,7 @@ export interface DraftOperation {
   halfAngle?: number;
   slantLength?: number;
   settings?: number;
+  runOut?: number;
   blank?: { diameter: number; upper: number; lower: number; thread: string };
   reasons: RuleId[];
   notes: string[];

@@ -47,7 +47,8 @@ export function ratesFor(build: Build, operation: DraftOperation, maximumSpeed: 
   if (!figures || !kind)
     return { speed: 0, surfaceSpeed: 0, feed: 0, feedPer: 'rev', minutes: operation.handling, how: `${operation.handling} min by hand.` };
   const material = materialOf(build.stock.material);
-  const wantedSpeed = cuttingSpeed(material, operation.toolMaterial, kind);
+  const plunges = operation.toolFigures['reach'] !== undefined && method !== 'part-off';
+  const wantedSpeed = cuttingSpeed(material, operation.toolMaterial, plunges ? 'grooving' : kind);
   const wanted = spindleSpeed(wantedSpeed, Math.max(figures.diameter, 1));
   const milling = method === 'mill-flat';
   const speeds = milling ? (build.mill?.speeds ?? []) : build.lathe.speeds;
@@ -88,6 +89,8 @@ function feedFor(
   milling: boolean,
 ): { feed: number; feedPer: 'rev' | 'min' } {
   const { method } = operation;
+  // A blade goes straight in, whatever it is called: it takes a blade's feed.
+  if (operation.toolFigures['reach'] !== undefined) return { feed: partingFeed(material.group), feedPer: 'rev' };
   if (milling) {
     const perTooth = feedPerTooth(operation.figures?.diameter ?? 10, material.group, operation.toolMaterial);
     const wanted = tableFeed(speed, operation.toolFigures['teeth'] ?? 4, perTooth);

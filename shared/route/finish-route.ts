@@ -187,6 +187,7 @@ function operationOf(
     ...(draft.halfAngle !== undefined ? { halfAngle: draft.halfAngle } : {}),
     ...(draft.slantLength !== undefined ? { slantLength: draft.slantLength } : {}),
     ...(draft.settings !== undefined ? { settings: draft.settings } : {}),
+    ...(draft.runOut !== undefined ? { runOut: draft.runOut } : {}),
     ...(draft.blank !== undefined ? { blankDiameter: draft.blank.diameter } : {}),
     reasons: draft.reasons,
     cautions: [...new Set([...draft.notes, ...cautionsFor(draft, first, 0, behind)])],

@@ -102,6 +102,8 @@ export interface Operation {
   settings?: number;
   blankDiameter?: number;
   overWires?: number;
+  /** Length of thread left incomplete at a shoulder that has no relief (mm), said on the card. */
+  runOut?: number;
   reasons: readonly string[];
   cautions: readonly string[];
   check: string;

@@ -11,7 +11,7 @@ const micrometers: readonly Instrument[] = [0, 25, 50, 75].map((minimum, k) => (
   permissibleError: k < 2 ? 0.004 : 0.005,
 }));
 
-const fine: readonly Instrument[] = [0, 25, 50].map((minimum, k) => ({
+const fine: readonly Instrument[] = [0, 25, 50, 75].map((minimum, k) => ({
   id: `micrometer-fine-${minimum}`,
   name: `Micrometer ${minimum}–${minimum + 25}, reading 0.001`,
   place: `inst. ${14 + k}`,
@@ -26,7 +26,7 @@ const RING_GAUGES = ['M6', 'M8', 'M10', 'M12', 'M16', '1/2-13 UNC'];
 const gauges: readonly Instrument[] = RING_GAUGES.map((designation, k) => ({
   id: `ring-${k + 1}`,
   name: `Ring gauge pair ${designation}`,
-  place: `inst. ${19 + k}`,
+  place: `inst. ${24 + k}`,
   kind: 'ring-gauge',
   minimum: 0,
   maximum: 100,

@@ -33,7 +33,7 @@ const ROWS: readonly Row[] = [
     perKg: 2.4,
     density: 7.85,
     length: 3000,
-    quantity: 2,
+    quantity: 4,
     place: 'rack 3',
   },
   {

@@ -15,12 +15,14 @@ export function faceEnd(session: Session, to: number, finishes: boolean): void {
   const stage = stageOf(session);
   const metal = stage.x1 - to;
   if (metal <= 1e-9) return;
-  const wish = finishes && session.trim > 0 ? 1 : 0.5;
+  const trimming = finishes && session.done.has('centre');
+  // The centre is drawn back before the length with its hole is faced off.
+  if (trimming) session.tail = false;
+  const wish = trimming ? 1 : 0.5;
   const depth = depthFor(session, 'face', stage.x1, wish, 'Facing');
   const cut = passesFor(metal, depth);
   const diameter = 2 * metalOver(session, to, stage.x1, 0);
   const tool = facingTool(session.build.register);
-  const trimming = finishes && session.done.has('centre');
   const key = keyOf(session, trimming ? 'trim' : 'face');
   const after: { key: string; rule: RuleId }[] = [];
   const grip = session.done.get('grip');
@@ -47,7 +49,6 @@ export function faceEnd(session: Session, to: number, finishes: boolean): void {
     needs: [tool.need],
   });
   session.done.set('face', key);
-  if (trimming) session.tail = false;
   if (trimming) session.done.set('trim', key);
 }
 

@@ -128,12 +128,17 @@ function singlePoint(
       ]),
     );
   } else needs.push(held('machine', spec, lathe.id, `${why} ${lathe.name} cuts ${mm(thread.lead)}.`));
-  if (exit < LIMITS.threadExit.value * thread.pitch) {
-    throw new RuledOut(
-      'thread-run-out',
-      `${thread.designation} runs right up to a shoulder and is cut with a single-point tool, which needs at least a pitch (${mm(thread.pitch)}) of run-out or a relief there.`,
+  const shallow = exit < LIMITS.threadExit.value * thread.pitch;
+  if (shallow)
+    needs.push(
+      alternative(
+        'geometry',
+        `run-out or relief where ${thread.designation} meets its shoulder`,
+        undefined,
+        `A single-point tool is drawn out in the last turn: about ${mm(2 * thread.pitch)} at the shoulder stays shallow.`,
+        ['say the run-out on the drawing', 'draw a relief', ...(dieHeld ? [] : ['buy the die and turn it round for the last threads'])],
+      ),
     );
-  }
   const allowed = depthFor(session, 'thread-single-point', thread.to, Math.min(0.2, depth), `Thread ${thread.designation}`);
   const cut = passesFor(depth, allowed);
   addOperation(build, view, {
@@ -144,9 +149,11 @@ function singlePoint(
     toolItem: tool.item?.id,
     toolFigures: tool.item?.figures,
     figures: { diameter: thread.major, travel: thread.to - thread.from + 3 * thread.pitch, depth: cut.depth, passes: cut.passes + 2 },
-    reasons: ['single-point'],
+    reasons: shallow ? ['single-point', 'thread-run-out'] : ['single-point'],
+    ...(shallow ? { runOut: 2 * thread.pitch } : {}),
     notes: [
       `Gearbox to ${mm(thread.lead)}; infeed ${mm(Math.round(depth * 1000) / 1000)} in all, two spring passes.`,
+      ...(shallow ? [`Draw the tool out in the last turn before the shoulder, the spindle turned by hand; ${mm(2 * thread.pitch)} stays shallow.`] : []),
       ...(thread.hand === 'left' ? ['Left hand: the tool travels away from the chuck.'] : []),
       ...(thread.starts > 1 ? [`${thread.starts} starts, each a pitch of ${mm(thread.pitch)} on.`] : []),
     ],

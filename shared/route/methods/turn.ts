@@ -50,56 +50,54 @@ export function valleysOf(rows: readonly Row[]): Row[] {
   return valleys.sort((a, b) => rowMax(b) - rowMax(a) || b.from - a.from);
 }
 
-/** Roughs the staircase, largest first, leaving one light cut. */
-export function roughPlateaus(session: Session): void {
-  const { build, view } = session;
+/** Roughs the staircase and the rows behind collars, largest first, leaving one light cut. */
+export function roughRows(session: Session): void {
   const rows = rowsWorked(session);
-  const leave = LIMITS.roughAllowance.value;
-  for (const plateau of plateausOf(rows)) {
-    const stage = stageOf(session);
-    const from = runFrom(session, plateau.from);
-    const target = plateau.radius + leave;
-    const metal = metalOver(session, from, stage.x1, target);
-    if (metal <= leave) continue;
-    const depth = depthFor(session, 'rough-turn', stage.x1, LIMITS.roughDepth.value, `Roughing to Ø${mm(2 * target)}`);
-    const cut = passesFor(metal, depth);
-    const tool = turningTool(build.register, 'rough');
-    const key = keyOf(session, `rough.${plateau.rows[0]?.id ?? ''}`);
-    const before = session.done.get('rough');
-    const after: { key: string; rule: RuleId }[] = before
-      ? [{ key: before, rule: 'rough-large-first' }]
-      : beforeTurning(session);
-    addOperation(build, view, {
-      key,
-      method: 'rough-turn',
-      title: `rough turn Ø${mm(2 * target)}`,
-      features: rows.filter((row) => row.to > from + 1e-9).map((row) => row.id),
-      tool: tool.name,
-      toolItem: tool.item?.id,
-      toolMaterial: tool.item?.material === 'carbide' ? 'carbide' : 'hss',
-      toolFigures: tool.item?.figures,
-      figures: { diameter: 2 * (target + metal), travel: stage.x1 - from, depth: cut.depth, passes: cut.passes },
-      cut: { kind: 'outer', envelope: constant(from, stage.x1, target) },
-      after,
-      stops: [{ toX: from }],
-      reasons: ['rough-large-first'],
-      check: 'caliper',
-      needs: [tool.need],
-    });
-    session.done.set('rough', key);
-    leansOnTail(session, key);
-  }
+  const jobs = [
+    ...plateausOf(rows).map((plateau) => ({ radius: plateau.radius, cut: () => roughPlateau(session, plateau, rows) })),
+    ...valleysOf(rows).map((row) => ({ radius: rowMax(row), cut: () => roughValley(session, row) })),
+  ];
+  for (const job of jobs.sort((a, b) => b.radius - a.radius)) job.cut();
 }
 
-/** Roughs rows behind a collar with a blade to open them and a left-hand tool to widen them. */
-export function roughValleys(session: Session): void {
+function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]): void {
+  const { build, view } = session;
   const leave = LIMITS.roughAllowance.value;
-  for (const row of valleysOf(rowsWorked(session))) {
-    const span = valleySpan(session, row);
-    const metal = metalOver(session, span.from, span.to, rowMax(row) + leave);
-    if (metal <= leave) continue;
-    cutBehindCollar(session, row, rowMax(row) + leave, 'rough-turn');
-  }
+  const stage = stageOf(session);
+  const from = runFrom(session, plateau.from);
+  const target = plateau.radius + leave;
+  const metal = metalOver(session, from, stage.x1, target);
+  if (metal <= leave) return;
+  const depth = depthFor(session, 'rough-turn', stage.x1, LIMITS.roughDepth.value, `Roughing to Ø${mm(2 * target)}`);
+  const cut = passesFor(metal, depth);
+  const tool = turningTool(build.register, 'rough');
+  const key = keyOf(session, `rough.${plateau.rows[0]?.id ?? ''}`);
+  const before = session.done.get('rough');
+  addOperation(build, view, {
+    key,
+    method: 'rough-turn',
+    title: `rough turn Ø${mm(2 * target)}`,
+    features: rows.filter((row) => row.to > from + 1e-9).map((row) => row.id),
+    tool: tool.name,
+    toolItem: tool.item?.id,
+    toolMaterial: tool.item?.material === 'carbide' ? 'carbide' : 'hss',
+    toolFigures: tool.item?.figures,
+    figures: { diameter: 2 * (target + metal), travel: stage.x1 - from, depth: cut.depth, passes: cut.passes },
+    cut: { kind: 'outer', envelope: constant(from, stage.x1, target) },
+    after: before ? [{ key: before, rule: 'rough-large-first' }] : beforeTurning(session),
+    stops: [{ toX: from }],
+    reasons: ['rough-large-first'],
+    check: 'caliper',
+    needs: [tool.need],
+  });
+  session.done.set('rough', key);
+  leansOnTail(session, key);
+}
+
+function roughValley(session: Session, row: Row): void {
+  const leave = LIMITS.roughAllowance.value;
+  const span = valleySpan(session, row);
+  if (metalOver(session, span.from, span.to, rowMax(row) + leave) > leave) cutBehindCollar(session, row, rowMax(row) + leave, 'rough-turn');
 }
 
 /** Turns every row to size, largest first; rows that the bar is already are left. */
@@ -171,16 +169,15 @@ function cutBehindCollar(session: Session, row: Row, radius: number, method: 'ro
   const bladeWidth = blade.item?.figures['width'] ?? 3;
   const narrow = width <= 3 * bladeWidth + 1e-9;
   const tool = narrow ? blade : turningTool(build.register, method === 'turn' ? 'finish' : 'rough', -1);
-  const asked = narrow && method === 'turn' ? 'groove' : method;
   const wish = method === 'turn' ? LIMITS.lightDepth.value : LIMITS.roughDepth.value;
-  const depth = depthFor(session, asked, to, wish, `Turning Ø${mm(2 * radius)} behind the collar`);
+  const depth = depthFor(session, method, to, wish, `Turning Ø${mm(2 * radius)} behind the collar`);
   const cut = passesFor(metal, depth);
   const key = keyOf(session, `${method}.${row.id}`);
   const before = session.done.get(method === 'turn' ? 'turn' : 'rough') ?? session.done.get('rough');
   const blank = method === 'turn' && row.thread ? threadBlank(row.thread) : undefined;
   addOperation(build, view, {
     key,
-    method: asked,
+    method,
     title: `${method === 'rough-turn' ? 'rough turn' : 'turn'} Ø${mm(2 * (blank ? blank.diameter / 2 : radius))} behind the collar`,
     features: [row.id],
     tool: narrow ? tool.name : `${tool.name}, after ${blade.name}`,

@@ -4,7 +4,7 @@ import type { Build } from '../draft';
 import { cutChamfers, drillCentre, faceEnd, turnCrown } from '../methods/ends';
 import { markOut, milledSpan, millFlats } from '../methods/mill';
 import { cutThreads } from '../methods/thread';
-import { finishRows, finishValleys, rowsWorked, roughPlateaus, roughValleys, turnTapers } from '../methods/turn';
+import { finishRows, finishValleys, rowsWorked, roughRows, turnTapers } from '../methods/turn';
 import type { Grip } from '../grips';
 import type { Session } from '../session';
 import { indexingFor } from '../shop';
@@ -35,8 +35,7 @@ export interface EndWork {
  * mill comes between; otherwise the lathe is left only once. Returns the session that holds the work at the end.
  */
 export function workEnd(session: Session, work: EndWork): Session {
-  roughPlateaus(session);
-  roughValleys(session);
+  roughRows(session);
   finishRows(session);
   finishValleys(session);
   if (work.flats.length === 0) return endForms(session);
