@@ -4,7 +4,7 @@ import type { LengthFormat } from '../../../shared/units/format';
 import { formatLength, formatNumber } from '../../../shared/units/format';
 import type { Column } from './measures';
 
-/** `Ø` stands for the diameter sign, which is drawn. */
+/** `Ø` stands for the diameter sign, which is drawn; each target has a line of its own. */
 export type Cells = Readonly<Record<Column['id'], string>>;
 
 const ACROSS = new Set<Size['kind']>(['diameter', 'hole', 'groove']);
@@ -34,10 +34,10 @@ function targetText(operation: Operation, scheme: Scheme, format: LengthFormat):
     const limit = (value: number) => (size?.kind === 'angle' ? degrees(value, format) : formatLength(value, format));
     const sign = size && ACROSS.has(size.kind) ? 'Ø' : '';
     const name = size?.designation ?? `${sign}${limit(target.nominal)}`;
-    const limits = target.upperLimit === target.lowerLimit ? '' : ` ${limit(target.upperLimit)}/${limit(target.lowerLimit)}`;
+    const limits = target.upperLimit === target.lowerLimit ? '' : `: ${limit(target.upperLimit)}/${limit(target.lowerLimit)}`;
     return size?.kind === 'thread' ? name : `${name}${limits}`;
   });
-  return [...own, ...targets].join(', ');
+  return [...own, ...targets].join('\n');
 }
 
 function degrees(value: number, { decimalSign }: LengthFormat): string {

@@ -8,8 +8,8 @@ export const LETTER = 2.5;
 export const FONT = fontSizeFor(LETTER);
 export const GLYPH = ADVANCE * FONT;
 /** One line of text, and what stands above its baseline (mm). */
-export const LINE = 4.6;
-export const BASELINE = 3.4;
+export const LINE = 4.3;
+export const BASELINE = 3.2;
 
 /** Room of pictures and of how the work is held, left of the operations. */
 export const PICTURE_WIDTH = 58;

@@ -21,7 +21,7 @@ export function operationRow(operation: Operation, cells: Cells): Row {
   const columns = COLUMNS.map((column, index) => ({
     column,
     start: STARTS[index] ?? TABLE_LEFT,
-    lines: wrap(cells[column.id], column.characters - 1),
+    lines: cells[column.id].split('\n').flatMap((text) => wrap(text, column.characters - 1)),
   }));
   // What stands at the foot of every card need not stand in it again.
   const own = operation.cautions.filter((caution) => !STANDING_CAUTIONS.includes(caution));
