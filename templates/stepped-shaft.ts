@@ -1,6 +1,12 @@
 import { defineTemplate } from '../shared/template/define';
 import type { ParameterBase } from '../shared/template/template';
-import { COMMON_PARAMETERS, LEAST_DIAMETER, LEAST_LENGTH, MOST_DIAMETER, MOST_LENGTH } from './common-parameters';
+import {
+  COMMON_PARAMETERS,
+  LEAST_DIAMETER,
+  LEAST_LENGTH,
+  MOST_DIAMETER,
+  MOST_LENGTH,
+} from './common-parameters';
 import { STEPPED_SHAFT_EXAMPLES } from './stepped-shaft-examples';
 
 const KEY_NOT_YET = 'Key seats cannot be drawn yet. Leave this empty.';
@@ -40,14 +46,32 @@ export const steppedShaft = defineTemplate({
           hint: 'May carry its tolerance, 25 h6. Leave it empty where a thread is given.',
         },
         { id: 'length', label: 'Length', kind: 'length', minimum: LEAST_LENGTH, maximum: MOST_LENGTH },
-        { id: 'fit', label: 'Fit', kind: 'fit', optional: true, default: '', hint: 'h6, ±0.05 or +0/-0.1; empty for the general tolerance.' },
+        {
+          id: 'fit',
+          label: 'Fit',
+          kind: 'fit',
+          optional: true,
+          default: '',
+          hint: 'h6, ±0.05 or +0/-0.1; empty for the general tolerance.',
+        },
         { id: 'thread', label: 'Thread', kind: 'thread', optional: true, default: '' },
-        notYet('fullThread', 'Full thread', 'A thread runs over its whole step for now. Leave this empty and give the threaded length as a step of its own.'),
+        notYet(
+          'fullThread',
+          'Full thread',
+          'A thread runs over its whole step for now. Leave this empty and give the threaded length as a step of its own.',
+        ),
         notYet('keyWidth', 'Key width', KEY_NOT_YET),
         notYet('keyDepth', 'Key depth', KEY_NOT_YET),
         notYet('keyLength', 'Key length', KEY_NOT_YET),
         notYet('keyOffset', 'Key offset', KEY_NOT_YET),
-        { ...notYet('texture', 'Surface texture', 'Surface texture cannot be given for each step yet. Leave this empty.'), kind: 'text' },
+        {
+          ...notYet(
+            'texture',
+            'Surface texture',
+            'Surface texture cannot be given for each step yet. Leave this empty.',
+          ),
+          kind: 'text',
+        },
       ],
       defaultRows: [
         { key: 'r1', diameter: '20', length: '30' },
@@ -75,7 +99,11 @@ export const steppedShaft = defineTemplate({
       maximum: '50',
       hint: 'Leg of 45°; 0 for none. Empty: none on a plain end, one pitch on a threaded one.',
     },
-    notYet('shoulderRadius', 'Shoulder radius', 'Inside corners are drawn sharp for now. Leave the shoulder radius empty.'),
+    notYet(
+      'shoulderRadius',
+      'Shoulder radius',
+      'Inside corners are drawn sharp for now. Leave the shoulder radius empty.',
+    ),
     { ...notYet('undercut', 'Undercut', UNDERCUT_NOT_YET), kind: 'text' },
     notYet('undercutWidth', 'Undercut width', UNDERCUT_NOT_YET),
     notYet('undercutDepth', 'Undercut depth', UNDERCUT_NOT_YET),
@@ -87,7 +115,11 @@ export const steppedShaft = defineTemplate({
     { id: 'start', each: 'steps', value: 'sumBefore("steps", "length", index)' },
     { id: 'end', each: 'steps', value: 'row.start + row.length' },
     { id: 'threadName', each: 'steps', value: 'given(row.thread) ? row.thread : ""' },
-    { id: 'fitName', each: 'steps', value: 'given(row.fit) ? row.fit : toleranceAt("steps", "diameter", index)' },
+    {
+      id: 'fitName',
+      each: 'steps',
+      value: 'given(row.fit) ? row.fit : toleranceAt("steps", "diameter", index)',
+    },
     // Neighbours of one diameter with nothing between them are one face, sized once.
     {
       id: 'continues',
@@ -96,7 +128,11 @@ export const steppedShaft = defineTemplate({
         'index > 0 ? (abs(row.size - valueAt("steps", "size", index - 1)) < 1e-6 and row.threadName == valueAt("steps", "threadName", index - 1) and row.fitName == valueAt("steps", "fitName", index - 1)) : false',
     },
     { id: 'runLast', each: 'steps', value: 'runEnd("steps", "continues", index)' },
-    { id: 'runFirst', each: 'steps', value: 'row.continues ? valueAt("steps", "runFirst", index - 1) : index' },
+    {
+      id: 'runFirst',
+      each: 'steps',
+      value: 'row.continues ? valueAt("steps", "runFirst", index - 1) : index',
+    },
     { id: 'runEnd', each: 'steps', value: 'valueAt("steps", "end", row.runLast)' },
     { id: 'runLength', each: 'steps', value: 'row.runEnd - valueAt("steps", "start", row.runFirst)' },
     { id: 'lastFace', value: 'valueAt("steps", "runFirst", last)' },
@@ -105,7 +141,8 @@ export const steppedShaft = defineTemplate({
     { id: 'rightSize', value: 'valueAt("steps", "size", last)' },
     {
       id: 'leftLeg',
-      value: 'given(leftChamfer) ? leftChamfer : (given(valueAt("steps", "thread", 0)) ? pitchOf(valueAt("steps", "thread", 0)) : 0)',
+      value:
+        'given(leftChamfer) ? leftChamfer : (given(valueAt("steps", "thread", 0)) ? pitchOf(valueAt("steps", "thread", 0)) : 0)',
     },
     {
       id: 'rightLeg',
@@ -113,8 +150,14 @@ export const steppedShaft = defineTemplate({
         'given(rightChamfer) ? rightChamfer : (given(valueAt("steps", "thread", last)) ? pitchOf(valueAt("steps", "thread", last)) : 0)',
     },
     // The longest leg that leaves a tenth of a millimetre of its step to measure.
-    { id: 'leftMost', value: 'min(valueAt("steps", "runLength", 0) - (lastFace == 0 ? rightLeg : 0), leftSize / 2) - 0.1' },
-    { id: 'rightMost', value: 'min(valueAt("steps", "runLength", last) - (lastFace == 0 ? leftLeg : 0), rightSize / 2) - 0.1' },
+    {
+      id: 'leftMost',
+      value: 'min(valueAt("steps", "runLength", 0) - (lastFace == 0 ? rightLeg : 0), leftSize / 2) - 0.1',
+    },
+    {
+      id: 'rightMost',
+      value: 'min(valueAt("steps", "runLength", last) - (lastFace == 0 ? leftLeg : 0), rightSize / 2) - 0.1',
+    },
   ],
   constraints: [
     {
@@ -128,7 +171,8 @@ export const steppedShaft = defineTemplate({
       parameter: 'diameter',
       when: 'given(row.thread) and given(row.diameter) and row.diameter > 0',
       holds: 'abs(row.diameter - majorOf(row.thread)) < 0.005',
-      message: '{row.diameter} is not the diameter of {#row.thread}, which is {=majorOf(row.thread)}. Leave the diameter empty, or give one that agrees.',
+      message:
+        '{row.diameter} is not the diameter of {#row.thread}, which is {=majorOf(row.thread)}. Leave the diameter empty, or give one that agrees.',
     },
     {
       each: 'steps',
@@ -142,21 +186,24 @@ export const steppedShaft = defineTemplate({
       parameter: 'fit',
       when: 'given(row.thread)',
       holds: 'not given(row.fit)',
-      message: 'A threaded step takes its limits from the class of its thread, such as M16-6g. Leave the fit empty.',
+      message:
+        'A threaded step takes its limits from the class of its thread, such as M16-6g. Leave the fit empty.',
     },
     {
       each: 'steps',
       parameter: 'diameter',
       when: 'given(row.thread)',
       holds: 'toleranceAt("steps", "diameter", index) == ""',
-      message: 'A threaded step takes its limits from the class of its thread, such as M16-6g. Leave the tolerance out.',
+      message:
+        'A threaded step takes its limits from the class of its thread, such as M16-6g. Leave the tolerance out.',
     },
     {
       each: 'steps',
       parameter: 'length',
       when: 'row.continues or valueAt("steps", "continues", index + 1)',
       holds: 'toleranceAt("steps", "length", index) == ""',
-      message: 'This step and its neighbour are both {row.size} across, so nothing shows where one ends. Make them one step to give its length a tolerance.',
+      message:
+        'This step and its neighbour are both {row.size} across, so nothing shows where one ends. Make them one step to give its length a tolerance.',
     },
     {
       parameter: 'steps',
@@ -165,19 +212,42 @@ export const steppedShaft = defineTemplate({
     },
     {
       parameter: 'leftChamfer',
+      when: 'leftLeg > 0 and leftMost < 0.1',
+      holds: 'false',
+      message:
+        'The first step leaves no room for a chamfer of {leftLeg} beside what else is cut on it. Give 0 for none.',
+    },
+    {
+      parameter: 'leftChamfer',
       when: 'leftLeg > 0',
       holds: 'leftLeg <= leftMost + 1e-9',
-      message: 'A chamfer of {leftLeg} leaves nothing of the first step, {leftSize} across and {=valueAt("steps", "runLength", 0)} long. Give {<=leftMost} or less, or 0 for none.',
+      message:
+        'A chamfer of {leftLeg} leaves nothing of the first step, {leftSize} across and {=valueAt("steps", "runLength", 0)} long. Give {<=leftMost} or less, or 0 for none.',
+    },
+    {
+      parameter: 'rightChamfer',
+      when: 'rightLeg > 0 and rightMost < 0.1',
+      holds: 'false',
+      message:
+        'The last step leaves no room for a chamfer of {rightLeg} beside what else is cut on it. Give 0 for none.',
     },
     {
       parameter: 'rightChamfer',
       when: 'rightLeg > 0',
       holds: 'rightLeg <= rightMost + 1e-9',
-      message: 'A chamfer of {rightLeg} leaves nothing of the last step, {rightSize} across and {=valueAt("steps", "runLength", last)} long. Give {<=rightMost} or less, or 0 for none.',
+      message:
+        'A chamfer of {rightLeg} leaves nothing of the last step, {rightSize} across and {=valueAt("steps", "runLength", last)} long. Give {<=rightMost} or less, or 0 for none.',
     },
   ],
   features: [
-    { kind: 'cylinder', id: 'steps.{key}', each: 'steps', parameter: 'diameter', when: 'not row.continues', figures: { length: 'row.runLength', diameter: 'row.size' } },
+    {
+      kind: 'cylinder',
+      id: 'steps.{key}',
+      each: 'steps',
+      parameter: 'diameter',
+      when: 'not row.continues',
+      figures: { length: 'row.runLength', diameter: 'row.size' },
+    },
     {
       kind: 'thread',
       id: 'steps.{key}.thread',
@@ -209,7 +279,13 @@ export const steppedShaft = defineTemplate({
       each: 'steps',
       when: 'given(row.thread) and not row.continues',
       features: ['steps.{key}.thread', 'steps.{key}'],
-      figures: { nominal: 'row.size', from: 'row.start', to: 'row.runEnd', diameter: 'row.size', lastRow: 'row.runLast' },
+      figures: {
+        nominal: 'row.size',
+        from: 'row.start',
+        to: 'row.runEnd',
+        diameter: 'row.size',
+        lastRow: 'row.runLast',
+      },
     },
     {
       id: 'steps.{key}.diameter',
@@ -219,7 +295,13 @@ export const steppedShaft = defineTemplate({
       each: 'steps',
       when: 'not given(row.thread) and not row.continues',
       features: ['steps.{key}'],
-      figures: { nominal: 'row.size', from: 'row.start', to: 'row.runEnd', diameter: 'row.size', lastRow: 'row.runLast' },
+      figures: {
+        nominal: 'row.size',
+        from: 'row.start',
+        to: 'row.runEnd',
+        diameter: 'row.size',
+        lastRow: 'row.runLast',
+      },
     },
     {
       id: 'steps.{key}.length',
@@ -230,8 +312,22 @@ export const steppedShaft = defineTemplate({
       features: ['steps.{key}'],
       figures: { nominal: 'row.runLength', from: 'row.start', to: 'row.runEnd', lastRow: 'row.runLast' },
     },
-    { id: 'leftChamfer', kind: 'chamfer', parameter: 'leftChamfer', when: 'leftLeg > 0', features: ['leftChamfer'], figures: { nominal: 'leftLeg' } },
-    { id: 'rightChamfer', kind: 'chamfer', parameter: 'rightChamfer', when: 'rightLeg > 0', features: ['rightChamfer'], figures: { nominal: 'rightLeg' } },
+    {
+      id: 'leftChamfer',
+      kind: 'chamfer',
+      parameter: 'leftChamfer',
+      when: 'leftLeg > 0',
+      features: ['leftChamfer'],
+      figures: { nominal: 'leftLeg' },
+    },
+    {
+      id: 'rightChamfer',
+      kind: 'chamfer',
+      parameter: 'rightChamfer',
+      when: 'rightLeg > 0',
+      features: ['rightChamfer'],
+      figures: { nominal: 'rightLeg' },
+    },
     {
       id: 'overall',
       kind: 'length',

@@ -1,4 +1,4 @@
-import type { Constraint, Derived } from '../shared/template/template';
+import type { Constraint, Derived, Remark } from '../shared/template/template';
 
 /** Stations from the left face, and what the end and the flats come to. */
 export const TAPERED_HANDLE_DERIVED: readonly Derived[] = [
@@ -14,7 +14,10 @@ export const TAPERED_HANDLE_DERIVED: readonly Derived[] = [
   // Where the taper has come down to the flats, measured from the left end of the grip.
   { id: 'flatsRunOut', value: 'gripLength + (barDiameter - acrossFlats) / 2 / slope' },
   // Flats end by themselves where the taper meets them, and run on to there when they are said to end with the grip.
-  { id: 'flatsEndIsGiven', value: 'isHex ? (abs(flatsSpan - gripLength) > 1e-6 and flatsSpan < flatsRunOut - 1e-6) : false' },
+  {
+    id: 'flatsEndIsGiven',
+    value: 'isHex ? (abs(flatsSpan - gripLength) > 1e-6 and flatsSpan < flatsRunOut - 1e-6) : false',
+  },
   { id: 'flatsStop', value: 'flatsEndIsGiven ? flatsSpan : flatsRunOut' },
   { id: 'cornersSharp', value: 'acrossFlats / cos(pi / 6) < barDiameter - 1e-6' },
   { id: 'end', value: 'either(endSize, 0)' },
@@ -25,7 +28,8 @@ export const TAPERED_HANDLE_DERIVED: readonly Derived[] = [
   { id: 'crownReach', value: 'end - taperEndDiameter / 2 * slope' },
   {
     id: 'crownDepth',
-    value: '(crownReach - sqrt(max(0, crownReach ^ 2 - (1 + slope ^ 2) * (taperEndDiameter / 2) ^ 2))) / (1 + slope ^ 2)',
+    value:
+      '(crownReach - sqrt(max(0, crownReach ^ 2 - (1 + slope ^ 2) * (taperEndDiameter / 2) ^ 2))) / (1 + slope ^ 2)',
   },
   { id: 'endDepth', value: 'crowned ? crownDepth : (chamfered ? end : 0)' },
 ];
@@ -40,71 +44,83 @@ export const TAPERED_HANDLE_CONSTRAINTS: readonly Constraint[] = [
     parameter: 'thread',
     when: 'spigot > 0',
     holds: 'major <= spigotDiameter + 1e-6',
-    message: '{#thread} has a diameter of {major}, larger than the spigot of {spigotDiameter} behind it. Give a smaller thread or a larger spigot.',
+    message:
+      '{#thread} has a diameter of {major}, larger than the spigot of {spigotDiameter} behind it. Give a smaller thread or a larger spigot.',
   },
   {
     parameter: 'thread',
     when: 'spigot == 0',
     holds: 'major < barDiameter',
-    message: '{#thread} has a diameter of {major}, and the bar has {barDiameter}. Give a thread smaller than the bar.',
+    message:
+      '{#thread} has a diameter of {major}, and the bar has {barDiameter}. Give a thread smaller than the bar.',
   },
   {
     parameter: 'threadChamfer',
     when: 'threadLeg > 0',
     holds: 'threadLeg <= min(threadLength, major / 2) - 0.1',
-    message: 'A chamfer of {threadLeg} leaves nothing of a thread {major} across and {threadLength} long. Give {<=min(threadLength, major / 2) - 0.1} or less, or 0 for none.',
+    message:
+      'A chamfer of {threadLeg} leaves nothing of a thread {major} across and {threadLength} long. Give {<=min(threadLength, major / 2) - 0.1} or less, or 0 for none.',
   },
   {
     parameter: 'spigotDiameter',
     when: 'spigot > 0',
     holds: 'spigotDiameter < barDiameter - 1e-6',
-    message: 'A spigot of {spigotDiameter} cannot be turned from a bar of {barDiameter}. Give a spigot smaller than the bar, or a larger bar.',
+    message:
+      'A spigot of {spigotDiameter} cannot be turned from a bar of {barDiameter}. Give a spigot smaller than the bar, or a larger bar.',
   },
   {
     parameter: 'acrossFlats',
     when: 'isHex',
     holds: 'acrossFlats <= barDiameter - 0.05',
-    message: 'Flats {acrossFlats} apart leave no flat on a bar of {barDiameter}. Give {<=barDiameter - 0.05} or less across flats, or a larger bar.',
+    message:
+      'Flats {acrossFlats} apart leave no flat on a bar of {barDiameter}. Give {<=barDiameter - 0.05} or less across flats, or a larger bar.',
   },
   {
     parameter: 'acrossFlats',
     when: 'isHex',
     holds: 'acrossFlats >= barDiameter * 0.7',
-    message: 'Flats {acrossFlats} apart are deeper than a bar of {barDiameter} allows. Give {>=barDiameter * 0.7} or more across flats, or a smaller bar.',
+    message:
+      'Flats {acrossFlats} apart are deeper than a bar of {barDiameter} allows. Give {>=barDiameter * 0.7} or more across flats, or a smaller bar.',
   },
   {
     parameter: 'acrossFlats',
-    when: 'isHex and spigot > 0',
+    when: 'isHex and spigot > 0 and spigotDiameter < barDiameter',
     holds: 'acrossFlats >= spigotDiameter',
-    message: 'Flats {acrossFlats} apart would cut into the spigot of {spigotDiameter}. Give {>=spigotDiameter} or more across flats, or a smaller spigot.',
+    message:
+      'Flats {acrossFlats} apart would cut into the spigot of {spigotDiameter}. Give {>=spigotDiameter} or more across flats, or a smaller spigot.',
   },
   {
     parameter: 'acrossFlats',
-    when: 'isHex and spigot == 0',
+    when: 'isHex and spigot == 0 and major < barDiameter',
     holds: 'acrossFlats >= major',
-    message: 'Flats {acrossFlats} apart would cut into the thread of {major}. Give {>=major} or more across flats, or a smaller thread.',
+    message:
+      'Flats {acrossFlats} apart would cut into the thread of {major}. Give {>=major} or more across flats, or a smaller thread.',
   },
   {
     parameter: 'taperEndDiameter',
     holds: 'taperEndDiameter < barDiameter - 1e-6',
-    message: 'A taper cannot end at {taperEndDiameter} on a bar of {barDiameter}. Give an end diameter smaller than the bar.',
+    message:
+      'A taper cannot end at {taperEndDiameter} on a bar of {barDiameter}. Give an end diameter smaller than the bar.',
   },
   {
     parameter: 'taperLength',
     holds: 'slope <= tan(pi / 6) + 1e-9',
-    message: 'A taper from {barDiameter} to {taperEndDiameter} in {taperLength} is steeper than a half angle of 30°. Give a length of {>=(barDiameter - taperEndDiameter) / 2 / tan(pi / 6)} or more, or a larger end.',
+    message:
+      'A taper from {barDiameter} to {taperEndDiameter} in {taperLength} is steeper than a half angle of 30°. Give a length of {>=(barDiameter - taperEndDiameter) / 2 / tan(pi / 6)} or more, or a larger end.',
   },
   {
     parameter: 'endSize',
     when: 'crowned',
     holds: 'end >= crownLeast - 1e-9',
-    message: '{endSize} is too small to crown a {taperEndDiameter} end. Give a radius of {range:crownLeast|500}, or choose a chamfer.',
+    message:
+      '{endSize} is too small to crown a {taperEndDiameter} end. Give a radius of {range:crownLeast|500}, or choose a chamfer.',
   },
   {
     parameter: 'endSize',
     when: 'chamfered',
     holds: 'end <= taperEndDiameter / 2 - 0.1',
-    message: 'A chamfer of {endSize} is too large for a {taperEndDiameter} end. Give {range:0.1|taperEndDiameter / 2 - 0.1}, or 0 for a plain end.',
+    message:
+      'A chamfer of {endSize} is too large for a {taperEndDiameter} end. Give {range:0.1|taperEndDiameter / 2 - 0.1}, or 0 for a plain end.',
   },
   {
     parameter: 'taperLength',
@@ -114,19 +130,31 @@ export const TAPERED_HANDLE_CONSTRAINTS: readonly Constraint[] = [
   },
   {
     parameter: 'flatsLength',
-    when: 'isHex and acrossFlats < barDiameter and taperEndDiameter < barDiameter',
-    holds: 'min(flatsSpan, flatsRunOut) <= gripLength + taperLength - endDepth - 0.1',
-    message: 'Flats {flatsSpan} long would reach the right end. Give {<=gripLength + taperLength - endDepth - 0.1} or less.',
+    when: 'isHex',
+    holds: 'flatsSpan <= gripLength + taperLength - endDepth - 0.1',
+    message:
+      'Flats {flatsSpan} long would reach past the taper. Give {<=gripLength + taperLength - endDepth - 0.1} or less.',
   },
   {
     parameter: 'acrossFlats',
-    when: 'isHex and acrossFlats < barDiameter and taperEndDiameter < barDiameter and not flatsEndIsGiven',
+    when: 'isHex and acrossFlats < barDiameter and taperEndDiameter < barDiameter and slope <= tan(pi / 6) and not flatsEndIsGiven',
     holds: 'flatsRunOut <= gripLength + taperLength - endDepth - 0.1',
-    message: 'Flats {acrossFlats} apart would run out through the right end, where the taper is still larger. Give more across flats, a smaller end diameter, or a flats length shorter than the grip.',
+    message:
+      'Flats {acrossFlats} apart would run out through the right end, where the taper is still larger. Give more across flats, a smaller end diameter, or a flats length shorter than the grip.',
   },
   {
     parameter: 'gripLength',
     holds: 'overall <= 3000',
     message: 'The handle comes to {overall}. Keep the whole length to {=3000} or less.',
+  },
+];
+
+export const TAPERED_HANDLE_REMARKS: readonly Remark[] = [
+  {
+    code: 'rounded-corners',
+    parameter: 'acrossFlats',
+    when: 'isHex and acrossFlats / cos(pi / 6) > barDiameter + 1e-6',
+    message:
+      'A bar of {barDiameter} leaves the corners of a hexagon {acrossFlats} across flats rounded. Sharp ones need {>=acrossFlats / cos(pi / 6)}.',
   },
 ];

@@ -1,14 +1,27 @@
 import type { Parameter } from '../shared/template/template';
-import { COMMON_PARAMETERS, LEAST_DIAMETER, LEAST_LENGTH, MOST_DIAMETER, MOST_LENGTH } from './common-parameters';
+import {
+  COMMON_PARAMETERS,
+  LEAST_DIAMETER,
+  LEAST_LENGTH,
+  MOST_DIAMETER,
+  MOST_LENGTH,
+} from './common-parameters';
 
 const KNURL_NOT_YET = 'Knurled grips cannot be drawn yet. Choose round or hex.';
-const TAPER_NOT_YET = 'A taper is given by its end diameter for now. Choose end-diameter and give the end diameter and length.';
+const TAPER_NOT_YET =
+  'A taper is given by its end diameter for now. Choose end-diameter and give the end diameter and length.';
 
 const length = { kind: 'length', minimum: LEAST_LENGTH, maximum: MOST_LENGTH } as const;
 const diameter = { kind: 'diameter', minimum: LEAST_DIAMETER, maximum: MOST_DIAMETER } as const;
 
 export const TAPERED_HANDLE_PARAMETERS: readonly Parameter[] = [
-  { id: 'thread', label: 'Thread', kind: 'thread', default: 'M10', hint: 'Such as M10, M12x1.25-6g or 3/8-16 UNC-2A.' },
+  {
+    id: 'thread',
+    label: 'Thread',
+    kind: 'thread',
+    default: 'M10',
+    hint: 'Such as M10, M12x1.25-6g or 3/8-16 UNC-2A.',
+  },
   { id: 'threadLength', label: 'Thread length', default: '16', ...length },
   {
     id: 'threadChamfer',
@@ -36,7 +49,14 @@ export const TAPERED_HANDLE_PARAMETERS: readonly Parameter[] = [
     hint: 'May carry its tolerance, 14 h9.',
     ...diameter,
   },
-  { id: 'spigotLength', label: 'Spigot length', default: '10', optional: true, hint: '0 for no spigot.', ...length },
+  {
+    id: 'spigotLength',
+    label: 'Spigot length',
+    default: '10',
+    optional: true,
+    hint: '0 for no spigot.',
+    ...length,
+  },
   {
     id: 'grip',
     label: 'Grip',
@@ -90,9 +110,29 @@ export const TAPERED_HANDLE_PARAMETERS: readonly Parameter[] = [
     hint: 'Where the taper and the right face would meet before any crown or chamfer.',
     ...diameter,
   },
-  { id: 'taperAngle', label: 'Taper angle', kind: 'angle', optional: true, default: '', notYet: TAPER_NOT_YET },
-  { id: 'taperRatio', label: 'Taper ratio', kind: 'ratio', optional: true, default: '', notYet: TAPER_NOT_YET },
-  { id: 'taperLength', label: 'Taper length', default: '95', hint: 'To the right face, crown or chamfer included.', ...length },
+  {
+    id: 'taperAngle',
+    label: 'Taper angle',
+    kind: 'angle',
+    optional: true,
+    default: '',
+    notYet: TAPER_NOT_YET,
+  },
+  {
+    id: 'taperRatio',
+    label: 'Taper ratio',
+    kind: 'ratio',
+    optional: true,
+    default: '',
+    notYet: TAPER_NOT_YET,
+  },
+  {
+    id: 'taperLength',
+    label: 'Taper length',
+    default: '95',
+    hint: 'To the right face, crown or chamfer included.',
+    ...length,
+  },
   {
     id: 'endForm',
     label: 'End form',

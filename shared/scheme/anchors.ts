@@ -53,8 +53,13 @@ function figure(size: SizeInstance, name: string): number {
   return value;
 }
 
-function the<K extends Feature['kind']>(size: SizeInstance, part: Part, kind: K): Extract<Feature, { kind: K }> {
-  const isKind = (feature: Feature | undefined): feature is Extract<Feature, { kind: K }> => feature?.kind === kind;
+function the<K extends Feature['kind']>(
+  size: SizeInstance,
+  part: Part,
+  kind: K,
+): Extract<Feature, { kind: K }> {
+  const isKind = (feature: Feature | undefined): feature is Extract<Feature, { kind: K }> =>
+    feature?.kind === kind;
   const found = size.features.map((id) => featureById(part, id)).find(isKind);
   if (!found) throw new TypeError(`Size “${size.id}” needs a ${kind} that the part does not have`);
   return found;
@@ -64,7 +69,8 @@ function the<K extends Feature['kind']>(size: SizeInstance, part: Part, kind: K)
 function visibleSpan(size: SizeInstance, part: Part): { from: number; to: number } {
   let [from, to] = [figure(size, 'from'), figure(size, 'to')];
   for (const feature of part.features) {
-    const cutsHere = feature.kind === 'crown' || (feature.kind === 'chamfer' && size.features.includes(feature.on));
+    const cutsHere =
+      feature.kind === 'crown' || (feature.kind === 'chamfer' && size.features.includes(feature.on));
     if (!cutsHere || (feature.kind !== 'crown' && feature.kind !== 'chamfer')) continue;
     if (feature.end === 'left' && feature.to > from && feature.to < to) from = feature.to;
     if (feature.end === 'right' && feature.from < to && feature.from > from) to = feature.from;

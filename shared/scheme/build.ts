@@ -47,7 +47,9 @@ function rank({ balloon, reference }: Size): number {
 
 function sizeOf(instance: SizeInstance, part: Part, general: GeneralTolerance): Size {
   const { template, nominal } = instance;
-  const thread = part.features.find((feature) => feature.kind === 'thread' && instance.features.includes(feature.id));
+  const thread = part.features.find(
+    (feature) => feature.kind === 'thread' && instance.features.includes(feature.id),
+  );
   const { tolerance, source, designation } = limitsOf(
     instance,
     general,

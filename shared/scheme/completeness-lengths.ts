@@ -59,9 +59,11 @@ function stationsToFix(part: Part): Node[] {
 /** An end of flats is a station to fix where it stands as a wall; where it runs out, the shapes fix it. */
 function addFlatsEnds(part: Part, flats: FlatsFeature, add: (x: number, words: string) => void): void {
   const { outer } = part.body;
-  const stands = (x: number, side: 'left' | 'right'): boolean => radiusAt(outer, x, side) > flats.distance + STATION_TOLERANCE;
+  const stands = (x: number, side: 'left' | 'right'): boolean =>
+    radiusAt(outer, x, side) > flats.distance + STATION_TOLERANCE;
   const id = flats.id;
-  if (stationAt(part, flats.from) !== undefined && stands(flats.from, 'right')) add(flats.from, `the left end of ${id}`);
+  if (stationAt(part, flats.from) !== undefined && stands(flats.from, 'right'))
+    add(flats.from, `the left end of ${id}`);
   const runsOn = flats.runOutTo > flats.to + STATION_TOLERANCE;
   if (!runsOn && stands(flats.to, 'left')) add(flats.to, `the right end of ${id}`);
 }

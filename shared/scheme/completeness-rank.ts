@@ -85,7 +85,9 @@ function freeFigures(part: Part): FreeFigures {
     return index;
   };
   const meeting = (x: number, diameter: number): number | undefined =>
-    before && Math.abs(before.x - x) <= STATION_TOLERANCE && Math.abs(before.diameter - diameter) <= STATION_TOLERANCE
+    before &&
+    Math.abs(before.x - x) <= STATION_TOLERANCE &&
+    Math.abs(before.diameter - diameter) <= STATION_TOLERANCE
       ? before.index
       : undefined;
   for (const feature of part.features) {
@@ -100,7 +102,12 @@ function freeFigures(part: Part): FreeFigures {
       }
       case 'cone': {
         const { from, to, startDiameter, endDiameter } = feature;
-        add(`${id}.start`, `the larger or left diameter of ${id}`, startDiameter, meeting(from, startDiameter));
+        add(
+          `${id}.start`,
+          `the larger or left diameter of ${id}`,
+          startDiameter,
+          meeting(from, startDiameter),
+        );
         const index = add(`${id}.end`, `the end diameter of ${id}`, endDiameter);
         before = { x: to, diameter: endDiameter, index };
         break;
@@ -133,7 +140,9 @@ function freeFigures(part: Part): FreeFigures {
 function isCone(part: Part, endsAt: number | undefined): boolean {
   return (
     endsAt !== undefined &&
-    part.features.some((feature) => feature.kind === 'cone' && Math.abs(feature.to - endsAt) <= STATION_TOLERANCE)
+    part.features.some(
+      (feature) => feature.kind === 'cone' && Math.abs(feature.to - endsAt) <= STATION_TOLERANCE,
+    )
   );
 }
 
@@ -148,7 +157,10 @@ function measuresOf(part: Part, size: Size, indexOf: ReadonlyMap<string, number>
   switch (anchor.kind) {
     case 'across': {
       const designated = size.kind === 'thread' ? features.find(({ kind }) => kind === 'thread') : undefined;
-      return [...reading(acrossName(features, anchor)), ...reading(designated && `${designated.id}.designation`)];
+      return [
+        ...reading(acrossName(features, anchor)),
+        ...reading(designated && `${designated.id}.designation`),
+      ];
     }
     case 'corner':
       return reading(nameOf(features, 'chamfer', 'leg'));
@@ -174,9 +186,13 @@ function nameOf(features: readonly Feature[], kind: Feature['kind'], figure: str
 }
 
 /** The diameter a size across the part reads: a cylinder's, or a cone's at the end the size is read at. */
-function acrossName(features: readonly Feature[], anchor: Extract<SizeAnchor, { kind: 'across' }>): string | undefined {
+function acrossName(
+  features: readonly Feature[],
+  anchor: Extract<SizeAnchor, { kind: 'across' }>,
+): string | undefined {
   const { at, diameter } = anchor;
-  const near = (a: number, b: number | undefined): boolean => b !== undefined && Math.abs(a - b) <= STATION_TOLERANCE;
+  const near = (a: number, b: number | undefined): boolean =>
+    b !== undefined && Math.abs(a - b) <= STATION_TOLERANCE;
   for (const feature of features) {
     if (feature.kind === 'cylinder' && near(feature.diameter, diameter)) return `${feature.id}.diameter`;
     if (feature.kind !== 'cone') continue;

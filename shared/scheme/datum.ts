@@ -71,7 +71,9 @@ export function redimension(part: Part, scheme: Scheme, datum: string): Redimens
     if (index === start) return;
     const nominal = Math.abs(node.x - from.x);
     const sign = node.x > from.x ? 1 : -1;
-    const own = chains.find(({ left, right }) => (left === start && right === index) || (right === start && left === index));
+    const own = chains.find(
+      ({ left, right }) => (left === start && right === index) || (right === start && left === index),
+    );
     lengths.push({
       station: node.id,
       x: node.x,
@@ -121,7 +123,7 @@ function chainsOf(part: Part, scheme: Scheme): { nodes: Node[]; chains: Chain[] 
 /** Middles follow exactly from the tree of the original lengths. */
 function settleMiddles(nodes: readonly Node[], chains: readonly Chain[], start: number): void {
   const reached = new Set([start]);
-  for (let grew = true; grew; ) {
+  for (let grew = true; grew;) {
     grew = false;
     for (const { left, right, middle } of chains) {
       const [a, b] = [nodes[left], nodes[right]];

@@ -24,11 +24,17 @@ export function limitsOf(size: SizeInstance, general: GeneralTolerance, thread?:
   switch (tolerance.kind) {
     case 'symmetric':
     case 'limits':
-      return { tolerance: { kind: tolerance.kind, upper: tolerance.upper, lower: tolerance.lower }, source: 'as typed' };
+      return {
+        tolerance: { kind: tolerance.kind, upper: tolerance.upper, lower: tolerance.lower },
+        source: 'as typed',
+      };
     case 'fit': {
       const limits = fitLimits(tolerance.code, nominal);
       if (!limits.ok) throw new TypeError(limits.message);
-      return { tolerance: { kind: 'fit', ...limits.value, code: tolerance.code }, source: `ISO 286 ${tolerance.code}` };
+      return {
+        tolerance: { kind: 'fit', ...limits.value, code: tolerance.code },
+        source: `ISO 286 ${tolerance.code}`,
+      };
     }
     case 'none': {
       const deviation = general.deviation(kind, nominal);
@@ -44,10 +50,19 @@ function threadSizeLimits(designation: string, nominal: number): SizeLimits {
   const limits = threadLimits(thread.value);
   const named = formatThread(thread.value);
   if (!limits) {
-    return { tolerance: { kind: 'thread-class', upper: 0, lower: 0 }, source: 'thread designation', designation: named };
+    return {
+      tolerance: { kind: 'thread-class', upper: 0, lower: 0 },
+      source: 'thread designation',
+      designation: named,
+    };
   }
   return {
-    tolerance: { kind: 'thread-class', upper: limits.major.max - nominal, lower: limits.major.min - nominal, code: limits.class },
+    tolerance: {
+      kind: 'thread-class',
+      upper: limits.major.max - nominal,
+      lower: limits.major.min - nominal,
+      code: limits.class,
+    },
     source: `${standardOf(thread.value)} ${limits.class}`,
     designation: named,
   };

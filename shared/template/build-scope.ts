@@ -43,7 +43,8 @@ export function readsOnlyGood(
 ): boolean {
   for (const name of expression.symbols) if (bad.has(name)) return false;
   if (row) {
-    for (const column of expression.columns) if (bad.has(`${row.table}[${row.index}].${column}`)) return false;
+    for (const column of expression.columns)
+      if (bad.has(`${row.table}[${row.index}].${column}`)) return false;
   }
   for (const name of expression.tableColumns) {
     const table = name.slice(0, name.indexOf('.'));

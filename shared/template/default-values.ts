@@ -33,7 +33,9 @@ export function defaultValues(template: Template, entryUnit: LengthUnit = 'mm'):
 /** The worked examples of a family, the first one always there. */
 export function workedExamples(template: Template): readonly WorkedExample[] {
   return (
-    template.examples ?? [{ id: `${template.id}-example`, name: template.name, entryUnit: 'mm', values: template.example }]
+    template.examples ?? [
+      { id: `${template.id}-example`, name: template.name, entryUnit: 'mm', values: template.example },
+    ]
   );
 }
 

@@ -2,13 +2,19 @@ import { z } from 'zod';
 import { compileExpression } from './expression';
 import type { Template } from './template';
 
-const expression = z.string().max(600).superRefine((source, context) => {
-  try {
-    compileExpression(source);
-  } catch (cause) {
-    context.addIssue({ code: 'custom', message: cause instanceof Error ? cause.message : 'cannot be compiled' });
-  }
-});
+const expression = z
+  .string()
+  .max(600)
+  .superRefine((source, context) => {
+    try {
+      compileExpression(source);
+    } catch (cause) {
+      context.addIssue({
+        code: 'custom',
+        message: cause instanceof Error ? cause.message : 'cannot be compiled',
+      });
+    }
+  });
 
 const identifier = z.string().regex(/^[a-z][A-Za-z0-9]{0,39}$/);
 const templateId = z.string().regex(/^[a-z][a-z0-9-]{0,39}$/);
@@ -24,14 +30,26 @@ const base = {
   optional: z.boolean().optional(),
   minimum: expression.optional(),
   maximum: expression.optional(),
-  choices: z.array(z.strictObject({ id: text.min(1), label: text.min(1), notYet: sentence.optional() })).optional(),
+  choices: z
+    .array(z.strictObject({ id: text.min(1), label: text.min(1), notYet: sentence.optional() }))
+    .optional(),
   when: expression.optional(),
   notYet: sentence.optional(),
   hint: sentence.optional(),
 };
 
 const simpleKind = z.enum([
-  'length', 'diameter', 'angle', 'count', 'ratio', 'choice', 'thread', 'fit', 'yes-no', 'text', 'material',
+  'length',
+  'diameter',
+  'angle',
+  'count',
+  'ratio',
+  'choice',
+  'thread',
+  'fit',
+  'yes-no',
+  'text',
+  'material',
 ]);
 const simple = z.strictObject({ ...base, kind: simpleKind });
 const row = z.object({ key: z.string().min(1) }).catchall(z.string());
@@ -52,8 +70,13 @@ export const templateSchema = z.strictObject({
   id: templateId,
   name: text.min(1),
   summary: sentence,
-  parameters: z.array(z.union([simple, table])).min(1).max(80),
-  derived: z.array(z.strictObject({ id: identifier, value: expression, each: identifier.optional() })).max(80),
+  parameters: z
+    .array(z.union([simple, table]))
+    .min(1)
+    .max(80),
+  derived: z
+    .array(z.strictObject({ id: identifier, value: expression, each: identifier.optional() }))
+    .max(80),
   constraints: z
     .array(
       z.strictObject({
@@ -65,6 +88,9 @@ export const templateSchema = z.strictObject({
       }),
     )
     .max(80),
+  remarks: z
+    .array(z.strictObject({ code: templateId, parameter: identifier, when: expression, message: sentence }))
+    .optional(),
   features: z
     .array(
       z.strictObject({
@@ -83,8 +109,23 @@ export const templateSchema = z.strictObject({
       z.strictObject({
         id: path,
         kind: z.enum([
-          'length', 'diameter', 'radius', 'angle', 'taper', 'chamfer', 'thread', 'across-flats', 'knurl', 'groove', 'key',
-          'hole', 'position', 'texture', 'centre-hole', 'geometrical', 'note',
+          'length',
+          'diameter',
+          'radius',
+          'angle',
+          'taper',
+          'chamfer',
+          'thread',
+          'across-flats',
+          'knurl',
+          'groove',
+          'key',
+          'hole',
+          'position',
+          'texture',
+          'centre-hole',
+          'geometrical',
+          'note',
         ]),
         parameter: identifier.optional(),
         fit: identifier.optional(),
@@ -101,7 +142,12 @@ export const templateSchema = z.strictObject({
   example: typedValues,
   examples: z
     .array(
-      z.strictObject({ id: templateId, name: text.min(1), entryUnit: z.enum(['mm', 'in']), values: typedValues }),
+      z.strictObject({
+        id: templateId,
+        name: text.min(1),
+        entryUnit: z.enum(['mm', 'in']),
+        values: typedValues,
+      }),
     )
     .optional(),
 });
@@ -117,7 +163,8 @@ export function defineTemplate(template: Template): Template {
     throw new Error(`Template ${template.id}: ${z.prettifyError(checked.error)}`);
   }
   const unknown = unknownNames(template);
-  if (unknown.length > 0) throw new Error(`Template ${template.id} reads names it does not have: ${unknown.join(', ')}`);
+  if (unknown.length > 0)
+    throw new Error(`Template ${template.id} reads names it does not have: ${unknown.join(', ')}`);
   return template;
 }
 
@@ -136,7 +183,9 @@ function unknownNames(template: Template): string[] {
     if (source === undefined) return;
     const { symbols, columns: read, tableColumns } = compileExpression(source);
     unknown.push(...[...symbols].filter((name) => !names.has(name)));
-    unknown.push(...[...read].filter((name) => !columns.get(each ?? '')?.has(name)).map((name) => `row.${name}`));
+    unknown.push(
+      ...[...read].filter((name) => !columns.get(each ?? '')?.has(name)).map((name) => `row.${name}`),
+    );
     for (const name of tableColumns) {
       const [tableName = '', column = '*'] = name.split('.');
       const known = columns.get(tableName);
@@ -151,8 +200,10 @@ function unknownNames(template: Template): string[] {
   }
   for (const parameter of template.parameters) {
     const inner = parameter.kind === 'table' && 'columns' in parameter ? parameter.columns : [];
-    for (const { minimum, maximum, when } of [parameter]) [minimum, maximum, when].forEach((source) => look(source));
-    for (const column of inner) [column.minimum, column.maximum, column.when].forEach((source) => look(source, parameter.id));
+    for (const { minimum, maximum, when } of [parameter])
+      [minimum, maximum, when].forEach((source) => look(source));
+    for (const column of inner)
+      [column.minimum, column.maximum, column.when].forEach((source) => look(source, parameter.id));
   }
   for (const { holds, when, each, parameter } of template.constraints) {
     look(holds, each);
@@ -164,6 +215,7 @@ function unknownNames(template: Template): string[] {
     look(when, each);
     Object.values(worth).forEach((source) => look(source, each));
   }
+  for (const { when } of template.remarks ?? []) look(when);
   look(template.datum);
   return [...new Set(unknown)];
 }

@@ -1,7 +1,9 @@
 import { buildPart } from '../part/build';
 import type { Part } from '../part/part';
 import type { Advice, Problem } from '../problem';
+import type { LengthUnit } from '../units/length';
 import { buildScope, spreadBad } from './build-scope';
+import { compileExpression } from './expression';
 import { templateHash } from './hash';
 import { fieldsOf, isShown, judgeConstraints, judgeRange } from './judge';
 import { judgeTolerances } from './judge-tolerances';
@@ -9,6 +11,7 @@ import { partInput } from './part-from-template';
 import { readTyped, type ReadParameters } from './read-typed';
 import type { Scope } from './scope';
 import type { EvaluatedParameters, Evaluation, EvaluationOptions, Template, TypedValues } from './template';
+import { fillSentence } from './words';
 
 /** More sentences than this help nobody; the first ones are kept. */
 const MAX_PROBLEMS = 50;
@@ -20,8 +23,7 @@ const MAX_PROBLEMS = 50;
 export function evaluate(template: Template, typed: TypedValues, options: EvaluationOptions): Evaluation {
   const read = readTyped(template, typed, options.entryUnit);
   const { problems, scope, parameters } = judge(template, read, options);
-  const advice: Advice[] = [];
-  const finish = (all: readonly Problem[], part?: Part): Evaluation => ({
+  const finish = (all: readonly Problem[], part?: Part, advice: readonly Advice[] = []): Evaluation => ({
     template: template.id,
     templateHash: templateHash(template),
     entryUnit: options.entryUnit,
@@ -35,10 +37,21 @@ export function evaluate(template: Template, typed: TypedValues, options: Evalua
   const built = buildPart(input);
   if (!('part' in built)) {
     return finish(
-      built.problems.map(({ input: id, message }) => ({ path: pathOf.get(id) ?? firstPath(template), message })),
+      built.problems.map(({ input: id, message }) => ({
+        path: pathOf.get(id) ?? firstPath(template),
+        message,
+      })),
     );
   }
-  return finish([], built.part);
+  return finish([], built.part, remarksOn(template, scope, options.entryUnit));
+}
+
+function remarksOn(template: Template, scope: Scope, unit: LengthUnit): Advice[] {
+  return (template.remarks ?? []).flatMap(({ code, parameter, when, message }) =>
+    compileExpression(when).run(scope) === true
+      ? [{ code, path: parameter, message: fillSentence(message, scope, unit) }]
+      : [],
+  );
 }
 
 function firstPath(template: Template): string {
@@ -85,7 +98,8 @@ function hideUnshown(template: Template, read: ReadParameters): EvaluatedParamet
     else {
       const rows = read.parameters.tables[field.row.table];
       const row = rows?.[field.row.index];
-      if (rows && row) rows[field.row.index] = { key: row.key, values: { ...row.values, [field.parameter.id]: unset } };
+      if (rows && row)
+        rows[field.row.index] = { key: row.key, values: { ...row.values, [field.parameter.id]: unset } };
     }
   }
   return read.parameters;
@@ -98,6 +112,8 @@ function inFieldOrder(template: Template, problems: readonly Problem[]): Problem
   const rowOf = ({ path }: Problem): number => Number(/\[(\d+)\]/.exec(path)?.[1] ?? '-1');
   return problems
     .map((problem, index) => ({ problem, index }))
-    .sort((a, b) => rank(a.problem) - rank(b.problem) || rowOf(a.problem) - rowOf(b.problem) || a.index - b.index)
+    .sort(
+      (a, b) => rank(a.problem) - rank(b.problem) || rowOf(a.problem) - rowOf(b.problem) || a.index - b.index,
+    )
     .map(({ problem }) => problem);
 }

@@ -26,7 +26,7 @@ export interface Compiled {
   tableColumns: ReadonlySet<string>;
 }
 
-const NAMED_FIGURES: Readonly<Record<string, number>> = { pi: Math.PI };
+const NAMED_FIGURES: ReadonlyMap<string, number> = new Map([['pi', Math.PI]]);
 
 /** An unset value makes whatever is worked out from it unset, so that a constraint says nothing of what is not there. */
 export function compileNode(tree: MathNode, source: string): Compiled {
@@ -65,7 +65,7 @@ export function compileNode(tree: MathNode, source: string): Compiled {
   }
 
   function buildSymbol(name: string): Closure {
-    const figure = NAMED_FIGURES[name];
+    const figure = NAMED_FIGURES.get(name);
     if (figure !== undefined) return () => figure;
     if (name === 'index') return (scope) => scope.index ?? null;
     symbols.add(name);
@@ -73,7 +73,7 @@ export function compileNode(tree: MathNode, source: string): Compiled {
   }
 
   function buildOperator(node: OperatorNode): Closure {
-    const args = (node.args as MathNode[]).map(build);
+    const args = node.args.map(build);
     const first = args[0] as Closure;
     const second = args[1] ?? first;
     if (node.fn === 'and' || node.fn === 'or') {
@@ -96,9 +96,9 @@ export function compileNode(tree: MathNode, source: string): Compiled {
   }
 
   function buildCall(node: FunctionNode): Closure {
-    const name = (node.fn as unknown as SymbolNode).name;
+    const name = node.fn.name;
     const called = FUNCTIONS[name];
-    const given = node.args as MathNode[];
+    const given = node.args;
     if (!called || given.length < called.least || given.length > called.most) {
       throw new Error(`“${source}”: ${name} takes ${called?.least ?? 0} to ${called?.most ?? 0} values`);
     }

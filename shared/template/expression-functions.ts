@@ -63,11 +63,22 @@ export const FUNCTIONS: Readonly<Record<string, ExpressionFunction>> = {
   /** Whether a parameter has a value. */
   given: { least: 1, most: 1, takesUnset: true, apply: ([value]) => value !== null && value !== undefined },
   /** The first value that is set. */
-  either: { least: 2, most: 4, takesUnset: true, apply: (args) => args.find((value) => value !== null) ?? null },
+  either: {
+    least: 2,
+    most: 4,
+    takesUnset: true,
+    apply: (args) => args.find((value) => value !== null) ?? null,
+  },
   majorOf: ofThread((thread) => thread.major),
   pitchOf: ofThread((thread) => thread.pitch),
   count: { least: 1, most: 1, table: 0, apply: (args, scope) => rowsOf(args, scope).length },
-  sumOf: { least: 2, most: 2, table: 0, column: 1, apply: (args, scope) => sum(rowsOf(args, scope), args[1]) },
+  sumOf: {
+    least: 2,
+    most: 2,
+    table: 0,
+    column: 1,
+    apply: (args, scope) => sum(rowsOf(args, scope), args[1]),
+  },
   /** Sum of a column over the rows before an index. */
   sumBefore: {
     least: 3,
@@ -90,9 +101,15 @@ export const FUNCTIONS: Readonly<Record<string, ExpressionFunction>> = {
     most: 3,
     table: 0,
     column: 1,
-    apply: (args, scope) => columnOf(rowsOf(args, scope)[Number(args[2])], `${String(args[1])}.tolerance`) ?? '',
+    apply: (args, scope) =>
+      columnOf(rowsOf(args, scope)[Number(args[2])], `${String(args[1])}.tolerance`) ?? '',
   },
-  keyAt: { least: 2, most: 2, table: 0, apply: (args, scope) => rowsOf(args, scope)[Number(args[1])]?.key ?? null },
+  keyAt: {
+    least: 2,
+    most: 2,
+    table: 0,
+    apply: (args, scope) => rowsOf(args, scope)[Number(args[1])]?.key ?? null,
+  },
   /** Index of the last row of the run that starts at an index, each following row saying yes in a column. */
   runEnd: {
     least: 3,

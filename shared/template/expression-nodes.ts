@@ -1,11 +1,31 @@
-import type { AccessorNode, ConstantNode, FunctionNode, IndexNode, MathNode, OperatorNode, SymbolNode } from 'mathjs';
+import type {
+  AccessorNode,
+  ConstantNode,
+  FunctionNode,
+  IndexNode,
+  MathNode,
+  OperatorNode,
+  SymbolNode,
+} from 'mathjs';
 import { FUNCTIONS } from './expression-functions';
 
 /** Operators by the parser's own names. */
 export const OPERATORS = new Set([
-  'add', 'subtract', 'multiply', 'divide', 'pow', 'unaryMinus',
-  'smaller', 'smallerEq', 'larger', 'largerEq', 'equal', 'unequal',
-  'and', 'or', 'not',
+  'add',
+  'subtract',
+  'multiply',
+  'divide',
+  'pow',
+  'unaryMinus',
+  'smaller',
+  'smallerEq',
+  'larger',
+  'largerEq',
+  'equal',
+  'unequal',
+  'and',
+  'or',
+  'not',
 ]);
 
 export const isSymbol = (node: MathNode): node is SymbolNode => node.type === 'SymbolNode';
@@ -13,10 +33,17 @@ export const isConstant = (node: MathNode): node is ConstantNode => node.type ==
 
 /** The column of `row.column`, or undefined for any other access. */
 export function rowColumn(node: AccessorNode): string | undefined {
-  const object = node.object as MathNode;
+  const object = node.object;
   const index = node.index as IndexNode & { dotNotation?: boolean };
   const first = index.dimensions[0];
-  if (!isSymbol(object) || object.name !== 'row' || index.dotNotation !== true || !first || !isConstant(first)) return undefined;
+  if (
+    !isSymbol(object) ||
+    object.name !== 'row' ||
+    index.dotNotation !== true ||
+    !first ||
+    !isConstant(first)
+  )
+    return undefined;
   const name: unknown = first.value;
   return typeof name === 'string' ? name : undefined;
 }
@@ -42,10 +69,14 @@ export function refuseNode(node: MathNode): string | undefined {
     case 'FunctionNode': {
       const called = (node as FunctionNode).fn as MathNode;
       if (!isSymbol(called)) return 'only functions of the list may be called.';
-      return Object.hasOwn(FUNCTIONS, called.name) ? undefined : `the function ${called.name} is not on the list.`;
+      return Object.hasOwn(FUNCTIONS, called.name)
+        ? undefined
+        : `the function ${called.name} is not on the list.`;
     }
     case 'AccessorNode':
-      return rowColumn(node as AccessorNode) === undefined ? 'only row.column may be read with a dot.' : undefined;
+      return rowColumn(node as AccessorNode) === undefined
+        ? 'only row.column may be read with a dot.'
+        : undefined;
     case 'IndexNode':
       return undefined;
     default:

@@ -23,12 +23,15 @@ const compiled = new Map<string, Compiled>();
 export function compileExpression(source: string): Compiled {
   const known = compiled.get(source);
   if (known) return known;
-  if (source.length > MAX_SOURCE) throw new ExpressionError(`The expression is longer than ${MAX_SOURCE} characters.`);
+  if (source.length > MAX_SOURCE)
+    throw new ExpressionError(`The expression is longer than ${MAX_SOURCE} characters.`);
   let tree: MathNode;
   try {
-    tree = parse(source) as unknown as MathNode;
+    tree = parse(source);
   } catch (cause) {
-    throw new ExpressionError(`“${source}” cannot be read: ${cause instanceof Error ? cause.message : 'unknown'}`);
+    throw new ExpressionError(
+      `“${source}” cannot be read: ${cause instanceof Error ? cause.message : 'unknown'}`,
+    );
   }
   let nodes = 0;
   const walk = (node: MathNode, depth: number): void => {

@@ -44,7 +44,8 @@ function impossible({ tolerance, nominal }: SizeInstance, unit: LengthUnit): str
 /** A fit typed beside the size and another in the fit's own field. */
 function disagreement(parameters: EvaluatedParameters, size: SizeInstance): string | undefined {
   const { template, parameter } = size;
-  if (template.parameter === undefined || template.fit === undefined || parameter === undefined) return undefined;
+  if (template.parameter === undefined || template.fit === undefined || parameter === undefined)
+    return undefined;
   const place = /^(.*)\[(\d+)\]\./.exec(parameter);
   const values = place ? parameters.tables[place[1] ?? '']?.[Number(place[2])]?.values : parameters.values;
   const beside = toleranceKey(values?.[template.parameter]?.tolerance);

@@ -5,7 +5,14 @@ import { compileExpression } from './expression';
 import { isTable } from './read-typed';
 import { atRow, type Scope } from './scope';
 import type { EvaluatedParameters, EvaluatedValue, ParameterBase, Template } from './template';
-import { fillSentence, labelInSentence, leastInWords, lengthInWords, mostInWords, rangeInWords } from './words';
+import {
+  fillSentence,
+  labelInSentence,
+  leastInWords,
+  lengthInWords,
+  mostInWords,
+  rangeInWords,
+} from './words';
 
 /** A parameter that may be judged where it stands: path, value, the scope of its row. */
 export interface Field {
@@ -66,11 +73,17 @@ export function judgeRange(field: Field, bad: ReadonlySet<string>, unit: LengthU
 /** A bound written as a formula may miss a round figure by the last bit. */
 const RANGE_SLACK = 1e-9;
 
-function allowed(least: number | undefined, most: number | undefined, isLength: boolean, unit: LengthUnit): string {
+function allowed(
+  least: number | undefined,
+  most: number | undefined,
+  isLength: boolean,
+  unit: LengthUnit,
+): string {
   if (least !== undefined && most !== undefined) {
     return isLength ? rangeInWords(least, most, unit) : `${least} to ${most}`;
   }
-  if (least !== undefined) return isLength ? `${leastInWords(least, unit)} ${unit} or more` : `${least} or more`;
+  if (least !== undefined)
+    return isLength ? `${leastInWords(least, unit)} ${unit} or more` : `${least} or more`;
   return isLength ? `${mostInWords(most ?? 0, unit)} ${unit} or less` : `${most ?? 0} or less`;
 }
 

@@ -85,7 +85,12 @@ export function partInput(template: Template, scope: Scope): TemplatePart {
     if (here.path !== undefined) pathOf.set(id, here.path);
     switch (here.template.kind) {
       case 'cylinder':
-        lengths.push({ form: 'cylinder', id, length: figure(here, 'length'), diameter: figure(here, 'diameter') });
+        lengths.push({
+          form: 'cylinder',
+          id,
+          length: figure(here, 'length'),
+          diameter: figure(here, 'diameter'),
+        });
         break;
       case 'cone':
         lengths.push({
@@ -111,7 +116,13 @@ export function partInput(template: Template, scope: Scope): TemplatePart {
       case 'thread': {
         const spec = parseThread(String(read(here, 'thread')));
         if (!spec.ok) throw new TypeError(`Feature “${id}” has no thread: ${spec.message}`);
-        threads.push({ id, on: String(read(here, 'on')), spec: spec.value, fullThread: figureIfAny(here, 'fullThread'), end: end(here) });
+        threads.push({
+          id,
+          on: String(read(here, 'on')),
+          spec: spec.value,
+          fullThread: figureIfAny(here, 'fullThread'),
+          end: end(here),
+        });
         break;
       }
       case 'flats':

@@ -2,7 +2,6 @@ import type { Problem } from '../problem';
 import type { LengthUnit } from '../units/length';
 import { isUnset, MAX_TEXT, readValue } from './read-value';
 import type {
-  EvaluatedParameters,
   EvaluatedRow,
   EvaluatedValue,
   Parameter,
@@ -13,6 +12,8 @@ import type {
 
 /** A table larger than this, or more unknown names than this, is not looked through. */
 const MAX_UNKNOWN_NAMED = 10;
+/** Kinds whose cleared field means the default; a cleared size is asked for. */
+const FALLS_BACK: ReadonlySet<ParameterBase['kind']> = new Set(['choice', 'material', 'count', 'yes-no']);
 const ROW_KEY = /^[A-Za-z0-9_-]{1,64}$/;
 
 /** What was read, field by field, and what could not be. `problems` is keyed by path so that a hidden field can be let off. */
@@ -74,7 +75,9 @@ function reportUnknown(
 }
 
 function listNames(names: readonly string[]): string {
-  return names.length < 2 ? names.join('') : `${names.slice(0, -1).join(', ')} and ${names[names.length - 1]}`;
+  return names.length < 2
+    ? names.join('')
+    : `${names.slice(0, -1).join(', ')} and ${names[names.length - 1]}`;
 }
 
 /** A value as text: a JSON number or yes/no counts as if it had been typed. */
@@ -108,7 +111,8 @@ function readField(
     if (!isUnset(text) && text !== parameter.default) read.firm.push({ path, message: parameter.notYet });
     return { text, value: null };
   }
-  const value = readValue(parameter, text, absent ? 'mm' : entryUnit);
+  const cleared = text.trim() === '' && !parameter.optional && FALLS_BACK.has(parameter.kind);
+  const value = readValue(parameter, cleared ? (parameter.default ?? '') : text, absent ? 'mm' : entryUnit);
   if (value.ok) return value.value;
   read.problems.set(path, { path, message: value.message });
   return { text, value: null };
@@ -119,9 +123,14 @@ function readTable(read: ReadParameters, table: TableParameter, given: unknown, 
   const unit = rows === given ? entryUnit : 'mm';
   read.parameters.tables[table.id] = [];
   const range =
-    table.minimumRows === table.maximumRows ? String(table.minimumRows) : `${table.minimumRows} to ${table.maximumRows}`;
+    table.minimumRows === table.maximumRows
+      ? String(table.minimumRows)
+      : `${table.minimumRows} to ${table.maximumRows}`;
   if (!Array.isArray(rows)) {
-    read.firm.push({ path: table.id, message: `The ${table.label.toLowerCase()} are given as ${range} rows.` });
+    read.firm.push({
+      path: table.id,
+      message: `The ${table.label.toLowerCase()} are given as ${range} rows.`,
+    });
     return;
   }
   if (rows.length < table.minimumRows || rows.length > table.maximumRows) {
@@ -138,7 +147,12 @@ function readTable(read: ReadParameters, table: TableParameter, given: unknown, 
     if (!cells) {
       read.firm.push({ path, message: 'A row is given as a list of names and values.' });
     }
-    reportUnknown(read, Object.keys(cells ?? {}).filter((name) => name !== 'key'), table.columns, (name) => `${path}.${name}`);
+    reportUnknown(
+      read,
+      Object.keys(cells ?? {}).filter((name) => name !== 'key'),
+      table.columns,
+      (name) => `${path}.${name}`,
+    );
     const key = rowKey(cells?.['key'], index, keys);
     keys.add(key);
     const values: Record<string, EvaluatedValue> = {};
@@ -156,8 +170,4 @@ function rowKey(given: unknown, index: number, taken: ReadonlySet<string>): stri
   let key = `r${index + 1}`;
   while (taken.has(key)) key = `${key}x`;
   return key;
-}
-
-export function parametersOf(read: ReadParameters): EvaluatedParameters {
-  return read.parameters;
 }

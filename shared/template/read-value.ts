@@ -1,4 +1,4 @@
-import { materialById } from '../standards/materials';
+import { materialById, MATERIALS } from '../standards/materials';
 import { formatThread, parseThread } from '../standards/threads';
 import { classSide } from '../standards/threads/limits';
 import { parseAngle } from '../units/angle';
@@ -60,7 +60,9 @@ export function readValue(parameter: ParameterBase, text: string, entryUnit: Len
       const thread = parseThread(text);
       if (!thread.ok) return thread;
       if (classSide(thread.value) === 'internal') {
-        return refuse(`${quoteGiven(text)} has the class of a tapped hole. This thread is outside: give 6g, 2A or no class.`);
+        return refuse(
+          `${quoteGiven(text)} has the class of a tapped hole. This thread is outside: give 6g, 2A or no class.`,
+        );
       }
       return { ok: true, value: { text, unit: 'none', value: formatThread(thread.value) } };
     }
@@ -68,7 +70,10 @@ export function readValue(parameter: ParameterBase, text: string, entryUnit: Len
       const tolerance = parseFitOrTolerance(text, entryUnit);
       if (!tolerance.ok) return tolerance;
       const key = toleranceKey(tolerance.value);
-      return { ok: true, value: { text, unit: 'none', value: key === '' ? null : key, tolerance: tolerance.value } };
+      return {
+        ok: true,
+        value: { text, unit: 'none', value: key === '' ? null : key, tolerance: tolerance.value },
+      };
     }
     case 'material':
       return readMaterial(text);
@@ -92,9 +97,19 @@ function missing(parameter: ParameterBase): string {
   return `The ${labelInSentence(parameter.label)} is empty. Give it${how ? `, ${how}` : ''}.`;
 }
 
+/** `25e8` is a fit to a fitter and a power of ten to a computer. */
+const GLUED_E = /^\s*([\d.,]+)(e\d{1,2})\s*$/i;
+
 function readSize(parameter: ParameterBase, text: string, entryUnit: LengthUnit): ReadValue {
   if (isUnset(text) && parameter.optional) return { ok: true, value: { text, unit: entryUnit, value: 0 } };
-  const parts = splitSizeAndTolerance(text);
+  const plain = parameter.kind === 'diameter' ? text.replace(/^\s*[Øø⌀]\s*/, '') : text;
+  const glued = GLUED_E.exec(plain);
+  if (glued && parameter.kind === 'diameter') {
+    return refuse(
+      `${quoteGiven(text)} can be read two ways. Type ${glued[1]} ${glued[2]} for the fit, or the figure without an exponent.`,
+    );
+  }
+  const parts = glued ? { size: plain, tolerance: '' } : splitSizeAndTolerance(plain);
   const size = parseLength(parts.size, entryUnit);
   if (!size.ok) return size;
   if (size.value === 0 && !parameter.optional) {
@@ -104,7 +119,8 @@ function readSize(parameter: ParameterBase, text: string, entryUnit: LengthUnit)
   if (parts.tolerance === '') return { ok: true, value };
   const tolerance = parseFitOrTolerance(parts.tolerance, size.unit);
   if (!tolerance.ok) return tolerance;
-  if (size.value === 0) return refuse(`${quoteGiven(text)} gives a tolerance to nothing. Leave the tolerance out.`);
+  if (size.value === 0)
+    return refuse(`${quoteGiven(text)} gives a tolerance to nothing. Leave the tolerance out.`);
   return { ok: true, value: { ...value, tolerance: tolerance.value } };
 }
 
@@ -145,8 +161,10 @@ function readChoice(parameter: ParameterBase, text: string): ReadValue {
 
 function readYesNo(text: string): ReadValue {
   const given = text.trim().toLowerCase();
-  if (['yes', 'y', 'true', '1'].includes(given)) return { ok: true, value: { text, unit: 'none', value: true } };
-  if (['no', 'n', 'false', '0', 'none'].includes(given)) return { ok: true, value: { text, unit: 'none', value: false } };
+  if (['yes', 'y', 'true', '1'].includes(given))
+    return { ok: true, value: { text, unit: 'none', value: true } };
+  if (['no', 'n', 'false', '0', 'none'].includes(given))
+    return { ok: true, value: { text, unit: 'none', value: false } };
   return refuse(`${quoteGiven(text)} is neither yes nor no. Type yes or no.`);
 }
 
@@ -161,7 +179,14 @@ function readText(parameter: ParameterBase, text: string): ReadValue {
 function readMaterial(text: string): ReadValue {
   const material = materialById(text.trim());
   if (!material) {
-    return refuse(`${quoteGiven(text)} is not in the table of materials. Choose one from the list.`);
+    return refuse(
+      `${quoteGiven(text)} is not in the table of materials. Choose one from the list, such as ${MATERIALS.slice(
+        0,
+        3,
+      )
+        .map(({ id }) => id)
+        .join(', ')}.`,
+    );
   }
   return { ok: true, value: { text, unit: 'none', value: material.id } };
 }

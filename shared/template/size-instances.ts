@@ -23,7 +23,11 @@ export interface SizeInstance {
 }
 
 /** Every size the template shows for these values, in the order written. All parameters must be good. */
-export function sizeInstances(template: Template, parameters: EvaluatedParameters, scope: Scope): SizeInstance[] {
+export function sizeInstances(
+  template: Template,
+  parameters: EvaluatedParameters,
+  scope: Scope,
+): SizeInstance[] {
   return template.sizes.flatMap((size) => {
     const { each } = size;
     if (each === undefined) return instance(size, parameters, scope);
@@ -41,7 +45,8 @@ function instance(
 ): SizeInstance[] {
   if (size.when !== undefined && compileExpression(size.when).run(scope) !== true) return [];
   const figures: Record<string, ExpressionValue> = {};
-  for (const [name, source] of Object.entries(size.figures)) figures[name] = compileExpression(source).run(scope);
+  for (const [name, source] of Object.entries(size.figures))
+    figures[name] = compileExpression(source).run(scope);
   const { nominal, lastRow } = figures;
   if (typeof nominal !== 'number' || !Number.isFinite(nominal)) {
     throw new TypeError(`Size “${size.id}” of template has no nominal: ${String(nominal)}`);
@@ -56,7 +61,9 @@ function instance(
   const own = cell(size.parameter);
   const toleranceColumns = [size.parameter, size.fit].filter((id) => id !== undefined);
   const typedIn = (values: Readonly<Record<string, EvaluatedValue>>): Tolerance =>
-    toleranceColumns.map((id) => values[id]?.tolerance).find((found) => found && found.kind !== 'none') ?? { kind: 'none' };
+    toleranceColumns.map((id) => values[id]?.tolerance).find((found) => found && found.kind !== 'none') ?? {
+      kind: 'none',
+    };
   const merged = span.length > 1 && size.kind === 'length';
   return [
     {
@@ -66,7 +73,9 @@ function instance(
       fitParameter: path(cell(size.fit)?.tolerance ? size.fit : size.parameter),
       features: size.features.map((id) => withKey(id, scope)),
       nominal,
-      typed: merged ? span.map(({ values }) => values[size.parameter ?? '']?.text.trim() ?? '').join(' + ') : (own?.text.trim() ?? ''),
+      typed: merged
+        ? span.map(({ values }) => values[size.parameter ?? '']?.text.trim() ?? '').join(' + ')
+        : (own?.text.trim() ?? ''),
       ...(own?.unit ? { unit: own.unit } : {}),
       tolerance: typedIn(row ? (span[0]?.values ?? {}) : parameters.values),
       figures,

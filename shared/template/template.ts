@@ -76,7 +76,17 @@ export interface Constraint {
   each?: string;
 }
 
-export type FeatureTemplateKind = 'cylinder' | 'cone' | 'chamfer' | 'crown' | 'thread' | 'flats' | 'centre-hole';
+/** Said of good values without refusing them. */
+export interface Remark {
+  code: string;
+  parameter: string;
+  when: Expression;
+  /** As `Constraint.message`. */
+  message: string;
+}
+
+export type FeatureTemplateKind =
+  'cylinder' | 'cone' | 'chamfer' | 'crown' | 'thread' | 'flats' | 'centre-hole';
 
 /**
  * One feature, its figures as expressions; `each` repeats it over a table's rows (bound as `row`, `index`),
@@ -121,6 +131,7 @@ export interface Template {
   parameters: readonly Parameter[];
   derived: readonly Derived[];
   constraints: readonly Constraint[];
+  remarks?: readonly Remark[];
   features: readonly FeatureTemplate[];
   sizes: readonly SizeTemplate[];
   /** x of the datum face. */

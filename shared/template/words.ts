@@ -43,10 +43,14 @@ export function fillSentence(sentence: string, scope: Scope, unit: LengthUnit): 
     if (inside.startsWith('range:')) {
       const [low = '', high = ''] = inside.slice(6).split('|');
       const [least, most] = [run(low), run(high)];
-      return typeof least === 'number' && typeof most === 'number' ? rangeInWords(least, most, unit) : 'a size';
+      return typeof least === 'number' && typeof most === 'number'
+        ? rangeInWords(least, most, unit)
+        : 'a size';
     }
-    if (inside.startsWith('>=')) return asLength(run(inside.slice(2)), (mm) => `${leastInWords(mm, unit)} ${unit}`);
-    if (inside.startsWith('<=')) return asLength(run(inside.slice(2)), (mm) => `${mostInWords(mm, unit)} ${unit}`);
+    if (inside.startsWith('>='))
+      return asLength(run(inside.slice(2)), (mm) => `${leastInWords(mm, unit)} ${unit}`);
+    if (inside.startsWith('<='))
+      return asLength(run(inside.slice(2)), (mm) => `${mostInWords(mm, unit)} ${unit}`);
     if (inside.startsWith('=')) return asLength(run(inside.slice(1)), (mm) => lengthInWords(mm, unit));
     if (inside.startsWith('#')) return String(run(inside.slice(1)) ?? '');
     return asLength(run(inside), (mm) => lengthInWords(mm, unit));

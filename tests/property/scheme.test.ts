@@ -42,7 +42,10 @@ describe.each(FAMILIES)('$template.id over 200 pinned parts', ({ template, value
         expect(without.missing.length, `${size.id} of ${JSON.stringify(typed)}`).toBeGreaterThan(0);
         expect(without.redundant).toEqual([]);
         const again = completenessOf(part, [...scheme.sizes, { ...size, id: 'again' }]);
-        expect(again, `${size.id} of ${JSON.stringify(typed)}`).toEqual({ missing: [], redundant: ['again'] });
+        expect(again, `${size.id} of ${JSON.stringify(typed)}`).toEqual({
+          missing: [],
+          redundant: ['again'],
+        });
       }
     }
   });
@@ -74,12 +77,16 @@ describe.each(FAMILIES)('$template.id over 200 pinned parts', ({ template, value
 });
 
 it('covers what the families can do', () => {
-  const shafts = FAMILIES[0].values.map(({ steps }) => steps as { thread: string; fit: string; diameter: string }[]);
+  const shafts = FAMILIES[0].values.map(
+    ({ steps }) => steps as unknown as { thread: string; fit: string; diameter: string }[],
+  );
   const handles = FAMILIES[1].values;
   const covered = {
     sixSteps: shafts.filter((steps) => steps.length === 6).length,
     threaded: shafts.filter((steps) => steps.some(({ thread }) => thread !== '')).length,
-    fitted: shafts.filter((steps) => steps.some(({ fit, diameter }) => fit !== '' || / [a-z]+\d|[±+]/.test(diameter))).length,
+    fitted: shafts.filter((steps) =>
+      steps.some(({ fit, diameter }) => fit !== '' || / [a-z]+\d|[±+]/.test(diameter)),
+    ).length,
     hexagon: handles.filter(({ grip }) => grip === 'hex').length,
     round: handles.filter(({ grip }) => grip === 'round').length,
     crowned: handles.filter(({ endForm, endSize }) => endForm === 'crown' && endSize !== '0').length,

@@ -20,7 +20,9 @@ export function typedInches(mm: number): string {
 
 /** A number of tenths of a millimetre between two lengths. */
 export function tenths(least: number, most: number): fc.Arbitrary<number> {
-  return fc.integer({ min: Math.ceil(least * 10), max: Math.max(Math.ceil(least * 10), Math.floor(most * 10)) }).map((n) => n / 10);
+  return fc
+    .integer({ min: Math.ceil(least * 10), max: Math.max(Math.ceil(least * 10), Math.floor(most * 10)) })
+    .map((n) => n / 10);
 }
 
 /** A share of something, in hundredths from `least` to `most`. */

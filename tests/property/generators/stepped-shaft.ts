@@ -15,15 +15,17 @@ interface Step {
 }
 
 /** One step: a quarter threaded, a third of the others fitted, one in twenty the diameter of its neighbour. */
-const step: fc.Arbitrary<Step> = fc.record({
-  thread: fc.option(fc.constantFrom(...THREADS), { nil: undefined, freq: 3 }).map((thread) => thread),
-  diameter: tenths(4, 80),
-  length: tenths(3, 90),
-  tolerance: fc.constantFrom('', '', '', '', 'h6', 'h7', 'g6', 'f7', 'k6', '±0.05', '+0/-0.1'),
-  beside: fc.boolean(),
-  lengthTolerance: fc.constantFrom('', '', '', '', '±0.1', '+0.2/0'),
-  sameAsBefore: sometimes(5),
-}).map((drawn) => ({ ...drawn, thread: drawn.thread && drawn.diameter > 30 ? undefined : drawn.thread }));
+const step: fc.Arbitrary<Step> = fc
+  .record({
+    thread: fc.option(fc.constantFrom(...THREADS), { nil: undefined, freq: 3 }).map((thread) => thread),
+    diameter: tenths(4, 80),
+    length: tenths(3, 90),
+    tolerance: fc.constantFrom('', '', '', '', 'h6', 'h7', 'g6', 'f7', 'k6', '±0.05', '+0/-0.1'),
+    beside: fc.boolean(),
+    lengthTolerance: fc.constantFrom('', '', '', '', '±0.1', '+0.2/0'),
+    sameAsBefore: sometimes(5),
+  })
+  .map((drawn) => ({ ...drawn, thread: drawn.thread && drawn.diameter > 30 ? undefined : drawn.thread }));
 
 /** Lengths leave room for a chamfer of one pitch at either end. */
 function roomFor({ thread, length }: Step): number {
@@ -71,7 +73,11 @@ export const steppedShaftValues: fc.Arbitrary<TypedValues> = fc
     for (const [index, drawn] of steps.entries()) {
       const before = settled[index - 1];
       // A run of equal diameters keeps the diameter of its first step.
-      settled.push(drawn.sameAsBefore && before && !before.thread ? { ...drawn, thread: undefined, diameter: before.diameter } : drawn);
+      settled.push(
+        drawn.sameAsBefore && before && !before.thread
+          ? { ...drawn, thread: undefined, diameter: before.diameter }
+          : drawn,
+      );
     }
     const first = settled[0] as Step;
     const last = settled[settled.length - 1] as Step;
@@ -79,7 +85,8 @@ export const steppedShaftValues: fc.Arbitrary<TypedValues> = fc
     // Neighbours of one diameter are one face when neither carries a tolerance; then no length of theirs may carry one.
     rows.forEach((row, index) => {
       const next = rows[index + 1];
-      const joins = (other: TypedRow | undefined): boolean => other !== undefined && bare(other['diameter']) === bare(row['diameter']);
+      const joins = (other: TypedRow | undefined): boolean =>
+        other !== undefined && bare(other['diameter']) === bare(row['diameter']);
       if (joins(next) || joins(rows[index - 1])) row['length'] = bare(row['length']);
     });
     return {

@@ -16,7 +16,10 @@ export const taperedHandleValues: fc.Arbitrary<TypedValues> = fc
     spigotFit: fc.constantFrom('', '', ' h9', ' f7', ' ±0.05', ' +0/-0.1'),
     overSpigot: tenths(3, 18),
     hex: fc.boolean(),
-    acrossShare: fc.oneof({ weight: 5, arbitrary: share(0.88, 0.96) }, { weight: 1, arbitrary: share(0.8, 0.86) }),
+    acrossShare: fc.oneof(
+      { weight: 5, arbitrary: share(0.88, 0.96) },
+      { weight: 1, arbitrary: share(0.8, 0.86) },
+    ),
     gripLength: tenths(20, 110),
     flats: fc.constantFrom('', '', '', 'short', 'long'),
     flatsShare: share(0.3, 0.9),
@@ -44,7 +47,11 @@ export const taperedHandleValues: fc.Arbitrary<TypedValues> = fc
         : drawn.flats === 'long'
           ? drawn.gripLength + Math.max(1, runOut * drawn.flatsShare)
           : undefined;
-    const endSize = drawn.endPlain ? '0' : drawn.endForm === 'crown' ? show((end / 2) * drawn.crownShare) : show(drawn.chamferLeg);
+    const endSize = drawn.endPlain
+      ? '0'
+      : drawn.endForm === 'crown'
+        ? show((end / 2) * drawn.crownShare)
+        : show(drawn.chamferLeg);
     return {
       thread: thread.text,
       threadLength: show(drawn.threadLength),
