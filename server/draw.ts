@@ -6,6 +6,7 @@ import { listTemplates } from './headless/list-templates';
 import { sheetPdf } from './pdf/sheet-pdf';
 import { drawResult } from '../shared/api/contract';
 import { drawResultOf } from '../shared/draw-result';
+import type { EngineResult } from '../shared/engine';
 import { runEngine } from '../shared/engine-run';
 
 /**
@@ -24,11 +25,16 @@ async function main(words: readonly string[]): Promise<number> {
   const json = drawResult.parse(drawResultOf({ ...result, good: result.good }));
   const text = `${JSON.stringify(json, null, 2)}\n`;
   if (outputs.svg) await write(outputs.svg, result.good.svg);
-  if (outputs.pdf)
-    await write(outputs.pdf, await sheetPdf([result.good.svg], { title: request.typed['title'] as string }));
+  if (outputs.pdf) await write(outputs.pdf, await sheetPdf([result.good.svg], { title: titleOf(result) }));
   if (outputs.json) await write(outputs.json, text);
   if (!outputs.svg && !outputs.pdf && !outputs.json) process.stdout.write(text);
   return 0;
+}
+
+/** The title as drawn, which may be the family's default; a document must have one. */
+function titleOf({ evaluation }: EngineResult): string {
+  const title = evaluation.parameters.values['title']?.value;
+  return typeof title === 'string' && title !== '' ? title : evaluation.template;
 }
 
 async function write(path: string, content: string | Uint8Array): Promise<void> {

@@ -7,6 +7,7 @@ import { drawSheet } from './drawing/draw';
 import { renderSvg } from './render/svg';
 import { planRoute } from './route/plan';
 import { buildScheme } from './scheme/build';
+import { schemeFromDatum } from './scheme/from-datum';
 import { simulate } from './simulate/simulate';
 import { evaluate } from './template/evaluate';
 import { titleBlockFor } from './title-block';
@@ -37,10 +38,17 @@ function drawAndPlan(request: EngineRequest, evaluation: Evaluation & { part: Pa
   const template = templateById(request.template);
   if (!template) throw new UnknownTemplate(request.template);
   const { part } = evaluation;
-  const scheme = buildScheme(template, evaluation, {
+  const designed = buildScheme(template, evaluation, {
     generalTolerance: generalToleranceOf(request),
     balloons: request.frozenBalloons,
   });
+  const given =
+    request.datum === undefined ? { scheme: designed } : schemeFromDatum(part, designed, request.datum);
+  if ('refused' in given) {
+    const problems = given.refused.map(({ message }) => ({ path: 'datum', message }));
+    return { evaluation: { ...evaluation, problems }, problems, advice: evaluation.advice };
+  }
+  const { scheme } = given;
   const plan = planRoute(part, scheme, request.register, {
     quantity: quantityOf(evaluation),
     material: part.material,

@@ -32,6 +32,14 @@ export function roundTo(value: number, decimals: number): number {
   return value < 0 && rounded !== 0 ? -rounded : rounded;
 }
 
+/** Rounds to the side given, so that a worked-out limit is never widened by its rounding. */
+export function roundInward(value: number, decimals: number, side: 'up' | 'down'): number {
+  const scale = 10 ** decimals;
+  const scaled = roundTo(value, decimals + 6) * scale;
+  const whole = side === 'up' ? Math.ceil(scaled - HALF_NUDGE) : Math.floor(scaled + HALF_NUDGE);
+  return whole === 0 ? 0 : roundTo(whole / scale, decimals);
+}
+
 /** Rounds halves to the even digit, as inch thread tables are rounded (ASME B1.30). */
 export function roundHalfEven(value: number, decimals: number): number {
   const scaled = roundTo(value, decimals + 6) * 10 ** decimals;
