@@ -126,6 +126,8 @@ async function startForWork(settings, port, env) {
       '--port',
       String(port),
       '--strictPort',
+      // Another copy of the pages under development, on data of its own, is no trouble to this one.
+      '--bypass-lock',
       '--logLevel',
       'warn',
     ],

@@ -34,7 +34,7 @@ export async function ensureClient(projectFolder, say) {
     const vite = join(projectFolder, 'node_modules', 'vite', 'bin', 'vite.js');
     const result = await run(
       process.execPath,
-      [vite, 'build', '--outDir', fresh, '--emptyOutDir', '--logLevel', 'error'],
+      [vite, 'build', '--outDir', fresh, '--emptyOutDir', '--bypass-lock', '--logLevel', 'error'],
       {
         cwd: projectFolder,
         capture: true,

@@ -11,9 +11,13 @@ import {
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import pg from 'pg';
-import { afterAll, afterEach, beforeAll, describe, expect, inject, it } from 'vitest';
-import { holdPort, leftBehind, processesOn, startBenchleaf } from '../factories/started';
+import { afterAll, afterEach, beforeAll, describe, expect, inject, it, vi } from 'vitest';
+import { endStarted, holdPort, leftBehind, processesOn, startBenchleaf } from '../factories/started';
 import type { Started } from '../factories/started';
+
+// A first start makes a cluster, its tables and the demo shop; this is a limit for a busy machine.
+vi.setConfig({ testTimeout: 240_000, hookTimeout: 240_000 });
+afterEach(endStarted);
 
 /** A start that goes wrong says one sentence or two and shows no insides. */
 function expectSentence(said: string, pattern: RegExp): void {
@@ -34,9 +38,8 @@ async function query(address: string, text: string): Promise<Record<string, unkn
 
 describe('npm start', () => {
   let data: string;
-  let started: Started | undefined;
   const start = (settings: Record<string, string> = {}, viaNpm?: 'start'): Started =>
-    (started = startBenchleaf({ BENCHLEAF_DATA: data, PORT: '0', ...settings }, viaNpm));
+    startBenchleaf({ BENCHLEAF_DATA: data, PORT: '0', ...settings }, viaNpm);
   const addressOf = async (of: Started): Promise<string> => (await of.until(/https?:\/\/localhost:\d+/))[0];
   const asOwner = async (text: string): Promise<Record<string, unknown>[]> => {
     const { ownerPassword } = JSON.parse(readFileSync(join(data, 'secrets.json'), 'utf8')) as Record<
@@ -52,10 +55,7 @@ describe('npm start', () => {
     chmodSync(data, 0o711);
   });
   afterEach(async () => {
-    if (!started) return;
-    // Also after a test that failed half way.
-    if (processesOn(data).length > 0) started.signal('SIGTERM');
-    await started.ended;
+    await endStarted();
     expect(await leftBehind(data)).toEqual([]);
   });
   afterAll(() => rmSync(data, { recursive: true, force: true }));
@@ -188,7 +188,12 @@ describe('npm start with DATABASE_URL', () => {
     const address = new URL(adminUrl);
     address.pathname = `/start_${process.pid}`;
     await query(adminUrl, `CREATE DATABASE start_${process.pid}`);
-    const benchleaf = startBenchleaf({ BENCHLEAF_DATA: data, PORT: '0', DATABASE_URL: address.href });
+    const benchleaf = startBenchleaf({
+      BENCHLEAF_DATA: data,
+      BENCHLEAF_DEMO: 'no',
+      PORT: '0',
+      DATABASE_URL: address.href,
+    });
     const [where] = await benchleaf.until(/http:\/\/localhost:\d+/);
     expect((await fetch(`${where}/api/drawings`)).status).toBe(401);
     expect(existsSync(join(data, 'postgres'))).toBe(false);
@@ -210,7 +215,7 @@ describe('npm run dev', () => {
   it('answers at one address, pages and api, and ends with nothing left behind', async () => {
     const data = mkdtempSync(join(tmpdir(), 'benchleaf-start-'));
     chmodSync(data, 0o711);
-    const benchleaf = startBenchleaf({ BENCHLEAF_DATA: data, PORT: '0' }, 'dev');
+    const benchleaf = startBenchleaf({ BENCHLEAF_DATA: data, BENCHLEAF_DEMO: 'no', PORT: '0' }, 'dev');
     const where = (await benchleaf.until(/answers at (http:\/\/localhost:\d+)/))[1] ?? '';
     const page = await fetch(where);
     expect(await page.text()).toMatch(/<div id="root">[^]*\/src\/main\.tsx/);

@@ -17,6 +17,16 @@ export interface Started {
   readonly ended: Promise<number | null>;
 }
 
+const running = new Set<Started>();
+
+/** Ends whatever a test that failed half way has left running. */
+export async function endStarted(): Promise<void> {
+  for (const started of running) {
+    started.signal('SIGTERM');
+    await started.ended;
+  }
+}
+
 /** Starts `db/start.mjs` (with `viaNpm`, `npm run start` or `dev`) with only these settings set. */
 export function startBenchleaf(settings: Record<string, string>, viaNpm?: 'start' | 'dev'): Started {
   const env: NodeJS.ProcessEnv = { ...process.env, ...settings };
@@ -54,6 +64,7 @@ export function startBenchleaf(settings: Record<string, string>, viaNpm?: 'start
   const ended = new Promise<number | null>((resolve) => {
     child.once('exit', (code) => {
       over = true;
+      running.delete(started);
       resolve(code);
     });
   });
@@ -71,7 +82,9 @@ export function startBenchleaf(settings: Record<string, string>, viaNpm?: 'start
       look();
     });
   const pid = child.pid ?? 0;
-  return { pid, said: () => text, until, signal: (name) => process.kill(pid, name), ended };
+  const started: Started = { pid, said: () => text, until, signal: (name) => process.kill(pid, name), ended };
+  running.add(started);
+  return started;
 }
 
 /** Command lines of processes that work in the folder or were told of it; the test's own are not among them. */
