@@ -1,7 +1,6 @@
 import { Refusal } from '../errors';
 import { sheetPdf } from '../pdf/sheet-pdf';
-import { permit } from '../policies/permit';
-import { checkVersion, stale } from './check-version';
+import { allow, stale } from './allow';
 import { keepBlob } from './keep-blob';
 import { keepFacts } from './keep-facts';
 import { drawStanding, goodOf, keepMove } from './move-revision';
@@ -26,8 +25,7 @@ export async function approveRevision(
   const asker = { ...work.asker, selfRelease: work.shop.selfRelease };
   const at = await revisionAt(work, place, { lock: true });
   const { revision, drawing } = at;
-  permit('approve', asker, at.matter);
-  await checkVersion(work, at, request.version);
+  await allow(work, at, 'approve', request.version, asker);
   if (request.contentHash !== revision.contentHash) throw await stale(work, at);
 
   const standing = {

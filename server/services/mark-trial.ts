@@ -1,5 +1,4 @@
-import { permit } from '../policies/permit';
-import { checkVersion } from './check-version';
+import { allow } from './allow';
 import { keepFacts } from './keep-facts';
 import { drawStanding, keepMove, redrawn } from './move-revision';
 import { recordDecision } from './record';
@@ -10,8 +9,7 @@ import type { ShopWork } from './shop-work';
 /** Marks a draft as trial piece, or takes the mark off. */
 export async function markTrial(work: ShopWork, place: RevisionPlace, version: number, trial: boolean): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
-  permit('trial', work.asker, at.matter);
-  await checkVersion(work, at, version);
+  await allow(work, at, 'trial', version);
   const { revision, drawing } = at;
   if (revision.trial === trial) return at;
   const result = await drawStanding(work, at, { trial });

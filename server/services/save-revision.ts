@@ -1,7 +1,6 @@
 import type { SaveRevisionRequest } from '../../shared/api/drawings';
-import { permit } from '../policies/permit';
 import { canonicalJson } from './content-hash';
-import { checkVersion } from './check-version';
+import { allow } from './allow';
 import { currentRegister } from './current-register';
 import { keepFacts } from './keep-facts';
 import { recordAudit } from './record';
@@ -18,8 +17,7 @@ import { snapshotOf, workOut } from './work-out';
 export async function saveRevision(work: ShopWork, place: RevisionPlace, request: SaveRevisionRequest): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
   const { revision, drawing } = at;
-  permit('edit', work.asker, at.matter);
-  await checkVersion(work, at, request.version);
+  await allow(work, at, 'edit', request.version);
   const filled = {
     template: revision.template,
     title: request.title,

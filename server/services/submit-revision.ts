@@ -1,8 +1,7 @@
 import type { EngineGood } from '../../shared/engine';
 import type { FieldError } from '../errors';
 import { Refusal } from '../errors';
-import { permit } from '../policies/permit';
-import { checkVersion } from './check-version';
+import { allow } from './allow';
 import { currentRegister } from './current-register';
 import { keepFacts } from './keep-facts';
 import { drawStanding, goodOf, keepMove, redrawn } from './move-revision';
@@ -20,8 +19,7 @@ import { snapshotOf, workOut } from './work-out';
 export async function submitRevision(work: ShopWork, place: RevisionPlace, version: number): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
   const { revision, drawing } = at;
-  permit('submit', work.asker, at.matter);
-  await checkVersion(work, at, version);
+  await allow(work, at, 'submit', version);
   const register = await currentRegister(work);
   const standing = {
     state: 'in review' as const,
@@ -60,8 +58,7 @@ async function reopen(
   reason?: string,
 ): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
-  permit(act, work.asker, at.matter);
-  await checkVersion(work, at, version);
+  await allow(work, at, act, version);
   const { revision, drawing } = at;
   const { contentHash } = revision;
   const standing = { state: 'draft' as const, returned: act === 'return', drawnBy: null, drawnAt: null };

@@ -1,5 +1,4 @@
-import { permit } from '../policies/permit';
-import { checkVersion } from './check-version';
+import { allow } from './allow';
 import { keepFacts } from './keep-facts';
 import { keepMove } from './move-revision';
 import { recordDecision } from './record';
@@ -10,8 +9,7 @@ import type { ShopWork } from './shop-work';
 /** Withdraws a release, with the reason: nobody may work from it any more. */
 export async function withdrawRevision(work: ShopWork, place: RevisionPlace, version: number, reason: string): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
-  permit('withdraw', work.asker, at.matter);
-  await checkVersion(work, at, version);
+  await allow(work, at, 'withdraw', version);
   await keepMove(work, at.revision, { state: 'withdrawn' });
   await recordDecision(work, at.revision, 'withdrawn', { reason });
   await keepFacts(work, at.drawing, at.revision);
