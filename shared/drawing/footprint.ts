@@ -81,6 +81,7 @@ export interface Verdict {
 /** Prices of meetings that the sheet check allows. Source: trial sheets, looked at. */
 const PRICE = {
   textOnExtension: 9,
+  textBesideText: 2.5,
   arrowOnExtension: 4,
   extensionExtension: 0.7,
   extensionDimension: 3,
@@ -91,6 +92,8 @@ const PRICE = {
 const TEXT_CLEAR = 0.45;
 const TEXT_APART = 0.8;
 const LINES_APART = 1.2;
+/** Two writings of one row closer than this read as one note. */
+const ONE_NOTE = 4;
 const OWN_CLEAR = 0.1;
 /** Half the width of an arrowhead. */
 const ARROW_HALF = 0.5;
@@ -144,9 +147,13 @@ function strokePair(a: PrintStroke, b: PrintStroke, verdict: Verdict): void {
 
 /** How two sizes stand to one another; symmetric. */
 export function compareFootprints(a: Footprint, b: Footprint): Verdict {
-  if (!boxesMeet(a.bounds, b.bounds, LINES_APART)) return CLEAR;
+  if (!boxesMeet(a.bounds, b.bounds, ONE_NOTE)) return CLEAR;
   const verdict: Verdict = { clashes: 0, cost: 0 };
-  for (const one of a.texts) for (const two of b.texts) if (boxesMeet(one, two, TEXT_APART)) verdict.clashes += 1;
+  for (const one of a.texts)
+    for (const two of b.texts) {
+      if (boxesMeet(one, two, TEXT_APART)) verdict.clashes += 1;
+      else if (one[1] < two[3] && two[1] < one[3] && one[0] < two[2] + ONE_NOTE && two[0] < one[2] + ONE_NOTE) verdict.cost += PRICE.textBesideText;
+    }
   textAgainstStrokes(a.texts, b, verdict);
   textAgainstStrokes(b.texts, a, verdict);
   const n = b.bounds;

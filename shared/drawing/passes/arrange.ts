@@ -84,6 +84,11 @@ function endToShow(part: Part, writing: Writing): EndName {
   return left < right ? 'end-left' : 'end-right';
 }
 
+/** True where at least one end shows the flats; else their size is noted on the axis view. */
+function flatsCanBeSeen(part: Part): boolean {
+  return Math.min(metalBefore(part.body, 'end-left'), metalBefore(part.body, 'end-right')) < 1;
+}
+
 /** First angle: the view of the left end stands on the right; third angle: on its own side. */
 function standsRight(end: EndName, writing: Writing): boolean {
   return (end === 'end-left') === (writing.style === 'iso');
@@ -138,8 +143,8 @@ function sizeGroup(drawing: Drawing): Group {
 export function arrange(part: Part, scheme: Scheme, map: XMap, writing: Writing, balloons: boolean, narrow = false): Arrangement {
   const paper = axisView(part, map, writing);
   const readies = scheme.sizes.map((size): ReadySize => ({ size, label: sizeLabel(size, writing) }));
-  const hasEnd = needsEndView(part.body);
-  const inEnd = readies.filter((r) => hasEnd && r.size.anchor.kind === 'flats');
+  const hasEnd = needsEndView(part.body) && flatsCanBeSeen(part);
+  const inEnd = readies.filter((r) => hasEnd && r.size.anchor.kind === 'flats' && r.size.kind === 'across-flats');
   const lengths = stackLengths(paper, readies.filter((r) => r.size.anchor.kind === 'span'));
   const others = readies.filter((r) => r.size.anchor.kind !== 'span' && !inEnd.includes(r));
   const chosen = chooseSizes(paper, others, lengths, narrow);

@@ -1,5 +1,6 @@
 import type { Body, FlatsCut, ThreadTreatment } from '../../part/body';
 import { radiusAt } from '../../part/generator';
+import type { Part } from '../../part/part';
 import { lineMark } from '../arrow';
 import { faceAngles, faceHalfWidth, flatsOf, reach } from '../profile';
 import type { ProfileSpan } from '../profile';
@@ -285,4 +286,16 @@ function firstAbove(body: Body, from: number, to: number, radius: number): numbe
     else low = middle;
   }
   return from + (to - from) * high;
+}
+
+/** A thin line where two lengths of one diameter meet, so that each length can be read (they are one face of metal). */
+export function faceDivisions(part: Part, { map }: Pick<Edges, 'map'>): Mark[] {
+  return part.features.flatMap((left) => {
+    if (left.kind !== 'cylinder') return [];
+    const right = part.features.find((f) => f.kind === 'cylinder' && Math.abs(f.from - left.to) < SAME && Math.abs(f.diameter - left.diameter) < SAME);
+    if (!right) return [];
+    const x = toPaper(map.knots, left.to);
+    const r = (left.diameter / 2) * map.scale;
+    return [lineMark('thin', x, -r, x, r)];
+  });
 }

@@ -1,7 +1,7 @@
 /** The axis view on floating paper. Afterwards: outline, edges, threads, breaks and centre line are drawn, true to the body. */
 import type { Part } from '../../part/part';
 import { axisCentreLine, axisOutline, breakLines } from './axis-outline';
-import { flatsEdges, shoulderEdges, threadMarks } from './axis-edges';
+import { faceDivisions, flatsEdges, shoulderEdges, threadMarks } from './axis-edges';
 import { footprintOf } from '../footprint';
 import type { AxisPaper } from '../layout';
 import { profileOf } from '../profile';
@@ -20,6 +20,7 @@ export function axisView(part: Part, map: XMap, writing: Writing): AxisPaper {
     ...shoulderEdges(profile, edges),
     ...flatsEdges(edges),
     ...threadMarks(edges),
+    ...faceDivisions(part, edges),
     ...breakLines(profile, map),
     axisCentreLine(map, rules.centrePast),
   ];

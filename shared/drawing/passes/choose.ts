@@ -11,6 +11,8 @@ const CLASH = 100;
 const SWEEPS = 6;
 const ROUNDS = 24;
 const BREAKOUT = 0.7;
+/** Sizes further apart than this cannot disturb one another. */
+const APART = 4;
 
 export interface Choice {
   chosen: readonly number[];
@@ -37,7 +39,7 @@ class Verdicts {
     const one = this.options[i]?.[a];
     const two = this.options[j]?.[b];
     if (!one || !two) return NOTHING;
-    if (!boxesMeet(one.print.bounds, two.print.bounds, 1.2)) return NOTHING;
+    if (!boxesMeet(one.print.bounds, two.print.bounds, APART)) return NOTHING;
     const p = (this.offsets[i] ?? 0) + a;
     const q = (this.offsets[j] ?? 0) + b;
     const key = p < q ? p * this.total + q : q * this.total + p;

@@ -1,9 +1,10 @@
 /** Extension lines give way: cut where a foreign text or arrowhead lies on them. Afterwards none crosses either. */
 import { boxAround, boxesMeet, growBox } from '../geometry/box';
 import type { Box } from '../geometry/box';
-import { distanceToSegment, segmentWithinBox } from '../geometry/segment';
+import { distanceToSegment, segmentsCross, segmentWithinBox } from '../geometry/segment';
 import type { LineMark, Mark, Point } from '../sheet';
 import { strokesOf, strokeBox, textBoxesOf } from '../strokes';
+import type { Stroke } from '../strokes';
 
 const TEXT_AIR = 0.6;
 const ARROW_AIR = 0.4;
@@ -12,15 +13,17 @@ const ON_LINE = 0.05;
 
 interface Obstacle {
   box: Box;
-  /** An arrow that ends on a line is no obstacle to it. */
+  /** The head itself: an arrow that ends on a line, or only passes near it, is no obstacle. */
+  head?: readonly Stroke[];
   tip?: Point;
 }
 
 function arrowBoxes(marks: readonly Mark[]): Obstacle[] {
   return marks.flatMap((mark) => {
     if (mark.type !== 'polyline' || mark.line !== 'arrow') return [];
-    const box = boxAround(strokesOf([mark]).map(strokeBox));
-    return box ? [{ box: growBox(box, ARROW_AIR), tip: mark.points[0] }] : [];
+    const head = strokesOf([mark]);
+    const box = boxAround(head.map(strokeBox));
+    return box ? [{ box: growBox(box, ARROW_AIR), head, tip: mark.points[0] }] : [];
   });
 }
 
@@ -35,9 +38,10 @@ function cut(line: LineMark, obstacles: readonly Obstacle[]): LineMark[] {
   const length = Math.hypot(dx, dy);
   const own: Box = [Math.min(line.x1, line.x2), Math.min(line.y1, line.y2), Math.max(line.x1, line.x2), Math.max(line.y1, line.y2)];
   let kept: [number, number][] = [[0, 1]];
-  for (const { box, tip } of obstacles) {
+  for (const { box, tip, head } of obstacles) {
     if (!boxesMeet(own, box, 0.001)) continue;
     if (tip && distanceToSegment(tip.x, tip.y, line) < ON_LINE) continue;
+    if (head && !head.some((edge) => segmentsCross(edge, line, 0))) continue;
     const hole = segmentWithinBox(line, box);
     if (!hole) continue;
     kept = kept.flatMap(([a, b]): [number, number][] => {

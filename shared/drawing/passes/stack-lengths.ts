@@ -31,6 +31,8 @@ const ISO_LEAST_IN = 8;
 const ASME_IN_AIR = 9.6;
 const OUTSIDE_TEXT = 4.2;
 const LANE_AIR = 0.9;
+/** What a plain figure reaches under its baseline; stacked limits reach lower and are lifted. */
+const PLAIN_DOWN = 1.06;
 
 function modeOf(paper: AxisPaper, ready: ReadySize, x1: number, x2: number): Mode {
   const w = x2 - x1;
@@ -191,7 +193,7 @@ function draw(paper: AxisPaper, span: Span, y: number): PlacedSize {
   const middle = (x1 + x2) / 2;
   const half = label.width / 2;
   const centred = style === 'iso' ? 0 : (label.up - label.down) / 2;
-  const baseline = style === 'iso' ? y - rules.textLift - Math.max(0, label.down - 1.06) : y + centred;
+  const baseline = style === 'iso' ? y - rules.textLift - Math.max(0, label.down - PLAIN_DOWN) : y + centred;
   let textX = middle - half;
   const line = (a: number, b: number): void => {
     marks.push(lineMark('dimension', a, y, b, y));
@@ -227,8 +229,10 @@ function drawSide(paper: AxisPaper, spans: readonly Span[], way: 1 | -1): Placed
   const { rules, style } = paper;
   const up = Math.max(...spans.map((s) => s.ready.label.up));
   const down = Math.max(...spans.map((s) => s.ready.label.down));
-  const pitch = style === 'iso' ? Math.max(rules.lanePitch, up + rules.textLift + 1.3) : Math.max(rules.lanePitch, up + down + 2);
-  const first = Math.max(rules.firstLine, style === 'iso' ? up + rules.textLift + 1.2 : (up + down) / 2 + 1.2);
+  // From a line to the top of the writing on it, and past the arrows of the line before.
+  const rise = up + rules.textLift + Math.max(0, down - PLAIN_DOWN) + rules.arrowHalfWidth + 0.7;
+  const pitch = style === 'iso' ? Math.max(rules.lanePitch, rise) : Math.max(rules.lanePitch, up + down + 2);
+  const first = Math.max(rules.firstLine, style === 'iso' ? rise : (up + down) / 2 + 1.2);
   return spans.map((span) => draw(paper, span, way * (paper.reach + first + span.lane * pitch)));
 }
 

@@ -37,6 +37,8 @@ interface Cell {
   text: string;
   width: number;
   large?: boolean;
+  /** Figures are never cut short: the cell points to the notes instead. */
+  inNotes?: boolean;
   draw?: (x: number, y: number) => Mark[];
 }
 
@@ -73,8 +75,9 @@ function fillCell(cell: Cell, x: number, y: number, overflow: Overflow[]): Mark[
   const text = cell.text === '' ? '–' : cell.text;
   const room = cell.width - 2 * PAD;
   const size = cell.large && textWidth(text, LARGE) <= room ? LARGE : SMALL;
-  const shown = fitted(text, size, room);
-  if (shown !== text) overflow.push({ label: cell.label, text });
+  const whole = textWidth(text, size) <= room;
+  if (!whole) overflow.push({ label: cell.label, text });
+  const shown = whole ? text : cell.inNotes ? 'see notes' : fitted(text, size, room);
   return [...marks, write(x + PAD, y + (size === LARGE ? 8.8 : 8.7), size, shown, 700)];
 }
 
@@ -112,7 +115,7 @@ function rows({ size, style, unit, scaleText, title }: BlockFacts): Cell[][] {
       { label: 'MASS', text: title.mass, width: 18 },
     ],
     [
-      { label: 'GENERAL TOLERANCE', text: title.generalTolerance, width: 42 },
+      { label: 'GENERAL TOLERANCE', text: title.generalTolerance, width: 42, inNotes: true },
       { label: 'TEXTURE', text: title.texture, width: 22, draw: texture },
       { label: 'SCALE', text: scaleText, width: 20 },
       { label: 'PROJECTION', text: '', width: 30, draw: projection },
