@@ -195,7 +195,12 @@ describe('npm start with DATABASE_URL', () => {
       DATABASE_URL: address.href,
     });
     const [where] = await benchleaf.until(/http:\/\/localhost:\d+/);
-    expect((await fetch(`${where}/api/drawings`)).status).toBe(401);
+    const unknown = await fetch(`${where}/api/session`, {
+      method: 'POST',
+      headers: { 'content-type': 'application/json', origin: where },
+      body: JSON.stringify({ mail: 'nobody@pellworth.example', password: 'a password of nobody' }),
+    });
+    expect(unknown.status).toBe(401);
     expect(existsSync(join(data, 'postgres'))).toBe(false);
     const connected = await query(
       adminUrl,
