@@ -20,7 +20,7 @@ import {
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { Fault, firstLine, orFault } from './start/fault.mjs';
-import { databaseAccount } from './start/accounts.mjs';
+import { canReach, databaseAccount } from './start/accounts.mjs';
 import { freeLoopbackPort } from './start/ports.mjs';
 import { launch, removeFolderIfKilled, run } from './start/processes.mjs';
 import { findServerBinaries } from './start/server-binaries.mjs';
@@ -74,7 +74,9 @@ export async function openCluster({
  */
 export async function startThrowawayCluster() {
   const account = databaseAccount();
-  const home = mkdtempSync(join(tmpdir(), 'benchleaf-cluster-'));
+  // A temporary folder of one's own may be closed to the account the server runs as.
+  const parent = [tmpdir(), '/tmp', '/var/tmp'].find((folder) => canReach(account, folder)) ?? tmpdir();
+  const home = mkdtempSync(join(parent, 'benchleaf-cluster-'));
   removeFolderIfKilled(home);
   if (account) chownSync(home, account.uid, account.gid);
   const passwords = makeSecrets();
