@@ -31,12 +31,13 @@ describe('values that are refused', () => {
   });
 
   it('says one thing of one fault', () => {
-    for (const change of [
+    const faults: TypedValues[] = [
       { spigotDiameter: '30' },
       { taperLength: '3' },
       { acrossFlats: '30' },
       { barDiameter: 'thick' },
-    ]) {
+    ];
+    for (const change of faults) {
       expect(handleWith(change).problems.map(({ path }) => path)).toHaveLength(1);
     }
   });
