@@ -8,6 +8,8 @@ export interface Grip {
   from: number;
   to: number;
   diameter: number;
+  /** The jaws close on the faces of a polygon. */
+  onFlats?: boolean;
 }
 
 /**
@@ -23,6 +25,26 @@ export function gripsOf(stage: Body, before: number, reach: number, spindleBore:
       const from = Math.max(span.from, to - reach);
       const grip = { from, to, diameter: 2 * piece.start };
       if (longEnough(grip) && nothingLargerBehind(stage, grip) && passesSpindle(stage, grip, spindleBore, reach)) grips.push(grip);
+    }
+  }
+  // A round is held before flats are.
+  return grips.length > 0 ? grips.sort((a, b) => b.to - a.to) : polygonGrips(stage, before, reach, spindleBore);
+}
+
+/** Lengths on which a polygon of three, six, nine … faces runs whole, for padded jaws when no round is left. */
+function polygonGrips(stage: Body, before: number, reach: number, spindleBore: number): Grip[] {
+  const grips: Grip[] = [];
+  for (const cut of stage.cuts) {
+    if (cut.kind !== 'flats' || cut.count % 3 !== 0) continue;
+    const span = flatsSpan(stage, cut);
+    if (!span) continue;
+    for (const piece of stage.outer) {
+      if (piece.kind !== 'line' || Math.abs(piece.start - piece.end) > 1e-9) continue;
+      const to = Math.min(piece.to, span.to, before);
+      const from = Math.max(piece.from, span.from, to - reach);
+      const marked = stage.treatments.some((t) => t.from < to && t.to > from);
+      const grip: Grip = { from, to, diameter: 2 * piece.start, onFlats: true };
+      if (!marked && longEnough(grip) && nothingLargerBehind(stage, grip) && passesSpindle(stage, grip, spindleBore, reach)) grips.push(grip);
     }
   }
   return grips.sort((a, b) => b.to - a.to);

@@ -120,7 +120,7 @@ function candidatesFor(views: { right: View; left: View }, stock: StockAnswer, l
 /** Parted to length and never turned round: nothing is drawn on the far end but a chamfer that a tool can reach beside the blade. */
 function mayPartToLength(view: View): boolean {
   const row = view.rows[0];
-  return row !== undefined && row.kind === 'cylinder' && !row.thread && !view.crownLeft && !view.centreLeft;
+  return row !== undefined && row.kind === 'cylinder' && !view.crownLeft && !view.centreLeft;
 }
 
 /** Stations where the work of the two ends may meet: between rows, on either side of the largest. */

@@ -45,6 +45,8 @@ export interface SetUp {
   gripTo: number;
   freeEnd: 'left' | 'right' | 'both' | 'side';
   support?: 'centre' | 'steady' | 'outboard';
+  /** Where three jaws close on the faces of a polygon instead of a round. */
+  heldOn?: 'flats';
   /** Register ids of what holds: chuck, collet, block, head. */
   holdingItem?: string;
   /** In words, for the card: how it is held, what the datum is, index or slide settings. */

@@ -127,6 +127,7 @@ export const RULES = {
   // what must hold
   'grip-metal': rule('grip-metal', 'The jaws close on metal that is there.'),
   'grip-plain': rule('grip-plain', 'The jaws close on one plain cylinder: no thread, knurl, key seat, hole or milled flat.'),
+  'grip-polygon': rule('grip-polygon', 'Three jaws, padded, may close on a polygon whose faces they divide, along its whole length, when no round is left to hold.'),
   'grip-length': rule('grip-length', 'The grip is long enough for its diameter.'),
   'grip-behind': rule('grip-behind', 'Nothing larger stands behind the jaws than can pass them and the spindle.'),
   'grip-uncut': rule('grip-uncut', 'Nothing is cut where the jaws hold.'),
@@ -163,6 +164,7 @@ export const RULES = {
   'index-block': rule('index-block', 'A collet block with as many faces (or a multiple) indexes the flats without a sum.'),
   'index-head': rule('index-head', 'A dividing head indexes any number its plates divide.'),
   'pull-out': rule('pull-out', 'A long end is faced and centred held short, then pulled out to the tail centre.'),
+  'steady-end': rule('steady-end', 'An end that stands out too far is faced, formed and threaded with a fixed steady beside it.'),
   'light-face': rule('light-face', 'An end that stands out with nothing in it is faced in light cuts.'),
 } as const satisfies Record<string, Rule>;
 

@@ -16,6 +16,8 @@ export interface Session {
   gripTo: number;
   /** A centre stands in the free end now. */
   tail: boolean;
+  /** A fixed steady runs beside the free end. */
+  steady: boolean;
   /** Length beyond the part that the centre hole stands in, cut away later. */
   trim: number;
   /** Rows from here to the free end are worked. */
@@ -37,7 +39,7 @@ export function depthFor(session: Session, method: Method, farEnd: number, wish:
     stage: stageOf(session),
     gripEdge: session.gripTo,
     farEnd,
-    tail: session.tail,
+    tail: session.tail || session.steady,
     wish,
   });
   if (answer.depth === null) {

@@ -54,8 +54,12 @@ function gripFaults(stage: Body, step: Step, blank: Body): [RuleId, string][] {
       faults.push(['grip-plain', `The jaws close on a finished ${treatment.kind}.`]);
   for (const cut of flatsOf(stage)) {
     const asBought = flatsOf(blank).some((own) => own.id === cut.id);
-    if (!asBought && flatsSpans(stage, cut).some((span) => span.from < gripTo - 1e-6 && span.to > gripFrom + 1e-6))
-      faults.push(['grip-plain', 'The jaws close on milled flats.']);
+    const under = flatsSpans(stage, cut).filter((span) => span.from < gripTo - 1e-6 && span.to > gripFrom + 1e-6);
+    if (asBought || under.length === 0) continue;
+    // Three jaws sit on a polygon whose faces they divide, along the whole grip, when the route says so.
+    const whole = under.some((span) => span.from <= gripFrom + 1e-6 && span.to >= gripTo - 1e-6);
+    if (step.setup.heldOn === 'flats' && cut.count % 3 === 0 && whole) continue;
+    faults.push(['grip-plain', 'The jaws close on milled flats.']);
   }
   const length = gripTo - gripFrom;
   const least = Math.max(LIMITS.gripMinimum.value, LIMITS.gripRatio.value * 2 * radius);

@@ -36,7 +36,9 @@ function namedFaults(step: Step): Fault[] {
   }
   if (EVENTS.has(operation.method) || changes.length === 0) return faults;
   const about = ABOUT[operation.method];
-  if (about && !named.some((feature) => about.includes(feature.kind)))
+  // A groove beside the part, in metal that is parted off, is the work of no feature.
+  const waste = changes.every((change) => change.to <= 1e-6 || change.from >= part.length - 1e-6);
+  if (about && !(waste && operation.method === 'groove') && !named.some((feature) => about.includes(feature.kind)))
     faults.push(fault('named-features', number, `Nothing that is named can be the work of ${operation.method}.`));
   for (const feature of named) {
     if (about && !about.includes(feature.kind) && feature.kind !== 'face')

@@ -65,7 +65,10 @@ function eventFaults(route: Route): Fault[] {
   const threaded = cuts.filter((operation) => operation.method.startsWith('thread-') || operation.method === 'tap').pop();
   if (threaded && fitted && fitted.number < threaded.number)
     faults.push(fault('fit-before-inspect', fitted.number, 'The thread is tried in its mate before it is cut.'));
+  if (edges && fitted && fitted.number < edges.number)
+    faults.push(fault('fit-before-inspect', fitted.number, 'The thread is tried in its mate before its burrs are gone.'));
   if (threaded && !fitted) faults.push(fault('fit-before-inspect', threaded.number, 'The thread is never tried in its mate or gauge.'));
+  faults.push(...measuringFaults(route, last, edges));
   for (const saw of all.filter((operation) => operation.method === 'saw' && !operation.cut))
     if (all.some((operation) => operation.number < saw.number && operation.method !== 'saw'))
       faults.push(fault('saw-first', saw.number, 'The piece is sawn from the bar after work on it has begun.'));
@@ -73,6 +76,29 @@ function eventFaults(route: Route): Fault[] {
     const marked = all.find((each) => each.method === 'mark-out' && each.features.some((id) => milled.features.includes(id)));
     if (marked && marked.number > milled.number)
       faults.push(fault('mark-before-mill', milled.number, 'The flats are milled before they are marked out.'));
+  }
+  return faults;
+}
+
+/** Measuring in the machine: of what is cut by then, while it is still held. The last inspection is at the bench. */
+function measuringFaults(route: Route, last: Operation | undefined, edges: Operation | undefined): Fault[] {
+  const faults: Fault[] = [];
+  const all = route.operations;
+  for (const measured of all.filter((operation) => operation.method === 'inspect' && operation !== last)) {
+    const { number, setup } = measured;
+    if (edges && edges.number < number) faults.push(fault('edges-last', edges.number, 'Edges are broken while the work is still to be measured in the machine.'));
+    const parted = all.find((operation) => operation.setup === setup && operation.method === 'part-off');
+    if (parted && parted.number < number && parted.cut?.kind === 'sever')
+      faults.push(fault('part-last', number, 'The work has been cut off before it is measured in the machine.'));
+    const toCome = all.find(
+      (operation) =>
+        operation.number > number &&
+        operation.setup === setup &&
+        operation.cut &&
+        operation.method !== 'rough-turn' &&
+        operation.features.some((id) => measured.features.includes(id)),
+    );
+    if (toCome) faults.push(fault('inspect-last', number, `It measures what operation ${toCome.number} has still to cut.`));
   }
   return faults;
 }

@@ -45,6 +45,8 @@ const DIES: readonly (readonly [string, number, number])[] = [
   ['3/8-16 UNC', inchesToMm(3 / 8), 25.4 / 16],
   ['1/2-13 UNC', inchesToMm(1 / 2), 25.4 / 13],
   ['5/8-11 UNC', inchesToMm(5 / 8), 25.4 / 11],
+  ['3/8-24 UNF', inchesToMm(3 / 8), 25.4 / 24],
+  ['1/2-20 UNF', inchesToMm(1 / 2), 25.4 / 20],
 ];
 
 const dies: readonly Tool[] = DIES.map(([designation, major, pitch]) => ({

@@ -21,7 +21,8 @@ export function chamferHeldEnd(session: Session, width: number): void {
   if (!row || !chamfer) return;
   const envelope = slice(view.part.body.outer, chamfer.from, chamfer.to);
   const small = envelope[0]?.kind === 'line' ? envelope[0].start : 0;
-  const floor = Math.max(0.5, small - 0.5);
+  // No deeper than the chamfer needs: the neck still carries the die.
+  const floor = Math.max(0.5, small - 0.2);
   const blade = bladeFor(session, row.startR - floor);
   const metal = metalOver(session, -width, 0, floor);
   const depth = depthFor(session, 'groove', 0, LIMITS.roughDepth.value, 'Opening the parting groove');

@@ -8,14 +8,15 @@ import type { View } from '../features';
 import { gripsOf, longEnough } from '../grips';
 import type { Grip } from '../grips';
 import { trimFor } from '../methods/ends';
-import { bladeFor, chamferHeldEnd, partOff } from '../methods/part-off';
+import { bladeFor, partOff } from '../methods/part-off';
 import { LIMITS } from '../rules';
 import type { Lathe, Register } from '../register';
 import type { Session } from '../session';
-import { firstMill, mm } from '../shop';
+import { firstMill, holdsFor, mm } from '../shop';
 import type { StockOption } from '../stock';
 import { finishPiece, sawPiece } from './bench';
 import { inspectSetUp, openEnd, workEnd } from './end-work';
+import { isSupport, markOf, openWithSteady } from './steady';
 import { indicate, latheHold, needGrip, openSetUp, standsOut } from './holding';
 
 export type CandidateKind = 'bar' | 'stick' | 'blank';
@@ -100,7 +101,6 @@ function attemptPlan(part: Part, register: Register, candidate: Candidate, tails
   sawPiece(build, view, candidate.kind);
   const end = firstEnd(build, view, candidate, tails, trims, layout, sides.first);
   if (candidate.kind !== 'blank') {
-    if (!candidate.secondEnd) chamferHeldEnd(end, layout.width);
     inspectSetUp(end);
     partOff(end, layout.cutAt, layout.width, !candidate.secondEnd);
   } else inspectSetUp(end);
@@ -130,7 +130,7 @@ function layOut(register: Register, view: View, candidate: Candidate, trims: { f
   const held = candidate.meets > 1e-9 ? radius : Math.max(...view.rows.slice(0, 1).map(rowMax));
   const { width } = bladeFor({ build: { register } as Build }, held);
   const cutAt = candidate.secondEnd ? -(LIMITS.partedAllowance.value + trims.second) : 0;
-  const reach = 28;
+  const reach = holdsFor(register, candidate.lathe, 2 * radius, false)[0]?.reach ?? 28;
   let grip: Grip;
   let x0: number;
   if (candidate.kind === 'blank') {
@@ -234,7 +234,17 @@ function firstEnd(
     flats,
     grip: layout.grip,
     regrip: () => open(tails.first, false),
+    regripSteady: (otherwise) =>
+      openWithSteady(
+        build,
+        view,
+        layout.grip,
+        { machine: lathe.id, holding: hold.name, ...(hold.item ? { holdingItem: hold.item } : {}), datum, minutes: hold.minutes + 6, turned: false },
+        run,
+        otherwise,
+      ),
     comesBack: candidate.kind !== 'blank',
+    partingWidth: candidate.kind !== 'blank' && !candidate.secondEnd ? layout.width : 0,
   });
 }
 
@@ -284,6 +294,30 @@ function pullOut(
   return long;
 }
 
+/** Turns the work round and opens its end; with a steady beside it first where it stands out too far even for that. */
+function beginSecond(build: Build, open: (first: boolean) => Session, steady: (otherwise: RuledOut) => Session, tail: boolean): Session {
+  const back = markOf(build);
+  try {
+    const session = open(true);
+    indicate(session, 0.05);
+    openEnd(session, tail);
+    return session;
+  } catch (error) {
+    if (!isSupport(error) || !tail) throw error;
+    back();
+    const opening = steady(error);
+    indicate(opening, 0.05);
+    openEnd(opening, true);
+    const session = open(false);
+    session.tail = true;
+    for (const name of ['face', 'centre']) {
+      const key = opening.done.get(name);
+      if (key) session.done.set(name, key);
+    }
+    return session;
+  }
+}
+
 /** The other end, held on a plain cylinder that the first end's work left. */
 function secondEnd(
   build: Build,
@@ -298,13 +332,10 @@ function secondEnd(
   const stage = stageIn(build, view);
   const grips = gripsOf(stage, begins, 38, build.lathe.spindleBore);
   needGrip(grips[0], 'Nothing plain is left to hold the other end by: threads, flats or tapers all the way.');
-  const saved = { stage: build.stage, operations: build.operations.length, setups: build.setups.length, needs: build.planNeeds.length };
+  const back = markOf(build);
   let failure: RuledOut | null = null;
   for (const grip of grips.slice(0, 3)) {
-    build.stage = saved.stage;
-    build.operations.length = saved.operations;
-    build.setups.length = saved.setups;
-    build.planNeeds.length = saved.needs;
+    back();
     try {
       return holdSecond(build, view, grip, from, tails, trims, flats);
     } catch (error) {
@@ -324,7 +355,7 @@ function holdSecond(
   trims: { first: number; second: number },
   flats: readonly FlatsFeature[],
 ): Session {
-  const hold = latheHold(build, found.diameter, true);
+  const hold = latheHold(build, found.diameter, true, found.onFlats ?? false);
   const grip = { ...found, from: Math.max(found.from, found.to - hold.reach) };
   if (!longEnough(grip)) throw new RuledOut('grip-length', `Ø${mm(grip.diameter)} is held on too short a length.`);
   const run = { trim: trims.second, from, runOn: 0 };
@@ -338,17 +369,24 @@ function holdSecond(
         ...(hold.item ? { holdingItem: hold.item } : {}),
         grip,
         ...(tails.second ? { support: 'centre' as const } : {}),
-        how: `Turned round, on Ø${mm(grip.diameter)}, ${standsOut(build, view, grip)}${tails.second ? ', centre in the tail' : ''}.`,
+        how: `Turned round, on ${grip.onFlats ? 'the flats, padded with copper' : `Ø${mm(grip.diameter)}`}, ${standsOut(build, view, grip)}${tails.second ? ', centre in the tail' : ''}.`,
         datum: 'Stops are from the end faced here.',
         minutes: hold.minutes + 1 + (tails.second ? 2 : 0),
         turned: first,
-        title: first ? `turn round, grip on Ø${mm(grip.diameter)}` : 'grip again as before, against the same face',
-        reasons: ['turn-round'],
+        title: first ? `turn round, grip on ${grip.onFlats ? 'the flats' : `Ø${mm(grip.diameter)}`}` : 'grip again as before, against the same face',
+        reasons: grip.onFlats ? ['turn-round', 'grip-polygon'] : ['turn-round'],
       },
       run,
     );
-  const session = open(true);
-  indicate(session, 0.05);
-  openEnd(session, tails.second);
-  return workEnd(session, { tail: tails.second, flats, grip, regrip: () => open(false), comesBack: false });
+  const steady = (otherwise: RuledOut): Session =>
+    openWithSteady(
+      build,
+      view,
+      grip,
+      { machine: build.lathe.id, holding: hold.name, ...(hold.item ? { holdingItem: hold.item } : {}), datum: 'Stops are from the end faced here.', minutes: hold.minutes + 6, turned: false },
+      run,
+      otherwise,
+    );
+  const session = beginSecond(build, open, steady, tails.second);
+  return workEnd(session, { tail: tails.second, flats, grip, regrip: () => open(false), regripSteady: steady, comesBack: false, partingWidth: 0 });
 }

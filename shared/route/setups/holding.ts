@@ -14,7 +14,7 @@ export interface SetUpWish {
   machine: string;
   holding: string;
   holdingItem?: string;
-  grip: { from: number; to: number; diameter: number };
+  grip: Grip;
   support?: SetUp['support'];
   how: string;
   datum: string;
@@ -42,6 +42,7 @@ export function openSetUp(build: Build, wish: SetUpWish, before: { trim: number;
     freeEnd: flipped ? 'left' : 'right',
     ...(wish.support ? { support: wish.support } : {}),
     ...(wish.holdingItem ? { holdingItem: wish.holdingItem } : {}),
+    ...(wish.grip.onFlats ? { heldOn: 'flats' as const } : {}),
     heldText: wish.how,
     datumText: wish.datum,
     minutes: wish.minutes,
@@ -53,6 +54,7 @@ export function openSetUp(build: Build, wish: SetUpWish, before: { trim: number;
     id,
     gripTo: grip.to,
     tail: false,
+    steady: false,
     trim: before.trim,
     from: before.from,
     runOn: before.runOn,
@@ -111,9 +113,10 @@ export interface LatheHold {
 }
 
 /** The lathe's hold on a diameter; without one, a short is written down and the plan goes on with a plain chuck. */
-export function latheHold(build: Build, diameter: number, finished: boolean): LatheHold {
-  const hold = holdsFor(build.register, build.lathe, diameter, finished)[0] ?? null;
-  const spec = `hold Ø${mm(diameter)} on ${build.lathe.name.toLowerCase()}`;
+export function latheHold(build: Build, diameter: number, finished: boolean, onFlats = false): LatheHold {
+  // A round collet does not sit on flats: three jaws do.
+  const hold = holdsFor(build.register, build.lathe, diameter, finished).find((h) => !onFlats || (h.kind === 'chuck' && 'kind' in h.item && h.item.kind === 'three-jaw')) ?? null;
+  const spec = `hold ${onFlats ? 'the flats of ' : ''}Ø${mm(diameter)} on ${build.lathe.name.toLowerCase()}`;
   if (!hold) {
     build.planNeeds.push(short('hold', spec, 'No chuck or collet of this lathe closes on it.', ['buy the collet, or bore soft jaws']));
     return { hold, name: 'Three-jaw chuck', minutes: 3, reach: LIMITS.mouthOfJaw.value };
