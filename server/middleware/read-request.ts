@@ -1,6 +1,7 @@
 import type { Request } from 'express';
 import { z } from 'zod';
 import { Refusal } from '../errors';
+import { plainIssue } from './plain-issue';
 
 /** The body as the schema makes it. @throws Refusal `bad-input` with every issue and its path at once. */
 export function readBody<Schema extends z.ZodType>(request: Request, schema: Schema): z.output<Schema> {
@@ -16,6 +17,6 @@ export function readQuery<Schema extends z.ZodType>(request: Request, schema: Sc
 function read<Schema extends z.ZodType>(value: unknown, schema: Schema): z.output<Schema> {
   const result = schema.safeParse(value);
   if (result.success) return result.data;
-  const fields = result.error.issues.map((issue) => ({ path: issue.path.join('.'), message: issue.message }));
+  const fields = result.error.issues.map((issue) => ({ path: issue.path.join('.'), message: plainIssue(issue) }));
   throw new Refusal('bad-input', fields);
 }

@@ -226,7 +226,8 @@ describe('a request that another site made', () => {
   it('is refused by where it came from, sign-in included', async () => {
     const browser = await signedIn(server, person);
     const body = JSON.stringify({ mail: person.mail, password: person.password });
-    for (const headers of [{ origin: 'https://elsewhere.example' }, { origin: 'null' }, { 'sec-fetch-site': 'cross-site' }]) {
+    const origins: Record<string, string>[] = [{ origin: 'https://elsewhere.example' }, { origin: 'null' }, { 'sec-fetch-site': 'cross-site' }];
+    for (const headers of origins) {
       expectRefusal(await browser.send('POST', '/api/session', body, headers), 403, 'forged');
       expectRefusal(await browser.send('POST', '/api/session/refresh', '{}', headers), 403, 'forged');
       expectRefusal(await browser.send('DELETE', '/api/session', undefined, headers), 403, 'forged');
