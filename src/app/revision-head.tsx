@@ -1,5 +1,5 @@
-import { useRef, type KeyboardEvent } from 'react';
-import { NavLink } from 'react-router-dom';
+import { useEffect, useRef, type KeyboardEvent } from 'react';
+import { NavLink, useLocation } from 'react-router-dom';
 import { Stamp } from '../components/stamp';
 import { leaves, paths, type Leaf } from '../lib/paths';
 import { useOpenRevision } from '../revision/open-revision';
@@ -20,6 +20,12 @@ export function RevisionHead() {
   const { revision } = answer;
   const row = useRef<HTMLElement>(null);
   const { shop: slug, drawing, revision: id } = address;
+  const { pathname } = useLocation();
+  // On a narrow screen the row of leaves scrolls: the one that is open is in sight.
+  useEffect(() => {
+    const here = row.current?.querySelector<HTMLElement>('[aria-current="page"]');
+    if (here && row.current) row.current.scrollLeft = here.offsetLeft - row.current.offsetLeft - 24;
+  }, [pathname]);
   const onKeyDown = (event: KeyboardEvent) => {
     const by = event.key === 'ArrowRight' ? 1 : event.key === 'ArrowLeft' ? -1 : 0;
     if (by === 0) return;

@@ -32,5 +32,5 @@ function templatePicture(id: string): string {
   if (!template) throw new Error(`There is no family "${id}".`);
   const { part } = evaluate(template, exampleValues(template), { entryUnit: 'mm' });
   if (!part) throw new Error(`The worked example of "${id}" is not a part.`);
-  return renderPicture(profilePicture(part.body));
+  return renderPicture(profilePicture(part.body, { width: 280, height: 110 }));
 }

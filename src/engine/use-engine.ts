@@ -21,7 +21,13 @@ interface Answered extends Omit<EngineState, 'drawing'> {
 
 /** Draws a request in the worker; a newer request takes the place of one that still waits. Null asks nothing. */
 export function useEngine(request: EngineRequest | null): EngineState {
-  const [answered, setAnswered] = useState<Answered>({ request: null, result: null, good: null, shown: null, fault: null });
+  const [answered, setAnswered] = useState<Answered>({
+    request: null,
+    result: null,
+    good: null,
+    shown: null,
+    fault: null,
+  });
   const latest = useRef<Latest<EngineRequest> | null>(null);
 
   useEffect(() => {
@@ -32,7 +38,13 @@ export function useEngine(request: EngineRequest | null): EngineState {
         queue.finished();
         if (answer.kind === 'drawn') {
           const { result, shown } = answer;
-          setAnswered((before) => ({ request: job, result, good: result.good ?? before.good, shown, fault: null }));
+          setAnswered((before) => ({
+            request: job,
+            result,
+            good: result.good ?? before.good,
+            shown,
+            fault: null,
+          }));
         } else if (answer.kind === 'fault') {
           setAnswered((before) => ({ ...before, request: job, fault: answer.message }));
         }

@@ -10,6 +10,7 @@ import {
 } from 'react';
 import type { RevisionAnswer } from '../../shared/api/drawings';
 import type { EngineGood, EngineResult } from '../../shared/engine';
+import type { Register } from '../../shared/route/register';
 import type { Problem } from '../../shared/problem';
 import type { Template } from '../../shared/template/template';
 import { templateById } from '../../templates';
@@ -42,6 +43,8 @@ export interface OpenRevision {
   /** Paths of the fields these values show; null until the engine has said. */
   shown: readonly string[] | null;
   drawing: boolean;
+  /** What the shop owns, once it is read. */
+  register: Register | undefined;
   engineFault: string | null;
 }
 
@@ -127,6 +130,7 @@ export function OpenRevisionProvider({ address, shop, answer, children }: Provid
     good: live ? (engine.good ?? stored) : stored,
     shown: engine.shown,
     drawing: live && engine.drawing,
+    register: register.data,
     engineFault: live ? (register.error?.message ?? engine.fault) : null,
   };
   return <Context.Provider value={value}>{children}</Context.Provider>;

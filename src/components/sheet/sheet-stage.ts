@@ -1,4 +1,5 @@
 import { SVG, type Svg } from '@svgdotjs/svg.js';
+import { boxRound } from './box-round';
 import { centredOn, moved, scaled, type ViewBox } from './view-box';
 
 export interface SheetSize {
@@ -115,36 +116,12 @@ export class SheetStage {
       group.classList.toggle('is-lit', lit.has(id));
       group.classList.toggle('is-wrong', wrong.has(id));
       if (group.getAttribute('data-role') !== 'dimension' || (!lit.has(id) && !wrong.has(id))) continue;
-      for (const text of group.querySelectorAll('text'))
-        this.#boxRound(text, wrong.has(id) ? 'is-wrong' : 'is-lit');
+      boxRound(group, wrong.has(id) ? 'is-wrong' : 'is-lit');
     }
     for (const edge of edges)
       svg
         .polyline(edge.map(({ x, y }): [number, number] => [x, y]))
         .attr({ class: 'state-mark edge', fill: 'none', 'pointer-events': 'none' });
-  }
-
-  /** A box behind a text. The engine's own metrics: 0.6 em a letter, 0.85 up, 0.22 down. */
-  #boxRound(text: SVGTextElement, state: string): void {
-    const size = Number(text.getAttribute('font-size'));
-    const x = Number(text.getAttribute('x'));
-    const y = Number(text.getAttribute('y'));
-    const width = 0.6 * size * (text.textContent ?? '').length;
-    const anchor = text.getAttribute('text-anchor');
-    const left = anchor === 'middle' ? x - width / 2 : anchor === 'end' ? x - width : x;
-    const box = document.createElementNS('http://www.w3.org/2000/svg', 'rect');
-    const room = 0.6;
-    const attributes = {
-      x: left - room,
-      y: y - 0.85 * size - room,
-      width: width + 2 * room,
-      height: 1.07 * size + 2 * room,
-    };
-    for (const [name, value] of Object.entries(attributes)) box.setAttribute(name, String(value));
-    const turn = text.getAttribute('transform');
-    if (turn) box.setAttribute('transform', turn);
-    box.setAttribute('class', `state-mark ${state}`);
-    text.parentNode?.insertBefore(box, text.parentNode.firstChild);
   }
 
   /** Where a size's text stands in the host, px; null when it is not on this sheet. */
@@ -208,7 +185,8 @@ export class SheetStage {
 
   #wheel(event: WheelEvent): void {
     const ctm = this.#svg?.node.getScreenCTM();
-    if (!ctm) return;
+    // The whole sheet cannot go further: the wheel then moves the page, as anywhere else.
+    if (!ctm || (event.deltaY > 0 && this.#box.width >= this.#whole.width)) return;
     event.preventDefault();
     const point = new DOMPoint(event.clientX, event.clientY).matrixTransform(ctm.inverse());
     this.#scale(event.deltaY < 0 ? STEP : 1 / STEP, point);

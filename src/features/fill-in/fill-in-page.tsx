@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { Notice } from '../../components/notice';
+import { useNarrow } from '../../lib/narrow';
 import { useDocumentTitle } from '../../lib/document-title';
 import { useOpenRevision } from '../../revision/open-revision';
 import { SheetLines } from './sheet-lines';
@@ -19,6 +20,7 @@ const PLACES = [
 export function FillInPage() {
   const { answer, draft, editable, engineFault } = useOpenRevision();
   const form = useSizeForm();
+  const narrow = useNarrow();
   const [place, setPlace] = useState<(typeof PLACES)[number]['id']>('sizes');
   useDocumentTitle(`Sizes, ${answer.revision.drawing.number} ${draft.title}`);
   return (
@@ -40,7 +42,7 @@ export function FillInPage() {
           <SmallCards />
         </div>
         <div className="sheet-column">
-          <SheetPlate />
+          <SheetPlate follow={narrow && place !== 'sheet'} />
           <SheetLines />
         </div>
       </main>

@@ -1,4 +1,4 @@
-import { useMemo, useRef, useState } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import { Button, ButtonLink } from '../../components/button';
 import { litEdges } from '../../components/sheet/lit-edges';
 import { SheetView, type SheetHandle } from '../../components/sheet/sheet-view';
@@ -11,8 +11,11 @@ import { InPlace } from './in-place';
 import { SheetSettingsPlate, settingsWords } from './sheet-settings';
 import { useSizeForm } from './size-form';
 
+/** So much of the paper, mm across, can be read at a hand's width. */
+const STRIP_OF_PAPER = 130;
+
 /** The sheet, live, with its bar; a size that is clicked is edited where it stands. */
-export function SheetPlate() {
+export function SheetPlate({ follow }: { follow: boolean }) {
   const { good, draft, template, answer, address, drawing, editable, engineFault } = useOpenRevision();
   const form = useSizeForm();
   const view = useRef<SheetHandle>(null);
@@ -36,6 +39,18 @@ export function SheetPlate() {
       edges: size && good ? litEdges(size.anchor, good.part.body.outer, good.sheet) : [],
     };
   }, [lit, sizeOf, problemOf, good]);
+  // A low sheet shows the size that is lit, else the first; a high one the whole.
+  const [litId] = marked.lit;
+  const firstId = sizes[0]?.id;
+  const [last, setLast] = useState<string | undefined>(undefined);
+  if (litId !== undefined && litId !== last) setLast(litId);
+  const shownId = litId ?? last ?? firstId;
+  const ready = good !== null;
+  useEffect(() => {
+    if (!ready) return;
+    if (!follow) view.current?.whole();
+    else if (shownId) view.current?.bringIn(shownId, STRIP_OF_PAPER);
+  }, [follow, shownId, ready]);
   const pathOf = (sizeId: string | null) =>
     good?.scheme.sizes.find(({ id }) => id === sizeId)?.parameter ?? null;
   const edit = (sizeId: string) => {

@@ -75,8 +75,8 @@ export function SheetSettingsPlate({ onClose }: { onClose: () => void }) {
         />
       </Row>
       <p className="hint">
-        {good ? `${good.sheet.choice} ` : ''}The unit is for showing only: a figure typed without a unit stays
-        in {draft.entryUnit}.
+        {good ? `${good.sheet.choice.replace(/\.?$/, '.')} ` : ''}The unit is for showing only: a figure typed
+        without a unit stays in {draft.entryUnit}.
       </p>
       <Button size="dense" onClick={onClose}>
         Done

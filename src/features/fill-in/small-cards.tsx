@@ -4,11 +4,14 @@ import { SetUpPictures } from '../../components/set-up-pictures';
 import { countOf } from '../../components/verdict';
 import { paths } from '../../lib/paths';
 import { useOpenRevision } from '../../revision/open-revision';
-import { cardsOf } from '../../revision/set-up-stages';
+import { itemName } from '../../revision/item-name';
+import { cardsOf, inShort } from '../../revision/set-up-stages';
+
+const SMALL = { width: 200, height: 66 };
 
 /** From bar to part: the set-ups small, pictures left, words right. */
 export function SmallCards() {
-  const { good, address } = useOpenRevision();
+  const { good, address, register } = useOpenRevision();
   const { shop, drawing, revision } = address;
   const route = good?.route;
   if (!route)
@@ -27,15 +30,13 @@ export function SmallCards() {
         {cardsOf(route).map((card, index) => (
           <li key={card.setUp.id}>
             <span className="card-number">{index + 1}</span>
-            <SetUpPictures card={card} label={`Set-up ${index + 1}, before and after`} />
+            <SetUpPictures card={card} label={`Set-up ${index + 1}, before and after`} size={SMALL} />
             <p>
               <Link to={`${paths.revision(shop, drawing, revision, 'route')}#${card.setUp.id}`}>
-                {card.setUp.machine}, {card.setUp.holding}
+                {itemName(register, card.setUp.machine)}, {card.setUp.holding}
               </Link>
-              {card.operations.map((operation) => (
-                <span key={operation.number}>
-                  {operation.number} {operation.title}
-                </span>
+              {inShort(card.operations).map((words) => (
+                <span key={words}>{words}</span>
               ))}
             </p>
           </li>

@@ -25,6 +25,9 @@ export function CapacityPage() {
     );
   const { capacity, route } = good;
   const verdict = verdictWords(capacity);
+  const lost = [
+    ...new Map((route?.others ?? []).map((other) => [`${other.text} ${other.why}`, other])).values(),
+  ];
   const groups = WORST_FIRST.map((state) => ({
     state,
     needs: capacity.needs.filter((need) => need.state === state),
@@ -69,12 +72,12 @@ export function CapacityPage() {
           </table>
         </Plate>
       ))}
-      {route && route.others.length > 0 && (
-        <Plate head="Ways that lost" aside={route.others.length}>
+      {lost.length > 0 && (
+        <Plate head="Ways that lost" aside={lost.length}>
           <table className="ruled needs">
             <tbody>
-              {route.others.map((other) => (
-                <tr key={other.text}>
+              {lost.map((other) => (
+                <tr key={`${other.text} ${other.why}`}>
                   <th scope="row">{other.text}</th>
                   <td>{other.why}</td>
                 </tr>

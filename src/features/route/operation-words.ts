@@ -5,7 +5,9 @@ import { toRadians } from '../../../shared/units/angle';
 
 /** Stop lengths from the set-up's datum, in the order they are met. */
 export function stopWords({ stops }: Operation, format: LengthFormat): string {
-  return stops.map(({ length }) => formatLength(length, format)).join(', ');
+  return stops
+    .map(({ length }) => formatLength(length, { ...format, decimals: format.unit === 'in' ? 3 : 2 }))
+    .join(', ');
 }
 
 const ACROSS: ReadonlySet<string> = new Set(['diameter', 'thread', 'knurl', 'hole']);
@@ -16,6 +18,7 @@ export function targetWords(
   sizes: ReadonlyMap<string, Size>,
   format: LengthFormat,
 ): string {
+  if (operation.method === 'inspect') return balloonWords(operation.target, sizes);
   const parts = operation.target.map((target) => oneTarget(target, sizes.get(target.size), format));
   if (operation.blankDiameter !== undefined)
     parts.push(`blank Ø${formatLength(operation.blankDiameter, format)}`);
@@ -28,7 +31,26 @@ export function targetWords(
   if (operation.slantLength !== undefined) parts.push(`slant ${formatLength(operation.slantLength, format)}`);
   if (operation.settings !== undefined && operation.settings > 1)
     parts.push(`${operation.settings} settings`);
-  return parts.join(', ');
+  return parts.join('\n');
+}
+
+/** `sizes 1 to 6, 9`: what is measured, by the balloons of the sheet. */
+function balloonWords(targets: readonly Target[], sizes: ReadonlyMap<string, Size>): string {
+  const numbers = targets
+    .flatMap(({ size }) => sizes.get(size)?.balloon ?? [])
+    .filter((balloon) => balloon > 0);
+  const sorted = [...new Set(numbers)].sort((a, b) => a - b);
+  const runs: [number, number][] = [];
+  for (const number of sorted) {
+    const last = runs.at(-1);
+    if (last && last[1] === number - 1) last[1] = number;
+    else runs.push([number, number]);
+  }
+  if (runs.length === 0) return '';
+  const words = runs.map(([from, to]) =>
+    from === to ? String(from) : to === from + 1 ? `${from}, ${to}` : `${from} to ${to}`,
+  );
+  return `size${sorted.length === 1 ? '' : 's'} ${words.join(', ')}`;
 }
 
 function oneTarget(target: Target, size: Size | undefined, format: LengthFormat): string {

@@ -9,16 +9,15 @@ import { Tick } from '../../components/tick';
 import { Waiting } from '../../components/waiting';
 import { useDocumentTitle } from '../../lib/document-title';
 import { paths } from '../../lib/paths';
-import { useRegister } from '../../revision/api/register';
 import { useOpenRevision } from '../../revision/open-revision';
+import { itemName } from '../../revision/item-name';
 import { cardsOf } from '../../revision/set-up-stages';
 import { SetUpCard } from './set-up-card';
 import { VerdictBox } from './verdict-box';
 
 /** The route as a works route card: read downwards, card by card. */
 export function RoutePage() {
-  const { good, address, answer, draft, problems, drawing, engineFault } = useOpenRevision();
-  const register = useRegister(address.shop);
+  const { good, address, answer, draft, problems, drawing, engineFault, register } = useOpenRevision();
   const { settings } = draft;
   const format = useMemo(
     () => ({ unit: settings.unit, style: settings.style }),
@@ -64,7 +63,14 @@ export function RoutePage() {
         )}
         {route &&
           cardsOf(route).map((card, index) => (
-            <SetUpCard key={card.setUp.id} card={card} number={index + 1} sizes={sizes} format={format} />
+            <SetUpCard
+              key={card.setUp.id}
+              card={card}
+              number={index + 1}
+              machine={itemName(register, card.setUp.machine)}
+              sizes={sizes}
+              format={format}
+            />
           ))}
         {route && <StandingCaution />}
       </div>
@@ -72,7 +78,7 @@ export function RoutePage() {
         <aside className="route-side" aria-label="Verdict, what to pull, time and cost">
           <VerdictBox capacity={good.capacity} allAt={paths.revision(shop, id, revision, 'capacity')} />
           {route && <PullList route={route} />}
-          {route && <TimeAndCost route={route} format={format} register={register.data} />}
+          {route && <TimeAndCost route={route} format={format} register={register} />}
         </aside>
       )}
     </main>

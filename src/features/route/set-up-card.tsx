@@ -1,6 +1,7 @@
 import { CautionLine } from '../../components/lines';
 import { WithDiameters } from '../../components/diameter';
 import { SetUpPictures } from '../../components/set-up-pictures';
+import { STANDING_CAUTIONS } from '../../../shared/route/cautions';
 import type { Size } from '../../../shared/scheme/scheme';
 import type { LengthFormat } from '../../../shared/units/format';
 import type { CardFacts } from '../../revision/set-up-stages';
@@ -11,18 +12,21 @@ interface SetUpCardProps {
   number: number;
   sizes: ReadonlyMap<string, Size>;
   format: LengthFormat;
+  /** What the shop calls the machine. */
+  machine: string;
 }
 
 /** A set-up as a ruled plate: the work before and after on one datum, how it is held, and its operations. */
-export function SetUpCard({ card, number, sizes, format }: SetUpCardProps) {
+export function SetUpCard({ card, number, sizes, format, machine }: SetUpCardProps) {
   const { setUp, operations } = card;
+  const cautions = firstTimeOnly(operations);
   const minutes = operations.reduce((sum, operation) => sum + operation.minutes, 0);
   return (
     <article className="set-up-card" id={setUp.id} aria-labelledby={`${setUp.id}-name`}>
       <header>
         <span className="card-plate">{number}</span>
         <h2 id={`${setUp.id}-name`}>
-          {setUp.machine}, {setUp.holding}
+          {machine}, {setUp.holding}
         </h2>
         <span className="aside">
           {Math.round(setUp.minutes)} min to set, {Math.round(minutes)} min a piece
@@ -94,7 +98,7 @@ export function SetUpCard({ card, number, sizes, format }: SetUpCardProps) {
                 <span className="paper-square" aria-hidden="true" />
               </td>
             </tr>
-            {operation.cautions.map((caution) => (
+            {(cautions.get(operation.number) ?? []).map((caution) => (
               <tr key={caution} className="op-caution">
                 <td />
                 <td colSpan={9}>
@@ -105,6 +109,19 @@ export function SetUpCard({ card, number, sizes, format }: SetUpCardProps) {
           </tbody>
         ))}
       </table>
+      <p className="card-foot">{STANDING_CAUTIONS.join(' ')}</p>
     </article>
+  );
+}
+
+/** A caution is said where it is first met on the card: said again at every line it is read no more. What always stands has its own line. */
+function firstTimeOnly(operations: CardFacts['operations']): ReadonlyMap<number, readonly string[]> {
+  const said = new Set(STANDING_CAUTIONS);
+  return new Map(
+    operations.map(({ number, cautions }) => {
+      const fresh = cautions.filter((caution) => !said.has(caution));
+      for (const caution of fresh) said.add(caution);
+      return [number, fresh] as const;
+    }),
   );
 }
