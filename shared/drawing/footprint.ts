@@ -86,7 +86,6 @@ const PRICE = {
   extensionExtension: 0.7,
   extensionDimension: 3,
   leaderExtension: 2,
-  leaderDimension: 5,
 } as const;
 
 const TEXT_CLEAR = 0.45;
@@ -137,7 +136,6 @@ function strokePair(a: PrintStroke, b: PrintStroke, verdict: Verdict): void {
   const extension = a.line === 'extension' || b.line === 'extension';
   if (a.line === 'leader' || b.line === 'leader') {
     if (extension) verdict.cost += PRICE.leaderExtension;
-    else if (a.line === 'dimension' || b.line === 'dimension') verdict.cost += PRICE.leaderDimension;
     else verdict.clashes += 1;
     return;
   }

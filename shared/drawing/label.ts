@@ -16,6 +16,8 @@ export interface Label {
   letter: number;
   small: number;
   width: number;
+  /** The figure alone, without the words under it. */
+  figureWidth: number;
   /** Extent over and under the baseline, mm. */
   up: number;
   down: number;
@@ -41,6 +43,7 @@ export function makeLabel(runs: readonly Run[], text: string, letter: number, sm
   const size = fontSizeFor(letter);
   const smallSize = fontSizeFor(small);
   let width = runs.reduce((sum, run) => sum + runWidth(run, letter, small), 0);
+  const figureWidth = width;
   let up = ASCENT * size;
   let down = DESCENT * size;
   if (runs.some((run) => run.kind === 'stack')) {
@@ -51,7 +54,7 @@ export function makeLabel(runs: readonly Run[], text: string, letter: number, sm
     width = Math.max(width, textWidth(under, smallSize));
     down += (ASCENT + DESCENT) * smallSize + 0.2;
   }
-  return { runs, under, letter, small, width, up, down, text };
+  return { runs, under, letter, small, width, figureWidth, up, down, text };
 }
 
 /** The label's marks with the left end (upright) or the lower end (turned) of its baseline at (x, y). */

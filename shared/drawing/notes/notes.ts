@@ -3,7 +3,7 @@ import type { Part } from '../../part/part';
 import type { Writing } from '../size-text';
 
 /** Widest line of the notes, in characters. */
-const NOTE_WIDTH = 44;
+const NOTE_WIDTH = 50;
 /** Edges without a size of their own. Source: common practice. */
 const EDGE_MM = 0.2;
 const EDGE_INCH = 0.01 * 25.4;

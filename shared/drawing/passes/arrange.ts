@@ -40,8 +40,10 @@ const BALLOON_ROOM = 16;
 const PLAIN_WORK = { enough: 14, most: 60 } as const;
 const DENSE_WORK = { enough: 70, most: 260 } as const;
 /** Price of a millimetre past the ends of the view: little, or much where the sheet is narrow. */
-const OVERHANG = { roomy: 0.02, narrow: 0.3 } as const;
+const OVERHANG = { roomy: 0.02, narrow: 0.2 } as const;
 const NARROW_APART = 8;
+/** Shares of the flats that the metal before them may differ by and still be much alike. */
+const MUCH_ALIKE = 0.05;
 
 interface Drawing {
   view: string;
@@ -80,7 +82,7 @@ function endToShow(part: Part, writing: Writing): EndName {
   const left = metalBefore(part.body, 'end-left');
   const right = metalBefore(part.body, 'end-right');
   const preferred: EndName = writing.style === 'iso' ? 'end-left' : 'end-right';
-  if (Math.max(left, 1) === Math.max(right, 1)) return preferred;
+  if (Math.abs(left - right) < MUCH_ALIKE) return preferred;
   return left < right ? 'end-left' : 'end-right';
 }
 

@@ -12,7 +12,7 @@ import type { Draft } from './candidate';
 import { leaderDrafts } from './leader-drafts';
 
 /** Prices of the forms and of their variants. Source: trial sheets, looked at. */
-const PRICE = { inside: 0.5, end: 1, slot: 1.3, perMm: 0.03, through: 2.2, offMiddle: 1.5, leader: 3.2 } as const;
+const PRICE = { inside: 0.5, end: 1, slot: 1.3, perMm: 0.03, through: 2.2, offMiddle: 1.5, leader: 3.2, cornerLeader: 6.5 } as const;
 const POSITIONS = [0.5, 0.3, 0.7, 0.15, 0.85];
 const LIFTS = [0, 6.5, 13, 20, 27];
 const SLOTS = 4;
@@ -203,7 +203,7 @@ function byLeader(a: Across): Draft[] {
   const { paper, ready, r } = a;
   const places = a.at !== null ? [a.at] : [0.5, 0.25, 0.75].map((t) => a.x0 + (a.x1 - a.x0) * t);
   return places.flatMap((x, i) =>
-    a.at === null && !onOutline(a, x) ? [] : leaderDrafts(paper, ready.label, { x, y: -r }, { cost: PRICE.leader + i * 0.4, lean: 0 }),
+    a.at === null && !onOutline(a, x) ? [] : leaderDrafts(paper, ready.label, { x, y: -r }, { cost: (a.at === null ? PRICE.leader : PRICE.cornerLeader) + i * 0.4, lean: 0 }),
   );
 }
 

@@ -1,14 +1,17 @@
 /** Across flats in the end view: between two opposite faces that lie upright or level on paper. */
 import { arrowHead, lineMark } from '../arrow';
-import { placeLabel } from '../label';
+import { makeLabel, placeLabel } from '../label';
 import type { Candidate, ReadySize } from '../layout';
 import type { RuleFigures } from '../rules';
 import type { DraftingStyle, Mark } from '../sheet';
 import { candidateOf } from './candidate';
 import type { EndView } from './end-view';
 import { faceHalfWidth } from '../profile';
+import { ASCENT, fontSizeFor } from '../text-metrics';
 
 const LEVEL = 1e-3;
+/** What a plain figure reaches under its baseline. */
+const PLAIN_DOWN = 1.06;
 
 /** The size drawn about the end view's centre (0, 0), or null where no pair of faces lies square to the paper. */
 export function flatsSize(view: EndView, ready: ReadySize, scale: number, rules: RuleFigures, style: DraftingStyle): Candidate | null {
@@ -27,29 +30,33 @@ export function flatsSize(view: EndView, ready: ReadySize, scale: number, rules:
   return upright ? acrossBeside(view, ready, h, half * scale, rules, style) : null;
 }
 
+/** The figure on (or in) its line and the words under it, where the figure goes between the extension lines. */
 function acrossBelow(view: EndView, ready: ReadySize, h: number, half: number, rules: RuleFigures, style: DraftingStyle): Candidate {
   const { label } = ready;
-  const y = view.radius + Math.max(rules.firstLine, style === 'iso' ? label.up + 1.2 : rules.firstLine);
-  const marks: Mark[] = [-h, h].map((x) => lineMark('extension', x, half + rules.extensionGap, x, y + rules.extensionPast));
   const iso = style === 'iso';
-  const figureDown = 1.06;
+  const figure = makeLabel(label.runs, label.text, label.letter, label.small);
+  const lift = rules.textLift + Math.max(0, figure.down - PLAIN_DOWN);
+  const y = view.radius + Math.max(rules.firstLine, iso ? figure.up + lift + 1.2 : 0);
+  const marks: Mark[] = [-h, h].map((x) => lineMark('extension', x, half + rules.extensionGap, x, y + rules.extensionPast));
   const room = 2 * h;
-  const inside = iso ? room >= Math.max(label.width + 1.6, 8) : room >= label.width + 9.6;
+  const inside = iso ? room >= Math.max(figure.width + 1.6, 8) : room >= figure.width + 9.6;
   const tail = rules.arrowTail;
-  if (inside) {
-    if (iso) marks.push(lineMark('dimension', -h, y, h, y));
-    else marks.push(lineMark('dimension', -h, y, -label.width / 2 - 0.8, y), lineMark('dimension', label.width / 2 + 0.8, y, h, y));
-    marks.push(arrowHead(-h, y, -1, 0, style), arrowHead(h, y, 1, 0, style));
-    const baseline = iso ? y + 1 + label.up : y + capMiddle(label);
-    return candidateOf('view', marks, placeLabel(label, -label.width / 2, iso ? baseline : baseline), 0.5);
+  if (!inside) {
+    marks.push(lineMark('dimension', -h - tail, y, h + tail, y), arrowHead(-h, y, 1, 0, style), arrowHead(h, y, -1, 0, style));
+    // Too narrow for its figure: the writing stands under the line, clear of the extension lines' ends.
+    return candidateOf('view', marks, placeLabel(label, -label.width / 2, y + rules.extensionPast + 0.8 + label.up), 1);
   }
-  marks.push(lineMark('dimension', -h - tail, y, h + tail, y), arrowHead(-h, y, 1, 0, style), arrowHead(h, y, -1, 0, style));
-  // Too narrow for its figure: the writing stands under the line, clear of both arrows.
-  return candidateOf('view', marks, placeLabel(label, -label.width / 2, y + rules.extensionPast + 0.8 + label.up - figureDown * 0), 1);
-}
-
-function capMiddle(label: ReadySize['label']): number {
-  return label.letter / 2;
+  const gap = figure.width / 2 + rules.textGap;
+  if (iso) marks.push(lineMark('dimension', -h, y, h, y));
+  else marks.push(lineMark('dimension', -h, y, -gap, y), lineMark('dimension', gap, y, h, y));
+  marks.push(arrowHead(-h, y, -1, 0, style), arrowHead(h, y, 1, 0, style));
+  const writing = placeLabel(figure, -figure.width / 2, iso ? y - lift : y + (figure.up - figure.down) / 2);
+  if (label.under !== undefined) {
+    const size = fontSizeFor(label.small);
+    const below = Math.max(rules.extensionPast, iso ? 0 : figure.up / 2 + 1) + 0.8;
+    writing.push({ type: 'text', x: 0, y: y + below + ASCENT * size, size, anchor: 'middle', text: label.under });
+  }
+  return candidateOf('view', marks, writing, 0.5);
 }
 
 function acrossBeside(view: EndView, ready: ReadySize, h: number, half: number, rules: RuleFigures, style: DraftingStyle): Candidate {
