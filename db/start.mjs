@@ -31,6 +31,8 @@ process.stdout.on('error', () => {});
 process.stderr.on('error', () => {});
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void leave(0));
 whenParentIsGone(() => void leave(0));
+for (const event of ['uncaughtException', 'unhandledRejection'])
+  process.on(event, (error) => void fail(error));
 
 try {
   await start();

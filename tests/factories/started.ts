@@ -91,18 +91,17 @@ export function startBenchleaf(settings: Record<string, string>, viaNpm?: 'start
 export function processesOn(folder: string): string[] {
   return readdirSync('/proc')
     .filter((name) => /^\d+$/.test(name) && Number(name) !== process.pid)
-    .filter((pid) => {
+    .flatMap((pid) => {
       try {
-        return (
-          readFileSync(`/proc/${pid}/environ`, 'latin1').includes(folder) ||
-          readFileSync(`/proc/${pid}/cmdline`, 'latin1').includes(folder) ||
-          readlinkSync(`/proc/${pid}/cwd`).startsWith(folder)
-        );
+        const command = readFileSync(`/proc/${pid}/cmdline`, 'latin1').replaceAll('\0', ' ');
+        const told =
+          command.includes(folder) || readFileSync(`/proc/${pid}/environ`, 'latin1').includes(folder);
+        return told || readlinkSync(`/proc/${pid}/cwd`).startsWith(folder) ? [command] : [];
       } catch {
-        return false;
+        // Gone while it was looked at, or another user's.
+        return [];
       }
-    })
-    .map((pid) => readFileSync(`/proc/${pid}/cmdline`, 'latin1').replaceAll('\0', ' '));
+    });
 }
 
 /** Waits until no process works on the folder; gives those that still do after 20 seconds. */
