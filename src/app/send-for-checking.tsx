@@ -2,7 +2,7 @@ import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { Button } from '../components/button';
 import { Dialog } from '../components/dialog';
-import { countOf } from '../components/verdict';
+import { countOf, verdictWords } from '../components/verdict';
 import { ApiFault } from '../lib/api/fault';
 import { paths } from '../lib/paths';
 import { useAct } from '../revision/api/act';
@@ -11,13 +11,14 @@ import { useOpenRevision } from '../revision/open-revision';
 
 /** The main act of a draft. While something is missing it says what, and takes the person there. */
 export function SendForChecking() {
-  const { address, answer, problems, keeper, template } = useOpenRevision();
+  const { address, answer, problems, keeper, template, good } = useOpenRevision();
   const [refusal, setRefusal] = useState<ApiFault | string | null>(null);
   const act = useAct(address);
   const navigate = useNavigate();
   if (answer.abilities['submit'] !== true) return null;
   const { shop, drawing, revision } = address;
   const first = problems[0];
+  const verdict = good ? verdictWords(good.capacity) : null;
 
   const send = async () => {
     const version = await keeper.flush();
@@ -42,6 +43,12 @@ export function SendForChecking() {
 
   return (
     <div className="main-act">
+      {verdict && (
+        <p className="foot-verdict" aria-hidden="true">
+          <span className="engraved">Can we make it?</span>{' '}
+          <b className={`is-${verdict.state}`}>{verdict.word}</b>
+        </p>
+      )}
       {first ? (
         <Button aria-disabled="true" aria-describedby="why-not-sent" onClick={goToFirst}>
           Send for checking: {countOf(problems.length, 'size')} wrong

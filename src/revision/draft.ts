@@ -107,7 +107,7 @@ export function merged(mine: Draft, theirs: Draft, keepMine: ReadonlySet<string>
   for (const path of keepMine) {
     const setting = /^settings\.(.+)$/.exec(path)?.[1];
     if (setting) Object.assign(settings, { [setting]: mine.settings[setting as keyof Draft['settings']] });
-    else if (path !== 'title' && path !== 'note') {
+    else if (path !== 'note') {
       const value = mine.values[path];
       if (value === undefined) delete values[path];
       else values[path] = value;

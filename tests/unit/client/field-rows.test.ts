@@ -1,0 +1,49 @@
+import { describe, expect, it } from 'vitest';
+import { exampleValues } from '../../../shared/template/default-values';
+import { evaluate } from '../../../shared/template/evaluate';
+import type { TypedValues } from '../../../shared/template/template';
+import { templateById } from '../../../templates';
+import { shownPaths } from '../../../src/engine/shown-paths';
+import { formRows } from '../../../src/features/fill-in/field-rows';
+
+function rowsOf(id: string, change: TypedValues = {}) {
+  const template = templateById(id);
+  if (!template) throw new Error(`no family ${id}`);
+  const values = { ...exampleValues(template), ...change };
+  const evaluation = evaluate(template, values, { entryUnit: 'mm' });
+  const shown = shownPaths({ evaluation, problems: evaluation.problems });
+  return formRows(template, values, shown);
+}
+const paths = (rows: ReturnType<typeof rowsOf>) =>
+  rows.shape.map((row) => (row.kind === 'one' ? row.path : row.parameter.id));
+
+describe('the form of a family', () => {
+  it('shows a field only while the values ask for it', () => {
+    expect(paths(rowsOf('tapered-handle', { grip: 'hex' }))).toContain('acrossFlats');
+    expect(paths(rowsOf('tapered-handle', { grip: 'round' }))).not.toContain('acrossFlats');
+  });
+
+  it('puts title, material and quantity after the shape, and what cannot be asked for yet apart', () => {
+    const rows = rowsOf('tapered-handle');
+    expect(rows.sheet.map(({ path }) => path)).toEqual(['title', 'material', 'quantity']);
+    expect(rows.notYet.length).toBeGreaterThan(0);
+    for (const { parameter } of rows.notYet) expect(parameter.notYet).toBeTruthy();
+    const shown = paths(rows);
+    for (const { path } of rows.notYet) expect(shown).not.toContain(path);
+  });
+
+  it('gives every row of a table its cells, a new one too', () => {
+    const steps = [{ key: 'n', diameter: '20', length: '30' }, { key: 'm' }];
+    const [table] = rowsOf('stepped-shaft', { steps }).shape;
+    if (table?.kind !== 'table') throw new Error('the first field of a stepped shaft is its steps');
+    expect(table.rows.map(({ key }) => key)).toEqual(['n', 'm']);
+    for (const row of table.rows)
+      expect(row.cells.map(({ path }) => path)).toEqual(
+        expect.arrayContaining([
+          `steps[${row.index}].diameter`,
+          `steps[${row.index}].length`,
+          `steps[${row.index}].thread`,
+        ]),
+      );
+  });
+});
