@@ -3,6 +3,7 @@ import { mkdtemp, readFile, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { drawCommand } from '../../../server/headless/draw-command';
 import { drawResult } from '../../../shared/api/contract';
 
 interface Run {
@@ -11,7 +12,17 @@ interface Run {
   stderr: string;
 }
 
-function draw(...words: string[]): Promise<Run> {
+async function draw(...words: string[]): Promise<Run> {
+  const run: Run = { code: -1, stdout: '', stderr: '' };
+  run.code = await drawCommand(words, {
+    print: (text) => (run.stdout += text),
+    complain: (text) => (run.stderr += text),
+  });
+  return run;
+}
+
+/** The command as a person starts it. */
+function npmRunDraw(...words: string[]): Promise<Run> {
   return new Promise((resolve) => {
     execFile(
       'npm',
@@ -88,7 +99,7 @@ describe('npm run draw', () => {
     [['stepped-shaft', '--scale', 'big'], /^--scale: "big" is not a scale/],
     [['stepped-shaft', '--sheet', 'B5'], /^--sheet: /],
     [['stepped-shaft', 'steps=[{"diameter":"20","length":"-4"}]'], /^steps\[0\]\.length: /],
-    [['tapered-handle', 'acrossFlats=26'], /^acrossFlats: /],
+    [['tapered-handle', 'grip=hex', 'acrossFlats=26'], /^acrossFlats: /],
     [
       ['stepped-shaft', '--params', '/nowhere/at/all.json'],
       /^--params: The file \/nowhere\/at\/all\.json cannot be read/,
@@ -102,20 +113,26 @@ describe('npm run draw', () => {
   });
 
   it('answers 1 when the fault is its own', async () => {
-    const run = await new Promise<Run>((resolve) => {
-      const broken = {
-        ...process.env,
-        NODE_OPTIONS: `--import data:text/javascript,${encodeURIComponent("process.stdout.write=()=>{throw new Error('the line is cut')}")}`,
-      };
-      execFile(
-        'node_modules/.bin/tsx',
-        ['server/draw.ts', '--templates'],
-        { env: broken },
-        (error, stdout, stderr) =>
-          resolve({ code: typeof error?.code === 'number' ? error.code : 0, stdout, stderr }),
-      );
+    const run: Run = { code: -1, stdout: '', stderr: '' };
+    run.code = await drawCommand(['--templates'], {
+      print: () => {
+        throw new Error('the line is cut');
+      },
+      complain: (text) => (run.stderr += text),
     });
-    expect(run.code).toBe(1);
-    expect(run.stderr).toMatch(/A fault of the program/);
+    expect(run).toEqual({
+      code: 1,
+      stdout: '',
+      stderr: 'A fault of the program, not of the sizes: the line is cut\n',
+    });
+  });
+
+  it('says the same as a process: exit codes, and nothing but JSON on standard output', async () => {
+    const good = await npmRunDraw('tapered-handle');
+    expect([good.code, good.stderr]).toEqual([0, '']);
+    expect(good.stdout).toBe((await draw('tapered-handle')).stdout);
+    const bad = await npmRunDraw('tapered-handle', 'gripLength=far');
+    expect([bad.code, bad.stdout]).toEqual([2, '']);
+    expect(bad.stderr).toMatch(/^gripLength: /);
   });
 });
