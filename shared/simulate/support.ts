@@ -15,7 +15,20 @@ const AT_THE_END: readonly Method[] = ['face', 'form-turn', 'thread-die', 'part-
 
 /** Free length and bending under each cut, on the stage before it. */
 export function judgeSupport(steps: readonly Step[]): Fault[] {
-  return steps.flatMap((step, index) => [...supportFaults(step), ...holeToCome(step, steps.slice(index + 1))]);
+  return steps.flatMap((step, index) => [
+    ...supportFaults(step),
+    ...holeToCome(step, steps.slice(index + 1)),
+    ...neverAHole(step, steps),
+  ]);
+}
+
+/** A tail centre is set up for a hole that is there at some time in the set-up; said once, at its first operation. */
+function neverAHole(step: Step, steps: readonly Step[]): Fault[] {
+  if (step.setup.support !== 'centre') return [];
+  const within = steps.filter((each) => each.setup.id === step.setup.id);
+  const hole = within.some(({ before, after }) => [before, after].some((stage) => radiusAt(stage.inner, stage.x1, 'left') > 0));
+  if (within[0] !== step || hole) return [];
+  return [fault('centre-before-support', step.operation.number, 'A centre is set up, but there is never a hole for it to enter.')];
 }
 
 /** Work that the set-up means to support is not done before the hole for the centre is there. */

@@ -128,6 +128,11 @@ function judgeChamfer(step: Step, chamfer: ChamferFeature, say: Say): void {
   const { part, before } = step;
   const atEnd = chamfer.end === 'right' && Math.abs(chamfer.to - part.length) < 1e-6;
   if (atEnd && before.x1 > part.length + 1e-6) say('trim-before-end-form', 'The end is not to length before its chamfer is cut.');
+  // The tool comes at the edge from the air beside it: the face, the smaller neighbour or a groove is there.
+  const beside = chamfer.end === 'right' ? chamfer.to + 1e-5 : chamfer.from - 1e-5;
+  const small = radiusAt(part.body.outer, chamfer.end === 'right' ? chamfer.to : chamfer.from, chamfer.end === 'right' ? 'left' : 'right');
+  if (beside > before.x0 && beside < before.x1 && radiusAt(before.outer, beside) > small + 1e-6)
+    say('way-in', 'The chamfer has no edge yet: metal still stands beside it.');
   const on = part.features.find((each) => each.id === chamfer.on);
   if (!on || on.kind === 'face') return;
   const ends = endForms(part);

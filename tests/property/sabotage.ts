@@ -1,9 +1,12 @@
 import { applyRemoval, removedVolume } from '../../shared/part/apply';
 import type { Piece } from '../../shared/part/body';
+import { smallestRadius } from '../../shared/part/generator';
 import type { Part } from '../../shared/part/part';
 import type { Removal } from '../../shared/part/removal';
+import { differences } from '../../shared/part/same-metal';
 import { volume, volumeBetween } from '../../shared/part/volume';
 import type { Operation, Route, SetUp } from '../../shared/route/route';
+import { SIDE_METHODS } from '../../shared/route/rules';
 import type { RuleId } from '../../shared/route/rules';
 
 /** A route spoiled in one way: what was done, and by which rules it must be refused (any, where none is named). */
@@ -90,7 +93,8 @@ const isFinishing = (operation: Operation): boolean => operation.method !== 'rou
 
 function withCut(by: number): Change {
   return (operation) => {
-    if (!isFinishing(operation)) return null;
+    // A groove in what is parted off names no feature, and its depth is nobody's size.
+    if (!isFinishing(operation) || operation.features.length === 0) return null;
     const cut = shifted(operation.cut, by);
     return cut && { ...operation, cut };
   };
@@ -144,6 +148,22 @@ function otherFeature(part: Part): Change {
   };
 }
 
+/** True where a sideways cut of the set-up reaches out more than three of the smallest diameters on the way, by a plain look at the stages. */
+function standsOut(route: Route, setup: SetUp): boolean {
+  return route.operations.some((operation, index) => {
+    const before = route.stages[index]?.body;
+    const after = route.stages[index + 1]?.body;
+    const sideways = (SIDE_METHODS as readonly string[]).includes(operation.method);
+    if (operation.setup !== setup.id || !before || !after || !sideways) return false;
+    const cut = differences(before, after);
+    const right = setup.freeEnd === 'right';
+    const edge = right ? Math.max(setup.gripFrom, setup.gripTo) : Math.min(setup.gripFrom, setup.gripTo);
+    const far = right ? Math.max(edge, ...cut.map((span) => span.to)) : Math.min(edge, ...cut.map((span) => span.from));
+    const [from, to] = right ? [edge, far] : [far, edge];
+    return to > from && to - from > 3.05 * 2 * smallestRadius(before.outer, from, to);
+  });
+}
+
 export const SABOTAGES: readonly Sabotage[] = [
   { id: 'drop-cut', expected: [], mutations: (route, part) => dropped(route, part, (o) => o.cut !== undefined) },
   {
@@ -151,15 +171,15 @@ export const SABOTAGES: readonly Sabotage[] = [
     expected: ['grip-first', 'edges-last', 'inspect-last', 'fit-before-inspect'],
     mutations: (route, part) => {
       const needed = (o: Operation): boolean =>
-        ['deburr', 'inspect', 'grip', 'turn-round', 'fit-check'].includes(o.method) &&
+        (['deburr', 'grip', 'turn-round', 'fit-check'].includes(o.method) || o === route.operations[route.operations.length - 1]) &&
         route.operations.filter((other) => other.method === o.method && other.setup === o.setup).length === 1 &&
         (isHeld(route, route.setups.find((setup) => setup.id === o.setup) ?? ({} as SetUp)) || o.method !== 'grip');
       return dropped(route, part, needed);
     },
   },
   { id: 'swap-with-reason', expected: [], mutations: swapped },
-  { id: 'too-deep', expected: ['not-below-part'], mutations: (route, part) => each(route, part, withCut(0.1)) },
-  { id: 'too-shallow', expected: ['stage-is-part'], mutations: (route, part) => each(route, part, withCut(-0.1)) },
+  { id: 'too-deep', expected: ['not-below-part', 'named-features'], mutations: (route, part) => each(route, part, withCut(0.1)) },
+  { id: 'too-shallow', expected: ['stage-is-part', 'named-features'], mutations: (route, part) => each(route, part, withCut(-0.1)) },
   {
     id: 'wrong-end',
     expected: ['free-end-only'],
@@ -182,7 +202,9 @@ export const SABOTAGES: readonly Sabotage[] = [
     mutations: (route, part) => {
       const thread = part.features.find((feature) => feature.kind === 'thread');
       if (thread?.kind !== 'thread') return [];
-      return eachSetUp(route, (s) => ({ ...s, gripFrom: thread.from, gripTo: thread.to }));
+      const cut = route.operations.findIndex((operation) => operation.method.startsWith('thread-'));
+      const lasts = (s: SetUp): boolean => route.operations.some((operation, index) => operation.setup === s.id && operation.cut && index >= cut);
+      return eachSetUp(route, (s) => (cut >= 0 && lasts(s) ? { ...s, gripFrom: thread.from, gripTo: thread.to } : null));
     },
   },
   {
@@ -200,7 +222,7 @@ export const SABOTAGES: readonly Sabotage[] = [
   {
     id: 'no-support',
     expected: ['support-overhang', 'support-bend'],
-    mutations: (route) => eachSetUp(route, (s) => (s.support ? { ...s, support: undefined } : null)),
+    mutations: (route) => eachSetUp(route, (s) => (s.support && standsOut(route, s) ? { ...s, support: undefined } : null)),
   },
   {
     id: 'no-centre-hole',
