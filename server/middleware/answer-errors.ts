@@ -24,14 +24,13 @@ const READER_CODES: Readonly<Record<string, ErrorCode>> = {
 
 function refusalOf(error: unknown): Refusal {
   if (error instanceof Refusal) return error;
-  if (statusOf(error) === 404) return new Refusal('not-found');
-  // An address such as /api/shops/%ff cannot be read at all, so there is nothing there.
-  if (error instanceof URIError) return new Refusal('not-found');
   const type = typeof error === 'object' && error !== null && 'type' in error ? error.type : undefined;
-  return new Refusal((typeof type === 'string' && READER_CODES[type]) || 'internal');
+  if (typeof type === 'string' && READER_CODES[type]) return new Refusal(READER_CODES[type]);
+  return new Refusal(isNoAddress(error) ? 'not-found' : 'internal');
 }
 
-/** The file server's own errors carry a status and no type. */
-function statusOf(error: unknown): unknown {
-  return typeof error === 'object' && error !== null && 'status' in error ? error.status : undefined;
+/** An address that names no file, climbs out of its folder, or cannot be read at all (`/api/shops/%ff`). */
+function isNoAddress(error: unknown): boolean {
+  const status = typeof error === 'object' && error !== null && 'status' in error ? error.status : undefined;
+  return error instanceof URIError || (typeof status === 'number' && status >= 400 && status < 500);
 }

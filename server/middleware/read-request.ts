@@ -1,5 +1,5 @@
 import type { Request } from 'express';
-import { z } from 'zod';
+import type { z } from 'zod';
 import { Refusal } from '../errors';
 import { plainIssue } from './plain-issue';
 

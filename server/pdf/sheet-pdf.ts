@@ -29,8 +29,7 @@ export function sheetPdf(svgs: readonly string[], facts: PdfFacts): Promise<Uint
       for (const svg of svgs) {
         const { width, height } = sizeOf(svg);
         document.addPage({ size: [width * POINTS_PER_MM, height * POINTS_PER_MM], margin: 0 });
-        // Its types ask for the class where the function takes a document.
-        SVGtoPDF(document as unknown as typeof PDFDocument, svg, 0, 0, {
+        SVGtoPDF(document, svg, 0, 0, {
           fontCallback: (_family: string, isBold: boolean) => (isBold ? 'bold' : 'regular'),
         });
       }

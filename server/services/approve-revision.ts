@@ -43,7 +43,7 @@ export async function approveRevision(
   const pdfHash = await keepBlob(work, pdf, 'application/pdf');
   await supersede(work, at);
   await keepMove(work, revision, { ...standing, sheet: good.sheet, findings: good.findings, svgHash, pdfHash });
-  await recordDecision(work, revision, 'approved', { contentHash: revision.contentHash });
+  await recordDecision(work, revision, 'approved', { contentHash: revision.contentHash, noSecondCheck: at.matter.own });
   await keepFacts(work, drawing, revision);
   return { ...at, matter: { ...at.matter, state: 'released' } };
 }

@@ -30,7 +30,7 @@ export async function recordDecision(
   work: ShopWork,
   revision: Revision,
   act: DecisionAct,
-  detail: { reason?: string; contentHash?: string | null } = {},
+  detail: { reason?: string; contentHash?: string | null; noSecondCheck?: boolean } = {},
 ): Promise<void> {
   await work.services.database.models.decisions.create(
     {

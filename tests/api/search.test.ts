@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { SearchAnswer } from '../../shared/api/drawings';
+import type { SearchAnswer, StartDrawingRequest } from '../../shared/api/drawings';
 import { searchAnswer } from '../../shared/api/drawings';
 import { exampleValues } from '../../shared/template/default-values';
 import { templateById } from '../../templates';
@@ -20,7 +20,7 @@ let checker: BrowserLike;
 let reader: BrowserLike;
 let machinist: BrowserLike;
 
-const pin = {
+const pin: Pick<StartDrawingRequest, 'template' | 'values'> = {
   template: 'stepped-shaft',
   values: { ...exampleValues(templateById('stepped-shaft') ?? missing()), steps: [{ key: 'a', diameter: '16', length: '12.7' }, { key: 'b', length: '20', thread: 'M12x1.25' }] },
 };
