@@ -8,13 +8,12 @@ import type { View } from './features';
 import type { RuleId } from './rules';
 
 /** A plan that cannot be: thrown inside a candidate, caught where candidates are compared. */
-export class RuledOut extends Error {
+export class RuledOut {
+  /** Not an Error: it is thrown by the dozen for every part, and a stack for each costs more than the plan. */
   constructor(
     readonly rule: RuleId,
-    message: string,
-  ) {
-    super(message);
-  }
+    readonly message: string,
+  ) {}
 }
 
 /** What an operation asks of the shop, before it is put in words for the reader. */
@@ -85,6 +84,8 @@ export interface Build {
   views: { right: View; left: View };
   blank: Body;
   stage: Body;
+  /** The stage turned end for end, kept while the stage stays the same. */
+  turned?: { of: Body; body: Body };
   setups: DraftSetUp[];
   operations: DraftOperation[];
   planNeeds: DraftNeed[];
@@ -93,7 +94,9 @@ export interface Build {
 
 /** The stage with the free end of the view to the right. */
 export function stageIn(build: Build, view: View): Body {
-  return view.flipped ? mirrorBody(build.stage, view.length) : build.stage;
+  if (!view.flipped) return build.stage;
+  if (build.turned?.of !== build.stage) build.turned = { of: build.stage, body: mirrorBody(build.stage, view.length) };
+  return build.turned.body;
 }
 
 export type OperationWish = Omit<
@@ -120,8 +123,24 @@ export function addOperation(build: Build, view: View, wish: OperationWish): Dra
   if (!setup) throw new Error('an operation needs a set-up');
   const length = view.length;
   const face = view.flipped ? build.stage.x0 : build.stage.x1;
+  // Written out, not spread: dozens of these are made for every part while somebody types.
   const operation: DraftOperation = {
-    ...wish,
+    key: wish.key,
+    method: wish.method,
+    title: wish.title,
+    features: wish.features,
+    tool: wish.tool,
+    toolItem: wish.toolItem,
+    figures: wish.figures,
+    pitch: wish.pitch,
+    depth: wish.depth,
+    faces: wish.faces,
+    halfAngle: wish.halfAngle,
+    slantLength: wish.slantLength,
+    settings: wish.settings,
+    runOut: wish.runOut,
+    blank: wish.blank,
+    check: wish.check,
     setup: setup.id,
     end: wish.method === 'mill-flat' ? 'side' : view.flipped ? 'left' : 'right',
     machine: wish.machine ?? setup.machine,

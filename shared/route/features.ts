@@ -54,8 +54,13 @@ export function unplannedKinds(part: Part): string[] {
   return [...new Set(part.features.filter((f) => !PLANNED.has(f.kind) || (f.kind === 'thread' && f.internal)).map((f) => f.kind))];
 }
 
+export interface Views {
+  right: View;
+  left: View;
+}
+
 /** Both views of a part: as drawn, with its right end free, and turned round. */
-export function viewsOf(part: Part): { right: View; left: View } {
+export function viewsOf(part: Part): Views {
   return { right: viewOf(part, false), left: viewOf(mirrorPart(part), true) };
 }
 

@@ -3,15 +3,16 @@ import type { Scheme } from '../scheme/scheme';
 import { RuledOut } from './draft';
 import type { Build } from './draft';
 import { unplannedKinds, viewsOf } from './features';
-import type { View } from './features';
+import type { View, Views } from './features';
 import { finishRoute, needList, weigh } from './finish-route';
 import type { WeighedPlan } from './finish-route';
 import { valleysOf } from './methods/turn';
 import { planNeeds } from './needs';
 import type { Lathe, Register } from './register';
 import type { Capacity, Need, Route } from './route';
-import { compareScores, whyWorse } from './score';
-import type { Score } from './score';
+import { LIMITS } from './rules';
+import { compareOutlines, compareScores, whyOutlineWorse, whyWorse } from './score';
+import type { Outline, Score } from './score';
 import { buildCandidate, candidateText } from './setups/candidate';
 import type { Candidate } from './setups/candidate';
 import { mm } from './shop';
@@ -29,8 +30,14 @@ export type PlanAnswer = { route: Route; capacity: Capacity } | { route: null; c
 
 const MOST_CANDIDATES = 40;
 
-interface Weighed {
+interface Built {
   candidate: Candidate;
+  build: Build;
+  /** What can be told before minutes and needs are worked out. */
+  outline: Outline;
+}
+
+interface Weighed extends Built {
   plan: WeighedPlan;
   needs: Need[];
   score: Score;
@@ -42,41 +49,75 @@ interface Weighed {
  */
 export function planRoute(part: Part, scheme: Scheme, register: Register, asked: PlanAsked): PlanAnswer {
   const unplanned = unplannedKinds(part);
-  if (unplanned.length > 0)
-    return noRoute([`No method here cuts a ${unplanned.join(' or a ')} yet.`]);
+  if (unplanned.length > 0) return noRoute([`No method here cuts a ${unplanned.join(' or a ')} yet.`]);
   if (register.lathes.length === 0) return noRoute(['The register has no lathe.'], 'machine', 'a lathe');
   const made = { ...part, material: asked.material };
   const views = viewsOf(made);
   const stock = stockFor(made, scheme, register, asked.material);
-  const weighed: Weighed[] = [];
   const failures: { text: string; why: string }[] = [];
+  let ranked: { best: Weighed; losers: Route['others'] } | null = null;
   for (const lathe of lathesFor(register, stock)) {
-    for (const candidate of candidatesFor(views, stock, lathe)) {
-      try {
-        weighed.push(weighCandidate(made, scheme, register, candidate, stock, asked.quantity));
-      } catch (error) {
-        if (!(error instanceof RuledOut)) throw error;
-        failures.push({ text: candidateText(candidate), why: error.message });
-      }
-    }
+    const here = bestOf(made, views, scheme, register, candidatesFor(views, stock, lathe), stock, asked.quantity, failures);
+    if (here && (!ranked || compareScores(here.best.score, ranked.best.score) < 0)) ranked = here;
     // The other lathe is only asked where this one leaves something short.
-    if (weighed.some((w) => w.score.shorts === 0)) break;
+    if (ranked?.best.score.shorts === 0) break;
   }
-  weighed.sort((a, b) => compareScores(a.score, b.score));
-  const best = weighed[0];
-  if (!best) return noRoute([...new Set(failures.map((f) => f.why))].slice(0, 4));
-  const others = [
-    ...weighed.slice(1, 9).map((w) => ({ text: candidateText(w.candidate), why: whyWorse(best.score, w.score) })),
-    ...failures.slice(0, 8),
-  ];
+  if (!ranked) return noRoute([...new Set(failures.map((f) => f.why))].slice(0, 4));
+  const { best } = ranked;
   const route = finishRoute(best.plan, {
     part: made,
     scheme,
     bar: best.candidate.stock.bar,
     quantity: asked.quantity,
-    others,
+    others: [...ranked.losers, ...failures.slice(0, 8)],
   });
   return { route, capacity: { verdict: verdictOf(best.needs), needs: best.needs } };
+}
+
+/**
+ * Builds and weighs candidates, those that promise most first. One whose promise is already beaten by a plan that
+ * leaves nothing short is not built: it could not win.
+ */
+function bestOf(
+  part: Part,
+  views: Views,
+  scheme: Scheme,
+  register: Register,
+  candidates: readonly Candidate[],
+  stock: StockAnswer,
+  quantity: number,
+  failures: { text: string; why: string }[],
+): { best: Weighed; losers: Route['others'] } | null {
+  const promised = candidates
+    .map((candidate) => ({ candidate, outline: promiseOf(views, candidate, scheme) }))
+    .sort((a, b) => compareOutlines(a.outline, b.outline));
+  const weighed: Weighed[] = [];
+  const beaten: { candidate: Candidate; outline: Outline }[] = [];
+  const cannotWin = (outline: Outline): boolean =>
+    weighed.some((w) => w.score.shorts === 0 && compareOutlines(w.outline, outline) < 0);
+  for (const each of promised) {
+    if (cannotWin(each.outline)) {
+      beaten.push(each);
+      continue;
+    }
+    try {
+      const build = buildCandidate(part, views, register, each.candidate);
+      const outline = outlineOf(build, each.outline);
+      if (cannotWin(outline)) beaten.push({ candidate: each.candidate, outline });
+      else weighed.push(weighBuilt({ candidate: each.candidate, build, outline }, stock, quantity, scheme));
+    } catch (error) {
+      if (!(error instanceof RuledOut)) throw error;
+      failures.push({ text: candidateText(each.candidate), why: error.message });
+    }
+  }
+  weighed.sort((a, b) => compareScores(a.score, b.score));
+  const [best, ...rest] = weighed;
+  if (!best) return null;
+  const losers = [
+    ...rest.map((w) => ({ text: candidateText(w.candidate), why: whyWorse(best.score, w.score) })),
+    ...beaten.map((u) => ({ text: candidateText(u.candidate), why: whyOutlineWorse(best.outline, u.outline) ?? 'is no better' })),
+  ];
+  return { best, losers: losers.slice(0, 8) };
 }
 
 function noRoute(reasons: readonly string[], kind: Need['kind'] = 'geometry', need = 'a way to make the part'): PlanAnswer {
@@ -97,7 +138,7 @@ function lathesFor(register: Register, stock: StockAnswer): Lathe[] {
   return fit.length > 0 ? fit : sorted;
 }
 
-function candidatesFor(views: { right: View; left: View }, stock: StockAnswer, lathe: Lathe): Candidate[] {
+function candidatesFor(views: Views, stock: StockAnswer, lathe: Lathe): Candidate[] {
   const found: Candidate[] = [];
   const option: StockOption | undefined = stock.options[0];
   if (!option) return found;
@@ -128,32 +169,44 @@ function meetingPoints(view: View): number[] {
   return view.rows.slice(1).map((row) => row.from);
 }
 
-function weighCandidate(
-  part: Part,
-  scheme: Scheme,
-  register: Register,
-  candidate: Candidate,
-  stock: StockAnswer,
-  quantity: number,
-): Weighed {
-  const build = buildCandidate(part, register, candidate);
+function weighBuilt(each: Built, stock: StockAnswer, quantity: number, scheme: Scheme): Weighed {
+  const { build, candidate } = each;
   const plan = weigh(build, scheme, planNeeds(build, stock, candidate.stock.bar, quantity));
   const needs = needList(plan);
-  return { candidate, plan, needs, score: scoreOf(build, plan, needs, candidate, scheme) };
-}
-
-function scoreOf(build: Build, plan: WeighedPlan, needs: readonly Need[], candidate: Candidate, scheme: Scheme): Score {
   const radius = build.stockRadius;
-  return {
+  const score: Score = {
+    ...each.outline,
     shorts: needs.filter((n) => n.state === 'short').length,
-    rocks: rockingHolds(build),
-    setups: build.setups.length - pulledOut(build) / 2,
-    awkward: awkwardRows(build, candidate),
-    apart: fitsApart(build, candidate, scheme),
     alternatives: needs.filter((n) => n.state === 'alternative').length,
     minutes: plan.setupMinutes + plan.runMinutes,
     blank: Math.PI * radius * radius * (build.blank.x1 - build.blank.x0),
   };
+  return { ...each, plan, needs, score };
+}
+
+/** The least that a candidate can come to: what its shape alone says. */
+function promiseOf(views: Views, candidate: Candidate, scheme: Scheme): Outline {
+  return {
+    rocks: 0,
+    setups: (candidate.secondEnd ? 2 : 1) + (views.right.flats.length > 0 ? 1 : 0),
+    awkward: awkwardRows(views, candidate),
+    apart: fitsApart(views, candidate, scheme),
+  };
+}
+
+function outlineOf(build: Build, promise: Outline): Outline {
+  return {
+    rocks: rockingHolds(build),
+    setups: build.setups.length - pulledOut(build) / 2,
+    awkward: promise.awkward + heavyParting(build),
+    apart: promise.apart,
+  };
+}
+
+/** Parting a solid larger than a small lathe likes: as bad as a row behind a collar. */
+function heavyParting(build: Build): number {
+  const parting = build.operations.find((o) => o.method === 'part-off');
+  return (parting?.figures?.diameter ?? 0) > LIMITS.partingMost.value ? 1 : 0;
 }
 
 /** Set-ups in which long work hangs on a short grip. */
@@ -167,20 +220,20 @@ function pulledOut(build: Build): number {
 }
 
 /** Rows cut behind a collar, in both holdings. */
-function awkwardRows(build: Build, candidate: Candidate): number {
-  const view = build.views[candidate.first];
-  const other = candidate.first === 'right' ? build.views.left : build.views.right;
+function awkwardRows(views: Views, candidate: Candidate): number {
+  const view = views[candidate.first];
+  const other = candidate.first === 'right' ? views.left : views.right;
   const first = view.rows.filter((row) => row.from >= candidate.meets - 1e-9);
   const second = candidate.secondEnd ? other.rows.filter((row) => row.from >= view.length - candidate.meets - 1e-9) : [];
   return valleysOf(first).length + valleysOf(second).length;
 }
 
 /** Pairs of holdings that share the part's fits between them, less one: 0 where all fits are turned together. */
-function fitsApart(build: Build, candidate: Candidate, scheme: Scheme): number {
+function fitsApart(views: Views, candidate: Candidate, scheme: Scheme): number {
   const fitted = new Set(
     scheme.sizes.filter((s) => s.kind === 'diameter' && s.tolerance.kind === 'fit').flatMap((s) => s.features),
   );
-  const view = build.views[candidate.first];
+  const view = views[candidate.first];
   const rows = view.rows.filter((row) => fitted.has(row.id));
   const first = rows.some((row) => row.from >= candidate.meets - 1e-9);
   const second = rows.some((row) => row.from < candidate.meets - 1e-9);

@@ -30,6 +30,7 @@ export const LIMITS = {
   gripRatio: limit('grip-ratio', 0.35, 'ratio', 'A grip shorter than this share of its diameter lets the work rock; the longer of this and the least grip rules.', JUDGEMENT),
   gripLeverage: limit('grip-leverage', 8, 'ratio', 'Free length over the length gripped, above which work rocks in the jaws: another holding is looked for first.', JUDGEMENT),
   partingClear: limit('parting-clear', 3, 'mm', 'Least distance between the jaws and the near side of the parting blade.', JUDGEMENT),
+  partingMost: limit('parting-most', 40, 'mm', 'Diameter above which parting a solid on a small lathe is looked on as a last resort; the saw does it better.', JUDGEMENT),
   overhang: limit('overhang', 3, 'ratio', 'Free length from the hold to the far end of the cut, over the smallest diameter between them on the stage before the cut: above this the work wants a centre or a steady.'),
   slender: limit('slender', 10, 'ratio', 'Free length over the smallest diameter above which a centre alone is not enough for a heavy cut: light cuts, a steady, or between centres.'),
   lightDepth: limit('light-depth', 0.25, 'mm', 'Largest radial depth of a light cut: all that is taken on work that stands out too far with nothing at its end.', JUDGEMENT),

@@ -26,6 +26,20 @@ function carryingRadius(body: Body, x: number): number {
   return r;
 }
 
+/** Second moment of area of a ring (mm⁴); a bore is never taken for more than nearly all of it. */
+function inertia(r: number, bore: number): number {
+  return Math.max(1e-9, (Math.PI * (r ** 4 - Math.min(bore, 0.95 * r) ** 4)) / 4);
+}
+
+/** True where neither surface, flats nor bore change between two stations with no break between them. */
+function isEven(body: Body, a: number, b: number, r: number, carrying: (body: Body, x: number) => number): boolean {
+  const near = (b - a) * 1e-3;
+  const same = (x: number): boolean => Math.abs(carrying(body, x) - r) < 1e-9;
+  const bore = radiusAt(body.inner, (a + b) / 2);
+  const solid = (x: number): boolean => Math.abs(radiusAt(body.inner, x) - bore) < 1e-9;
+  return same(a + near) && same(b - near) && solid(a + near) && solid(b - near);
+}
+
 /**
  * Bend at the cut for each millimetre of radial depth (mm/mm): F/E · ∫ (xc − x)² / I dx from the grip's edge to the
  * far end of the cut, with nothing at the free end; integrated within each length of the outline.
@@ -40,15 +54,18 @@ export function bendPerDepth(body: Body, gripEdge: number, cut: number): number 
   const stations = marks.filter((x) => x >= from && x <= to).sort((a, b) => a - b);
   const compliance = (x: number): number => {
     const r = carryingRadius(body, x);
-    const bore = Math.min(radiusAt(body.inner, x), 0.95 * r);
-    return (to - x) ** 2 / Math.max(1e-9, (Math.PI * (r ** 4 - bore ** 4)) / 4);
+    return (to - x) ** 2 / inertia(r, radiusAt(body.inner, x));
   };
   let sum = 0;
   for (let i = 0; i + 1 < stations.length; i += 1) {
     const a = stations[i] ?? from;
     const b = stations[i + 1] ?? to;
     if (b - a < 1e-9) continue;
-    sum += integrate(compliance, a, b);
+    const middle = (a + b) / 2;
+    const r = carryingRadius(body, middle);
+    // A length of one radius has a closed form; only slopes and arcs are integrated.
+    if (isEven(body, a, b, r, carryingRadius)) sum += ((to - a) ** 3 - (to - b) ** 3) / 3 / inertia(r, radiusAt(body.inner, middle));
+    else sum += integrate(compliance, a, b);
   }
   return (LIMITS.forcePerDepth.value / LIMITS.elasticModulus.value) * sum;
 }

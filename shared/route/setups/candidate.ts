@@ -3,8 +3,8 @@ import { constant } from '../../part/generator';
 import type { FlatsFeature, Part } from '../../part/part';
 import type { Build } from '../draft';
 import { RuledOut, stageIn } from '../draft';
-import { rowMax, viewsOf } from '../features';
-import type { View } from '../features';
+import { rowMax } from '../features';
+import type { View, Views } from '../features';
 import { gripsOf, longEnough } from '../grips';
 import type { Grip } from '../grips';
 import { trimFor } from '../methods/ends';
@@ -52,12 +52,12 @@ export function candidateText(candidate: Candidate): string {
 }
 
 /** Builds the plan; where work stands out too far it is planned again with a centre. Throws RuledOut when it cannot be. */
-export function buildCandidate(part: Part, register: Register, candidate: Candidate): Build {
-  let tails: Tails = { first: false, second: false };
+export function buildCandidate(part: Part, views: Views, register: Register, candidate: Candidate): Build {
+  let tails: Tails = { first: surelyNeedsCentre(views, candidate), second: false };
   for (let attempt = 0; ; attempt += 1) {
     const where = { end: 'first' as 'first' | 'second' };
     try {
-      return attemptPlan(part, register, candidate, tails, where);
+      return attemptPlan(part, views, register, candidate, tails, where);
     } catch (error) {
       if (!(error instanceof RuledOut) || attempt >= 3) throw error;
       const wantsCentre = error.rule === 'support-overhang' || error.rule === 'support-bend';
@@ -67,8 +67,22 @@ export function buildCandidate(part: Part, register: Register, candidate: Candid
   }
 }
 
-function attemptPlan(part: Part, register: Register, candidate: Candidate, tails: Tails, where: { end: 'first' | 'second' }): Build {
-  const views = viewsOf(part);
+/** True where even the raw bar stands out too far for the turning that its free end gets: spares a vain attempt. */
+function surelyNeedsCentre(views: Views, candidate: Candidate): boolean {
+  const view = candidate.first === 'right' ? views.right : views.left;
+  const last = view.rows[view.rows.length - 1];
+  if (!last || candidate.stock.asDrawn.includes(last.id)) return false;
+  return (view.length - candidate.meets) / (2 * candidate.stock.radius) > LIMITS.overhang.value;
+}
+
+function attemptPlan(
+  part: Part,
+  views: Views,
+  register: Register,
+  candidate: Candidate,
+  tails: Tails,
+  where: { end: 'first' | 'second' },
+): Build {
   const view = candidate.first === 'right' ? views.right : views.left;
   const other = candidate.first === 'right' ? views.left : views.right;
   const trims = {
