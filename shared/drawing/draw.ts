@@ -52,7 +52,9 @@ function ground(attempt: Attempt, part: Part, options: DrawingOptions, writing: 
     title: options.titleBlock,
   });
   const [x0, y0, x1] = frameBox(attempt.sheet);
-  const said = strip.overflow.map(({ label, text }) => `${label.charAt(0)}${label.slice(1).toLowerCase()}: ${text}`);
+  const said = strip.overflow.map(
+    ({ label, text }) => `${label.charAt(0)}${label.slice(1).toLowerCase()}: ${text}`,
+  );
   const bottom = strip.block[1];
   const notes = notesColumn([...said, ...notesOf(part, writing)], options.unit, x0 + EDGE, bottom);
   const over: Box = [x0 + EDGE, y0 + EDGE, x1 - EDGE, notes.box[1] - 3];
@@ -71,7 +73,9 @@ function placeIn(rooms: readonly Box[], bounds: Box): { dx: number; dy: number }
 
 /** True where a narrower arrangement may still go in. */
 function nearlyFits(rooms: readonly Box[], bounds: Box): boolean {
-  return rooms.some((r) => bounds[3] - bounds[1] <= r[3] - r[1] && bounds[2] - bounds[0] <= r[2] - r[0] + NEARLY);
+  return rooms.some(
+    (r) => bounds[3] - bounds[1] <= r[3] - r[1] && bounds[2] - bounds[0] <= r[2] - r[0] + NEARLY,
+  );
 }
 
 function better(a: Tried, b: Tried | null): boolean {
@@ -89,7 +93,8 @@ function search(part: Part, scheme: Scheme, options: DrawingOptions, writing: Wr
   let clean = 0;
   let tried = 0;
   for (const attempt of attemptsFor(part, options)) {
-    if (best && best.place && best.arrangement.clashes === 0 && SCORE_WEIGHT * attempt.score >= best.rank) break;
+    if (best && best.place && best.arrangement.clashes === 0 && SCORE_WEIGHT * attempt.score >= best.rank)
+      break;
     const key = JSON.stringify(attempt.map);
     const kind = `${attempt.sheet} ${attempt.map.breaks.length}`;
     if (attempt.scale.factor >= (tooBig.get(kind) ?? Infinity)) continue;
@@ -99,12 +104,19 @@ function search(part: Part, scheme: Scheme, options: DrawingOptions, writing: Wr
     const base = ground(attempt, part, options, writing);
     let place = placeIn(base.rooms, arrangement.bounds);
     if (!place && nearlyFits(base.rooms, arrangement.bounds)) {
-      arrangement = cache.get(`narrow ${key}`) ?? arrange(part, scheme, attempt.map, writing, options.balloons, true);
+      arrangement =
+        cache.get(`narrow ${key}`) ?? arrange(part, scheme, attempt.map, writing, options.balloons, true);
       cache.set(`narrow ${key}`, arrangement);
       place = placeIn(base.rooms, arrangement.bounds);
     }
     if (!place) tooBig.set(kind, attempt.scale.factor);
-    const now: Tried = { attempt, arrangement, ground: base, place, rank: SCORE_WEIGHT * attempt.score + PRICE_WEIGHT * arrangement.price };
+    const now: Tried = {
+      attempt,
+      arrangement,
+      ground: base,
+      place,
+      rank: SCORE_WEIGHT * attempt.score + PRICE_WEIGHT * arrangement.price,
+    };
     if (better(now, best)) best = now;
     if (place && arrangement.clashes === 0 && ++clean >= COMPARED) break;
   }
@@ -115,7 +127,9 @@ function assemble(tried: Tried, options: DrawingOptions, writing: Writing): Shee
   const { attempt, arrangement, ground: base } = tried;
   const { dx, dy } = tried.place ?? { dx: 0, dy: 0 };
   const { width, height } = SHEET_SIZES[attempt.sheet];
-  const stamp = options.stamp ? [stampGroup(options.stamp, base.beside, frameBox(attempt.sheet)[2], base.foot.block[1])] : [];
+  const stamp = options.stamp
+    ? [stampGroup(options.stamp, base.beside, frameBox(attempt.sheet)[2], base.foot.block[1])]
+    : [];
   return {
     schemaVersion: 1,
     size: attempt.sheet,
@@ -144,19 +158,34 @@ function assemble(tried: Tried, options: DrawingOptions, writing: Writing): Shee
 }
 
 function nothingFits(part: Part, options: DrawingOptions, writing: Writing): Problem {
-  const say = (mm: number): string => `${formatLength(mm, { unit: writing.unit, style: writing.style })} ${writing.unit}`;
+  const say = (mm: number): string =>
+    `${formatLength(mm, { unit: writing.unit, style: writing.style })} ${writing.unit}`;
   const size = `${say(part.length)} long and ${say(part.maxDiameter)} in diameter`;
   const path = options.sheet !== 'auto' ? '--sheet' : options.scale !== 'auto' ? '--scale' : 'sheet';
-  const asked = options.sheet === 'auto' && options.scale === 'auto' ? 'any listed sheet at any listed scale' : 'the sheet and scale asked for';
-  return { path, message: `The part is ${size} and does not fit ${asked}. Choose a larger sheet, a smaller scale, or let both be chosen.` };
+  const asked =
+    options.sheet === 'auto' && options.scale === 'auto'
+      ? 'any listed sheet at any listed scale'
+      : 'the sheet and scale asked for';
+  return {
+    path,
+    message: `The part is ${size} and does not fit ${asked}. Choose a larger sheet, a smaller scale, or let both be chosen.`,
+  };
 }
 
 /**
  * Part and scheme to a finished sheet: views, sizes, balloons, notes, title block, the stamp of an unreleased sheet.
  * A problem when nothing listed holds the part. The same input gives the same sheet anywhere.
  */
-export function drawSheet(part: Part, scheme: Scheme, options: DrawingOptions): { sheet: Sheet } | { problem: Problem } {
-  const writing: Writing = { style: options.style, unit: options.unit, decimalSign: options.decimalSign ?? '.' };
+export function drawSheet(
+  part: Part,
+  scheme: Scheme,
+  options: DrawingOptions,
+): { sheet: Sheet } | { problem: Problem } {
+  const writing: Writing = {
+    style: options.style,
+    unit: options.unit,
+    decimalSign: options.decimalSign ?? '.',
+  };
   const best = search(part, scheme, options, writing);
   if (!best || !best.place) return { problem: nothingFits(part, options, writing) };
   return { sheet: assemble(best, options, writing) };

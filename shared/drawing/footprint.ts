@@ -40,7 +40,10 @@ function solverStrokes(marks: readonly Mark[]): PrintStroke[] {
   for (const mark of marks) {
     if (mark.type === 'polyline' && mark.line === 'arrow') {
       const [tip, a, b] = mark.points;
-      if (tip && a && b) out.push(printStroke({ line: 'arrow', x1: tip.x, y1: tip.y, x2: (a.x + b.x) / 2, y2: (a.y + b.y) / 2 }));
+      if (tip && a && b)
+        out.push(
+          printStroke({ line: 'arrow', x1: tip.x, y1: tip.y, x2: (a.x + b.x) / 2, y2: (a.y + b.y) / 2 }),
+        );
     } else if (mark.type === 'line') out.push(printStroke(mark));
     else if (mark.type !== 'text' && mark.type !== 'symbol') drawn.push(mark);
   }
@@ -150,15 +153,28 @@ export function compareFootprints(a: Footprint, b: Footprint): Verdict {
   for (const one of a.texts)
     for (const two of b.texts) {
       if (boxesMeet(one, two, TEXT_APART)) verdict.clashes += 1;
-      else if (one[1] < two[3] && two[1] < one[3] && one[0] < two[2] + ONE_NOTE && two[0] < one[2] + ONE_NOTE) verdict.cost += PRICE.textBesideText;
+      else if (one[1] < two[3] && two[1] < one[3] && one[0] < two[2] + ONE_NOTE && two[0] < one[2] + ONE_NOTE)
+        verdict.cost += PRICE.textBesideText;
     }
   textAgainstStrokes(a.texts, b, verdict);
   textAgainstStrokes(b.texts, a, verdict);
   const n = b.bounds;
   for (const one of a.strokes) {
-    if (one.x0 >= n[2] + LINES_APART || one.xe <= n[0] - LINES_APART || one.y0 >= n[3] + LINES_APART || one.ye <= n[1] - LINES_APART) continue;
+    if (
+      one.x0 >= n[2] + LINES_APART ||
+      one.xe <= n[0] - LINES_APART ||
+      one.y0 >= n[3] + LINES_APART ||
+      one.ye <= n[1] - LINES_APART
+    )
+      continue;
     for (const two of b.strokes) {
-      if (one.x0 >= two.xe + LINES_APART || one.xe <= two.x0 - LINES_APART || one.y0 >= two.ye + LINES_APART || one.ye <= two.y0 - LINES_APART) continue;
+      if (
+        one.x0 >= two.xe + LINES_APART ||
+        one.xe <= two.x0 - LINES_APART ||
+        one.y0 >= two.ye + LINES_APART ||
+        one.ye <= two.y0 - LINES_APART
+      )
+        continue;
       strokePair(one, two, verdict);
     }
   }

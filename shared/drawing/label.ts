@@ -4,9 +4,7 @@ import { ASCENT, DESCENT, fontSizeFor, textWidth } from './text-metrics';
 
 /** One piece of a size's writing. `stack` is a pair of limits one over the other. */
 export type Run =
-  | { kind: 'text'; text: string }
-  | { kind: 'diameter' }
-  | { kind: 'stack'; upper: string; lower: string };
+  { kind: 'text'; text: string } | { kind: 'diameter' } | { kind: 'stack'; upper: string; lower: string };
 
 /** A size's writing before it has a place: its runs, a second line under them, and its extent about the baseline. */
 export interface Label {
@@ -39,7 +37,13 @@ function runWidth(run: Run, letter: number, small: number): number {
 }
 
 /** Measures a label of the given runs; heights are letter heights in mm. */
-export function makeLabel(runs: readonly Run[], text: string, letter: number, small: number, under?: string): Label {
+export function makeLabel(
+  runs: readonly Run[],
+  text: string,
+  letter: number,
+  small: number,
+  under?: string,
+): Label {
   const size = fontSizeFor(letter);
   const smallSize = fontSizeFor(small);
   let width = runs.reduce((sum, run) => sum + runWidth(run, letter, small), 0);

@@ -16,7 +16,15 @@ function moveDrawn(mark: Drawn, dx: number, dy: number): Drawn {
         commands: mark.commands.map((c) => {
           if (c.op === 'Z') return c;
           if (c.op === 'C')
-            return { ...c, x1: c.x1 + dx, y1: c.y1 + dy, x2: c.x2 + dx, y2: c.y2 + dy, x: c.x + dx, y: c.y + dy };
+            return {
+              ...c,
+              x1: c.x1 + dx,
+              y1: c.y1 + dy,
+              x2: c.x2 + dx,
+              y2: c.y2 + dy,
+              x: c.x + dx,
+              y: c.y + dy,
+            };
           return { ...c, x: c.x + dx, y: c.y + dy };
         }),
       };

@@ -23,8 +23,19 @@ const CHANGED = 1e-4;
 export function profileMarks(body: Body, map: XMap, left: number, y: number): PicturePart[] {
   const profile = profileOf(body);
   const edges = { body, map, merge: MERGE };
-  const metal = [...axisOutline(profile, map).marks, ...shoulderEdges(profile, edges), ...flatsEdges(edges), ...threadMarks(edges)];
-  const own: XMap = { ...map, knots: [[body.x0, toPaper(map.knots, body.x0)], [body.x1, toPaper(map.knots, body.x1)]] };
+  const metal = [
+    ...axisOutline(profile, map).marks,
+    ...shoulderEdges(profile, edges),
+    ...flatsEdges(edges),
+    ...threadMarks(edges),
+  ];
+  const own: XMap = {
+    ...map,
+    knots: [
+      [body.x0, toPaper(map.knots, body.x0)],
+      [body.x1, toPaper(map.knots, body.x1)],
+    ],
+  };
   return [
     { class: 'metal', marks: moveMarks(metal, left, y) },
     { class: 'axis', marks: moveMarks([axisCentreLine(own, 3)], left, y) },
@@ -34,7 +45,10 @@ export function profileMarks(body: Body, map: XMap, left: number, y: number): Pi
 function upperAt(body: Body, x: number): number {
   if (x < body.x0 || x > body.x1) return 0;
   const r = radiusAt(body.outer, x, 'right');
-  return reach(r, flatsOf(body).filter((c) => c.from <= x && x <= c.to)).top;
+  return reach(
+    r,
+    flatsOf(body).filter((c) => c.from <= x && x <= c.to),
+  ).top;
 }
 
 /** What this set-up has cut, as heavy edges of the work after it. */
@@ -48,14 +62,18 @@ export function changedEdges(before: Body, after: Body, map: XMap, left: number,
     }
     run = [];
   };
-  const stations = [...after.outer.flatMap((p) => [p.from, p.to]), ...flatsOf(after).flatMap((c) => [c.from, c.to])];
+  const stations = [
+    ...after.outer.flatMap((p) => [p.from, p.to]),
+    ...flatsOf(after).flatMap((c) => [c.from, c.to]),
+  ];
   for (let i = 0; i <= SAMPLES; i++) stations.push(after.x0 + ((after.x1 - after.x0) * i) / SAMPLES);
   const sorted = [...new Set(stations)].filter((x) => x >= after.x0 && x <= after.x1).sort((p, q) => p - q);
   sorted.forEach((x, i) => {
     const next = sorted[i + 1];
     if (next === undefined) return;
     const middle = (x + next) / 2;
-    const changed = newCutAt(before, after, middle) || upperAt(before, middle) - upperAt(after, middle) > CHANGED;
+    const changed =
+      newCutAt(before, after, middle) || upperAt(before, middle) - upperAt(after, middle) > CHANGED;
     if (!changed) {
       flush();
       return;
@@ -75,7 +93,11 @@ export function changedEdges(before: Body, after: Body, map: XMap, left: number,
 }
 
 function newCutAt(before: Body, after: Body, x: number): boolean {
-  const over = (b: Body): number => [...b.cuts.filter((c) => 'from' in c && c.from <= x && x <= c.to), ...b.treatments.filter((t) => t.from <= x && x <= t.to)].length;
+  const over = (b: Body): number =>
+    [
+      ...b.cuts.filter((c) => 'from' in c && c.from <= x && x <= c.to),
+      ...b.treatments.filter((t) => t.from <= x && x <= t.to),
+    ].length;
   return over(after) > over(before);
 }
 
@@ -86,9 +108,21 @@ function face(body: Body, inside: number, x: number, map: XMap): Mark {
 }
 
 /** Hatched jaws over and under the held length. */
-export function heldParts(body: Body, map: XMap, left: number, y: number, grip: { from: number; to: number }, thick: number): PicturePart[] {
+export function heldParts(
+  body: Body,
+  map: XMap,
+  left: number,
+  y: number,
+  grip: { from: number; to: number },
+  thick: number,
+): PicturePart[] {
   if (grip.to - grip.from < 1e-6) return [];
-  const r = Math.max(upperAt(body, grip.from + 1e-6), upperAt(body, grip.to - 1e-6), upperAt(body, (grip.from + grip.to) / 2)) * map.scale;
+  const r =
+    Math.max(
+      upperAt(body, grip.from + 1e-6),
+      upperAt(body, grip.to - 1e-6),
+      upperAt(body, (grip.from + grip.to) / 2),
+    ) * map.scale;
   const x0 = left + toPaper(map.knots, grip.from);
   const x1 = left + toPaper(map.knots, grip.to);
   const marks = [-1, 1].flatMap((way): Mark[] => {
@@ -96,7 +130,17 @@ export function heldParts(body: Body, map: XMap, left: number, y: number, grip: 
     const far = y + way * (r + 0.6 + thick);
     const [top, bottom] = [Math.min(near, far), Math.max(near, far)];
     return [
-      { type: 'polyline', line: 'thin', closed: true, points: [{ x: x0, y: top }, { x: x1, y: top }, { x: x1, y: bottom }, { x: x0, y: bottom }] },
+      {
+        type: 'polyline',
+        line: 'thin',
+        closed: true,
+        points: [
+          { x: x0, y: top },
+          { x: x1, y: top },
+          { x: x1, y: bottom },
+          { x: x0, y: bottom },
+        ],
+      },
       ...hatch(x0, x1, top, bottom),
     ];
   });

@@ -68,7 +68,10 @@ export function pairPicture(before: Body, after: Body, setUp: PictureSetUp, size
   const centreRoom = setUp.support === 'centre' ? 16 : 0;
   const room = (height - (stops.length > 0 ? STOP_ROOM : 0)) / 2;
   const tall = Math.max(widest(a), widest(b));
-  const scale = Math.min((width - 2 * MARGIN - centreRoom) / (to - from), (room - 2 * (JAW + 2)) / (2 * tall));
+  const scale = Math.min(
+    (width - 2 * MARGIN - centreRoom) / (to - from),
+    (room - 2 * (JAW + 2)) / (2 * tall),
+  );
   const map = makeXMap(from, to, scale, [], 0);
   const left = MARGIN + Math.max(0, (width - 2 * MARGIN - centreRoom - (to - from) * scale) / 2);
   const grip = { from: Math.max(gripFrom, from), to: Math.min(gripTo, to) };
@@ -82,7 +85,10 @@ export function pairPicture(before: Body, after: Body, setUp: PictureSetUp, size
     ...heldParts(b, map, left, lower, grip, JAW),
   ];
   if (setUp.support === 'centre')
-    parts.push(tailCentre(left + toPaper(map.knots, a.x1), upper), tailCentre(left + toPaper(map.knots, b.x1), lower));
+    parts.push(
+      tailCentre(left + toPaper(map.knots, a.x1), upper),
+      tailCentre(left + toPaper(map.knots, b.x1), lower),
+    );
   if (stops.length > 0) parts.push(stopLine(stops, map, left, lower + tall * scale + JAW + 3));
   return { width, height, parts };
 }

@@ -46,7 +46,10 @@ export function reach(r: number, cuts: readonly FlatsCut[]): { top: number; bott
     const freeUp = angles.every((a) => r * Math.cos(a) <= cut.distance + 1e-9);
     const freeDown = angles.every((a) => -r * Math.cos(a) <= cut.distance + 1e-9);
     const w = faceHalfWidth(cut, r);
-    const ys = angles.flatMap((a) => [cut.distance * Math.cos(a) - w * Math.sin(a), cut.distance * Math.cos(a) + w * Math.sin(a)]);
+    const ys = angles.flatMap((a) => [
+      cut.distance * Math.cos(a) - w * Math.sin(a),
+      cut.distance * Math.cos(a) + w * Math.sin(a),
+    ]);
     if (!freeUp) top = Math.min(top, Math.max(...ys));
     if (!freeDown) bottom = Math.min(bottom, -Math.min(...ys));
   }
@@ -69,12 +72,16 @@ function stationsWithin(piece: Piece, body: Body): number[] {
 }
 
 function spanOver(piece: Piece, body: Body, from: number, to: number): ProfileSpan {
-  const cuts = cutsOver(body, from, to).filter((cut) => Math.max(pieceRadius(piece, from), pieceRadius(piece, to)) > cut.distance + 1e-9);
+  const cuts = cutsOver(body, from, to).filter(
+    (cut) => Math.max(pieceRadius(piece, from), pieceRadius(piece, to)) > cut.distance + 1e-9,
+  );
   const at = (x: number): ProfilePoint => ({ x, ...reach(pieceRadius(piece, x), cuts) });
   if (cuts.length === 0 && piece.kind === 'arc') return { from, to, points: [at(from), at(to)], arc: piece };
   const plain = cuts.length === 0 || (piece.kind === 'line' && piece.start === piece.end);
   const steps = plain ? 1 : CURVE_STEPS;
-  const points = Array.from({ length: steps + 1 }, (_, i) => at(i === steps ? to : from + ((to - from) * i) / steps));
+  const points = Array.from({ length: steps + 1 }, (_, i) =>
+    at(i === steps ? to : from + ((to - from) * i) / steps),
+  );
   return { from, to, points };
 }
 
@@ -83,7 +90,8 @@ export function profileOf(body: Body): ProfileSpan[] {
   const spans: ProfileSpan[] = [];
   for (const piece of body.outer) {
     const stations = stationsWithin(piece, body);
-    for (let i = 0; i + 1 < stations.length; i++) spans.push(spanOver(piece, body, stations[i] ?? 0, stations[i + 1] ?? 0));
+    for (let i = 0; i + 1 < stations.length; i++)
+      spans.push(spanOver(piece, body, stations[i] ?? 0, stations[i + 1] ?? 0));
   }
   return spans;
 }

@@ -27,7 +27,9 @@ function saidBy(mm: number, decimals: number): boolean {
 function inchDecimals(size: Size): number {
   const kind = size.tolerance.kind;
   if (kind === 'general' || kind === 'none' || kind === 'thread-class') return INCH_DECIMALS;
-  return saidBy(size.tolerance.upper, INCH_DECIMALS) && saidBy(size.tolerance.lower, INCH_DECIMALS) ? INCH_DECIMALS : 4;
+  return saidBy(size.tolerance.upper, INCH_DECIMALS) && saidBy(size.tolerance.lower, INCH_DECIMALS)
+    ? INCH_DECIMALS
+    : 4;
 }
 
 /** The format of one size's figures. */
@@ -55,7 +57,11 @@ function degrees(value: number, writing: Writing): string {
 }
 
 /** What stands before and after the figure, by kind. */
-function dressing(size: Size, format: LengthFormat, writing: Writing): { runs: Run[]; text: string; under?: string } {
+function dressing(
+  size: Size,
+  format: LengthFormat,
+  writing: Writing,
+): { runs: Run[]; text: string; under?: string } {
   const figure = (): string => formatLength(size.nominal, format);
   const words = (text: string): { runs: Run[]; text: string } => ({ runs: [{ kind: 'text', text }], text });
   switch (size.kind) {
@@ -100,7 +106,8 @@ function joinTexts(runs: readonly Run[]): Run[] {
   const joined: Run[] = [];
   for (const run of runs) {
     const last = joined[joined.length - 1];
-    if (run.kind === 'text' && last?.kind === 'text') joined[joined.length - 1] = { kind: 'text', text: last.text + run.text };
+    if (run.kind === 'text' && last?.kind === 'text')
+      joined[joined.length - 1] = { kind: 'text', text: last.text + run.text };
     else joined.push(run);
   }
   return joined;

@@ -28,7 +28,9 @@ function arcPoints(x1: number, y1: number, r: number, large: 0 | 1, sweep: 0 | 1
   const steps = Math.max(1, Math.ceil(Math.abs(turn) / FLATTEN));
   return Array.from({ length: steps }, (_, i) => {
     const angle = start + (turn * (i + 1)) / steps;
-    return i === steps - 1 ? { x: x2, y: y2 } : { x: cx + radius * Math.cos(angle), y: cy + radius * Math.sin(angle) };
+    return i === steps - 1
+      ? { x: x2, y: y2 }
+      : { x: cx + radius * Math.cos(angle), y: cy + radius * Math.sin(angle) };
   });
 }
 

@@ -7,7 +7,13 @@ export interface XMap {
 }
 
 /** The map of a part drawn from `from` to `to`, the spans in `breaks` (in order) drawn as a gap of `gap` mm. */
-export function makeXMap(from: number, to: number, scale: number, breaks: readonly (readonly [number, number])[], gap: number): XMap {
+export function makeXMap(
+  from: number,
+  to: number,
+  scale: number,
+  breaks: readonly (readonly [number, number])[],
+  gap: number,
+): XMap {
   const knots: [number, number][] = [[from, 0]];
   let paper = 0;
   let last = from;

@@ -1,4 +1,14 @@
-import type { CircleMark, Group, LineMark, LineType, Mark, PathMark, PolylineMark, Sheet, TextMark } from '../drawing/sheet';
+import type {
+  CircleMark,
+  Group,
+  LineMark,
+  LineType,
+  Mark,
+  PathMark,
+  PolylineMark,
+  Sheet,
+  TextMark,
+} from '../drawing/sheet';
 import { lineLook } from '../drawing/line-look';
 import type { Picture } from '../drawing/picture';
 
@@ -76,7 +86,8 @@ function groupSvg(group: Group): string {
   if (group.forView !== undefined) attributes.push(`data-for-view="${escape(group.forView)}"`);
   if (group.sizeKind !== undefined) attributes.push(`data-kind="${group.sizeKind}"`);
   if (group.value !== undefined) attributes.push(`data-value="${Number(group.value.toFixed(6))}"`);
-  if (group.reference !== undefined) attributes.push(`data-reference="${group.reference ? 'true' : 'false'}"`);
+  if (group.reference !== undefined)
+    attributes.push(`data-reference="${group.reference ? 'true' : 'false'}"`);
   return `<g ${attributes.join(' ')}>\n${group.marks.map(markSvg).join('\n')}\n</g>`;
 }
 
@@ -97,15 +108,24 @@ export function renderSvg(sheet: Sheet): string {
   ].join('\n');
 }
 
-
 /** Line widths of a picture, in its own units: what was cut is twice as heavy as the rest. */
-const PICTURE_WIDTHS: Readonly<Record<string, number>> = { metal: 1, cut: 2.2, axis: 0.6, held: 0.7, centre: 0.9, stops: 0.8 };
+const PICTURE_WIDTHS: Readonly<Record<string, number>> = {
+  metal: 1,
+  cut: 2.2,
+  axis: 0.6,
+  held: 0.7,
+  centre: 0.9,
+  stops: 0.8,
+};
 
 /** A picture as SVG that fills whatever holds it; its classes (`metal`, `cut`, `held` …) are for the screen's own colours. */
 export function renderPicture(picture: Picture): string {
   const groups = picture.parts.map((part) => {
     const width = PICTURE_WIDTHS[part.class] ?? 1;
-    const marks = part.marks.map(markSvg).join('').replace(/stroke-width="[^"]*"/g, `stroke-width="${width}"`);
+    const marks = part.marks
+      .map(markSvg)
+      .join('')
+      .replace(/stroke-width="[^"]*"/g, `stroke-width="${width}"`);
     return `<g class="${part.class}">${marks}</g>`;
   });
   return (

@@ -41,12 +41,17 @@ export interface Asked {
 }
 
 /** Typed values to part and scheme. @throws when the values are refused: a test's own mistake */
-export function partAndScheme(template: string, typed: TypedValues, asked: Asked): { part: Part; scheme: Scheme } {
+export function partAndScheme(
+  template: string,
+  typed: TypedValues,
+  asked: Asked,
+): { part: Part; scheme: Scheme } {
   const family = templateById(template);
   if (!family) throw new Error(`No template ${template}`);
   const evaluation = evaluate(family, typed, { entryUnit: asked.entryUnit ?? 'mm' });
   const { part } = evaluation;
-  if (!part) throw new Error(`${template}: ${evaluation.problems.map((p) => `${p.path}: ${p.message}`).join('; ')}`);
+  if (!part)
+    throw new Error(`${template}: ${evaluation.problems.map((p) => `${p.path}: ${p.message}`).join('; ')}`);
   const generalTolerance = asked.style === 'asme' && asked.unit === 'in' ? 'shop-inch' : 'ISO 2768-m';
   return { part, scheme: buildScheme(family, { ...evaluation, part }, { generalTolerance }) };
 }

@@ -24,14 +24,22 @@ const styles: readonly (readonly [DraftingStyle, 'mm' | 'in'])[] = [
 ];
 
 /** Draws the part and says what is wrong with its sheet, with the values it came from. */
-function faultsOf(template: string, typed: TypedValues, style: DraftingStyle, unit: 'mm' | 'in', twice: boolean): string[] {
+function faultsOf(
+  template: string,
+  typed: TypedValues,
+  style: DraftingStyle,
+  unit: 'mm' | 'in',
+  twice: boolean,
+): string[] {
   const { part, scheme } = partAndScheme(template, typed, { style, unit });
   const sheet: Sheet = draw(part, scheme, { style, unit });
   const svg = renderSvg(sheet);
   const faults = checkSheet(sheet, scheme, part).map((f) => `${f.rule}: ${f.message}`);
   if (/NaN|Infinity|undefined/.test(svg)) faults.push('the SVG holds what is no number');
-  if (sheet.groups.filter((g) => g.role === 'dimension').length !== scheme.sizes.length) faults.push('sizes are missing');
-  if (twice && renderSvg(draw(part, scheme, { style, unit })) !== svg) faults.push('the same values gave other bytes');
+  if (sheet.groups.filter((g) => g.role === 'dimension').length !== scheme.sizes.length)
+    faults.push('sizes are missing');
+  if (twice && renderSvg(draw(part, scheme, { style, unit })) !== svg)
+    faults.push('the same values gave other bytes');
   return faults.map((fault) => `${style} ${unit} ${fault} of ${JSON.stringify(typed)}`);
 }
 
@@ -43,7 +51,10 @@ describe.each(families)('%s', (template, values) => {
       const faults = values.slice(from, from + CHUNK).flatMap((typed, i) => {
         const other = unit === 'mm' ? 'in' : 'mm';
         const also = i % ALSO === 0;
-        return [...faultsOf(template, typed, style, unit, also), ...(also ? faultsOf(template, typed, style, other, false) : [])];
+        return [
+          ...faultsOf(template, typed, style, unit, also),
+          ...(also ? faultsOf(template, typed, style, other, false) : []),
+        ];
       });
       expect(faults).toEqual([]);
     },

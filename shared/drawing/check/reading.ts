@@ -49,7 +49,8 @@ function readGroup(group: Group, index: number): ReadGroup {
   const texts: ReadText[] = [];
   const arrows: Point[] = [];
   for (const mark of group.marks) {
-    if (mark.type === 'text' && !mark.faint) texts.push({ box: textBox(mark), text: mark.text, symbol: false });
+    if (mark.type === 'text' && !mark.faint)
+      texts.push({ box: textBox(mark), text: mark.text, symbol: false });
     else if (mark.type === 'symbol') texts.push({ box: mark.box, text: mark.name, symbol: true });
     else if (mark.type === 'polyline' && mark.line === 'arrow' && mark.points[0]) arrows.push(mark.points[0]);
   }

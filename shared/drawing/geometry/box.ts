@@ -28,6 +28,9 @@ export function growBox(box: Box, by: number): Box {
 /** True where `inner` lies wholly inside `outer`. */
 export function boxInside(inner: Box, outer: Box, slack = 0): boolean {
   return (
-    inner[0] >= outer[0] - slack && inner[1] >= outer[1] - slack && inner[2] <= outer[2] + slack && inner[3] <= outer[3] + slack
+    inner[0] >= outer[0] - slack &&
+    inner[1] >= outer[1] - slack &&
+    inner[2] <= outer[2] + slack &&
+    inner[3] <= outer[3] + slack
   );
 }

@@ -37,7 +37,8 @@ export interface Arrangement {
 const CUT_PRICE = 0.25;
 const BALLOON_ROOM = 16;
 /** Clean candidates a size that the chooser gets, and how many are worked out to find them. */
-const PLAIN_WORK = { enough: 14, most: 60 } as const;
+const PLAIN_WORK = { enough: 10, most: 40 } as const;
+const NARROW_WORK = { enough: 45, most: 180 } as const;
 const DENSE_WORK = { enough: 70, most: 260 } as const;
 /** Price of a millimetre past the ends of the view: little, or much where the sheet is narrow. */
 const OVERHANG = { roomy: 0.02, narrow: 0.2 } as const;
@@ -54,13 +55,23 @@ interface Drawing {
   onLine?: boolean;
 }
 
-function chooseSizes(paper: AxisPaper, readies: readonly ReadySize[], lengths: readonly PlacedSize[], narrow: boolean) {
+function chooseSizes(
+  paper: AxisPaper,
+  readies: readonly ReadySize[],
+  lengths: readonly PlacedSize[],
+  narrow: boolean,
+) {
   const fixed = lengths.map((l) => l.candidate.print);
   const attempt = (dense: boolean): { placed: PlacedSize[]; clashes: number; cost: number } => {
     const options = readies.map((ready) => {
-      const drafts = ready.size.anchor.kind === 'across' ? diameterDrafts(paper, ready) : noteDrafts(paper, ready, dense);
-      const { enough, most } = dense || narrow ? DENSE_WORK : PLAIN_WORK;
-      return weighDrafts(drafts, paper.print, fixed, { enough, most, overhang: narrow ? OVERHANG.narrow : OVERHANG.roomy });
+      const drafts =
+        ready.size.anchor.kind === 'across' ? diameterDrafts(paper, ready) : noteDrafts(paper, ready, dense);
+      const { enough, most } = dense ? DENSE_WORK : narrow ? NARROW_WORK : PLAIN_WORK;
+      return weighDrafts(drafts, paper.print, fixed, {
+        enough,
+        most,
+        overhang: narrow ? OVERHANG.narrow : OVERHANG.roomy,
+      });
     });
     const able = readies.map((_, i) => i).filter((i) => (options[i]?.length ?? 0) > 0);
     const choice = choose(able.map((i) => options[i] ?? []));
@@ -103,14 +114,22 @@ interface PlacedEnd {
   centre: number;
 }
 
-function placeEnd(part: Part, paper: AxisPaper, readies: readonly ReadySize[], bounds: Box, apart: number): PlacedEnd {
+function placeEnd(
+  part: Part,
+  paper: AxisPaper,
+  readies: readonly ReadySize[],
+  bounds: Box,
+  apart: number,
+): PlacedEnd {
   const { rules, writing, map } = paper;
   const view = endView(part.body, endToShow(part, writing), map.scale, rules.mergeOutlines, rules.centrePast);
   const drawn = readies.flatMap((ready) => {
     const candidate = flatsSize(view, ready, map.scale, rules, writing.style);
     return candidate ? [{ ready, candidate }] : [];
   });
-  const own = boxAround([footprintOf(view.marks).bounds, ...drawn.map((d) => d.candidate.print.bounds)]) ?? [0, 0, 0, 0];
+  const own = boxAround([footprintOf(view.marks).bounds, ...drawn.map((d) => d.candidate.print.bounds)]) ?? [
+    0, 0, 0, 0,
+  ];
   const right = standsRight(view.name, writing);
   const centre = right ? bounds[2] + apart - own[0] : bounds[0] - apart - own[2];
   return {
@@ -121,7 +140,12 @@ function placeEnd(part: Part, paper: AxisPaper, readies: readonly ReadySize[], b
       view: view.name,
       ready,
       marks: moveMarks(candidate.marks, centre, 0),
-      text: [candidate.textBox[0] + centre, candidate.textBox[1], candidate.textBox[2] + centre, candidate.textBox[3]],
+      text: [
+        candidate.textBox[0] + centre,
+        candidate.textBox[1],
+        candidate.textBox[2] + centre,
+        candidate.textBox[3],
+      ],
       rotate: candidate.rotate,
     })),
   };
@@ -142,36 +166,64 @@ function sizeGroup(drawing: Drawing): Group {
 }
 
 /** Lays out the whole drawing at one scale; `balloons` also numbers the sizes; `narrow` saves width where it can. */
-export function arrange(part: Part, scheme: Scheme, map: XMap, writing: Writing, balloons: boolean, narrow = false): Arrangement {
+export function arrange(
+  part: Part,
+  scheme: Scheme,
+  map: XMap,
+  writing: Writing,
+  balloons: boolean,
+  narrow = false,
+): Arrangement {
   const paper = axisView(part, map, writing);
   const readies = scheme.sizes.map((size): ReadySize => ({ size, label: sizeLabel(size, writing) }));
   const hasEnd = needsEndView(part.body) && flatsCanBeSeen(part);
-  const inEnd = readies.filter((r) => hasEnd && r.size.anchor.kind === 'flats' && r.size.kind === 'across-flats');
-  const lengths = stackLengths(paper, readies.filter((r) => r.size.anchor.kind === 'span'));
+  const inEnd = readies.filter(
+    (r) => hasEnd && r.size.anchor.kind === 'flats' && r.size.kind === 'across-flats',
+  );
+  const lengths = stackLengths(
+    paper,
+    readies.filter((r) => r.size.anchor.kind === 'span'),
+  );
   const others = readies.filter((r) => r.size.anchor.kind !== 'span' && !inEnd.includes(r));
   const chosen = chooseSizes(paper, others, lengths, narrow);
   const placed = [...lengths, ...chosen.placed];
   const cutMarks = interrupt(placed.map((p) => p.candidate.marks));
-  const drawings = placed.map(
-    (p, i): Drawing => ({
-      view: p.forView,
-      ready: p.ready,
-      marks: cutMarks.marks[i] ?? p.candidate.marks,
-      text: p.candidate.textBox,
-      rotate: p.candidate.rotate,
-      onLine: p.candidate.form === 'lane' && writing.style === 'iso',
-    }),
-  );
-  const axisBounds = boxAround([paper.print.bounds, ...drawings.map((d) => footprintOf(d.marks).bounds)]) ?? paper.print.bounds;
-  const end = hasEnd ? placeEnd(part, paper, inEnd, axisBounds, narrow ? NARROW_APART : paper.rules.viewsApart) : null;
+  const drawings = placed.map((p, i): Drawing => ({
+    view: p.forView,
+    ready: p.ready,
+    marks: cutMarks.marks[i] ?? p.candidate.marks,
+    text: p.candidate.textBox,
+    rotate: p.candidate.rotate,
+    onLine: p.candidate.form === 'lane' && writing.style === 'iso',
+  }));
+  const axisBounds =
+    boxAround([paper.print.bounds, ...drawings.map((d) => footprintOf(d.marks).bounds)]) ??
+    paper.print.bounds;
+  const end = hasEnd
+    ? placeEnd(part, paper, inEnd, axisBounds, narrow ? NARROW_APART : paper.rules.viewsApart)
+    : null;
   const lostFlats = end ? inEnd.filter((r) => !end.sizes.some((s) => s.ready === r)) : [];
-  const all = [...drawings, ...(end?.sizes ?? [])].sort((a, b) => scheme.sizes.indexOf(a.ready.size) - scheme.sizes.indexOf(b.ready.size));
+  const all = [...drawings, ...(end?.sizes ?? [])].sort(
+    (a, b) => scheme.sizes.indexOf(a.ready.size) - scheme.sizes.indexOf(b.ready.size),
+  );
   const viewMarks = [...paper.marks, ...(end?.marks ?? [])];
-  const bounds = boxAround([axisBounds, ...(end ? [footprintOf(end.marks).bounds, ...end.sizes.map((s) => footprintOf(s.marks).bounds)] : [])]) ?? axisBounds;
-  const numbered = balloons ? number(all, viewMarks, bounds, paper.rules.balloonRadius) : { groups: [], lost: [] };
+  const bounds =
+    boxAround([
+      axisBounds,
+      ...(end ? [footprintOf(end.marks).bounds, ...end.sizes.map((s) => footprintOf(s.marks).bounds)] : []),
+    ]) ?? axisBounds;
+  const numbered = balloons
+    ? number(all, viewMarks, bounds, paper.rules.balloonRadius)
+    : { groups: [], lost: [] };
   const total = boxAround([bounds, ...numbered.groups.map((g) => footprintOf(g.marks).bounds)]) ?? bounds;
   const groups: Group[] = [
-    { role: 'view', view: 'axis', scale: map.scale, broken: map.breaks.length > 0 ? true : undefined, marks: paper.marks },
+    {
+      role: 'view',
+      view: 'axis',
+      scale: map.scale,
+      broken: map.breaks.length > 0 ? true : undefined,
+      marks: paper.marks,
+    },
     ...(end ? [{ role: 'view' as const, view: end.view.name, scale: map.scale, marks: end.marks }] : []),
     ...all.map(sizeGroup),
     ...numbered.groups,
@@ -185,18 +237,37 @@ export function arrange(part: Part, scheme: Scheme, map: XMap, writing: Writing,
     maps,
     bounds: total,
     clashes: chosen.clashes + lostFlats.length + numbered.lost.length,
-    price: (chosen.cost + lengths.reduce((sum, l) => sum + l.candidate.cost, 0) + CUT_PRICE * cutMarks.cuts) / Math.max(1, all.length),
+    price:
+      (chosen.cost + lengths.reduce((sum, l) => sum + l.candidate.cost, 0) + CUT_PRICE * cutMarks.cuts) /
+      Math.max(1, all.length),
     lost: numbered.lost,
   };
 }
 
-function number(all: readonly Drawing[], viewMarks: readonly Mark[], bounds: Box, r: number): { groups: Group[]; lost: readonly string[] } {
+function number(
+  all: readonly Drawing[],
+  viewMarks: readonly Mark[],
+  bounds: Box,
+  r: number,
+): { groups: Group[]; lost: readonly string[] } {
   const wishes = all
     .filter((d) => d.ready.size.balloon > 0)
-    .map((d): BalloonWish => ({ number: d.ready.size.balloon, sizeId: d.ready.size.id, text: d.text, rotate: d.rotate, onLine: d.onLine }));
+    .map((d): BalloonWish => ({
+      number: d.ready.size.balloon,
+      sizeId: d.ready.size.id,
+      text: d.text,
+      rotate: d.rotate,
+      onLine: d.onLine,
+    }));
   const marks = [...viewMarks, ...all.flatMap((d) => d.marks)];
   const room = (x: number, y: number, radius: number): boolean =>
-    x - radius > bounds[0] - BALLOON_ROOM && x + radius < bounds[2] + BALLOON_ROOM && y - radius > bounds[1] - BALLOON_ROOM && y + radius < bounds[3] + BALLOON_ROOM;
+    x - radius > bounds[0] - BALLOON_ROOM &&
+    x + radius < bounds[2] + BALLOON_ROOM &&
+    y - radius > bounds[1] - BALLOON_ROOM &&
+    y + radius < bounds[3] + BALLOON_ROOM;
   const placed = placeBalloons(wishes, { texts: textBoxesOf(marks), strokes: strokesOf(marks) }, room, r);
-  return { groups: placed.balloons.map((b): Group => ({ role: 'balloon', sizeId: b.sizeId, marks: b.marks })), lost: placed.lost };
+  return {
+    groups: placed.balloons.map((b): Group => ({ role: 'balloon', sizeId: b.sizeId, marks: b.marks })),
+    lost: placed.lost,
+  };
 }

@@ -9,6 +9,8 @@ import { toPaper } from '../x-map';
 import type { XMap } from '../x-map';
 
 const SAME = 1e-6;
+/** Where curves part for good, mm on paper: under it they print as one line that thins out. */
+const PARTING = 0.25;
 /** A bend of the outline under this (radians) is no edge. */
 const LEAST_BEND = 0.01;
 
@@ -26,7 +28,8 @@ function slopeAt(span: ProfileSpan, end: 'start' | 'end'): number {
     return r === 0 ? -Infinity : -(x - span.arc.centreX) / r;
   }
   const n = span.points.length;
-  const [a, b] = end === 'start' ? [span.points[0], span.points[1]] : [span.points[n - 2], span.points[n - 1]];
+  const [a, b] =
+    end === 'start' ? [span.points[0], span.points[1]] : [span.points[n - 2], span.points[n - 1]];
   return a && b && b.x > a.x ? (b.top - a.top) / (b.x - a.x) : 0;
 }
 
@@ -69,14 +72,23 @@ export function shoulderEdges(profile: readonly ProfileSpan[], { body, map, merg
     const r = radiusAt(body.outer, left.to, 'left');
     const stepped = Math.abs(r - radiusAt(body.outer, left.to, 'right')) > SAME;
     if (stepped) {
-      marks.push(lineMark('visible', x, -Math.min(a.top, b.top) * map.scale, x, Math.min(a.bottom, b.bottom) * map.scale));
+      marks.push(
+        lineMark(
+          'visible',
+          x,
+          -Math.min(a.top, b.top) * map.scale,
+          x,
+          Math.min(a.bottom, b.bottom) * map.scale,
+        ),
+      );
       continue;
     }
     if (Math.abs(a.top - b.top) > SAME || Math.abs(a.bottom - b.bottom) > SAME) continue;
     const bend = Math.abs(Math.atan(slopeAt(left, 'end')) - Math.atan(slopeAt(right, 'start')));
     if (bend < LEAST_BEND) continue;
     for (const [low, high] of seenEdge(r, cutsTouching(body, left.to)))
-      if ((high - low) * map.scale >= merge) marks.push(lineMark('visible', x, -high * map.scale, x, -low * map.scale));
+      if ((high - low) * map.scale >= merge)
+        marks.push(lineMark('visible', x, -high * map.scale, x, -low * map.scale));
   }
   return marks;
 }
@@ -132,7 +144,14 @@ function longEdges(cut: FlatsCut, body: Body, map: XMap, merge: number): Mark[] 
   const angles = faceAngles(cut);
   const half = (x: number): number => {
     const r = Math.max(radiusAt(body.outer, x, 'left'), radiusAt(body.outer, x, 'right'));
-    return faceHalfWidth(cut, x >= cut.to - SAME ? radiusAt(body.outer, x, 'left') : x <= cut.from + SAME ? radiusAt(body.outer, x, 'right') : r);
+    return faceHalfWidth(
+      cut,
+      x >= cut.to - SAME
+        ? radiusAt(body.outer, x, 'left')
+        : x <= cut.from + SAME
+          ? radiusAt(body.outer, x, 'right')
+          : r,
+    );
   };
   const edge = (angle: number, side: 1 | -1): Point[] =>
     stations.map((x) => {
@@ -169,8 +188,20 @@ function longEdges(cut: FlatsCut, body: Body, map: XMap, merge: number): Mark[] 
   return marks.filter((mark) => !hugsOutline(mark, body, map, merge));
 }
 
+/** Two curves that part for good are drawn from where they leave one another; two that never do are one line. */
+function partingWidth(one: readonly Point[], two: readonly Point[], merge: number): number {
+  const widest = Math.max(...one.map((p, i) => Math.abs(p.y - (two[i]?.y ?? p.y))));
+  return widest >= merge ? Math.min(merge, PARTING) : merge;
+}
+
 /** One line where the two edges of a rounded corner would print as a blot, two from where they part. */
-function drawCorner(one: readonly Point[], two: readonly Point[], merge: number, draw: (p: readonly Point[]) => void): void {
+function drawCorner(
+  one: readonly Point[],
+  two: readonly Point[],
+  least: number,
+  draw: (p: readonly Point[]) => void,
+): void {
+  const merge = partingWidth(one, two, least);
   let joint: Point[] = [];
   let a: Point[] = [];
   let b: Point[] = [];
@@ -210,7 +241,13 @@ function drawCorner(one: readonly Point[], two: readonly Point[], merge: number,
 }
 
 /** The parts of an edge that stand clear of the outline, each begun and ended on it. */
-function drawLeaving(edge: readonly Point[], outline: readonly Point[], merge: number, draw: (p: readonly Point[]) => void): void {
+function drawLeaving(
+  edge: readonly Point[],
+  outline: readonly Point[],
+  least: number,
+  draw: (p: readonly Point[]) => void,
+): void {
+  const merge = partingWidth(edge, outline, least);
   let run: Point[] = [];
   edge.forEach((p, i) => {
     const o = outline[i];
@@ -232,7 +269,12 @@ function straightened(points: readonly Point[]): Point[] {
     const last = out[out.length - 1];
     const before = out[out.length - 2];
     if (last && Math.hypot(p.x - last.x, p.y - last.y) < 1e-4) continue;
-    if (last && before && Math.abs((last.x - before.x) * (p.y - before.y) - (last.y - before.y) * (p.x - before.x)) < 1e-4) out.pop();
+    if (
+      last &&
+      before &&
+      Math.abs((last.x - before.x) * (p.y - before.y) - (last.y - before.y) * (p.x - before.x)) < 1e-4
+    )
+      out.pop();
     out.push(p);
   }
   return out;
@@ -240,7 +282,9 @@ function straightened(points: readonly Point[]): Point[] {
 
 function hugsOutline(mark: Mark, body: Body, map: XMap, merge: number): boolean {
   if (mark.type !== 'polyline') return false;
-  const highest = Math.max(...body.outer.map((p) => (p.kind === 'line' ? Math.max(p.start, p.end) : p.radius)));
+  const highest = Math.max(
+    ...body.outer.map((p) => (p.kind === 'line' ? Math.max(p.start, p.end) : p.radius)),
+  );
   return mark.points.every((p) => Math.abs(p.y) > highest * map.scale - merge);
 }
 
@@ -259,7 +303,10 @@ function threadLines(thread: ThreadTreatment, body: Body, map: XMap, merge: numb
     const from = firstAbove(body, thread.from, thread.to, root);
     const to = firstAbove(body, thread.to, thread.from, root);
     const [a, b] = [toPaper(map.knots, from), toPaper(map.knots, to)];
-    marks.push(lineMark('thin', a, -root * map.scale, b, -root * map.scale), lineMark('thin', a, root * map.scale, b, root * map.scale));
+    marks.push(
+      lineMark('thin', a, -root * map.scale, b, -root * map.scale),
+      lineMark('thin', a, root * map.scale, b, root * map.scale),
+    );
   }
   for (const x of [thread.from, thread.to]) {
     if (x <= body.x0 + SAME || x >= body.x1 - SAME) continue;
@@ -279,7 +326,12 @@ function firstAbove(body: Body, from: number, to: number, radius: number): numbe
   if (at(from) >= radius) return from;
   let low = 0;
   let high = 1;
-  for (let i = 1; i <= 64; i++) if (at(from + ((to - from) * i) / 64) >= radius) { high = i / 64; low = (i - 1) / 64; break; }
+  for (let i = 1; i <= 64; i++)
+    if (at(from + ((to - from) * i) / 64) >= radius) {
+      high = i / 64;
+      low = (i - 1) / 64;
+      break;
+    }
   for (let i = 0; i < 30; i++) {
     const middle = (low + high) / 2;
     if (at(from + (to - from) * middle) >= radius) high = middle;
@@ -292,7 +344,12 @@ function firstAbove(body: Body, from: number, to: number, radius: number): numbe
 export function faceDivisions(part: Part, { map }: Pick<Edges, 'map'>): Mark[] {
   return part.features.flatMap((left) => {
     if (left.kind !== 'cylinder') return [];
-    const right = part.features.find((f) => f.kind === 'cylinder' && Math.abs(f.from - left.to) < SAME && Math.abs(f.diameter - left.diameter) < SAME);
+    const right = part.features.find(
+      (f) =>
+        f.kind === 'cylinder' &&
+        Math.abs(f.from - left.to) < SAME &&
+        Math.abs(f.diameter - left.diameter) < SAME,
+    );
     if (!right) return [];
     const x = toPaper(map.knots, left.to);
     const r = (left.diameter / 2) * map.scale;

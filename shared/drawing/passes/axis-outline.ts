@@ -102,20 +102,36 @@ export function axisOutline(profile: readonly ProfileSpan[], map: XMap): AxisOut
   const marks: Mark[] = [];
   if (sides.length === 1 && sides[0]) {
     const { top, bottom } = sides[0];
-    marks.push({ type: 'path', line: 'visible', commands: [...commands(top, 'M'), ...commands(reversed(bottom), 'L'), { op: 'Z' }] });
+    marks.push({
+      type: 'path',
+      line: 'visible',
+      commands: [...commands(top, 'M'), ...commands(reversed(bottom), 'L'), { op: 'Z' }],
+    });
   } else
     sides.forEach((side, i) => {
       if (i === 0)
-        marks.push({ type: 'path', line: 'visible', commands: [...commands(reversed(side.bottom), 'M'), ...commands(side.top, 'L')] });
+        marks.push({
+          type: 'path',
+          line: 'visible',
+          commands: [...commands(reversed(side.bottom), 'M'), ...commands(side.top, 'L')],
+        });
       else if (i === sides.length - 1)
-        marks.push({ type: 'path', line: 'visible', commands: [...commands(side.top, 'M'), ...commands(reversed(side.bottom), 'L')] });
+        marks.push({
+          type: 'path',
+          line: 'visible',
+          commands: [...commands(side.top, 'M'), ...commands(reversed(side.bottom), 'L')],
+        });
       else
         marks.push(
           { type: 'path', line: 'visible', commands: commands(side.top, 'M') },
           { type: 'path', line: 'visible', commands: commands(side.bottom, 'M') },
         );
     });
-  return { marks, top: sides.flatMap((s) => sampled(s.top)), bottom: sides.flatMap((s) => sampled(s.bottom)) };
+  return {
+    marks,
+    top: sides.flatMap((s) => sampled(s.top)),
+    bottom: sides.flatMap((s) => sampled(s.bottom)),
+  };
 }
 
 /** Arcs as a few points, so that heights between two nodes can be read. */

@@ -44,15 +44,23 @@ class Field {
   constructor(ink: Ink) {
     for (const text of ink.texts) this.addText(text);
     for (const stroke of ink.strokes)
-      this.each([Math.min(stroke.x1, stroke.x2), Math.min(stroke.y1, stroke.y2), Math.max(stroke.x1, stroke.x2), Math.max(stroke.y1, stroke.y2)], (c) =>
-        c.strokes.push(stroke),
+      this.each(
+        [
+          Math.min(stroke.x1, stroke.x2),
+          Math.min(stroke.y1, stroke.y2),
+          Math.max(stroke.x1, stroke.x2),
+          Math.max(stroke.y1, stroke.y2),
+        ],
+        (c) => c.strokes.push(stroke),
       );
   }
   addText(text: Box): void {
     this.each(text, (c) => c.texts.push(text));
   }
   addStroke(s: Stroke): void {
-    this.each([Math.min(s.x1, s.x2), Math.min(s.y1, s.y2), Math.max(s.x1, s.x2), Math.max(s.y1, s.y2)], (c) => c.strokes.push(s));
+    this.each([Math.min(s.x1, s.x2), Math.min(s.y1, s.y2), Math.max(s.x1, s.x2), Math.max(s.y1, s.y2)], (c) =>
+      c.strokes.push(s),
+    );
   }
   private each(box: Box, act: (cell: { texts: Box[]; strokes: Stroke[] }) => void): void {
     const n = (v: number): number => Math.floor(v / Field.CELL);
@@ -68,7 +76,8 @@ class Field {
     const cell = this.cells.get(`${Math.floor(x / Field.CELL)},${Math.floor(y / Field.CELL)}`);
     if (!cell) return true;
     return (
-      cell.texts.every((t) => boxDistance(x, y, t) >= r + CLEAR) && cell.strokes.every((s) => distanceToSegment(x, y, s) >= r + CLEAR)
+      cell.texts.every((t) => boxDistance(x, y, t) >= r + CLEAR) &&
+      cell.strokes.every((s) => distanceToSegment(x, y, s) >= r + CLEAR)
     );
   }
   /** Stem strokes that would cross something: every cell on the way is asked. */
@@ -118,9 +127,23 @@ function hugging(wish: BalloonWish, r: number): Circle[] {
       const uy = Math.sign(p.y - my);
       slid.push({ x: p.x + ux * d, y: p.y + uy * d });
     }
-    slid.push({ x: mx - d * 2, y: under.y }, { x: mx + d * 2, y: under.y }, { x: mx - d * 2, y: over.y }, { x: mx + d * 2, y: over.y });
-    slid.push({ x: after.x, y: my - d }, { x: after.x, y: my + d }, { x: before.x, y: my - d }, { x: before.x, y: my + d });
-    slid.push({ x: under.x, y: under.y + 1.6 + d }, { x: under.x - d * 2, y: under.y + 1.6 + d }, { x: under.x + d * 2, y: under.y + 1.6 + d });
+    slid.push(
+      { x: mx - d * 2, y: under.y },
+      { x: mx + d * 2, y: under.y },
+      { x: mx - d * 2, y: over.y },
+      { x: mx + d * 2, y: over.y },
+    );
+    slid.push(
+      { x: after.x, y: my - d },
+      { x: after.x, y: my + d },
+      { x: before.x, y: my - d },
+      { x: before.x, y: my + d },
+    );
+    slid.push(
+      { x: under.x, y: under.y + 1.6 + d },
+      { x: under.x - d * 2, y: under.y + 1.6 + d },
+      { x: under.x + d * 2, y: under.y + 1.6 + d },
+    );
   }
   return [...base, ...slid];
 }
@@ -132,7 +155,14 @@ function mark(wish: BalloonWish, at: Circle, r: number, stem: Mark[]): { sizeId:
     marks: [
       ...stem,
       { type: 'circle', line: 'thin', cx: at.x, cy: at.y, r },
-      { type: 'text', x: at.x, y: at.y + (CAP_HEIGHT * size) / 2, size, anchor: 'middle', text: String(wish.number) },
+      {
+        type: 'text',
+        x: at.x,
+        y: at.y + (CAP_HEIGHT * size) / 2,
+        size,
+        anchor: 'middle',
+        text: String(wish.number),
+      },
     ],
   };
 }
@@ -169,7 +199,12 @@ export function placeBalloons(
   return { balloons, lost };
 }
 
-function onStem(wish: BalloonWish, r: number, field: Field, room: (x: number, y: number, r: number) => boolean) {
+function onStem(
+  wish: BalloonWish,
+  r: number,
+  field: Field,
+  room: (x: number, y: number, r: number) => boolean,
+) {
   const [x0, y0, x1, y1] = wish.text;
   const starts = [
     { x: x1 + 0.5, y: y0 - 0.5, ux: 1, uy: -1 },
@@ -191,7 +226,8 @@ function onStem(wish: BalloonWish, r: number, field: Field, room: (x: number, y:
         if (!room(circle.x, circle.y, r) || !field.free(circle.x, circle.y, r)) continue;
         const from = { x: s.x, y: s.y };
         const to = { x: s.x + ux * length, y: s.y + uy * length };
-        if (field.openLine({ x1: from.x, y1: from.y, x2: to.x, y2: to.y }, wish.text)) return { circle, from, to };
+        if (field.openLine({ x1: from.x, y1: from.y, x2: to.x, y2: to.y }, wish.text))
+          return { circle, from, to };
       }
   return null;
 }

@@ -28,7 +28,7 @@ const SHEETS: Readonly<Record<SheetSize, { target: number; price: number }>> = {
 };
 const NOT_FULL_SIZE = 0.15;
 const BROKEN = 0.35;
-const TALLEST = 0.66;
+const TALLEST = 0.7;
 const FOOT_HEIGHT = 40;
 const SIDE_ROOM = 24;
 const BREAK_SLENDER = 6;
@@ -36,6 +36,10 @@ const BREAK_LENGTH = 3;
 const BREAK_KEEPS = 34;
 const BREAK_SAVES = 15;
 const BREAK_GAP = 3;
+/** Share of what stays that stands left of the break: a diameter goes there. */
+const LEFT_OF_BREAK = 0.6;
+/** A short wide part is judged by its diameter, in lengths. */
+const WIDE = 1.6;
 
 /** Diameter of the metal over most of the part, for slenderness. */
 function breaksFor(part: Part, scale: number, target: number): [number, number][] {
@@ -52,23 +56,32 @@ function breaksFor(part: Part, scale: number, target: number): [number, number][
     const most = (f.to - f.from) * scale - BREAK_KEEPS - BREAK_GAP;
     const take = Math.min(excess, most);
     if (take < BREAK_SAVES) continue;
-    const middle = f.from + (f.to - f.from) * 0.55;
-    found.push([middle - take / scale / 2, middle + take / scale / 2]);
+    const from = f.from + (f.to - f.from - take / scale) * LEFT_OF_BREAK;
+    found.push([from, from + take / scale]);
     excess -= take;
   }
   return found.sort((a, b) => a[0] - b[0]);
 }
 
-function score(part: Part, sheet: SheetSize, scale: DrawingScale, drawnLength: number, height: number): number {
+function score(
+  part: Part,
+  sheet: SheetSize,
+  scale: DrawingScale,
+  drawnLength: number,
+  height: number,
+): number {
   const { target, price } = SHEETS[sheet];
   const stations = part.stations.map((s) => s.x).sort((a, b) => a - b);
   const steps = part.features
     .filter((f) => f.kind === 'cylinder' || f.kind === 'cone')
     .map((f) => (f.to - f.from) * scale.factor);
   const shortest = Math.min(...steps, part.length * scale.factor, ...(steps.length === 0 ? stations : []));
-  const diameters = part.body.outer.map((p) => (p.kind === 'line' ? 2 * Math.max(p.start, p.end) : 2 * p.radius));
+  const diameters = part.body.outer.map((p) =>
+    p.kind === 'line' ? 2 * Math.max(p.start, p.end) : 2 * p.radius,
+  );
   const smallest = Math.min(...diameters) * scale.factor;
-  let sum = price + 0.9 * Math.abs(Math.log(drawnLength / target));
+  let sum =
+    price + 0.9 * Math.abs(Math.log(Math.max(drawnLength, WIDE * part.maxDiameter * scale.factor) / target));
   if (scale.factor !== 1) sum += NOT_FULL_SIZE;
   if (shortest < 4) sum += 0.45 * Math.log(4 / Math.max(shortest, 0.01));
   if (smallest < 7) sum += 1.1 * Math.log(7 / Math.max(smallest, 0.01));
@@ -81,7 +94,10 @@ export function attemptsFor(part: Part, options: DrawingOptions): Attempt[] {
   const iso = options.style === 'iso';
   const sheets = options.sheet === 'auto' ? (iso ? ISO_SHEETS : INCH_SHEETS) : [options.sheet];
   const series = options.unit === 'in' && !iso ? INCH_SCALES : iso ? ISO_SCALES : INCH_SCALES;
-  const scales = options.scale === 'auto' ? series : series.filter((s) => Math.abs(s.factor - Number(options.scale)) < 1e-9);
+  const scales =
+    options.scale === 'auto'
+      ? series
+      : series.filter((s) => Math.abs(s.factor - Number(options.scale)) < 1e-9);
   const forced = options.scale !== 'auto' && options.sheet !== 'auto';
   const attempts: Attempt[] = [];
   for (const sheet of sheets) {
@@ -113,5 +129,10 @@ function add(
   const map = makeXMap(0, part.length, scale.factor, breaks, BREAK_GAP);
   const drawn = map.knots[map.knots.length - 1]?.[1] ?? 0;
   if (drawn > width) return;
-  attempts.push({ sheet, scale, map, score: score(part, sheet, scale, drawn, height) + (breaks.length > 0 ? BROKEN : 0) });
+  attempts.push({
+    sheet,
+    scale,
+    map,
+    score: score(part, sheet, scale, drawn, height) + (breaks.length > 0 ? BROKEN : 0),
+  });
 }

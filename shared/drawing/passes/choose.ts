@@ -113,7 +113,8 @@ export function choose(options: readonly (readonly Candidate[])[]): Choice {
       if (!changed) break;
     }
     const now = state();
-    if (!best || now.clashes < best.clashes || (now.clashes === best.clashes && now.cost < best.cost - 1e-9)) best = now;
+    if (!best || now.clashes < best.clashes || (now.clashes === best.clashes && now.cost < best.cost - 1e-9))
+      best = now;
     if (now.clashes === 0) break;
     for (let i = 0; i < n; i++)
       for (let j = 0; j < i; j++)

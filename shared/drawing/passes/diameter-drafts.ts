@@ -12,7 +12,16 @@ import type { Draft } from './candidate';
 import { leaderDrafts } from './leader-drafts';
 
 /** Prices of the forms and of their variants. Source: trial sheets, looked at. */
-const PRICE = { inside: 0.5, end: 1, slot: 1.3, perMm: 0.03, through: 2.2, offMiddle: 1.5, leader: 3.2, cornerLeader: 6.5 } as const;
+const PRICE = {
+  inside: 0.5,
+  end: 1,
+  slot: 1.3,
+  perMm: 0.03,
+  through: 2.2,
+  offMiddle: 1.5,
+  leader: 3.2,
+  cornerLeader: 6.5,
+} as const;
 const POSITIONS = [0.5, 0.3, 0.7, 0.15, 0.85];
 const LIFTS = [0, 6.5, 13, 20, 27];
 const SLOTS = 4;
@@ -37,17 +46,33 @@ function acrossOf(paper: AxisPaper, ready: ReadySize): Across | null {
   const a = toPaper(paper.map.knots, anchor.from);
   const b = toPaper(paper.map.knots, anchor.to);
   const at = anchor.at === undefined ? null : toPaper(paper.map.knots, anchor.at);
-  return { paper, ready, x0: Math.min(a, b), x1: Math.max(a, b), r: (anchor.diameter / 2) * paper.map.scale, at };
+  return {
+    paper,
+    ready,
+    x0: Math.min(a, b),
+    x1: Math.max(a, b),
+    r: (anchor.diameter / 2) * paper.map.scale,
+    at,
+  };
 }
 
 /** True where the drawn outline really lies at this radius over x. */
 function onOutline({ paper, r }: Across, x: number): boolean {
   const eps = 0.02;
-  return Math.abs(reachWithin(paper.top, x - 0.001, x + 0.001) - r) < eps && Math.abs(reachWithin(paper.bottom, x - 0.001, x + 0.001) - r) < eps;
+  return (
+    Math.abs(reachWithin(paper.top, x - 0.001, x + 0.001) - r) < eps &&
+    Math.abs(reachWithin(paper.bottom, x - 0.001, x + 0.001) - r) < eps
+  );
 }
 
 /** The vertical dimension line between the outlines, arrows in or out. */
-function crossLine(a: Across, x: number, inside: boolean, topTo: number, gap: readonly [number, number] | null): Mark[] {
+function crossLine(
+  a: Across,
+  x: number,
+  inside: boolean,
+  topTo: number,
+  gap: readonly [number, number] | null,
+): Mark[] {
   const { r, paper } = a;
   const { style } = paper;
   const marks: Mark[] = [];
@@ -71,7 +96,12 @@ function inside(a: Across): Draft[] {
   if (iso ? r < label.width + 4.6 : r < 2 * ((label.up + label.down) / 2 + 4)) return out;
   for (const t of POSITIONS) {
     const x = a.x0 + (a.x1 - a.x0) * t;
-    if (iso ? x - a.x0 < rules.textLift + label.up + 1.2 || a.x1 - x < 2 : Math.min(x - a.x0, a.x1 - x) < label.width / 2 + 1.2) continue;
+    if (
+      iso
+        ? x - a.x0 < rules.textLift + label.up + 1.2 || a.x1 - x < 2
+        : Math.min(x - a.x0, a.x1 - x) < label.width / 2 + 1.2
+    )
+      continue;
     if (!onOutline(a, x)) continue;
     const cost = PRICE.inside + Math.abs(t - 0.5) * PRICE.offMiddle;
     if (iso) {
@@ -112,7 +142,9 @@ function through(a: Across): Draft[] {
   for (const t of POSITIONS) {
     const x = a.x0 + (a.x1 - a.x0) * t;
     if (Math.min(x - a.x0, a.x1 - x) < 1.3 || !onOutline(a, x)) continue;
-    const column: [number, number] = iso ? [x - shift - label.up - 0.5, x + 0.5] : [x - label.width / 2 - 0.5, x + label.width / 2 + 0.5];
+    const column: [number, number] = iso
+      ? [x - shift - label.up - 0.5, x + 0.5]
+      : [x - label.width / 2 - 0.5, x + label.width / 2 + 0.5];
     const own = r + (arrowsIn ? 1.2 : TURNED_TEXT_FROM_ARROW);
     const base = Math.max(own, reachWithin(paper.top, ...column) + 1.2);
     for (const lift of LIFTS) {
@@ -123,7 +155,10 @@ function through(a: Across): Draft[] {
           form: 'through',
           cost,
           rotate: -90,
-          build: () => ({ strokes: crossLine(a, x, arrowsIn, start - label.width - 0.3, null), writing: placeLabel(label, x - shift, start, -90) }),
+          build: () => ({
+            strokes: crossLine(a, x, arrowsIn, start - label.width - 0.3, null),
+            writing: placeLabel(label, x - shift, start, -90),
+          }),
         });
       } else {
         const lineEnd = Math.min(start, arrowsIn ? -r - 2 : -r - TAIL);
@@ -155,32 +190,60 @@ function atEnd(a: Across, side: 1 | -1): Draft[] {
   const end = side > 0 ? paper.right : paper.left;
   const own = a.at ?? (side > 0 ? a.x1 : a.x0);
   // Only metal smaller than this one may lie between the step and the end.
-  const between = side > 0 ? reachWithin(paper.top, own + 0.05, end) : reachWithin(paper.top, end, own - 0.05);
+  const between =
+    side > 0 ? reachWithin(paper.top, own + 0.05, end) : reachWithin(paper.top, end, own - 0.05);
   if (between > r + 0.02 || (Math.abs(own - end) > 0.05 && between > r - 0.25)) return [];
-  const corner = a.at === null ? own : side > 0 ? Math.min(own, cornerTowards(a, side)) : Math.max(own, cornerTowards(a, side));
+  const corner =
+    a.at === null
+      ? own
+      : side > 0
+        ? Math.min(own, cornerTowards(a, side))
+        : Math.max(own, cornerTowards(a, side));
   const iso = style === 'iso';
   const arrowsIn = 2 * r >= (iso ? ARROWS_IN - 1 : ARROWS_IN);
   const tall = label.up + label.down;
   const out: Draft[] = [];
   const shift = rules.textLift + Math.max(0, label.down - 1.06);
-  const first = iso ? Math.max(rules.firstLine, side > 0 ? rules.centrePast + 0.8 + shift + label.up : rules.centrePast + 1.6) : Math.max(rules.firstLine, label.width / 2 + 4.6);
+  const first = iso
+    ? Math.max(rules.firstLine, side > 0 ? rules.centrePast + 0.8 + shift + label.up : rules.centrePast + 1.6)
+    : Math.max(rules.firstLine, label.width / 2 + 4.6);
   const step = iso ? label.up + shift + 1.5 : label.width / 2 + 3.5;
   for (let slot = 0; slot < SLOTS; slot++) {
     const x = end + side * (first + slot * step);
     const reach = Math.abs(x - corner);
     const hug = Math.abs(own - end) > 4 && between > r - 1.2 ? 7 : 0;
     const price = PRICE.end + slot * PRICE.slot + reach * PRICE.perMm + hug;
-    const ext = (y: number): Mark => lineMark('extension', corner + side * rules.extensionGap, y, x + side * rules.extensionPast, y);
+    const ext = (y: number): Mark =>
+      lineMark('extension', corner + side * rules.extensionGap, y, x + side * rules.extensionPast, y);
     const push = (more: () => Mark[], writing: () => Mark[], extra: number, rotate?: -90): void => {
-      out.push({ form: 'end', cost: price + extra, rotate, build: () => ({ strokes: [ext(-r), ext(r), ...more()], writing: writing() }) });
+      out.push({
+        form: 'end',
+        cost: price + extra,
+        rotate,
+        build: () => ({ strokes: [ext(-r), ext(r), ...more()], writing: writing() }),
+      });
     };
     if (iso) {
-      if (2 * r >= label.width + 1.6) push(() => crossLine(a, x, arrowsIn, 0, null), () => placeLabel(label, x - shift, label.width / 2, -90), 0, -90);
+      if (2 * r >= label.width + 1.6)
+        push(
+          () => crossLine(a, x, arrowsIn, 0, null),
+          () => placeLabel(label, x - shift, label.width / 2, -90),
+          0,
+          -90,
+        );
       else {
         const from = r + TURNED_TEXT_FROM_ARROW;
-        push(() => crossLine(a, x, arrowsIn, -from - label.width - 0.3, null), () => placeLabel(label, x - shift, -from, -90), 0.5, -90);
         push(
-          () => [...crossLine(a, x, arrowsIn, 0, null), lineMark('dimension', x, r, x, from + label.width + 0.3)],
+          () => crossLine(a, x, arrowsIn, -from - label.width - 0.3, null),
+          () => placeLabel(label, x - shift, -from, -90),
+          0.5,
+          -90,
+        );
+        push(
+          () => [
+            ...crossLine(a, x, arrowsIn, 0, null),
+            lineMark('dimension', x, r, x, from + label.width + 0.3),
+          ],
           () => placeLabel(label, x - shift, from + label.width, -90),
           0.7,
           -90,
@@ -189,10 +252,18 @@ function atEnd(a: Across, side: 1 | -1): Draft[] {
     } else {
       const gapHalf = tall / 2 + rules.textGap;
       if (2 * r >= 2 * gapHalf + (arrowsIn ? 7 : 1))
-        push(() => crossLine(a, x, arrowsIn, 0, [-gapHalf, gapHalf]), () => placeLabel(label, x - label.width / 2, (label.up - label.down) / 2), 0);
+        push(
+          () => crossLine(a, x, arrowsIn, 0, [-gapHalf, gapHalf]),
+          () => placeLabel(label, x - label.width / 2, (label.up - label.down) / 2),
+          0,
+        );
       else {
         const top = -(r + (arrowsIn ? 3 : TAIL));
-        push(() => crossLine(a, x, arrowsIn, top, null), () => placeLabel(label, x - label.width / 2, top - rules.textGap - label.down), 0.5);
+        push(
+          () => crossLine(a, x, arrowsIn, top, null),
+          () => placeLabel(label, x - label.width / 2, top - rules.textGap - label.down),
+          0.5,
+        );
       }
     }
   }
@@ -203,7 +274,14 @@ function byLeader(a: Across): Draft[] {
   const { paper, ready, r } = a;
   const places = a.at !== null ? [a.at] : [0.5, 0.25, 0.75].map((t) => a.x0 + (a.x1 - a.x0) * t);
   return places.flatMap((x, i) =>
-    a.at === null && !onOutline(a, x) ? [] : leaderDrafts(paper, ready.label, { x, y: -r }, { cost: (a.at === null ? PRICE.leader : PRICE.cornerLeader) + i * 0.4, lean: 0 }),
+    a.at === null && !onOutline(a, x)
+      ? []
+      : leaderDrafts(
+          paper,
+          ready.label,
+          { x, y: -r },
+          { cost: (a.at === null ? PRICE.leader : PRICE.cornerLeader) + i * 0.4, lean: 0 },
+        ),
   );
 }
 
@@ -211,5 +289,11 @@ function byLeader(a: Across): Draft[] {
 export function diameterDrafts(paper: AxisPaper, ready: ReadySize): Draft[] {
   const across = acrossOf(paper, ready);
   if (!across) return [];
-  return [...inside(across), ...atEnd(across, 1), ...atEnd(across, -1), ...through(across), ...byLeader(across)];
+  return [
+    ...inside(across),
+    ...atEnd(across, 1),
+    ...atEnd(across, -1),
+    ...through(across),
+    ...byLeader(across),
+  ];
 }

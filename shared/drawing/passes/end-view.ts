@@ -27,11 +27,16 @@ export function needsEndView(body: Body): boolean {
 }
 
 /** Stations from the seen end inwards, each with the radius before and after it on the way in. */
-function wayIn(body: Body, end: EndName): { x: number; near: number; far: number; before: FlatsCut[]; cuts: FlatsCut[] }[] {
+function wayIn(
+  body: Body,
+  end: EndName,
+): { x: number; near: number; far: number; before: FlatsCut[]; cuts: FlatsCut[] }[] {
   const stations = [...breaks(body.outer), ...flatsOf(body).flatMap((c) => [c.from, c.to])].filter(
     (x) => x >= body.x0 - SAME && x <= body.x1 + SAME,
   );
-  const sorted = [...new Set(stations.map((x) => Math.round(x * 1e7) / 1e7))].sort((a, b) => (end === 'end-left' ? a - b : b - a));
+  const sorted = [...new Set(stations.map((x) => Math.round(x * 1e7) / 1e7))].sort((a, b) =>
+    end === 'end-left' ? a - b : b - a,
+  );
   return sorted.map((x, i) => {
     const nearSide = end === 'end-left' ? 'left' : 'right';
     const farSide = end === 'end-left' ? 'right' : 'left';
@@ -101,7 +106,8 @@ function seenFrom(body: Body, end: EndName): Seen {
       }
     }
     const thread = body.treatments.find(
-      (t): t is ThreadTreatment => t.kind === 'thread' && !t.internal && x >= t.from - SAME && x <= t.to + SAME,
+      (t): t is ThreadTreatment =>
+        t.kind === 'thread' && !t.internal && x >= t.from - SAME && x <= t.to + SAME,
     );
     seen.circles.push(thread && Math.abs(thread.major / 2 - r) < SAME ? { r, thread } : { r });
     circle = r;
@@ -136,10 +142,24 @@ function polygonPath(cut: FlatsCut, r: number, end: EndName, scale: number): Mar
     const a = point(-w);
     const b = point(w);
     if (k === 0) commands.push({ op: 'M', ...a });
-    else if (!sharp) commands.push({ op: 'A', r: r * scale, large: cut.count === 1 ? 1 : 0, sweep: clockwise ? 1 : 0, ...a });
+    else if (!sharp)
+      commands.push({
+        op: 'A',
+        r: r * scale,
+        large: cut.count === 1 ? 1 : 0,
+        sweep: clockwise ? 1 : 0,
+        ...a,
+      });
     commands.push({ op: 'L', ...b });
     if (k === cut.count - 1 && !sharp && commands[0]?.op === 'M')
-      commands.push({ op: 'A', r: r * scale, large: cut.count === 1 ? 1 : 0, sweep: clockwise ? 1 : 0, x: commands[0].x, y: commands[0].y });
+      commands.push({
+        op: 'A',
+        r: r * scale,
+        large: cut.count === 1 ? 1 : 0,
+        sweep: clockwise ? 1 : 0,
+        x: commands[0].x,
+        y: commands[0].y,
+      });
   });
   commands.push({ op: 'Z' });
   return { type: 'path', line: 'visible', commands };
@@ -187,13 +207,24 @@ export function endView(body: Body, end: EndName, scale: number, merge: number, 
   const drawn: number[] = [];
   const outside = Math.max(
     ...seen.circles.map((c) => c.r),
-    ...seen.polygons.map((p) => Math.max(reach(p.r, [p.cut]).top, Math.min(p.r, p.cut.count >= 3 ? p.cut.distance / Math.cos(Math.PI / p.cut.count) : p.r))),
+    ...seen.polygons.map((p) =>
+      Math.max(
+        reach(p.r, [p.cut]).top,
+        Math.min(p.r, p.cut.count >= 3 ? p.cut.distance / Math.cos(Math.PI / p.cut.count) : p.r),
+      ),
+    ),
     0,
   );
   // From the outside in, so that where two would blot it is the inner one that is left out.
   for (const { r, thread } of [...seen.circles].sort((a, b) => b.r - a.r)) {
     const paper = r * scale;
-    if (threaded && threaded.r > r + SAME && threaded.thread && r > threaded.thread.root / 2 - threaded.thread.pitch) continue;
+    if (
+      threaded &&
+      threaded.r > r + SAME &&
+      threaded.thread &&
+      r > threaded.thread.root / 2 - threaded.thread.pitch
+    )
+      continue;
     if (paper < 0.4 || drawn.some((d) => Math.abs(d - paper) < merge)) continue;
     if (seen.polygons.some((p) => Math.abs(p.cut.distance * scale - paper) < merge * 0.7)) continue;
     marks.push({ type: 'circle', line: 'visible', cx: 0, cy: 0, r: paper });
@@ -208,7 +239,10 @@ export function endView(body: Body, end: EndName, scale: number, merge: number, 
   for (const { r, cut } of seen.arcs) marks.push(...arcsPast(r, cut, end, scale, merge));
   const radius = outside * scale;
   const box = boxAround(strokesOf(marks).map(strokeBox)) ?? [-radius, -radius, radius, radius];
-  marks.push(lineMark('centre', box[0] - past, 0, box[2] + past, 0), lineMark('centre', 0, box[1] - past, 0, box[3] + past));
+  marks.push(
+    lineMark('centre', box[0] - past, 0, box[2] + past, 0),
+    lineMark('centre', 0, box[1] - past, 0, box[3] + past),
+  );
   const normals = seen.polygons.map(({ cut }) => ({
     cut: cut.id,
     angles: faceAngles(cut).map((a) => (end === 'end-left' ? a : -a)),

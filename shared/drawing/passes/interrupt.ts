@@ -36,7 +36,12 @@ function cut(line: LineMark, obstacles: readonly Obstacle[]): LineMark[] {
   const dx = line.x2 - line.x1;
   const dy = line.y2 - line.y1;
   const length = Math.hypot(dx, dy);
-  const own: Box = [Math.min(line.x1, line.x2), Math.min(line.y1, line.y2), Math.max(line.x1, line.x2), Math.max(line.y1, line.y2)];
+  const own: Box = [
+    Math.min(line.x1, line.x2),
+    Math.min(line.y1, line.y2),
+    Math.max(line.x1, line.x2),
+    Math.max(line.y1, line.y2),
+  ];
   let kept: [number, number][] = [[0, 1]];
   for (const { box, tip, head } of obstacles) {
     if (!boxesMeet(own, box, 0.001)) continue;
@@ -53,7 +58,13 @@ function cut(line: LineMark, obstacles: readonly Obstacle[]): LineMark[] {
   }
   return kept
     .filter(([a, b]) => (b - a) * length >= LEAST_PIECE)
-    .map(([a, b]) => ({ ...line, x1: line.x1 + dx * a, y1: line.y1 + dy * a, x2: line.x1 + dx * b, y2: line.y1 + dy * b }));
+    .map(([a, b]) => ({
+      ...line,
+      x1: line.x1 + dx * a,
+      y1: line.y1 + dy * a,
+      x2: line.x1 + dx * b,
+      y2: line.y1 + dy * b,
+    }));
 }
 
 /** The sizes' marks with their extension lines cut at one another's writing; `cuts` counts the holes made. */
@@ -66,7 +77,15 @@ export function interrupt(sizes: readonly (readonly Mark[])[]): { marks: Mark[][
       if (mark.type !== 'line' || mark.line !== 'extension') return [mark];
       const pieces = cut(mark, foreign);
       const first = pieces[0];
-      if (pieces.length !== 1 || !first || first.x1 !== mark.x1 || first.y1 !== mark.y1 || first.x2 !== mark.x2 || first.y2 !== mark.y2) cuts++;
+      if (
+        pieces.length !== 1 ||
+        !first ||
+        first.x1 !== mark.x1 ||
+        first.y1 !== mark.y1 ||
+        first.x2 !== mark.x2 ||
+        first.y2 !== mark.y2
+      )
+        cuts++;
       return pieces;
     });
   });

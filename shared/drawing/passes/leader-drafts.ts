@@ -28,9 +28,12 @@ export function leaderDrafts(paper: AxisPaper, label: Label, tip: Point, wish: L
   const out: Draft[] = [];
   const local = reachWithin(paper.top, tip.x - 12, tip.x + 12);
   const heights: { y: number; cost: number }[] = [];
-  for (let row = 0; row < ROWS; row++) heights.push({ y: paper.reach + ROW_START + row * ROW_STEP, cost: row * PER_ROW });
-  for (let row = 0; row < 2; row++) heights.push({ y: local + 6 + row * ROW_STEP, cost: 0.4 + row * PER_ROW });
-  if (wish.dense) for (let y = local + 5; y < paper.reach + 50; y += 2.7) heights.push({ y, cost: 1 + (y - local) * 0.03 });
+  for (let row = 0; row < ROWS; row++)
+    heights.push({ y: paper.reach + ROW_START + row * ROW_STEP, cost: row * PER_ROW });
+  for (let row = 0; row < 2; row++)
+    heights.push({ y: local + 6 + row * ROW_STEP, cost: 0.4 + row * PER_ROW });
+  if (wish.dense)
+    for (let y = local + 5; y < paper.reach + 50; y += 2.7) heights.push({ y, cost: 1 + (y - local) * 0.03 });
   (wish.dense ? DENSE_ANGLES : ANGLES).forEach((angle, i) => {
     const cot = 1 / Math.tan((angle * Math.PI) / 180);
     for (const { y, cost } of heights)
@@ -49,7 +52,13 @@ export function leaderDrafts(paper: AxisPaper, label: Label, tip: Point, wish: L
   return out;
 }
 
-function leader(paper: AxisPaper, label: Label, tip: Point, elbow: Point, side: 1 | -1): { strokes: Mark[]; writing: Mark[] } {
+function leader(
+  paper: AxisPaper,
+  label: Label,
+  tip: Point,
+  elbow: Point,
+  side: 1 | -1,
+): { strokes: Mark[]; writing: Mark[] } {
   const iso = paper.style === 'iso';
   const shelf = iso ? label.width + 0.8 : ASME_SHELF;
   const end = { x: elbow.x + side * shelf, y: elbow.y };
@@ -60,6 +69,10 @@ function leader(paper: AxisPaper, label: Label, tip: Point, elbow: Point, side: 
   ];
   const writing = iso
     ? placeLabel(label, side > 0 ? elbow.x + 0.6 : elbow.x - label.width - 0.6, elbow.y - 0.5 - label.down)
-    : placeLabel(label, side > 0 ? end.x + paper.rules.textGap : end.x - paper.rules.textGap - label.width, elbow.y + (label.up - label.down) / 2);
+    : placeLabel(
+        label,
+        side > 0 ? end.x + paper.rules.textGap : end.x - paper.rules.textGap - label.width,
+        elbow.y + (label.up - label.down) / 2,
+      );
   return { strokes, writing };
 }

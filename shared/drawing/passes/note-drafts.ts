@@ -53,5 +53,7 @@ function tipsOf(paper: AxisPaper, ready: ReadySize): { tips: Tip[]; lean: -1 | 0
 /** Every leader of a note-like size. */
 export function noteDrafts(paper: AxisPaper, ready: ReadySize, dense: boolean): Draft[] {
   const { tips, lean } = tipsOf(paper, ready);
-  return tips.flatMap((tip) => leaderDrafts(paper, ready.label, tip, { cost: CORNER_COST + tip.cost, lean, dense }));
+  return tips.flatMap((tip) =>
+    leaderDrafts(paper, ready.label, tip, { cost: CORNER_COST + tip.cost, lean, dense }),
+  );
 }

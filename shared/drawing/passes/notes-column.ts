@@ -9,7 +9,12 @@ const SMALL = fontSizeFor(2.5);
 const PITCH = 4.4;
 
 /** The column stands on `bottom`, its left edge at `left`. */
-export function notesColumn(notes: readonly string[], unit: 'mm' | 'in', left: number, bottom: number): { group: Group; box: Box } {
+export function notesColumn(
+  notes: readonly string[],
+  unit: 'mm' | 'in',
+  left: number,
+  bottom: number,
+): { group: Group; box: Box } {
   const long = unit === 'in' ? 4 * 25.4 : 100;
   const step = unit === 'in' ? 12.7 : 10;
   const words = unit === 'in' ? '4 in. Measure: prints true size' : '100 mm. Measure: prints true size';
@@ -24,7 +29,15 @@ export function notesColumn(notes: readonly string[], unit: 'mm' | 'in', left: n
   const all = lines.length > 0 ? ['NOTES', ...lines] : [];
   const last = barY - 4.2;
   all.forEach((text, i) =>
-    marks.push({ type: 'text', x: left, y: last - (all.length - 1 - i) * PITCH, size: SMALL, anchor: 'start', text, weight: i === 0 ? 700 : 400 }),
+    marks.push({
+      type: 'text',
+      x: left,
+      y: last - (all.length - 1 - i) * PITCH,
+      size: SMALL,
+      anchor: 'start',
+      text,
+      weight: i === 0 ? 700 : 400,
+    }),
   );
   const top = all.length > 0 ? last - (all.length - 1) * PITCH - 0.85 * SMALL : barY - 1.8;
   const right = left + Math.max(long, ...all.map((t) => textWidth(t, SMALL)));

@@ -37,7 +37,8 @@ const PLAIN_DOWN = 1.06;
 function modeOf(paper: AxisPaper, ready: ReadySize, x1: number, x2: number): Mode {
   const w = x2 - x1;
   const text = ready.label.width;
-  const roomy = paper.style === 'iso' ? w >= Math.max(text + ISO_IN_AIR, ISO_LEAST_IN) : w >= text + ASME_IN_AIR;
+  const roomy =
+    paper.style === 'iso' ? w >= Math.max(text + ISO_IN_AIR, ISO_LEAST_IN) : w >= text + ASME_IN_AIR;
   if (roomy) return 'in';
   if (w >= text + NARROW_AIR) return 'between';
   return (x1 + x2) / 2 <= (paper.left + paper.right) / 2 ? 'left' : 'right';
@@ -66,8 +67,7 @@ function spanOf(paper: AxisPaper, ready: ReadySize): Span | null {
 
 const overlapInPart = (a: Span, b: Span): boolean => {
   const meet = Math.min(a.x2, b.x2) - Math.max(a.x1, b.x1) > SAME;
-  const nested =
-    (a.x1 >= b.x1 - SAME && a.x2 <= b.x2 + SAME) || (b.x1 >= a.x1 - SAME && b.x2 <= a.x2 + SAME);
+  const nested = (a.x1 >= b.x1 - SAME && a.x2 <= b.x2 + SAME) || (b.x1 >= a.x1 - SAME && b.x2 <= a.x2 + SAME);
   return meet && !nested;
 };
 
@@ -76,7 +76,10 @@ function neighbours(span: Span, all: readonly Span[], paper: AxisPaper): number 
   const ends = (x: number): number =>
     Math.abs(x - paper.left) < SAME || Math.abs(x - paper.right) < SAME
       ? 1
-      : Math.min(1, all.filter((o) => o !== span && (Math.abs(o.x1 - x) < SAME || Math.abs(o.x2 - x) < SAME)).length);
+      : Math.min(
+          1,
+          all.filter((o) => o !== span && (Math.abs(o.x1 - x) < SAME || Math.abs(o.x2 - x) < SAME)).length,
+        );
   return ends(span.x1) + ends(span.x2);
 }
 
@@ -87,7 +90,11 @@ function splitSides(spans: readonly Span[], paper: AxisPaper): { under: Span[]; 
   for (;;) {
     const counted = under
       .filter((s) => !s.ready.size.reference)
-      .map((s) => ({ s, n: under.filter((o) => o !== s && overlapInPart(s, o)).length, k: neighbours(s, under, paper) }))
+      .map((s) => ({
+        s,
+        n: under.filter((o) => o !== s && overlapInPart(s, o)).length,
+        k: neighbours(s, under, paper),
+      }))
       .filter(({ n }) => n > 0)
       .sort((a, b) => a.k - b.k || b.n - a.n || a.s.x2 - a.s.x1 - (b.s.x2 - b.s.x1));
     const worst = counted[0];
@@ -132,7 +139,10 @@ function fits(span: Span, lane: number, placed: readonly Span[], strict: boolean
 
 function lowest(span: Span, placed: readonly Span[]): void {
   const contained = placed.filter((o) => o.x1 >= span.x1 - SAME && o.x2 <= span.x2 + SAME);
-  const start = contained.reduce((lane, o) => Math.max(lane, o.x2 - o.x1 < span.x2 - span.x1 - SAME ? o.lane + 1 : lane), 0);
+  const start = contained.reduce(
+    (lane, o) => Math.max(lane, o.x2 - o.x1 < span.x2 - span.x1 - SAME ? o.lane + 1 : lane),
+    0,
+  );
   for (const strict of [true, false])
     for (let lane = start; lane < MOST_LANES; lane++)
       if (fits(span, lane, placed, strict)) {
@@ -149,7 +159,13 @@ function assignLanes(spans: readonly Span[], paper: AxisPaper): void {
   const placed: Span[] = [];
   const order = datum
     ? [...sizes].sort((a, b) => a.x2 - a.x1 - (b.x2 - b.x1) || a.x1 - b.x1)
-    : [...sizes.filter((s) => s.mode === 'in').sort((a, b) => a.x1 - b.x1), ...inwards(sizes.filter((s) => s.mode !== 'in'), paper)];
+    : [
+        ...sizes.filter((s) => s.mode === 'in').sort((a, b) => a.x1 - b.x1),
+        ...inwards(
+          sizes.filter((s) => s.mode !== 'in'),
+          paper,
+        ),
+      ];
   for (const span of order) {
     if (span.mode === 'left' || span.mode === 'right') outsideSide(span, placed, paper);
     lowest(span, placed);
@@ -216,11 +232,16 @@ function draw(paper: AxisPaper, span: Span, y: number): PlacedSize {
       if (mode !== 'between') line(x1, x2);
       line(x2, hi);
     }
-    if (mode === 'left') textX = iso ? x1 - OUTSIDE_TEXT - label.width : x1 - tail - rules.textGap - label.width;
+    if (mode === 'left')
+      textX = iso ? x1 - OUTSIDE_TEXT - label.width : x1 - tail - rules.textGap - label.width;
     if (mode === 'right') textX = iso ? x2 + OUTSIDE_TEXT : x2 + tail + rules.textGap;
     marks.push(arrowHead(x1, y, 1, 0, style), arrowHead(x2, y, -1, 0, style));
   }
-  return { ready: span.ready, candidate: candidateOf('lane', marks, placeLabel(label, textX, baseline), 0.3 * span.lane), forView: 'axis' };
+  return {
+    ready: span.ready,
+    candidate: candidateOf('lane', marks, placeLabel(label, textX, baseline), 0.3 * span.lane),
+    forView: 'axis',
+  };
 }
 
 function drawSide(paper: AxisPaper, spans: readonly Span[], way: 1 | -1): PlacedSize[] {

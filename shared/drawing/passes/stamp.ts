@@ -9,5 +9,8 @@ const LIFT = 6;
 export function stampGroup(text: string, left: number, right: number, bottom: number): Group {
   const size = Math.min(LARGEST, ((right - left) * SHARE) / (ADVANCE * Math.max(1, text.length)));
   const x = (left + right) / 2;
-  return { role: 'stamp', marks: [{ type: 'text', x, y: bottom - LIFT, size, anchor: 'middle', weight: 700, text, faint: true }] };
+  return {
+    role: 'stamp',
+    marks: [{ type: 'text', x, y: bottom - LIFT, size, anchor: 'middle', weight: 700, text, faint: true }],
+  };
 }

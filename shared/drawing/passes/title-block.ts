@@ -16,7 +16,8 @@ const REVISION_WIDTH = 96;
 const MOST_REVISIONS = 4;
 const PAD = 1.2;
 const SMALL = fontSizeFor(2.5);
-const LARGE = fontSizeFor(3.5);
+/** Title and number: as large as they fit. */
+const TITLE_SIZES = [3.5, 3].map(fontSizeFor);
 
 /** A field whose words are longer than its room: they are said in the notes. */
 export interface Overflow {
@@ -74,11 +75,11 @@ function fillCell(cell: Cell, x: number, y: number, overflow: Overflow[]): Mark[
   if (cell.draw) return [...marks, ...cell.draw(x, y)];
   const text = cell.text === '' ? '–' : cell.text;
   const room = cell.width - 2 * PAD;
-  const size = cell.large && textWidth(text, LARGE) <= room ? LARGE : SMALL;
+  const size = (cell.large ? TITLE_SIZES : []).find((each) => textWidth(text, each) <= room) ?? SMALL;
   const whole = textWidth(text, size) <= room;
   if (!whole) overflow.push({ label: cell.label, text });
   const shown = whole ? text : cell.inNotes ? 'see notes' : fitted(text, size, room);
-  return [...marks, write(x + PAD, y + (size === LARGE ? 8.8 : 8.7), size, shown, 700)];
+  return [...marks, write(x + PAD, y + 8.7, size, shown, 700)];
 }
 
 function person(signed: TitleBlock['drawn'] | TitleBlock['checked']): string {
@@ -100,7 +101,9 @@ function rows({ size, style, unit, scaleText, title }: BlockFacts): Cell[][] {
     textureSymbol(x + PAD, y + 8.9, 2.5),
     write(x + PAD + 2.5 * TEXTURE_ROOM + 0.6, y + 8.7, SMALL, fitted(title.texture || '–', SMALL, 15), 700),
   ];
-  const projection = (x: number, y: number): Mark[] => [projectionSymbol(x + 15, y + 7.2, 3.6, style === 'iso' ? 'first' : 'third')];
+  const projection = (x: number, y: number): Mark[] => [
+    projectionSymbol(x + 15, y + 7.2, 3.6, style === 'iso' ? 'first' : 'third'),
+  ];
   return [
     [
       { label: 'TITLE', text: title.title, width: 84, large: true },
@@ -133,7 +136,15 @@ function rows({ size, style, unit, scaleText, title }: BlockFacts): Cell[][] {
 function block(facts: BlockFacts, overflow: Overflow[]): Mark[] {
   const [x0, y0, x1, y1] = blockBox(facts.size);
   const marks: Mark[] = [
-    { type: 'polyline', line: 'frame', points: [{ x: x0, y: y1 }, { x: x0, y: y0 }, { x: x1, y: y0 }] },
+    {
+      type: 'polyline',
+      line: 'frame',
+      points: [
+        { x: x0, y: y1 },
+        { x: x0, y: y0 },
+        { x: x1, y: y0 },
+      ],
+    },
     lineMark('table', x0 + CODE_WIDTH, y0, x0 + CODE_WIDTH, y1),
   ];
   rows(facts).forEach((cells, i) => {
@@ -158,7 +169,9 @@ function block(facts: BlockFacts, overflow: Overflow[]): Mark[] {
       { x: code[0], y: code[3] },
     ],
   });
-  ['IS THIS', 'PAPER', 'CURRENT?'].forEach((line, i) => marks.push(write(x0 + 2, y0 + 29.4 + i * 4, SMALL, line, i === 2 ? 700 : 400)));
+  ['IS THIS', 'PAPER', 'CURRENT?'].forEach((line, i) =>
+    marks.push(write(x0 + 2, y0 + 29.4 + i * 4, SMALL, line, i === 2 ? 700 : 400)),
+  );
   return marks;
 }
 
@@ -168,7 +181,10 @@ function revisionTable(size: SheetSize, title: TitleBlock): { marks: Mark[]; top
   const x0 = bx0 - REVISION_WIDTH < frameLeft + 3 ? frameLeft : bx0 - REVISION_WIDTH;
   const widths = [8.6, bx0 - x0 - 8.6 - 22.5 - 23.2, 22.5, 23.2];
   const lines = [
-    ...title.revisions.slice(-MOST_REVISIONS).reverse().map((r) => [r.letter, r.change, r.by, r.date]),
+    ...title.revisions
+      .slice(-MOST_REVISIONS)
+      .reverse()
+      .map((r) => [r.letter, r.change, r.by, r.date]),
     ['REV', 'WHAT CHANGED', 'BY', 'DATE'],
   ];
   const top = y1 - lines.length * REVISION_ROW;

@@ -7,14 +7,25 @@ import type { Candidate } from '../layout';
 import { realise } from './candidate';
 import type { Draft } from './candidate';
 
-const PRICE = { leaderOverOutline: 9, extensionHugs: 7, extensionCrosses: 1.5, dimensionCrosses: 0.3, arrowOnEdge: 2 } as const;
+const PRICE = {
+  leaderOverOutline: 9,
+  extensionHugs: 7,
+  extensionCrosses: 1.5,
+  dimensionCrosses: 0.3,
+  arrowOnEdge: 2,
+} as const;
 const TEXT_CLEAR = 0.6;
 const HUG = 1.2;
 const HUG_LENGTH = 4;
 
-function strokeOnView(stroke: PrintStroke, view: PrintStroke, verdict: { clashes: number; cost: number }): void {
+function strokeOnView(
+  stroke: PrintStroke,
+  view: PrintStroke,
+  verdict: { clashes: number; cost: number },
+): void {
   if (view.line === 'centre') {
-    if (stroke.line !== 'extension' && stroke.line !== 'arrow' && sideBySide(stroke, view, 0.8) > 0.5) verdict.clashes += 1;
+    if (stroke.line !== 'extension' && stroke.line !== 'arrow' && sideBySide(stroke, view, 0.8) > 0.5)
+      verdict.clashes += 1;
     return;
   }
   if (stroke.line === 'arrow') {
@@ -28,7 +39,8 @@ function strokeOnView(stroke: PrintStroke, view: PrintStroke, verdict: { clashes
     if (sideBySide(stroke, view, HUG) > HUG_LENGTH) verdict.cost += PRICE.extensionHugs;
     else if (sideBySide(stroke, view, 0.3) > 0.5) verdict.cost += PRICE.extensionHugs;
     if (segmentsCross(stroke, view)) verdict.cost += PRICE.extensionCrosses;
-  } else if (stroke.line === 'leader' && segmentsCross(stroke, view, 0.3)) verdict.cost += PRICE.leaderOverOutline;
+  } else if (stroke.line === 'leader' && segmentsCross(stroke, view, 0.3))
+    verdict.cost += PRICE.leaderOverOutline;
 }
 
 /** Meetings of a candidate with the strokes of the view. */
@@ -43,7 +55,8 @@ function againstView(candidate: Candidate, view: Footprint): { clashes: number; 
   for (const s of candidate.print.strokes) {
     if (s.x0 >= n[2] + HUG || s.xe <= n[0] - HUG || s.y0 >= n[3] + HUG || s.ye <= n[1] - HUG) continue;
     for (const e of view.strokes)
-      if (s.x0 < e.xe + HUG && s.xe > e.x0 - HUG && s.y0 < e.ye + HUG && s.ye > e.y0 - HUG) strokeOnView(s, e, verdict);
+      if (s.x0 < e.xe + HUG && s.xe > e.x0 - HUG && s.y0 < e.ye + HUG && s.ye > e.y0 - HUG)
+        strokeOnView(s, e, verdict);
   }
   return verdict;
 }
@@ -55,10 +68,16 @@ export interface Work {
   overhang: number;
 }
 
-function weigh(candidate: Candidate, view: Footprint, fixed: readonly Footprint[], overhang: number): Candidate {
+function weigh(
+  candidate: Candidate,
+  view: Footprint,
+  fixed: readonly Footprint[],
+  overhang: number,
+): Candidate {
   const verdict = againstView(candidate, view);
   const { bounds } = candidate.print;
-  verdict.cost += overhang * (Math.max(0, view.bounds[0] - bounds[0]) + Math.max(0, bounds[2] - view.bounds[2]));
+  verdict.cost +=
+    overhang * (Math.max(0, view.bounds[0] - bounds[0]) + Math.max(0, bounds[2] - view.bounds[2]));
   for (const other of fixed) {
     const met = compareFootprints(candidate.print, other);
     verdict.clashes += met.clashes;
@@ -71,9 +90,16 @@ function weigh(candidate: Candidate, view: Footprint, fixed: readonly Footprint[
  * Drafts worked out and weighed, cheapest first, until `enough` are free of clashes with what is fixed; sorted by
  * clashes, then price. `most` bounds the work; `overhang` is the price of a millimetre beyond the ends of the view.
  */
-export function weighDrafts(drafts: readonly Draft[], view: Footprint, fixed: readonly Footprint[], work: Work): Candidate[] {
+export function weighDrafts(
+  drafts: readonly Draft[],
+  view: Footprint,
+  fixed: readonly Footprint[],
+  work: Work,
+): Candidate[] {
   const { enough, most, overhang } = work;
-  const order = drafts.map((draft, i) => ({ draft, i })).sort((a, b) => a.draft.cost - b.draft.cost || a.i - b.i);
+  const order = drafts
+    .map((draft, i) => ({ draft, i }))
+    .sort((a, b) => a.draft.cost - b.draft.cost || a.i - b.i);
   const weighed: Candidate[] = [];
   let clean = 0;
   for (const { draft } of order) {
@@ -86,6 +112,8 @@ export function weighDrafts(drafts: readonly Draft[], view: Footprint, fixed: re
   }
   return weighed
     .map((candidate, i) => ({ candidate, i }))
-    .sort((a, b) => a.candidate.clashes - b.candidate.clashes || a.candidate.cost - b.candidate.cost || a.i - b.i)
+    .sort(
+      (a, b) => a.candidate.clashes - b.candidate.clashes || a.candidate.cost - b.candidate.cost || a.i - b.i,
+    )
     .map(({ candidate }) => candidate);
 }

@@ -24,7 +24,14 @@ export function textureSymbol(x: number, y: number, height: number): SymbolMark 
           { x: foot + long * slope, y: y - long },
         ],
       },
-      { type: 'line', line: 'symbol', x1: foot - short * slope, y1: y - short, x2: foot + short * slope, y2: y - short },
+      {
+        type: 'line',
+        line: 'symbol',
+        x1: foot - short * slope,
+        y1: y - short,
+        x2: foot + short * slope,
+        y2: y - short,
+      },
     ],
   };
 }

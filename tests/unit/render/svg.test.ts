@@ -22,10 +22,19 @@ describe('the SVG of a sheet', () => {
   });
 
   it('names each size once, with its kind and value, beside the views', () => {
-    const groups = svgTree(renderSvg(drawn.sheet)).children.filter((g) => g.attributes['data-role'] === 'dimension');
-    expect(groups.map((g) => g.attributes['data-id']).sort()).toEqual(drawn.scheme.sizes.map((s) => s.id).sort());
+    const groups = svgTree(renderSvg(drawn.sheet)).children.filter(
+      (g) => g.attributes['data-role'] === 'dimension',
+    );
+    expect(groups.map((g) => g.attributes['data-id']).sort()).toEqual(
+      drawn.scheme.sizes.map((s) => s.id).sort(),
+    );
     const taper = groups.find((g) => g.attributes['data-id'] === 'taperLength');
-    expect(taper?.attributes).toMatchObject({ 'data-kind': 'length', 'data-value': '95', 'data-for-view': 'axis', 'data-reference': 'false' });
+    expect(taper?.attributes).toMatchObject({
+      'data-kind': 'length',
+      'data-value': '95',
+      'data-for-view': 'axis',
+      'data-reference': 'false',
+    });
   });
 
   it('writes no figure with more than three decimals', () => {
@@ -35,13 +44,22 @@ describe('the SVG of a sheet', () => {
 
   it('escapes what a person typed', () => {
     const title = 'A--B -> <b>&"';
-    const sheet = sheetOf('tapered-handle', typed, { style: 'iso', unit: 'mm', options: { titleBlock: { ...drawnTitle(), title } } }).sheet;
+    const sheet = sheetOf('tapered-handle', typed, {
+      style: 'iso',
+      unit: 'mm',
+      options: { titleBlock: { ...drawnTitle(), title } },
+    }).sheet;
     expect(renderSvg(sheet)).toContain('A--B -&gt; &lt;b&gt;&amp;&quot;');
     expect(svgFaults(svgTree(renderSvg(sheet)))).toEqual([]);
   });
 
   it('refuses a place that is no number', () => {
-    const groups = [{ role: 'notes' as const, marks: [{ type: 'line' as const, line: 'thin' as const, x1: NaN, y1: 0, x2: 1, y2: 1 }] }];
+    const groups = [
+      {
+        role: 'notes' as const,
+        marks: [{ type: 'line' as const, line: 'thin' as const, x1: NaN, y1: 0, x2: 1, y2: 1 }],
+      },
+    ];
     expect(() => renderSvg({ ...drawn.sheet, groups })).toThrow(RangeError);
   });
 });
@@ -77,8 +95,20 @@ describe('small profiles', () => {
   });
 
   it('shows before over after with what was cut heavy and the grip in jaws', () => {
-    const bar = { ...body, outer: [{ kind: 'line' as const, from: -30, to: length + 2, start: 12.5, end: 12.5 }], x0: -30, x1: length + 2, cuts: [], treatments: [] };
-    const picture = pairPicture(bar, body, { gripFrom: -30, gripTo: -5, freeEnd: 'right', support: 'centre' });
+    const bar = {
+      ...body,
+      outer: [{ kind: 'line' as const, from: -30, to: length + 2, start: 12.5, end: 12.5 }],
+      x0: -30,
+      x1: length + 2,
+      cuts: [],
+      treatments: [],
+    };
+    const picture = pairPicture(bar, body, {
+      gripFrom: -30,
+      gripTo: -5,
+      freeEnd: 'right',
+      support: 'centre',
+    });
     const classes = picture.parts.map((p) => p.class);
     expect(classes.filter((c) => c === 'metal')).toHaveLength(2);
     expect(classes).toContain('cut');

@@ -16,7 +16,9 @@ export const balloons: CheckRule = {
       .flatMap((s) => {
         const own = drawn.filter((b) => b.group.sizeId === s.id);
         const right = own.length === 1 && own[0]?.texts.some((t) => t.text === String(s.balloon));
-        return right ? [] : [finding('balloons', `Balloon ${s.balloon} of ${s.id} must stand on the sheet once.`, [s.id])];
+        return right
+          ? []
+          : [finding('balloons', `Balloon ${s.balloon} of ${s.id} must stand on the sheet once.`, [s.id])];
       });
     for (const balloon of drawn)
       for (const mark of balloon.group.marks) {
@@ -24,10 +26,27 @@ export const balloons: CheckRule = {
         const hit = reading.groups.find(
           (g) =>
             g !== balloon &&
-            (g.strokes.some((s) => s.box[0] <= mark.cx + mark.r && s.box[2] >= mark.cx - mark.r && distanceToSegment(mark.cx, mark.cy, s) < mark.r + CLEAR) ||
-              g.texts.some((t) => boxesMeet(t.box, [mark.cx - mark.r, mark.cy - mark.r, mark.cx + mark.r, mark.cy + mark.r], -0.6))),
+            (g.strokes.some(
+              (s) =>
+                s.box[0] <= mark.cx + mark.r &&
+                s.box[2] >= mark.cx - mark.r &&
+                distanceToSegment(mark.cx, mark.cy, s) < mark.r + CLEAR,
+            ) ||
+              g.texts.some((t) =>
+                boxesMeet(
+                  t.box,
+                  [mark.cx - mark.r, mark.cy - mark.r, mark.cx + mark.r, mark.cy + mark.r],
+                  -0.6,
+                ),
+              )),
         );
-        if (hit) found.push(finding('balloons', `The balloon of ${balloon.name} touches ${hit.name}.`, [balloon.name, hit.name]));
+        if (hit)
+          found.push(
+            finding('balloons', `The balloon of ${balloon.name} touches ${hit.name}.`, [
+              balloon.name,
+              hit.name,
+            ]),
+          );
       }
     return found;
   },

@@ -9,7 +9,12 @@ export const dimensionCrossing: CheckRule = {
     dimensionPairs(reading).flatMap(([a, b]) => {
       const other = strokesOfKind(b, 'dimension');
       return strokesOfKind(a, 'dimension').some((s) => other.some((t) => segmentsCross(s, t)))
-        ? [finding('dimension-crossing', `The dimension lines of ${a.name} and ${b.name} cross.`, [a.name, b.name])]
+        ? [
+            finding('dimension-crossing', `The dimension lines of ${a.name} and ${b.name} cross.`, [
+              a.name,
+              b.name,
+            ]),
+          ]
         : [];
     }),
 };

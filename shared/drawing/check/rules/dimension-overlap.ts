@@ -12,7 +12,13 @@ export const dimensionOverlap: CheckRule = {
     dimensionPairs(reading).flatMap(([a, b]) => {
       const other = strokesOfKind(b, 'dimension');
       return strokesOfKind(a, 'dimension').some((s) => other.some((t) => sideBySide(s, t, APART) > LEAST))
-        ? [finding('dimension-overlap', `The dimension lines of ${a.name} and ${b.name} lie on one another.`, [a.name, b.name])]
+        ? [
+            finding(
+              'dimension-overlap',
+              `The dimension lines of ${a.name} and ${b.name} lie on one another.`,
+              [a.name, b.name],
+            ),
+          ]
         : [];
     }),
 };

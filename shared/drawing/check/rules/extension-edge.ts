@@ -9,7 +9,13 @@ const SAME_LINE = 0.01;
 function roots(size: ReadGroup): { x: number; y: number; pieces: ReadStroke[] }[] {
   const lines: ReadStroke[][] = [];
   for (const s of strokesOfKind(size, 'extension')) {
-    const mate = lines.find((l) => l.some((o) => (s.x1 === s.x2 ? o.x1 === o.x2 && Math.abs(o.x1 - s.x1) < SAME_LINE : o.y1 === o.y2 && Math.abs(o.y1 - s.y1) < SAME_LINE)));
+    const mate = lines.find((l) =>
+      l.some((o) =>
+        s.x1 === s.x2
+          ? o.x1 === o.x2 && Math.abs(o.x1 - s.x1) < SAME_LINE
+          : o.y1 === o.y2 && Math.abs(o.y1 - s.y1) < SAME_LINE,
+      ),
+    );
     if (mate) mate.push(s);
     else lines.push([s]);
   }
@@ -31,6 +37,8 @@ export const extensionEdge: CheckRule = {
         ]);
         return !ends.some((p) => edges.some((e) => distanceToSegment(p.x, p.y, e) <= REACH));
       });
-      return loose ? [finding('extension-edge', `An extension line of ${size.name} begins at no edge.`, [size.name])] : [];
+      return loose
+        ? [finding('extension-edge', `An extension line of ${size.name} begins at no edge.`, [size.name])]
+        : [];
     }),
 };

@@ -28,7 +28,9 @@ export const figure: CheckRule = {
       if (!size) return [];
       if (NAMED.includes(size.kind)) {
         const name = size.designation ?? size.typed;
-        return group.texts.some((t) => t.text === name) ? [] : [finding('figure', `${size.id} must read ${name}.`, [size.id])];
+        return group.texts.some((t) => t.text === name)
+          ? []
+          : [finding('figure', `${size.id} must read ${name}.`, [size.id])];
       }
       const written = figureOf(group);
       const angle = size.kind === 'angle' || size.kind === 'taper';

@@ -12,7 +12,13 @@ export const foreignOutline: CheckRule = {
         .flatMap((view) => {
           const edges = strokesOfKind(view, 'visible');
           return strokesOfKind(size, 'dimension').some((s) => edges.some((e) => segmentsCross(s, e, 0)))
-            ? [finding('foreign-outline', `The dimension line of ${size.name} meets the outline of the view ${view.name}.`, [size.name, view.name])]
+            ? [
+                finding(
+                  'foreign-outline',
+                  `The dimension line of ${size.name} meets the outline of the view ${view.name}.`,
+                  [size.name, view.name],
+                ),
+              ]
             : [];
         }),
     ),

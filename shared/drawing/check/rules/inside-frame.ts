@@ -25,10 +25,13 @@ export const insideFrame: CheckRule = {
     return reading.groups.flatMap((g) => {
       if (FREE.includes(g.group.role)) return [];
       const boxes = boxesOf(g);
-      if (boxes.some((b) => !boxInside(b, frame, 0.001))) return [finding('inside-frame', `${g.name} reaches over the frame.`, [g.name])];
+      if (boxes.some((b) => !boxInside(b, frame, 0.001)))
+        return [finding('inside-frame', `${g.name} reaches over the frame.`, [g.name])];
       if (FOOT.includes(g.group.role)) return [];
       const hit = foot.find((f) => boxes.some((b) => boxesMeet(b, f.box, -0.01)));
-      return hit ? [finding('inside-frame', `${g.name} reaches into the ${hit.name}.`, [g.name, hit.name])] : [];
+      return hit
+        ? [finding('inside-frame', `${g.name} reaches into the ${hit.name}.`, [g.name, hit.name])]
+        : [];
     });
   },
 };

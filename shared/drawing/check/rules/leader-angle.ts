@@ -16,7 +16,13 @@ export const leaderAngle: CheckRule = {
         if (!a || !b) return [];
         const angle = (Math.atan2(Math.abs(b.y - a.y), Math.abs(b.x - a.x)) * 180) / Math.PI;
         return angle < leastLeaderAngle - SLACK || angle > mostLeaderAngle + SLACK
-          ? [finding('leader-angle', `The leader of ${size.name} leaves at ${angle.toFixed(1)}°; it must be ${leastLeaderAngle} to ${mostLeaderAngle}°.`, [size.name])]
+          ? [
+              finding(
+                'leader-angle',
+                `The leader of ${size.name} leaves at ${angle.toFixed(1)}°; it must be ${leastLeaderAngle} to ${mostLeaderAngle}°.`,
+                [size.name],
+              ),
+            ]
           : [];
       }),
     );

@@ -17,8 +17,16 @@ export const lineWidths: CheckRule = {
       .filter((g) => g.strokes.some((s) => WIDE.includes(s.line)))
       .map((g) => finding('line-widths', `${g.name} is drawn with a line as wide as an outline.`, [g.name]));
     for (const view of ofRole(reading, 'view'))
-      if (!view.strokes.some((s) => s.line === 'visible')) found.push(finding('line-widths', `The view ${view.name} has no outline.`, [view.name]));
-    if (Math.abs(ratio - lineRatio) > 1e-9) found.push(finding('line-widths', `Outlines are ${ratio} times as wide as dimension lines; ${lineRatio} is the rule.`, ['sheet']));
+      if (!view.strokes.some((s) => s.line === 'visible'))
+        found.push(finding('line-widths', `The view ${view.name} has no outline.`, [view.name]));
+    if (Math.abs(ratio - lineRatio) > 1e-9)
+      found.push(
+        finding(
+          'line-widths',
+          `Outlines are ${ratio} times as wide as dimension lines; ${lineRatio} is the rule.`,
+          ['sheet'],
+        ),
+      );
     return found;
   },
 };

@@ -12,6 +12,10 @@ export const numbers: CheckRule = {
   id: 'numbers',
   check: ({ groups }) =>
     groups
-      .filter((g) => g.strokes.some((s) => !Number.isFinite(s.x1 + s.y1 + s.x2 + s.y2)) || numbersIn(g.texts.map((t) => t.box)).some((n) => !Number.isFinite(n)))
+      .filter(
+        (g) =>
+          g.strokes.some((s) => !Number.isFinite(s.x1 + s.y1 + s.x2 + s.y2)) ||
+          numbersIn(g.texts.map((t) => t.box)).some((n) => !Number.isFinite(n)),
+      )
       .map((g) => finding('numbers', `${g.name} has a place that is no number.`, [g.name])),
 };

@@ -9,7 +9,9 @@ export const sizeMissing: CheckRule = {
     const absent = reading.scheme.sizes
       .filter((s) => !drawn.has(s.id))
       .map((s) => finding('size-missing', `${s.id} is not on the sheet.`, [s.id]));
-    const open = reading.scheme.completeness.missing.map((words) => finding('size-missing', `Nothing fixes ${words}.`, [words]));
+    const open = reading.scheme.completeness.missing.map((words) =>
+      finding('size-missing', `Nothing fixes ${words}.`, [words]),
+    );
     return [...absent, ...open];
   },
 };

@@ -52,7 +52,13 @@ export const spacing: CheckRule = {
         for (const span of spansOf(size, way)) {
           const clear = view ? clearOf(span, way, view) : null;
           if (clear !== null && clear < rules.leastFirstLine - SLACK) {
-            found.push(finding('spacing', `The dimension line of ${size.name} stands ${clear.toFixed(2)} mm off the outline; the least is ${rules.leastFirstLine} mm.`, [size.name]));
+            found.push(
+              finding(
+                'spacing',
+                `The dimension line of ${size.name} stands ${clear.toFixed(2)} mm off the outline; the least is ${rules.leastFirstLine} mm.`,
+                [size.name],
+              ),
+            );
             break;
           }
         }
@@ -62,10 +68,21 @@ export const spacing: CheckRule = {
         const close = spansOf(a, way).some((s) =>
           spansOf(b, way).some((t) => {
             const apart = Math.abs(s.at - t.at);
-            return Math.min(s.hi, t.hi) - Math.max(s.lo, t.lo) > 0.3 && apart > 0.3 && apart < rules.leastPitch - SLACK;
+            return (
+              Math.min(s.hi, t.hi) - Math.max(s.lo, t.lo) > 0.3 &&
+              apart > 0.3 &&
+              apart < rules.leastPitch - SLACK
+            );
           }),
         );
-        if (close) found.push(finding('spacing', `The dimension lines of ${a.name} and ${b.name} stand closer than ${rules.leastPitch} mm.`, [a.name, b.name]));
+        if (close)
+          found.push(
+            finding(
+              'spacing',
+              `The dimension lines of ${a.name} and ${b.name} stand closer than ${rules.leastPitch} mm.`,
+              [a.name, b.name],
+            ),
+          );
       }
     return found;
   },

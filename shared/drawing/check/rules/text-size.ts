@@ -13,7 +13,13 @@ export const textSize: CheckRule = {
     return groups.flatMap((g) =>
       g.group.marks.flatMap((mark) =>
         mark.type === 'text' && mark.size * CAP_HEIGHT < least - SLACK
-          ? [finding('text-size', `“${mark.text}” is ${(mark.size * CAP_HEIGHT).toFixed(2)} mm high; the least is ${least} mm.`, [g.name])]
+          ? [
+              finding(
+                'text-size',
+                `“${mark.text}” is ${(mark.size * CAP_HEIGHT).toFixed(2)} mm high; the least is ${least} mm.`,
+                [g.name],
+              ),
+            ]
           : [],
       ),
     );

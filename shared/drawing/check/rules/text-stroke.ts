@@ -18,7 +18,12 @@ export const textStroke: CheckRule = {
             if (s.box[0] >= x1 || s.box[2] <= x0 || s.box[1] >= y1 || s.box[3] <= y0) continue;
             if (other === g && s.line === 'symbol') continue;
             if (segmentMeetsBox(s, inner))
-              return [finding('text-stroke', `A ${s.line} line of ${other.name} runs through “${text.text}”.`, [g.name, other.name])];
+              return [
+                finding('text-stroke', `A ${s.line} line of ${other.name} runs through “${text.text}”.`, [
+                  g.name,
+                  other.name,
+                ]),
+              ];
           }
         return [];
       }),

@@ -11,7 +11,18 @@ export const viewsOverlap: CheckRule = {
       return box ? [{ name: v.name, box }] : [];
     });
     return views.flatMap((a, i) =>
-      views.slice(i + 1).flatMap((b) => (boxesMeet(a.box, b.box) ? [finding('views-overlap', `The views ${a.name} and ${b.name} lie over one another.`, [a.name, b.name])] : [])),
+      views
+        .slice(i + 1)
+        .flatMap((b) =>
+          boxesMeet(a.box, b.box)
+            ? [
+                finding('views-overlap', `The views ${a.name} and ${b.name} lie over one another.`, [
+                  a.name,
+                  b.name,
+                ]),
+              ]
+            : [],
+        ),
     );
   },
 };
