@@ -29,6 +29,8 @@ export function buildApp(services: Services, logger: Logger): Express {
   const { config } = services;
   const app = express();
   app.disable('x-powered-by');
+  // A proxy on this machine (https in front, the pages under development) may say whom it asks for; nobody else may.
+  app.set('trust proxy', 'loopback');
   app.use(requestLog(logger));
   app.use(securityHeaders(config.secureCookies));
   app.use('/api', apiRoutes(services));

@@ -4,6 +4,7 @@ import { workedExamples, defaultValues } from '../../shared/template/default-val
 import { templateById } from '../../templates';
 import { usualRateLimits } from '../../server/config';
 import type { Database } from '../../server/database';
+import { Refusal } from '../../server/errors';
 import { approveRevision } from '../../server/services/approve-revision';
 import { markTrial } from '../../server/services/mark-trial';
 import type { RevisionAt } from '../../server/services/revision-at';
@@ -83,7 +84,16 @@ export async function demoDrawings(database: Database, slug: string, people: Rea
       if (personId === undefined) throw new Error(`The demo shop has no ${mail}.`);
       return workInShop(services, { slug, personId }, work);
     };
-    if (!(await isThere(as, drawing))) await draw(drawing, as);
+    if (!(await isThere(as, drawing))) await drawAsFarAsItGoes(drawing, as);
+  }
+}
+
+/** A demo drawing that the sheet check holds back stays the draft it is, and says why; that is no reason not to start. */
+async function drawAsFarAsItGoes(drawing: DemoDrawing, as: As): Promise<void> {
+  try {
+    await draw(drawing, as);
+  } catch (error) {
+    if (!(error instanceof Refusal) || error.code !== 'not-ready') throw error;
   }
 }
 
