@@ -20,7 +20,7 @@ function said(file: string, line: string): string[] {
       {
         files: ['**/*.{ts,tsx}'],
         plugins: { house },
-        languageOptions: { parser: tseslint.parser as Linter.Parser },
+        languageOptions: { parser: tseslint.parser },
         rules: { 'house/import-direction': 'error' },
       },
     ],
