@@ -34,16 +34,23 @@ export function restrict(body: Body, from: number, to: number): Body {
     outer: slice(body.outer, a, b),
     inner: slice(body.inner, a, b),
     cuts: body.cuts.map((cut) => clipCut(cut, a, b)).filter((cut) => cut !== null),
-    treatments: body.treatments.map((treatment) => clipSpan(treatment, a, b)).filter((treatment) => treatment !== null),
+    treatments: body.treatments
+      .map((treatment) => clipSpan(treatment, a, b))
+      .filter((treatment) => treatment !== null),
   };
 }
 
 function clipCut(cut: Cut, a: number, b: number): Cut | null {
-  if (cut.kind === 'cross-hole') return cut.at + cut.diameter / 2 > a && cut.at - cut.diameter / 2 < b ? cut : null;
+  if (cut.kind === 'cross-hole')
+    return cut.at + cut.diameter / 2 > a && cut.at - cut.diameter / 2 < b ? cut : null;
   return clipSpan(cut, a, b);
 }
 
-function clipSpan<T extends Treatment | Exclude<Cut, { kind: 'cross-hole' }>>(spanned: T, a: number, b: number): T | null {
+function clipSpan<T extends Treatment | Exclude<Cut, { kind: 'cross-hole' }>>(
+  spanned: T,
+  a: number,
+  b: number,
+): T | null {
   const from = Math.max(spanned.from, a);
   const to = Math.min(spanned.to, b);
   return to > from ? { ...spanned, from, to } : null;

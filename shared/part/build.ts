@@ -23,7 +23,11 @@ export type BuiltPart = { part: Part } | { problems: InputProblem[] };
 export function buildPart(input: PartInput): BuiltPart {
   const { placed, problems } = placeLengths(input.lengths);
   const last = placed[placed.length - 1];
-  if (!last) return { problems: problems.length > 0 ? problems : [{ input: 'lengths', message: 'A part needs at least one length.' }] };
+  if (!last)
+    return {
+      problems:
+        problems.length > 0 ? problems : [{ input: 'lengths', message: 'A part needs at least one length.' }],
+    };
   if (problems.length > 0) return { problems };
 
   const chamfers = collect(input.chamfers, (chamfer) => placeChamfer(chamfer, placed), 'chamfer', problems);
@@ -72,13 +76,15 @@ function collect<I, K extends string, P>(
   const found: P[] = [];
   for (const input of inputs) {
     const result = place(input);
-    if ('problem' in result) problems.push((result as { problem: InputProblem }).problem);
-    else found.push((result as { [k in K]: P })[key]);
+    if ('problem' in result) problems.push(result.problem);
+    else found.push(result[key]);
   }
   return found;
 }
 
-function overlappingCrowns(crowns: readonly { input: { id: string }; from: number; to: number }[]): InputProblem[] {
+function overlappingCrowns(
+  crowns: readonly { input: { id: string }; from: number; to: number }[],
+): InputProblem[] {
   const [first, second] = crowns;
   if (!first || !second || first.from >= second.to || second.from >= first.to) return [];
   return [

@@ -32,9 +32,13 @@ export function placeCentreHole(
   const face = input.end === 'right' ? radiusAt(outline, to, 'left') : radiusAt(outline, from, 'right');
   const mouth = hole.guard?.diameter ?? hole.mouthDiameter;
   if (mouth / 2 >= face)
-    return fault(`Centre hole ${hole.designation} opens to ${millimetres(mouth)}, but the end face is only ${millimetres(2 * face)}.`);
+    return fault(
+      `Centre hole ${hole.designation} opens to ${millimetres(mouth)}, but the end face is only ${millimetres(2 * face)}.`,
+    );
   if (hole.depth >= to - from)
-    return fault(`Centre hole ${hole.designation} is ${millimetres(hole.depth)} deep; the part must be longer than that.`);
+    return fault(
+      `Centre hole ${hole.designation} is ${millimetres(hole.depth)} deep; the part must be longer than that.`,
+    );
   const leftward = holePieces(hole, from);
   const envelope = input.end === 'left' ? leftward : mirrorGenerator(leftward, from + to);
   return { hole: { input, ...spanOf(envelope), envelope } };
@@ -50,6 +54,12 @@ function holePieces(hole: CentreHole, face: number): Generator {
   };
   if (hole.guard) cone(hole.guard.diameter, hole.mouthDiameter, hole.guard.angle);
   cone(hole.mouthDiameter, hole.pilotDiameter, hole.coneAngle);
-  pieces.push({ kind: 'line', from: x, to: face + hole.depth, start: hole.pilotDiameter / 2, end: hole.pilotDiameter / 2 });
+  pieces.push({
+    kind: 'line',
+    from: x,
+    to: face + hole.depth,
+    start: hole.pilotDiameter / 2,
+    end: hole.pilotDiameter / 2,
+  });
   return pieces;
 }

@@ -17,7 +17,10 @@ export interface PlacedCrown {
  * A spherical crown whose apex is the end face, followed from the apex to where it first meets the outline.
  * A radius too small to meet it at all is a problem that names the least allowed.
  */
-export function placeCrown(input: CrownInput, outline: Generator): { crown: PlacedCrown } | { problem: InputProblem } {
+export function placeCrown(
+  input: CrownInput,
+  outline: Generator,
+): { crown: PlacedCrown } | { problem: InputProblem } {
   const { from: first, to: last } = spanOf(outline);
   const length = first + last;
   const rightward = input.end === 'right' ? outline : mirrorGenerator(outline, length);

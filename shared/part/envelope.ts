@@ -59,6 +59,7 @@ function sorted(stations: number[]): number[] {
     if (before === undefined || x - before > 1e-9) kept.push(x);
   }
   const last = ordered[ordered.length - 1];
-  if (last !== undefined && kept.length > 0) kept[kept.length - 1] = Math.max(last, kept[kept.length - 1] ?? last);
+  if (last !== undefined && kept.length > 0)
+    kept[kept.length - 1] = Math.max(last, kept[kept.length - 1] ?? last);
   return kept;
 }

@@ -25,11 +25,15 @@ export function placeThread(
   const { spec } = input;
   if (on.input.form !== 'cylinder') return fault('A thread needs a cylinder to be cut on.');
   if (Math.abs(on.input.diameter - spec.major) > 1e-6)
-    return fault(`A ${spec.designation} thread needs a cylinder of ${millimetres(spec.major)}, not ${millimetres(on.input.diameter)}.`);
+    return fault(
+      `A ${spec.designation} thread needs a cylinder of ${millimetres(spec.major)}, not ${millimetres(on.input.diameter)}.`,
+    );
   const length = on.to - on.from;
   const full = input.fullThread ?? length;
   if (!(full > 0) || full > length + 1e-9)
-    return fault(`The full thread must be more than 0 mm and at most the ${millimetres(length)} it is cut on.`);
+    return fault(
+      `The full thread must be more than 0 mm and at most the ${millimetres(length)} it is cut on.`,
+    );
   const from = input.end === 'right' ? on.to - full : on.from;
   return {
     thread: {
@@ -109,32 +113,33 @@ export function featuresOf(placed: PlacedInputs): Feature[] {
     { kind: 'face', id: 'left-face', x: 0 },
     { kind: 'face', id: 'right-face', x: placed.length },
     ...placed.lengths.map(lengthFeature),
-    ...placed.chamfers.map(
-      ({ input, from, to, angle }): Feature => ({
-        kind: 'chamfer',
-        id: input.id,
-        from,
-        to,
-        end: input.end,
-        leg: input.leg,
-        angle,
-        on: input.on,
-      }),
-    ),
-    ...placed.crowns.map(
-      ({ input, from, to }): Feature => ({ kind: 'crown', id: input.id, from, to, end: input.end, radius: input.radius }),
-    ),
+    ...placed.chamfers.map(({ input, from, to, angle }): Feature => ({
+      kind: 'chamfer',
+      id: input.id,
+      from,
+      to,
+      end: input.end,
+      leg: input.leg,
+      angle,
+      on: input.on,
+    })),
+    ...placed.crowns.map(({ input, from, to }): Feature => ({
+      kind: 'crown',
+      id: input.id,
+      from,
+      to,
+      end: input.end,
+      radius: input.radius,
+    })),
     ...placed.threads.map(threadFeature),
     ...placed.flats.map(flatsFeature),
-    ...placed.centreHoles.map(
-      ({ input, from, to }): Feature => ({
-        kind: 'centre-hole',
-        id: input.id,
-        from,
-        to,
-        end: input.end,
-        designation: input.designation,
-      }),
-    ),
+    ...placed.centreHoles.map(({ input, from, to }): Feature => ({
+      kind: 'centre-hole',
+      id: input.id,
+      from,
+      to,
+      end: input.end,
+      designation: input.designation,
+    })),
   ];
 }

@@ -93,8 +93,9 @@ export function joined(generator: Generator): Generator {
 }
 
 function join(p: Piece, q: Piece): Piece {
-  if (p.kind === 'line' && q.kind === 'line') return { kind: 'line', from: p.from, to: q.to, start: p.start, end: q.end };
-  return { ...p, to: q.to } as Piece;
+  if (p.kind === 'line' && q.kind === 'line')
+    return { kind: 'line', from: p.from, to: q.to, start: p.start, end: q.end };
+  return { ...p, to: q.to };
 }
 
 /** Stations inside [from, to] where r passes the level, steps included. */

@@ -28,7 +28,11 @@ export function mirrorRemoval(removal: Removal, length: number): Removal {
     case 'trim':
       return mirrorSpan(removal, length);
     case 'sever':
-      return { ...mirrorSpan(removal, length), kerfFrom: length - removal.kerfTo, kerfTo: length - removal.kerfFrom };
+      return {
+        ...mirrorSpan(removal, length),
+        kerfFrom: length - removal.kerfTo,
+        kerfTo: length - removal.kerfFrom,
+      };
   }
 }
 

@@ -23,7 +23,10 @@ export interface PlacedChamfer {
 }
 
 /** Lengths put end to end from x = 0, and what is wrong with any of them. */
-export function placeLengths(lengths: readonly LengthInput[]): { placed: PlacedLength[]; problems: InputProblem[] } {
+export function placeLengths(lengths: readonly LengthInput[]): {
+  placed: PlacedLength[];
+  problems: InputProblem[];
+} {
   const problems: InputProblem[] = [];
   const placed: PlacedLength[] = [];
   let x = 0;
@@ -86,10 +89,13 @@ export function placeChamfer(
   const least = facing ?? 0;
   if (edge - drop < least - 1e-9) {
     const allowed = Math.max(0, (edge - least) / Math.tan(angle));
-    return fault(`A chamfer of ${millimetres(input.leg)} is deeper than the edge it cuts; at most ${millimetres(allowed)} is allowed.`);
+    return fault(
+      `A chamfer of ${millimetres(input.leg)} is deeper than the edge it cuts; at most ${millimetres(allowed)} is allowed.`,
+    );
   }
   // Where the cone narrows towards the end faster than the chamfer, no corner is left to cut.
-  if (edge - drop > corner) return fault('The chamfer does not touch the edge: the cone already falls more steeply.');
+  if (edge - drop > corner)
+    return fault('The chamfer does not touch the edge: the cone already falls more steeply.');
   const envelope: Generator =
     input.end === 'left'
       ? [{ kind: 'line', from: on.from, to: on.from + input.leg, start: edge - drop, end: edge }]
@@ -102,9 +108,12 @@ export function placeChamfer(
 export function overlappingChamfers(chamfers: readonly PlacedChamfer[]): InputProblem[] {
   const problems: InputProblem[] = [];
   for (const [index, chamfer] of chamfers.entries()) {
-    const clash = chamfers.slice(0, index).find((other) => other.from < chamfer.to - 1e-9 && chamfer.from < other.to - 1e-9);
+    const clash = chamfers
+      .slice(0, index)
+      .find((other) => other.from < chamfer.to - 1e-9 && chamfer.from < other.to - 1e-9);
     if (!clash) continue;
-    const allowed = chamfer.to - chamfer.from - (Math.min(clash.to, chamfer.to) - Math.max(clash.from, chamfer.from));
+    const allowed =
+      chamfer.to - chamfer.from - (Math.min(clash.to, chamfer.to) - Math.max(clash.from, chamfer.from));
     problems.push({
       input: chamfer.input.id,
       message: `The chamfers at the two ends of this length overlap; at most ${millimetres(Math.max(0, allowed))} is left for this one.`,

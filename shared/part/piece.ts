@@ -114,7 +114,9 @@ export function sameCurve(p: Piece, q: Piece): boolean {
     if (p.start === p.end && q.start === q.end) return p.start === q.start;
     const slopeP = (p.end - p.start) / (p.to - p.from);
     const slopeQ = (q.end - q.start) / (q.to - q.from);
-    return Math.abs(slopeP - slopeQ) < 1e-12 && Math.abs(p.start + slopeP * (q.from - p.from) - q.start) < 1e-12;
+    return (
+      Math.abs(slopeP - slopeQ) < 1e-12 && Math.abs(p.start + slopeP * (q.from - p.from) - q.start) < 1e-12
+    );
   }
   return false;
 }

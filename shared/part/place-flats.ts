@@ -18,7 +18,10 @@ export interface PlacedFlats {
  * Flats with their run-out. Where the declared span ends at a station from which the outline falls, the flats
  * go on to where r(x) meets them; where it ends within a length, against a cylinder or below a step, they stop.
  */
-export function placeFlats(input: FlatsInput, outline: Generator): { flats: PlacedFlats } | { problem: InputProblem } {
+export function placeFlats(
+  input: FlatsInput,
+  outline: Generator,
+): { flats: PlacedFlats } | { problem: InputProblem } {
   const { from: left, to: right } = spanOf(outline);
   const fault = (message: string): { problem: InputProblem } => ({ problem: { input: input.id, message } });
   const declaredFrom = input.from;
@@ -36,7 +39,10 @@ export function placeFlats(input: FlatsInput, outline: Generator): { flats: Plac
   if (distance <= 0)
     return fault(`A flat this deep passes the axis; it must leave more than ${millimetres(largest)} across.`);
   const to = runOut(outline, Math.min(declaredTo, right), distance);
-  const from = left + right - runOut(mirrorGenerator(outline, left + right), left + right - Math.max(declaredFrom, left), distance);
+  const from =
+    left +
+    right -
+    runOut(mirrorGenerator(outline, left + right), left + right - Math.max(declaredFrom, left), distance);
   const corner = input.count >= 3 ? distance / Math.cos(Math.PI / input.count) : Infinity;
   return {
     flats: {

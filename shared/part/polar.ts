@@ -103,6 +103,8 @@ export function flattedDisc(radius: number, count: number, distance: number): nu
   if (radius <= distance) return Math.PI * radius * radius;
   if (count >= 3 && radius >= distance / Math.cos(Math.PI / count))
     return count * distance * distance * Math.tan(Math.PI / count);
-  const segment = radius * radius * Math.acos(distance / radius) - distance * Math.sqrt(radius * radius - distance * distance);
+  const segment =
+    radius * radius * Math.acos(distance / radius) -
+    distance * Math.sqrt(radius * radius - distance * distance);
   return Math.PI * radius * radius - count * segment;
 }

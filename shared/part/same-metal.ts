@@ -57,16 +57,25 @@ function canonicalForm(body: Body): CanonicalBody {
     outer: joined(outer),
     inner: joined(body.inner),
     flats: visibleFlats(outer, flats, body),
-    treatments: merged(body.treatments.map((treatment) => treatmentMark(treatment, body)).filter((mark) => mark.to > mark.from)),
+    treatments: merged(
+      body.treatments
+        .map((treatment) => treatmentMark(treatment, body))
+        .filter((mark) => mark.to > mark.from),
+    ),
   };
 }
 
 function visibleFlats(outer: Generator, flats: readonly FlatsCut[], body: Body): Marked[] {
   const marks = flats.flatMap((cut) => {
-    const deeper = flats.filter((other) => sameFaces(other, cut) && other.distance < cut.distance - STATION_TOLERANCE);
+    const deeper = flats.filter(
+      (other) => sameFaces(other, cut) && other.distance < cut.distance - STATION_TOLERANCE,
+    );
     return spansAbove(outer, cut.distance, Math.max(cut.from, body.x0), Math.min(cut.to, body.x1))
       .flatMap((span) => without(span, deeper))
-      .map((span) => ({ ...span, key: `${cut.count} flats at ${rounded(cut.distance)} turned ${rounded(turnOf(cut))}` }));
+      .map((span) => ({
+        ...span,
+        key: `${cut.count} flats at ${rounded(cut.distance)} turned ${rounded(turnOf(cut))}`,
+      }));
   });
   return merged(marks);
 }
@@ -89,7 +98,8 @@ function rounded(value: number): string {
 function treatmentMark(treatment: Treatment, body: Body): Marked {
   const from = Math.max(treatment.from, body.x0);
   const to = Math.min(treatment.to, body.x1);
-  if (treatment.kind === 'knurl') return { from, to, key: `knurl ${treatment.pattern} ${rounded(treatment.pitch)}` };
+  if (treatment.kind === 'knurl')
+    return { from, to, key: `knurl ${treatment.pattern} ${rounded(treatment.pitch)}` };
   const place = treatment.internal ? 'internal' : 'external';
   const figures = [treatment.major, treatment.pitchDiameter, treatment.lead].map(rounded).join(' ');
   return { from, to, key: `thread ${place} ${figures} ${treatment.hand}` };
@@ -141,7 +151,9 @@ export function differences(a: Body, b: Body): Difference[] {
   for (const span of unequalSpans(p.inner, q.inner, from, to))
     found.push({ kind: 'inner', ...span, message: `bore ${radiiText(p.inner, q.inner, span)}` });
   found.push(...markDifferences(p.flats, q.flats, () => 'flats'));
-  found.push(...markDifferences(p.treatments, q.treatments, (key) => (key.startsWith('knurl') ? 'knurl' : 'thread')));
+  found.push(
+    ...markDifferences(p.treatments, q.treatments, (key) => (key.startsWith('knurl') ? 'knurl' : 'thread')),
+  );
   return found;
 }
 
@@ -158,13 +170,18 @@ const SAMPLES = [0.001, 0.07, 0.25, 0.5, 0.75, 0.93, 0.999];
 
 /** Spans of [from, to], between stations of either, where the two radii differ. */
 export function unequalSpans(p: Generator, q: Generator, from: number, to: number): Span[] {
-  const stations = [from, ...[...breaks(p), ...breaks(q)].filter((x) => x > from && x < to), to].sort((a, b) => a - b);
+  const stations = [from, ...[...breaks(p), ...breaks(q)].filter((x) => x > from && x < to), to].sort(
+    (a, b) => a - b,
+  );
   const spans: Span[] = [];
   for (let i = 0; i + 1 < stations.length; i += 1) {
     const a = stations[i] ?? from;
     const b = stations[i + 1] ?? to;
     if (b - a <= STATION_TOLERANCE) continue;
-    if (SAMPLES.every((share) => sameRadius(radiusAt(p, a + share * (b - a)), radiusAt(q, a + share * (b - a))))) continue;
+    if (
+      SAMPLES.every((share) => sameRadius(radiusAt(p, a + share * (b - a)), radiusAt(q, a + share * (b - a))))
+    )
+      continue;
     const before = spans[spans.length - 1];
     if (before && a - before.to <= STATION_TOLERANCE) before.to = b;
     else spans.push({ from: a, to: b });
@@ -184,7 +201,12 @@ function markDifferences(
 ): Difference[] {
   const missing = (one: readonly Marked[], other: readonly Marked[], which: string): Difference[] =>
     one
-      .filter((mark) => !other.some((twin) => twin.key === mark.key && near(twin.from, mark.from) && near(twin.to, mark.to)))
+      .filter(
+        (mark) =>
+          !other.some(
+            (twin) => twin.key === mark.key && near(twin.from, mark.from) && near(twin.to, mark.to),
+          ),
+      )
       .map((mark) => ({
         kind: kind(mark.key),
         from: mark.from,

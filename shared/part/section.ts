@@ -33,5 +33,7 @@ function isEven(lines: readonly FlatLine[]): boolean {
   const first = lines[0];
   if (!first) return false;
   const step = (2 * Math.PI) / lines.length;
-  return lines.every((line, i) => line.distance === first.distance && Math.abs(line.normal - first.normal - i * step) < 1e-12);
+  return lines.every(
+    (line, i) => line.distance === first.distance && Math.abs(line.normal - first.normal - i * step) < 1e-12,
+  );
 }

@@ -62,7 +62,9 @@ function isLevel(piece: Generator[number]): boolean {
 }
 
 function linesOver(cuts: readonly FlatsCut[], x: number): FlatLine[] {
-  return cuts.filter((cut) => x > cut.from && x < cut.to).flatMap((cut) => flatLines(cut.count, cut.distance, cut.phase));
+  return cuts
+    .filter((cut) => x > cut.from && x < cut.to)
+    .flatMap((cut) => flatLines(cut.count, cut.distance, cut.phase));
 }
 
 function splitStations(shell: Shell, from: number, to: number): number[] {
@@ -72,11 +74,17 @@ function splitStations(shell: Shell, from: number, to: number): number[] {
     stations.push(cut.from, cut.to);
     for (const level of [cut.distance, cornerRadius(cut)]) {
       if (!Number.isFinite(level)) continue;
-      stations.push(...levelStations(shell.outer, level, from, to), ...levelStations(shell.inner, level, from, to));
+      stations.push(
+        ...levelStations(shell.outer, level, from, to),
+        ...levelStations(shell.inner, level, from, to),
+      );
     }
   }
   for (const level of meetingRadii(flats))
-    stations.push(...levelStations(shell.outer, level, from, to), ...levelStations(shell.inner, level, from, to));
+    stations.push(
+      ...levelStations(shell.outer, level, from, to),
+      ...levelStations(shell.inner, level, from, to),
+    );
   for (const outer of shell.outer) for (const inner of shell.inner) stations.push(...crossings(outer, inner));
   return [...new Set(stations.filter((x) => x >= from && x <= to))].sort((a, b) => a - b);
 }

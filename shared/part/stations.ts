@@ -11,8 +11,14 @@ export function stationsOf(placed: PlacedInputs): Station[] {
     { id: 'left-face', x: 0 },
     { id: 'right-face', x: placed.length },
     ...placed.lengths.map(({ input, to }) => ({ id: `${input.id}.end`, x: to })),
-    ...placed.chamfers.map(({ input, from, to }) => ({ id: `${input.id}.edge`, x: input.end === 'left' ? to : from })),
-    ...placed.crowns.map(({ input, from, to }) => ({ id: `${input.id}.edge`, x: input.end === 'left' ? to : from })),
+    ...placed.chamfers.map(({ input, from, to }) => ({
+      id: `${input.id}.edge`,
+      x: input.end === 'left' ? to : from,
+    })),
+    ...placed.crowns.map(({ input, from, to }) => ({
+      id: `${input.id}.edge`,
+      x: input.end === 'left' ? to : from,
+    })),
     ...placed.flats.flatMap(({ input, declaredFrom, declaredTo }) => [
       { id: `${input.id}.start`, x: declaredFrom },
       { id: `${input.id}.end`, x: declaredTo },

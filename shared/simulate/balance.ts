@@ -21,12 +21,22 @@ export function judgeBalance(route: Route, part: Part, replayed: Replay): Fault[
   for (const name of ['blank', 'removed', 'kerf', 'remnant', 'part'] as const) {
     if (!(Math.abs(own[name] - route.volumes[name]) <= slack))
       faults.push(
-        fault('volumes-balance', 0, `The route gives ${name} as ${route.volumes[name]} mm³; the metal gives ${own[name]} mm³.`),
+        fault(
+          'volumes-balance',
+          0,
+          `The route gives ${name} as ${route.volumes[name]} mm³; the metal gives ${own[name]} mm³.`,
+        ),
       );
   }
   const said = route.operations.reduce((sum, operation) => sum + operation.removes, 0);
   if (!(Math.abs(said - route.volumes.removed) <= slack))
-    faults.push(fault('volumes-balance', 0, `The operations remove ${said} mm³ together, the route says ${route.volumes.removed} mm³.`));
+    faults.push(
+      fault(
+        'volumes-balance',
+        0,
+        `The operations remove ${said} mm³ together, the route says ${route.volumes.removed} mm³.`,
+      ),
+    );
   if (!(Math.abs(own.blank - own.removed - own.kerf - own.remnant - own.part) <= slack))
     faults.push(fault('volumes-balance', 0, 'Chips, kerf, remnant and part together are not the blank.'));
   return faults;

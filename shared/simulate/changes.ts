@@ -45,8 +45,16 @@ function newFlats(before: Body, after: Body): Change[] {
   const had = flatsOf(before);
   return flatsOf(after).flatMap((cut) =>
     spansAbove(before.outer, cut.distance, Math.max(cut.from, after.x0), Math.min(cut.to, after.x1))
-      .filter((span) => !had.some((old) => isSame(old, cut) && old.from <= span.from + 1e-9 && old.to >= span.to - 1e-9))
-      .map((span): Change => ({ kind: 'flats', ...span, cut, deepest: roundOver(before, span.from, span.to) - cut.distance })),
+      .filter(
+        (span) =>
+          !had.some((old) => isSame(old, cut) && old.from <= span.from + 1e-9 && old.to >= span.to - 1e-9),
+      )
+      .map((span): Change => ({
+        kind: 'flats',
+        ...span,
+        cut,
+        deepest: roundOver(before, span.from, span.to) - cut.distance,
+      })),
   );
 }
 

@@ -18,11 +18,19 @@ export function judgeStops(steps: readonly Step[]): Fault[] {
       const fromX = step.place(stop.fromX);
       const toX = step.place(stop.toX);
       if (!near(Math.abs(toX - fromX), stop.length))
-        faults.push(fault('figures-fit', operation.number, `The stop says ${mm(stop.length)}, but its ends lie ${mm(Math.abs(toX - fromX))} apart.`));
+        faults.push(
+          fault(
+            'figures-fit',
+            operation.number,
+            `The stop says ${mm(stop.length)}, but its ends lie ${mm(Math.abs(toX - fromX))} apart.`,
+          ),
+        );
       faults.push(...originFaults(step, stop.from, fromX, freeMade));
       const ends = reachedStations(step);
       if (ends.length > 0 && !ends.some((x) => near(x, toX)))
-        faults.push(fault('figures-fit', operation.number, `The stop ends at ${mm(stop.toX)}, where no metal changes.`));
+        faults.push(
+          fault('figures-fit', operation.number, `The stop ends at ${mm(stop.toX)}, where no metal changes.`),
+        );
     }
     made = [...made, ...facesMade(step)];
   }
@@ -34,15 +42,30 @@ function originFaults(step: Step, from: string, fromX: number, freeMade: boolean
   const trims = step.cut?.kind === 'trim';
   if (from === `${step.setup.id}.face`) {
     const free = near(fromX, before.x1) || (trims && near(fromX, after.x1));
-    if (!free) return [fault('stop-from-face', operation.number, `The stop starts at ${mm(step.place(fromX))}, but the free face is not there now.`)];
+    if (!free)
+      return [
+        fault(
+          'stop-from-face',
+          operation.number,
+          `The stop starts at ${mm(step.place(fromX))}, but the free face is not there now.`,
+        ),
+      ];
     if (!freeMade && !trims && operation.method !== 'saw')
       return [fault('datum-first', operation.number, 'The stop starts at an end that has not been faced.')];
     return [];
   }
   const station = step.part.stations.find((each) => swapped(each.id, step.flipped) === from);
   if (!station || !near(station.x, fromX))
-    return [fault('stop-from-face', operation.number, `The stop starts at ${from}, which does not lie where it says.`)];
-  return isShoulder(before, fromX) ? [] : [fault('stop-from-face', operation.number, `There is no face at ${from} yet.`)];
+    return [
+      fault(
+        'stop-from-face',
+        operation.number,
+        `The stop starts at ${from}, which does not lie where it says.`,
+      ),
+    ];
+  return isShoulder(before, fromX)
+    ? []
+    : [fault('stop-from-face', operation.number, `There is no face at ${from} yet.`)];
 }
 
 /** The route speaks of faces as drawn; the turned part has their names the other way round. */

@@ -28,12 +28,22 @@ function removesFaults(step: Step): Fault[] {
   const faults: Fault[] = [];
   const slack = LIMITS.volumeTolerance.value * Math.max(1, chips);
   if (!(Math.abs(operation.removes - chips) <= slack))
-    faults.push(fault('removes-metal', operation.number, `It says it removes ${operation.removes} mm³; the cut takes ${chips} mm³.`));
+    faults.push(
+      fault(
+        'removes-metal',
+        operation.number,
+        `It says it removes ${operation.removes} mm³; the cut takes ${chips} mm³.`,
+      ),
+    );
   const event = EVENTS.has(operation.method);
-  if (event && cut) faults.push(fault('removes-metal', operation.number, `No metal is cut when the method is ${operation.method}.`));
+  if (event && cut)
+    faults.push(
+      fault('removes-metal', operation.number, `No metal is cut when the method is ${operation.method}.`),
+    );
   if (!event && operation.method !== 'saw' && !cut)
     faults.push(fault('removes-metal', operation.number, 'The operation has no cut to replay.'));
-  if (cut && step.changes.length === 0) faults.push(fault('removes-metal', operation.number, 'The cut changes nothing: no metal is there.'));
+  if (cut && step.changes.length === 0)
+    faults.push(fault('removes-metal', operation.number, 'The cut changes nothing: no metal is there.'));
   return faults;
 }
 
@@ -55,8 +65,15 @@ function rateFaults({ operation }: Step): Fault[] {
 function passFaults({ operation, changes }: Step): Fault[] {
   if (!BY_PASSES.includes(operation.method)) return [];
   const kinds: readonly Change['kind'][] =
-    operation.method === 'face' ? ['left-end', 'right-end'] : operation.method === 'mill-flat' ? ['flats'] : ['outer'];
-  const gone = Math.max(0, ...changes.filter((change) => kinds.includes(change.kind)).map((change) => change.deepest));
+    operation.method === 'face'
+      ? ['left-end', 'right-end']
+      : operation.method === 'mill-flat'
+        ? ['flats']
+        : ['outer'];
+  const gone = Math.max(
+    0,
+    ...changes.filter((change) => kinds.includes(change.kind)).map((change) => change.deepest),
+  );
   const taken = operation.passes * operation.depthOfCut;
   if (taken >= gone - LIMITS.figureTolerance.value) return [];
   return [
@@ -74,14 +91,24 @@ function coneFaults(step: Step): Fault[] {
   const angles = changes
     .filter((change) => change.kind === 'outer')
     .map((change) => pieceAt(after.outer, (change.from + change.to) / 2))
-    .map((piece) => (piece?.kind === 'line' ? Math.atan(Math.abs(piece.end - piece.start) / (piece.to - piece.from)) : 0));
+    .map((piece) =>
+      piece?.kind === 'line' ? Math.atan(Math.abs(piece.end - piece.start) / (piece.to - piece.from)) : 0,
+    );
   const degrees = (Math.max(0, ...angles) * 180) / Math.PI;
   const said = operation.halfAngle ?? NaN;
   const faults: Fault[] = [];
   if (!(Math.abs(said - degrees) <= LIMITS.angleTolerance.value))
-    faults.push(fault('figures-fit', operation.number, `The half angle is said to be ${said}°; the cone has ${degrees.toFixed(4)}°.`));
+    faults.push(
+      fault(
+        'figures-fit',
+        operation.number,
+        `The half angle is said to be ${said}°; the cone has ${degrees.toFixed(4)}°.`,
+      ),
+    );
   if (operation.settings !== undefined && !(Number.isInteger(operation.settings) && operation.settings >= 1))
-    faults.push(fault('figures-fit', operation.number, 'A taper takes a whole number of settings, at least 1.'));
+    faults.push(
+      fault('figures-fit', operation.number, 'A taper takes a whole number of settings, at least 1.'),
+    );
   return faults;
 }
 
@@ -92,9 +119,21 @@ function flatsFaults({ operation, changes }: Step): Fault[] {
   const deepest = Math.max(0, ...milled.map((change) => change.deepest));
   const faults: Fault[] = [];
   if (operation.faces !== count)
-    faults.push(fault('figures-fit', operation.number, `It says ${operation.faces ?? 'no'} faces; the cut has ${count}.`));
+    faults.push(
+      fault(
+        'figures-fit',
+        operation.number,
+        `It says ${operation.faces ?? 'no'} faces; the cut has ${count}.`,
+      ),
+    );
   if (!(Math.abs((operation.depth ?? NaN) - deepest) <= LIMITS.figureTolerance.value))
-    faults.push(fault('figures-fit', operation.number, `It says ${mm(operation.depth ?? NaN)} a face; from the round that is there it is ${mm(deepest)}.`));
+    faults.push(
+      fault(
+        'figures-fit',
+        operation.number,
+        `It says ${mm(operation.depth ?? NaN)} a face; from the round that is there it is ${mm(deepest)}.`,
+      ),
+    );
   return faults;
 }
 
@@ -102,8 +141,16 @@ function threadFaults({ operation, changes }: Step): Fault[] {
   if (operation.method !== 'thread-die' && operation.method !== 'thread-single-point') return [];
   const thread = changes.find((change) => change.kind === 'thread')?.treatment;
   if (thread?.kind !== 'thread' || operation.blankDiameter === undefined) return [];
-  const fits = operation.blankDiameter <= thread.major + LIMITS.figureTolerance.value && operation.blankDiameter > thread.pitchDiameter;
+  const fits =
+    operation.blankDiameter <= thread.major + LIMITS.figureTolerance.value &&
+    operation.blankDiameter > thread.pitchDiameter;
   return fits
     ? []
-    : [fault('figures-fit', operation.number, `A blank of ${mm(operation.blankDiameter)} does not suit a thread of ${mm(thread.major)}.`)];
+    : [
+        fault(
+          'figures-fit',
+          operation.number,
+          `A blank of ${mm(operation.blankDiameter)} does not suit a thread of ${mm(thread.major)}.`,
+        ),
+      ];
 }

@@ -16,15 +16,25 @@ export function judgeHold(route: Route, steps: readonly Step[]): Fault[] {
     const within = steps.filter((step) => step.setup.id === setup.id);
     const first = within[0];
     if (!first || setup.freeEnd === 'both' || !within.some((step) => isCutHeld(step))) continue;
-    for (const [rule, message] of gripFaults(first.before, first, route.blank)) faults.push(fault(rule, first.operation.number, message));
+    for (const [rule, message] of gripFaults(first.before, first, route.blank))
+      faults.push(fault(rule, first.operation.number, message));
     let severed = false;
     for (const step of within) {
       if (step.changes.length === 0 && step.cut === undefined) continue;
       if (severed) {
-        faults.push(fault('part-last', step.operation.number, 'The work has been cut off what is held; nothing more can be cut in this set-up.'));
+        faults.push(
+          fault(
+            'part-last',
+            step.operation.number,
+            'The work has been cut off what is held; nothing more can be cut in this set-up.',
+          ),
+        );
         continue;
       }
-      severed = step.cut?.kind === 'sever' && step.after.x0 > step.gripFrom - 1e-9 && step.after.x0 >= step.gripTo - 1e-9;
+      severed =
+        step.cut?.kind === 'sever' &&
+        step.after.x0 > step.gripFrom - 1e-9 &&
+        step.after.x0 >= step.gripTo - 1e-9;
       faults.push(...cutInHold(step, severed));
       if (severed) continue;
       for (const [rule, message] of gripFaults(step.after, step, route.blank))
@@ -45,7 +55,12 @@ function gripFaults(stage: Body, step: Step, blank: Body): [RuleId, string][] {
   const faults: [RuleId, string][] = [];
   if (!(gripTo > gripFrom)) return [['grip-length', 'Nothing is gripped: the grip has no length.']];
   if (gripFrom < stage.x0 - 1e-6 || gripTo > stage.x1 + 1e-6)
-    return [['grip-metal', `The jaws close where there is no metal: the work runs from ${mm(stage.x0)} to ${mm(stage.x1)}.`]];
+    return [
+      [
+        'grip-metal',
+        `The jaws close where there is no metal: the work runs from ${mm(stage.x0)} to ${mm(stage.x1)}.`,
+      ],
+    ];
   const radius = largestRadius(stage.outer, gripFrom, gripTo);
   if (radius - smallestRadius(stage.outer, gripFrom, gripTo) > 1e-6)
     faults.push(['grip-plain', 'The jaws close on more than one diameter.']);
@@ -54,7 +69,9 @@ function gripFaults(stage: Body, step: Step, blank: Body): [RuleId, string][] {
       faults.push(['grip-plain', `The jaws close on a finished ${treatment.kind}.`]);
   for (const cut of flatsOf(stage)) {
     const asBought = flatsOf(blank).some((own) => own.id === cut.id);
-    const under = flatsSpans(stage, cut).filter((span) => span.from < gripTo - 1e-6 && span.to > gripFrom + 1e-6);
+    const under = flatsSpans(stage, cut).filter(
+      (span) => span.from < gripTo - 1e-6 && span.to > gripFrom + 1e-6,
+    );
     if (asBought || under.length === 0) continue;
     // Three jaws sit on a polygon whose faces they divide, along the whole grip, when the route says so.
     const whole = under.some((span) => span.from <= gripFrom + 1e-6 && span.to >= gripTo - 1e-6);
@@ -63,7 +80,8 @@ function gripFaults(stage: Body, step: Step, blank: Body): [RuleId, string][] {
   }
   const length = gripTo - gripFrom;
   const least = Math.max(LIMITS.gripMinimum.value, LIMITS.gripRatio.value * 2 * radius);
-  if (length < least - 1e-6) faults.push(['grip-length', `A grip of ${mm(length)} is too short; at least ${mm(least)} is needed.`]);
+  if (length < least - 1e-6)
+    faults.push(['grip-length', `A grip of ${mm(length)} is too short; at least ${mm(least)} is needed.`]);
   if (length > LIMITS.gripMost.value + 1e-6)
     faults.push(['grip-length', `No jaws close on ${mm(length)}; at most ${mm(LIMITS.gripMost.value)}.`]);
   if (gripFrom > stage.x0 + 1e-6 && largestRadius(stage.outer, stage.x0, gripFrom) > radius + 1e-6)
@@ -76,19 +94,41 @@ function cutInHold(step: Step, severed: boolean): Fault[] {
   const faults: Fault[] = [];
   const expected = step.setup.freeEnd === 'side' ? ['side', 'left', 'right'] : [step.setup.freeEnd, 'side'];
   if (!expected.includes(operation.end))
-    faults.push(fault('free-end-only', operation.number, `The operation works the ${operation.end} end, but this set-up frees the ${step.setup.freeEnd} one.`));
+    faults.push(
+      fault(
+        'free-end-only',
+        operation.number,
+        `The operation works the ${operation.end} end, but this set-up frees the ${step.setup.freeEnd} one.`,
+      ),
+    );
   if (operation.end === 'side' && !['mill-flat', 'mill-key', 'cross-drill'].includes(operation.method))
-    faults.push(fault('free-end-only', operation.number, 'Only milling and cross drilling work from the side.'));
+    faults.push(
+      fault('free-end-only', operation.number, 'Only milling and cross drilling work from the side.'),
+    );
   for (const change of step.changes) {
     if (change.kind === 'inner' || (severed && change.kind === 'left-end')) continue;
     if (change.from >= gripTo - 1e-6) continue;
     const rule: RuleId = change.to <= step.gripFrom + 1e-6 ? 'free-end-only' : 'grip-uncut';
-    faults.push(fault(rule, operation.number, `Metal is cut from ${mm(change.from)} to ${mm(change.to)}, which is not clear of the grip.`));
+    faults.push(
+      fault(
+        rule,
+        operation.number,
+        `Metal is cut from ${mm(change.from)} to ${mm(change.to)}, which is not clear of the grip.`,
+      ),
+    );
   }
   if (cut?.kind === 'sever') {
-    const clear = severed ? cut.kerfFrom - gripTo : Math.max(cut.kerfFrom - gripTo, step.gripFrom - cut.kerfTo);
+    const clear = severed
+      ? cut.kerfFrom - gripTo
+      : Math.max(cut.kerfFrom - gripTo, step.gripFrom - cut.kerfTo);
     if (clear < LIMITS.partingClear.value - 1e-6)
-      faults.push(fault('parting-clear', operation.number, `The blade passes ${mm(clear)} from the jaws; ${mm(LIMITS.partingClear.value)} is needed.`));
+      faults.push(
+        fault(
+          'parting-clear',
+          operation.number,
+          `The blade passes ${mm(clear)} from the jaws; ${mm(LIMITS.partingClear.value)} is needed.`,
+        ),
+      );
   }
   return faults;
 }

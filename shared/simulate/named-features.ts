@@ -38,12 +38,19 @@ function namedFaults(step: Step): Fault[] {
   const about = ABOUT[operation.method];
   // A groove beside the part, in metal that is parted off, is the work of no feature.
   const waste = changes.every((change) => change.to <= 1e-6 || change.from >= part.length - 1e-6);
-  if (about && !(waste && operation.method === 'groove') && !named.some((feature) => about.includes(feature.kind)))
-    faults.push(fault('named-features', number, `Nothing that is named can be the work of ${operation.method}.`));
+  if (
+    about &&
+    !(waste && operation.method === 'groove') &&
+    !named.some((feature) => about.includes(feature.kind))
+  )
+    faults.push(
+      fault('named-features', number, `Nothing that is named can be the work of ${operation.method}.`),
+    );
   for (const feature of named) {
     if (about && !about.includes(feature.kind) && feature.kind !== 'face')
       faults.push(fault('named-features', number, `${feature.id} is not the work of ${operation.method}.`));
-    else if (!touches(step, feature)) faults.push(fault('named-features', number, `No metal of ${feature.id} is cut here.`));
+    else if (!touches(step, feature))
+      faults.push(fault('named-features', number, `No metal of ${feature.id} is cut here.`));
   }
   return faults;
 }
@@ -74,7 +81,8 @@ function finishedFaults(route: Route, part: Part, steps: readonly Step[]): Fault
       faults.push(...unfinished(feature, by[by.length - 1]));
       continue;
     }
-    const message = by.length === 0 ? `${feature.id} is never finished.` : `${feature.id} is finished ${by.length} times.`;
+    const message =
+      by.length === 0 ? `${feature.id} is never finished.` : `${feature.id} is finished ${by.length} times.`;
     faults.push(fault('finished-once', by[1]?.operation.number ?? 0, message));
   }
   return faults;
@@ -86,7 +94,10 @@ function finishers(feature: Feature, steps: readonly Step[]): Step[] {
     const id = flipped && feature.kind === 'face' ? feature.id : feature.id;
     const about = ABOUT[operation.method] ?? [];
     const parts = feature.kind === 'face' && operation.method === 'part-off';
-    return (about.includes(feature.kind) || parts || isHole(feature, operation.method)) && operation.features.includes(id);
+    return (
+      (about.includes(feature.kind) || parts || isHole(feature, operation.method)) &&
+      operation.features.includes(id)
+    );
   });
 }
 

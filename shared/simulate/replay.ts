@@ -55,7 +55,8 @@ export function replay(route: Route, part: Part): Replay {
       faults.push(fault('can-be-replayed', number, message));
       return { steps, end: stage, faults, complete: false };
     };
-    if (number !== index + 1) return stop(`Operations are numbered 1, 2, 3 …; place ${index + 1} has ${number}.`);
+    if (number !== index + 1)
+      return stop(`Operations are numbered 1, 2, 3 …; place ${index + 1} has ${number}.`);
     const setup = route.setups.find((each) => each.id === operation.setup);
     if (!setup) return stop(`Set-up ${operation.setup} is not on the route.`);
     try {
@@ -63,7 +64,9 @@ export function replay(route: Route, part: Part): Replay {
       steps.push(stepOf(operation, setup, views, stage, after, part.length));
       stage = after;
     } catch (error) {
-      return stop(`The cut cannot be made on this stage: ${error instanceof Error ? error.message : 'unknown'}.`);
+      return stop(
+        `The cut cannot be made on this stage: ${error instanceof Error ? error.message : 'unknown'}.`,
+      );
     }
     checkStage(route, number, stage, faults, operation.cut !== undefined);
   }
@@ -107,7 +110,8 @@ function isFlipped(setup: SetUp, length: number): boolean {
 
 function checkStage(route: Route, number: number, stage: Body, faults: Fault[], needed = true): void {
   const recorded = route.stages.filter((each) => each.after === number);
-  if (recorded.length === 0 && needed) faults.push(fault('stages-recorded', number, 'No stage is recorded after this operation.'));
+  if (recorded.length === 0 && needed)
+    faults.push(fault('stages-recorded', number, 'No stage is recorded after this operation.'));
   if (recorded.some((each) => !sameMetal(each.body, stage)))
     faults.push(fault('stages-recorded', number, 'The recorded stage is not what the cuts so far leave.'));
 }

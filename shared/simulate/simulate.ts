@@ -50,11 +50,24 @@ function judgeEnd(replayed: Replay, part: Part): Fault[] {
     const missing = missingMetal(step.after, step.part.body);
     const first = missing[0];
     if (first && missing.length > lost)
-      faults.push(fault('not-below-part', step.operation.number, `The part is cut into from ${mm(first.from)} to ${mm(first.to)}: ${first.message}.`));
+      faults.push(
+        fault(
+          'not-below-part',
+          step.operation.number,
+          `The part is cut into from ${mm(first.from)} to ${mm(first.to)}: ${first.message}.`,
+        ),
+      );
     lost = missing.length;
   }
   const [left] = differences(replayed.end, part.body);
-  if (left) faults.push(fault('stage-is-part', 0, `What is left is not the part from ${mm(left.from)} to ${mm(left.to)}: ${left.message}.`));
+  if (left)
+    faults.push(
+      fault(
+        'stage-is-part',
+        0,
+        `What is left is not the part from ${mm(left.from)} to ${mm(left.to)}: ${left.message}.`,
+      ),
+    );
   return faults;
 }
 
@@ -62,11 +75,23 @@ function judgeBlank(route: Route, part: Part): Fault[] {
   const { blank, stock } = route;
   const faults: Fault[] = [];
   const [missing] = missingMetal(blank, part.body);
-  if (missing) faults.push(fault('not-below-part', 0, `The blank does not cover the part from ${mm(missing.from)} to ${mm(missing.to)}.`));
+  if (missing)
+    faults.push(
+      fault(
+        'not-below-part',
+        0,
+        `The blank does not cover the part from ${mm(missing.from)} to ${mm(missing.to)}.`,
+      ),
+    );
   if (Math.abs(blank.x1 - blank.x0 - route.blankLength) > 1e-6)
-    faults.push(fault('figures-fit', 0, `The blank is ${mm(blank.x1 - blank.x0)} long, not ${mm(route.blankLength)}.`));
+    faults.push(
+      fault('figures-fit', 0, `The blank is ${mm(blank.x1 - blank.x0)} long, not ${mm(route.blankLength)}.`),
+    );
   const round = constant(blank.x0, blank.x1, stock.size / 2);
-  if (stock.shape === 'round' && differences(blank, { ...blank, outer: round, cuts: [], treatments: [] }).length > 0)
+  if (
+    stock.shape === 'round' &&
+    differences(blank, { ...blank, outer: round, cuts: [], treatments: [] }).length > 0
+  )
     faults.push(fault('figures-fit', 0, `The blank is not a round bar of ${mm(stock.size)}.`));
   return faults;
 }

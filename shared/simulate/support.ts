@@ -26,9 +26,17 @@ export function judgeSupport(steps: readonly Step[]): Fault[] {
 function neverAHole(step: Step, steps: readonly Step[]): Fault[] {
   if (step.setup.support !== 'centre') return [];
   const within = steps.filter((each) => each.setup.id === step.setup.id);
-  const hole = within.some(({ before, after }) => [before, after].some((stage) => radiusAt(stage.inner, stage.x1, 'left') > 0));
+  const hole = within.some(({ before, after }) =>
+    [before, after].some((stage) => radiusAt(stage.inner, stage.x1, 'left') > 0),
+  );
   if (within[0] !== step || hole) return [];
-  return [fault('centre-before-support', step.operation.number, 'A centre is set up, but there is never a hole for it to enter.')];
+  return [
+    fault(
+      'centre-before-support',
+      step.operation.number,
+      'A centre is set up, but there is never a hole for it to enter.',
+    ),
+  ];
 }
 
 /** Work that the set-up means to support is not done before the hole for the centre is there. */
@@ -37,7 +45,15 @@ function holeToCome(step: Step, later: readonly Step[]): Fault[] {
   if (setup.support !== 'centre' || changes.length === 0 || standsInTail(step)) return [];
   if (!(SIDE_METHODS as readonly Method[]).includes(operation.method)) return [];
   const comes = later.some((each) => each.setup.id === setup.id && each.operation.method === 'centre-drill');
-  return comes ? [fault('centre-before-support', operation.number, 'The centre hole that this set-up leans on is drilled only later.')] : [];
+  return comes
+    ? [
+        fault(
+          'centre-before-support',
+          operation.number,
+          'The centre hole that this set-up leans on is drilled only later.',
+        ),
+      ]
+    : [];
 }
 
 function supportFaults(step: Step): Fault[] {
@@ -50,19 +66,38 @@ function supportFaults(step: Step): Fault[] {
   const number = operation.number;
   const ratio = (far - gripTo) / smallestAcross(before, gripTo, far);
   const tail = standsInTail(step);
-  const steadied = setup.support === 'steady' || (setup.support === 'outboard' && operation.method === 'mill-flat');
+  const steadied =
+    setup.support === 'steady' || (setup.support === 'outboard' && operation.method === 'mill-flat');
   const faults: Fault[] = [];
   if (sideways && ratio > LIMITS.overhang.value * SLACK && !tail && !steadied) {
     const rule = setup.support === 'centre' ? 'centre-before-support' : 'support-overhang';
-    const why = setup.support === 'centre' ? 'there is no centre hole for the tail to stand in' : 'nothing stands at its end';
-    faults.push(fault(rule, number, `The work stands out ${round(ratio)} of its smallest diameters, and ${why}.`));
+    const why =
+      setup.support === 'centre'
+        ? 'there is no centre hole for the tail to stand in'
+        : 'nothing stands at its end';
+    faults.push(
+      fault(rule, number, `The work stands out ${round(ratio)} of its smallest diameters, and ${why}.`),
+    );
   }
   const depth = operation.depthOfCut;
   if (light && ratio > LIMITS.overhang.value * SLACK && depth > LIMITS.lightDepth.value + 1e-9)
-    faults.push(fault('support-overhang', number, `A cut of ${mm(depth)} is too much for an end that stands out ${round(ratio)} of its smallest diameters.`));
+    faults.push(
+      fault(
+        'support-overhang',
+        number,
+        `A cut of ${mm(depth)} is too much for an end that stands out ${round(ratio)} of its smallest diameters.`,
+      ),
+    );
   const bend = bendUnder(before, gripTo, far, depth) * (tail || steadied ? LIMITS.tailFactor.value : 1);
   const limit = depth > LIMITS.lightDepth.value ? LIMITS.bendRough.value : LIMITS.bendFinish.value;
-  if (bend > limit * SLACK) faults.push(fault('support-bend', number, `The work bends ${mm(bend)} under this cut; at most ${mm(limit)} is allowed.`));
+  if (bend > limit * SLACK)
+    faults.push(
+      fault(
+        'support-bend',
+        number,
+        `The work bends ${mm(bend)} under this cut; at most ${mm(limit)} is allowed.`,
+      ),
+    );
   return faults;
 }
 
@@ -79,14 +114,21 @@ function round(ratio: number): string {
 
 function smallestAcross(body: Body, from: number, to: number): number {
   let radius = smallestRadius(body.outer, Math.max(from, body.x0), Math.min(to, body.x1));
-  for (const cut of flatsOf(body)) if (cut.from < to && cut.to > from) radius = Math.min(radius, cut.distance);
+  for (const cut of flatsOf(body))
+    if (cut.from < to && cut.to > from) radius = Math.min(radius, cut.distance);
   return 2 * radius;
 }
 
 /** F/E · ∫ (xc − x)² / I dx from the grip to the cut (mm), I = π (r⁴ − b⁴) / 4, r held to the flats. */
 function bendUnder(body: Body, from: number, to: number, depth: number): number {
   const flats = flatsOf(body);
-  const stations = [from, to, ...breaks(body.outer), ...breaks(body.inner), ...flats.flatMap((cut) => [cut.from, cut.to])]
+  const stations = [
+    from,
+    to,
+    ...breaks(body.outer),
+    ...breaks(body.inner),
+    ...flats.flatMap((cut) => [cut.from, cut.to]),
+  ]
     .filter((x) => x >= from && x <= to)
     .sort((a, b) => a - b);
   let sum = 0;
@@ -97,7 +139,10 @@ function bendUnder(body: Body, from: number, to: number, depth: number): number 
     const middle = (a + b) / 2;
     const outer = pieceAt(body.outer, middle);
     if (!outer) continue;
-    const held = Math.min(Infinity, ...flats.filter((cut) => middle > cut.from && middle < cut.to).map((cut) => cut.distance));
+    const held = Math.min(
+      Infinity,
+      ...flats.filter((cut) => middle > cut.from && middle < cut.to).map((cut) => cut.distance),
+    );
     const compliance = (x: number): number => {
       const r = Math.min(pieceRadius(outer, x), held);
       const hole = Math.min(radiusAt(body.inner, x), 0.95 * r);

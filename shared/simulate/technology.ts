@@ -19,7 +19,8 @@ export function judgeTechnology(steps: readonly Step[]): Fault[] {
   const made: number[] = [];
   for (const [index, step] of steps.entries()) {
     if (step.changes.length > 0) {
-      const say = (rule: RuleId, message: string): void => void faults.push(fault(rule, step.operation.number, message));
+      const say = (rule: RuleId, message: string): void =>
+        void faults.push(fault(rule, step.operation.number, message));
       judgeFace(step, made, say);
       judgeRoughing(step, steps.slice(0, index), say);
       judgeFinishedThreads(step, say);
@@ -37,16 +38,24 @@ function judgeFace(step: Step, made: readonly number[], say: Say): void {
   const { operation, before } = step;
   if (!FROM_A_FACE.includes(operation.method) || step.setup.freeEnd === 'both') return;
   if (made.some((x) => Math.abs(step.place(x) - before.x1) < 1e-6)) return;
-  say(operation.method === 'centre-drill' ? 'face-before-centre' : 'datum-first', 'The free end has not been faced yet.');
+  say(
+    operation.method === 'centre-drill' ? 'face-before-centre' : 'datum-first',
+    'The free end has not been faced yet.',
+  );
 }
 
 function judgeRoughing(step: Step, before: readonly Step[], say: Say): void {
   if (step.operation.method !== 'rough-turn') return;
   const here = before.filter((each) => each.setup.id === step.setup.id && each.changes.length > 0);
   const finished = here.find((each) => FINISHING.includes(each.operation.method));
-  if (finished) say('rough-before-finish', `Operation ${finished.operation.number} has finished a surface in this set-up already.`);
+  if (finished)
+    say(
+      'rough-before-finish',
+      `Operation ${finished.operation.number} has finished a surface in this set-up already.`,
+    );
   const smaller = here.find((each) => each.operation.method === 'rough-turn' && isWeakerBeside(each, step));
-  if (smaller) say('rough-large-first', `Operation ${smaller.operation.number} has roughed a smaller diameter already.`);
+  if (smaller)
+    say('rough-large-first', `Operation ${smaller.operation.number} has roughed a smaller diameter already.`);
 }
 
 /** True where `earlier` has gone to a smaller diameter, unless a collar parts it from this cut on the free side. */
@@ -54,7 +63,9 @@ function isWeakerBeside(earlier: Step, step: Step): boolean {
   const done = roughed(earlier);
   const now = roughed(step);
   if (!done || !now || done.radius >= now.radius - 1e-6) return false;
-  return done.from < now.to - 1e-6 || largestRadius(step.before.outer, now.to, done.from) <= now.radius + 1e-6;
+  return (
+    done.from < now.to - 1e-6 || largestRadius(step.before.outer, now.to, done.from) <= now.radius + 1e-6
+  );
 }
 
 function roughed(step: Step): { from: number; to: number; radius: number } | null {
@@ -73,7 +84,10 @@ function judgeFinishedThreads(step: Step, say: Say): void {
     if (change.kind === 'outer' || change.kind === 'flats')
       for (const treatment of before.treatments)
         if (treatment.from < change.to - 1e-6 && treatment.to > change.from + 1e-6)
-          say('nothing-after-finish', `The finished ${treatment.kind} from ${mm(treatment.from)} to ${mm(treatment.to)} is cut into.`);
+          say(
+            'nothing-after-finish',
+            `The finished ${treatment.kind} from ${mm(treatment.from)} to ${mm(treatment.to)} is cut into.`,
+          );
     if (change.kind === 'thread' && change.treatment?.kind === 'thread' && !change.treatment.internal)
       judgeThreadBlank(step, change.treatment, part, operation, say);
   }
@@ -91,9 +105,18 @@ function judgeThreadBlank(
   const from = Math.max(thread.from, 0);
   const to = Math.min(thread.to, part.length);
   for (const span of unequalSpans(before.outer, part.body.outer, from, to)) {
-    const chamfer = part.features.find((f) => f.kind === 'chamfer' && f.from < span.to - 1e-6 && f.to > span.from + 1e-6);
-    const onlyThere = chamfer && chamfer.kind === 'chamfer' && span.from >= chamfer.from - 1e-6 && span.to <= chamfer.to + 1e-6;
-    say(onlyThere ? 'chamfer-before-thread' : 'blank-before-thread', `The blank is not the part's from ${mm(span.from)} to ${mm(span.to)}.`);
+    const chamfer = part.features.find(
+      (f) => f.kind === 'chamfer' && f.from < span.to - 1e-6 && f.to > span.from + 1e-6,
+    );
+    const onlyThere =
+      chamfer &&
+      chamfer.kind === 'chamfer' &&
+      span.from >= chamfer.from - 1e-6 &&
+      span.to <= chamfer.to + 1e-6;
+    say(
+      onlyThere ? 'chamfer-before-thread' : 'blank-before-thread',
+      `The blank is not the part's from ${mm(span.from)} to ${mm(span.to)}.`,
+    );
   }
   if (thread.to >= part.length - 1e-6 && before.x1 > part.length + 1e-6)
     say('trim-before-end-form', 'The end is not to length before its thread is cut.');
@@ -105,8 +128,16 @@ function judgeThreadBlank(
     if (wanted < thread.major / 2 - 1e-6 && radiusAt(before.outer, beside) > wanted + 1e-6)
       say('relief-before-thread', `The smaller diameter beside the thread at ${mm(x)} is not there yet.`);
     const stated = (operation.runOut ?? 0) >= LIMITS.threadExit.value * thread.pitch - 1e-9;
-    if (side === 'left' && operation.method === 'thread-single-point' && wanted > thread.major / 2 + 1e-6 && !stated)
-      say('thread-run-out', `The thread ends against a shoulder at ${mm(x)} with neither relief nor run-out.`);
+    if (
+      side === 'left' &&
+      operation.method === 'thread-single-point' &&
+      wanted > thread.major / 2 + 1e-6 &&
+      !stated
+    )
+      say(
+        'thread-run-out',
+        `The thread ends against a shoulder at ${mm(x)} with neither relief nor run-out.`,
+      );
   }
 }
 
@@ -116,7 +147,8 @@ function judgeEndForms(step: Step, say: Say): void {
     const feature = part.features.find((each) => each.id === id);
     if (feature?.kind === 'chamfer' && operation.method === 'chamfer') judgeChamfer(step, feature, say);
     if (feature?.kind === 'crown' && operation.method === 'form-turn') {
-      if (before.x1 > part.length + 1e-6) say('trim-before-end-form', 'The end is not to length before its crown is cut.');
+      if (before.x1 > part.length + 1e-6)
+        say('trim-before-end-form', 'The end is not to length before its crown is cut.');
       const beside = feature.from - 1e-4;
       if (beside > 0 && Math.abs(radiusAt(before.outer, beside) - radiusAt(part.body.outer, beside)) > 1e-6)
         say('taper-before-crown', 'The surface that the crown meets is not at its size yet.');
@@ -127,10 +159,15 @@ function judgeEndForms(step: Step, say: Say): void {
 function judgeChamfer(step: Step, chamfer: ChamferFeature, say: Say): void {
   const { part, before } = step;
   const atEnd = chamfer.end === 'right' && Math.abs(chamfer.to - part.length) < 1e-6;
-  if (atEnd && before.x1 > part.length + 1e-6) say('trim-before-end-form', 'The end is not to length before its chamfer is cut.');
+  if (atEnd && before.x1 > part.length + 1e-6)
+    say('trim-before-end-form', 'The end is not to length before its chamfer is cut.');
   // The tool comes at the edge from the air beside it: the face, the smaller neighbour or a groove is there.
   const beside = chamfer.end === 'right' ? chamfer.to + 1e-5 : chamfer.from - 1e-5;
-  const small = radiusAt(part.body.outer, chamfer.end === 'right' ? chamfer.to : chamfer.from, chamfer.end === 'right' ? 'left' : 'right');
+  const small = radiusAt(
+    part.body.outer,
+    chamfer.end === 'right' ? chamfer.to : chamfer.from,
+    chamfer.end === 'right' ? 'left' : 'right',
+  );
   if (beside > before.x0 && beside < before.x1 && radiusAt(before.outer, beside) > small + 1e-6)
     say('way-in', 'The chamfer has no edge yet: metal still stands beside it.');
   const on = part.features.find((each) => each.id === chamfer.on);
@@ -138,7 +175,8 @@ function judgeChamfer(step: Step, chamfer: ChamferFeature, say: Say): void {
   const ends = endForms(part);
   const raw = unequalSpans(before.outer, part.body.outer, Math.max(0, on.from), Math.min(part.length, on.to));
   const unturned = raw.filter((span) => !isCovered(span, ends));
-  if (unturned.length > 0) say('row-before-chamfer', `${chamfer.on} is not at its size before its chamfer is cut.`);
+  if (unturned.length > 0)
+    say('row-before-chamfer', `${chamfer.on} is not at its size before its chamfer is cut.`);
 }
 
 /** Flats are set from the turned round, and come before a taper or crown that trims them. */
@@ -150,21 +188,35 @@ function judgeFlats(step: Step, later: readonly Step[], say: Say): void {
   if (operation.method === 'mill-flat') {
     for (const feature of flats) {
       const trimmed = trimmedSpans(part, feature);
-      const round = unequalSpans(before.outer, part.body.outer, Math.max(0, feature.from), Math.min(part.length, feature.to));
+      const round = unequalSpans(
+        before.outer,
+        part.body.outer,
+        Math.max(0, feature.from),
+        Math.min(part.length, feature.to),
+      );
       const unturned = round.filter((span) => !isCovered(span, [...trimmed, ...endForms(part)]));
-      if (unturned.length > 0) say('turn-before-mill', 'The round that the flats are set from is not turned yet.');
+      if (unturned.length > 0)
+        say('turn-before-mill', 'The round that the flats are set from is not turned yet.');
       for (const span of trimmed)
         if (unequalSpans(before.outer, part.body.outer, span.from, span.to).length === 0)
-          say('flats-before-taper', 'The surface that should trim the ends of the flats is finished already.');
+          say(
+            'flats-before-taper',
+            'The surface that should trim the ends of the flats is finished already.',
+          );
     }
   }
   const trims = operation.method === 'taper-turn';
   if (!trims) return;
   for (const feature of part.features) {
     if (feature.kind !== 'flats') continue;
-    const meets = trimmedSpans(part, feature).some((span) => step.changes.some((c) => c.kind === 'outer' && c.from < span.to - 1e-6 && c.to > span.from + 1e-6));
-    const comes = later.some((each) => each.operation.method === 'mill-flat' && each.operation.features.includes(feature.id));
-    if (meets && comes) say('flats-before-taper', `${feature.id} should be milled before the taper that trims its ends.`);
+    const meets = trimmedSpans(part, feature).some((span) =>
+      step.changes.some((c) => c.kind === 'outer' && c.from < span.to - 1e-6 && c.to > span.from + 1e-6),
+    );
+    const comes = later.some(
+      (each) => each.operation.method === 'mill-flat' && each.operation.features.includes(feature.id),
+    );
+    if (meets && comes)
+      say('flats-before-taper', `${feature.id} should be milled before the taper that trims its ends.`);
   }
 }
 

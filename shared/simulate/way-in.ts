@@ -16,7 +16,13 @@ function wayFaults(step: Step, change: Step['changes'][number]): Fault[] {
     const open = opening(step, change.to);
     const widest = largestRadius(after.inner, change.from, change.to);
     return open < widest - 1e-6
-      ? [fault('way-in', number, `The hole cannot be reached from the free end: it is ${mm(2 * open)} wide there, the cut ${mm(2 * widest)}.`)]
+      ? [
+          fault(
+            'way-in',
+            number,
+            `The hole cannot be reached from the free end: it is ${mm(2 * open)} wide there, the cut ${mm(2 * widest)}.`,
+          ),
+        ]
       : [];
   }
   if (change.kind === 'thread' && change.treatment?.kind === 'thread' && !change.treatment.internal) {

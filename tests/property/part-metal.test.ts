@@ -18,21 +18,33 @@ const span = fc
   .tuple(mm(-5, LENGTH), mm(1, 30))
   .map(([from, length]) => ({ from, to: Math.min(LENGTH + 5, from + length) }));
 
-const line = (from: number, to: number, start: number, end: number): LinePiece => ({ kind: 'line', from, to, start, end });
+const line = (from: number, to: number, start: number, end: number): LinePiece => ({
+  kind: 'line',
+  from,
+  to,
+  start,
+  end,
+});
 
 const envelope: fc.Arbitrary<Generator> = fc.oneof(
   fc.tuple(span, mm(3, 20), mm(3, 20)).map(([s, a, b]): Generator => [line(s.from, s.to, a, b)]),
-  fc.tuple(mm(20, 40), mm(12, 25)).map(([at, radius]): Generator => [
-    { kind: 'arc', from: at, to: at + radius * 0.98, centreX: at, centreR: 0, radius, sign: 1 },
-  ]),
-  fc.tuple(mm(10, 40), mm(3, 6)).map(([at, radius]): Generator => [
-    { kind: 'arc', from: at - radius, to: at + radius, centreX: at, centreR: 18, radius, sign: -1 },
-  ]),
+  fc
+    .tuple(mm(20, 40), mm(12, 25))
+    .map(([at, radius]): Generator => [
+      { kind: 'arc', from: at, to: at + radius * 0.98, centreX: at, centreR: 0, radius, sign: 1 },
+    ]),
+  fc
+    .tuple(mm(10, 40), mm(3, 6))
+    .map(([at, radius]): Generator => [
+      { kind: 'arc', from: at - radius, to: at + radius, centreX: at, centreR: 18, radius, sign: -1 },
+    ]),
 );
 
 const removal: fc.Arbitrary<Removal> = fc.oneof(
   { weight: 3, arbitrary: envelope.map((e): Removal => ({ kind: 'outer', envelope: e })) },
-  fc.tuple(span, mm(0.5, 5), mm(0.5, 5)).map(([s, a, b]): Removal => ({ kind: 'bore', envelope: [line(s.from, s.to, a, b)] })),
+  fc
+    .tuple(span, mm(0.5, 5), mm(0.5, 5))
+    .map(([s, a, b]): Removal => ({ kind: 'bore', envelope: [line(s.from, s.to, a, b)] })),
   {
     weight: 2,
     arbitrary: fc
@@ -108,7 +120,9 @@ describe('random removals', () => {
     fc.assert(
       fc.property(removals, (list) => {
         const body = applied(list);
-        const turned = list.map((each) => mirrorRemoval(each, LENGTH)).reduce(applyRemoval, mirrorBody(blank, LENGTH));
+        const turned = list
+          .map((each) => mirrorRemoval(each, LENGTH))
+          .reduce(applyRemoval, mirrorBody(blank, LENGTH));
         expect(Math.abs(volume(turned) - volume(body))).toBeLessThan(1e-8 * volume(blank));
         expect(differences(turned, mirrorBody(body, LENGTH))).toEqual([]);
         expect(differences(mirrorBody(mirrorBody(body, LENGTH), LENGTH), body)).toEqual([]);
@@ -126,7 +140,10 @@ describe('random removals', () => {
         let sum = 0;
         for (let i = 0; i < slices; i += 1) sum += sectionArea(body, body.x0 + (i + 0.5) * step) * step;
         expect(Math.abs(sum - volume(body)) / volume(blank)).toBeLessThan(1e-3);
-        expect(volumeBetween(body, body.x0, 20) + volumeBetween(body, 20, body.x1)).toBeCloseTo(volume(body), 6);
+        expect(volumeBetween(body, body.x0, 20) + volumeBetween(body, 20, body.x1)).toBeCloseTo(
+          volume(body),
+          6,
+        );
       }),
       { seed: 77, numRuns: 12 },
     );
@@ -155,12 +172,18 @@ describe('same metal', () => {
   });
 
   it('takes a hexagon bar and a milled round for one', () => {
-    const hexagon: Removal = { kind: 'cut', cut: { kind: 'flats', id: 'a', from: -5, to: 65, count: 6, distance: 12, phase: 0 } };
-    const turned = applied([hexagon, { kind: 'outer', envelope: constant(-5, 65, 12 / Math.cos(Math.PI / 6)) }]);
-    const otherName: Removal = { kind: 'cut', cut: { ...hexagon.cut, id: 'b', phase: Math.PI / 3 } } as Removal;
+    const hexagon: Removal = {
+      kind: 'cut',
+      cut: { kind: 'flats', id: 'a', from: -5, to: 65, count: 6, distance: 12, phase: 0 },
+    };
+    const turned = applied([
+      hexagon,
+      { kind: 'outer', envelope: constant(-5, 65, 12 / Math.cos(Math.PI / 6)) },
+    ]);
+    const otherName: Removal = { kind: 'cut', cut: { ...hexagon.cut, id: 'b', phase: Math.PI / 3 } };
     expect(sameMetal(applied([hexagon]), turned)).toBe(true);
     expect(sameMetal(applied([otherName]), turned)).toBe(true);
-    const offset: Removal = { kind: 'cut', cut: { ...hexagon.cut, phase: 0.01 } } as Removal;
+    const offset: Removal = { kind: 'cut', cut: { ...hexagon.cut, phase: 0.01 } };
     expect(sameMetal(applied([offset]), turned)).toBe(false);
   });
 });

@@ -10,7 +10,10 @@ describe.each(Object.entries(MADE))('a %s route spoiled', (_name, { route, part 
     const missed: string[] = [];
     for (const spoiled of sabotage.mutations(route, part)) {
       const rules = simulate(spoiled.route, part).map((fault) => fault.rule);
-      const caught = sabotage.expected.length === 0 ? rules.length > 0 : sabotage.expected.some((rule) => rules.includes(rule));
+      const caught =
+        sabotage.expected.length === 0
+          ? rules.length > 0
+          : sabotage.expected.some((rule) => rules.includes(rule));
       if (!caught) missed.push(`${spoiled.text}: ${rules.join(', ') || 'accepted'}`);
     }
     expect(missed).toEqual([]);

@@ -61,7 +61,12 @@ function each(route: Route, part: Part, change: Change, honest = true): Spoiled[
     if (!changed) return [];
     const operations = route.operations.map((old, i) => (i === index ? changed : old));
     const spoiled = { ...route, operations };
-    return [{ text: `operation ${operation.number}, ${operation.title}`, route: honest ? restate(spoiled, part) : spoiled }];
+    return [
+      {
+        text: `operation ${operation.number}, ${operation.title}`,
+        route: honest ? restate(spoiled, part) : spoiled,
+      },
+    ];
   });
 }
 
@@ -69,12 +74,19 @@ function eachSetUp(route: Route, change: (setup: SetUp) => SetUp | null): Spoile
   return route.setups.flatMap((setup, index) => {
     const changed = change(setup);
     if (!changed || !isHeld(route, setup)) return [];
-    return [{ text: `set-up ${setup.id}`, route: { ...route, setups: route.setups.map((old, i) => (i === index ? changed : old)) } }];
+    return [
+      {
+        text: `set-up ${setup.id}`,
+        route: { ...route, setups: route.setups.map((old, i) => (i === index ? changed : old)) },
+      },
+    ];
   });
 }
 
 function isHeld(route: Route, setup: SetUp): boolean {
-  return route.operations.some((operation) => operation.setup === setup.id && operation.cut && operation.method !== 'saw');
+  return route.operations.some(
+    (operation) => operation.setup === setup.id && operation.cut && operation.method !== 'saw',
+  );
 }
 
 function shifted(cut: Removal | undefined, by: number): Removal | null {
@@ -85,11 +97,13 @@ function shifted(cut: Removal | undefined, by: number): Removal | null {
         : { ...piece, centreR: piece.centreR - by };
     return { ...cut, envelope: cut.envelope.map(lower) };
   }
-  if (cut?.kind === 'cut' && cut.cut.kind === 'flats') return { ...cut, cut: { ...cut.cut, distance: cut.cut.distance - by } };
+  if (cut?.kind === 'cut' && cut.cut.kind === 'flats')
+    return { ...cut, cut: { ...cut.cut, distance: cut.cut.distance - by } };
   return null;
 }
 
-const isFinishing = (operation: Operation): boolean => operation.method !== 'rough-turn' && operation.cut !== undefined;
+const isFinishing = (operation: Operation): boolean =>
+  operation.method !== 'rough-turn' && operation.cut !== undefined;
 
 function withCut(by: number): Change {
   return (operation) => {
@@ -103,7 +117,10 @@ function withCut(by: number): Change {
 function dropped(route: Route, part: Part, which: (operation: Operation) => boolean): Spoiled[] {
   return route.operations.filter(which).map((gone) => ({
     text: `operation ${gone.number}, ${gone.title}`,
-    route: restate({ ...route, operations: route.operations.filter((operation) => operation !== gone) }, part),
+    route: restate(
+      { ...route, operations: route.operations.filter((operation) => operation !== gone) },
+      part,
+    ),
   }));
 }
 
@@ -113,9 +130,19 @@ function swapped(route: Route, part: Part): Spoiled[] {
     const earlier = route.operations[index - 1];
     if (!earlier || !later.after.some((edge) => edge.operation === earlier.number)) return [];
     const free = { ...later, after: later.after.filter((edge) => edge.operation !== earlier.number) };
-    const operations = [...route.operations.slice(0, index - 1), free, earlier, ...route.operations.slice(index + 1)];
+    const operations = [
+      ...route.operations.slice(0, index - 1),
+      free,
+      earlier,
+      ...route.operations.slice(index + 1),
+    ];
     const rules = later.after.filter((edge) => edge.operation === earlier.number).map((edge) => edge.rule);
-    return [{ text: `${later.title} before ${earlier.title} (${rules.join(', ')})`, route: restate({ ...route, operations }, part) }];
+    return [
+      {
+        text: `${later.title} before ${earlier.title} (${rules.join(', ')})`,
+        route: restate({ ...route, operations }, part),
+      },
+    ];
   });
 }
 
@@ -123,10 +150,13 @@ function partedEarly(route: Route, part: Part): Spoiled[] {
   return route.operations.flatMap((operation, index) => {
     const before = route.operations[index - 1];
     if (operation.method !== 'part-off' || !before?.cut || before.setup !== operation.setup) return [];
-    if (!route.operations.slice(index + 1).every((later) => later.setup !== operation.setup || !later.cut)) return [];
+    if (!route.operations.slice(index + 1).every((later) => later.setup !== operation.setup || !later.cut))
+      return [];
     const operations = [...route.operations];
     operations.splice(index - 1, 2, { ...operation, after: [] }, before);
-    return [{ text: `${operation.title} before ${before.title}`, route: restate({ ...route, operations }, part) }];
+    return [
+      { text: `${operation.title} before ${before.title}`, route: restate({ ...route, operations }, part) },
+    ];
   });
 }
 
@@ -158,34 +188,53 @@ function standsOut(route: Route, setup: SetUp): boolean {
     const cut = differences(before, after);
     const right = setup.freeEnd === 'right';
     const edge = right ? Math.max(setup.gripFrom, setup.gripTo) : Math.min(setup.gripFrom, setup.gripTo);
-    const far = right ? Math.max(edge, ...cut.map((span) => span.to)) : Math.min(edge, ...cut.map((span) => span.from));
+    const far = right
+      ? Math.max(edge, ...cut.map((span) => span.to))
+      : Math.min(edge, ...cut.map((span) => span.from));
     const [from, to] = right ? [edge, far] : [far, edge];
     return to > from && to - from > 3.05 * 2 * smallestRadius(before.outer, from, to);
   });
 }
 
 export const SABOTAGES: readonly Sabotage[] = [
-  { id: 'drop-cut', expected: [], mutations: (route, part) => dropped(route, part, (o) => o.cut !== undefined) },
+  {
+    id: 'drop-cut',
+    expected: [],
+    mutations: (route, part) => dropped(route, part, (o) => o.cut !== undefined),
+  },
   {
     id: 'drop-event',
     expected: ['grip-first', 'edges-last', 'inspect-last', 'fit-before-inspect'],
     mutations: (route, part) => {
       const needed = (o: Operation): boolean =>
-        (['deburr', 'grip', 'turn-round', 'fit-check'].includes(o.method) || o === route.operations[route.operations.length - 1]) &&
-        route.operations.filter((other) => other.method === o.method && other.setup === o.setup).length === 1 &&
-        (isHeld(route, route.setups.find((setup) => setup.id === o.setup) ?? ({} as SetUp)) || o.method !== 'grip');
+        (['deburr', 'grip', 'turn-round', 'fit-check'].includes(o.method) ||
+          o === route.operations[route.operations.length - 1]) &&
+        route.operations.filter((other) => other.method === o.method && other.setup === o.setup).length ===
+          1 &&
+        (isHeld(route, route.setups.find((setup) => setup.id === o.setup) ?? ({} as SetUp)) ||
+          o.method !== 'grip');
       return dropped(route, part, needed);
     },
   },
   { id: 'swap-with-reason', expected: [], mutations: swapped },
-  { id: 'too-deep', expected: ['not-below-part', 'named-features'], mutations: (route, part) => each(route, part, withCut(0.1)) },
-  { id: 'too-shallow', expected: ['stage-is-part', 'named-features'], mutations: (route, part) => each(route, part, withCut(-0.1)) },
+  {
+    id: 'too-deep',
+    expected: ['not-below-part', 'named-features'],
+    mutations: (route, part) => each(route, part, withCut(0.1)),
+  },
+  {
+    id: 'too-shallow',
+    expected: ['stage-is-part', 'named-features'],
+    mutations: (route, part) => each(route, part, withCut(-0.1)),
+  },
   {
     id: 'wrong-end',
     expected: ['free-end-only'],
     mutations: (route, part) =>
       each(route, part, (o) =>
-        o.cut && (o.end === 'left' || o.end === 'right') ? { ...o, end: o.end === 'left' ? 'right' : 'left' } : null,
+        o.cut && (o.end === 'left' || o.end === 'right')
+          ? { ...o, end: o.end === 'left' ? 'right' : 'left' }
+          : null,
       ),
   },
   {
@@ -193,7 +242,9 @@ export const SABOTAGES: readonly Sabotage[] = [
     expected: ['free-end-only', 'grip-behind'],
     mutations: (route) =>
       eachSetUp(route, (s) =>
-        s.freeEnd === 'left' || s.freeEnd === 'right' ? { ...s, freeEnd: s.freeEnd === 'left' ? 'right' : 'left' } : null,
+        s.freeEnd === 'left' || s.freeEnd === 'right'
+          ? { ...s, freeEnd: s.freeEnd === 'left' ? 'right' : 'left' }
+          : null,
       ),
   },
   {
@@ -203,26 +254,35 @@ export const SABOTAGES: readonly Sabotage[] = [
       const thread = part.features.find((feature) => feature.kind === 'thread');
       if (thread?.kind !== 'thread') return [];
       const cut = route.operations.findIndex((operation) => operation.method.startsWith('thread-'));
-      const lasts = (s: SetUp): boolean => route.operations.some((operation, index) => operation.setup === s.id && operation.cut && index >= cut);
-      return eachSetUp(route, (s) => (cut >= 0 && lasts(s) ? { ...s, gripFrom: thread.from, gripTo: thread.to } : null));
+      const lasts = (s: SetUp): boolean =>
+        route.operations.some(
+          (operation, index) => operation.setup === s.id && operation.cut && index >= cut,
+        );
+      return eachSetUp(route, (s) =>
+        cut >= 0 && lasts(s) ? { ...s, gripFrom: thread.from, gripTo: thread.to } : null,
+      );
     },
   },
   {
     id: 'grip-two',
     expected: ['grip-length'],
     mutations: (route) =>
-      eachSetUp(route, (s) => (s.freeEnd === 'left' ? { ...s, gripTo: s.gripFrom + 2 } : { ...s, gripFrom: s.gripTo - 2 })),
+      eachSetUp(route, (s) =>
+        s.freeEnd === 'left' ? { ...s, gripTo: s.gripFrom + 2 } : { ...s, gripFrom: s.gripTo - 2 },
+      ),
   },
   {
     id: 'grip-in-air',
     expected: ['grip-metal'],
-    mutations: (route) => eachSetUp(route, (s) => ({ ...s, gripFrom: s.gripFrom - 1000, gripTo: s.gripTo - 1000 })),
+    mutations: (route) =>
+      eachSetUp(route, (s) => ({ ...s, gripFrom: s.gripFrom - 1000, gripTo: s.gripTo - 1000 })),
   },
   { id: 'part-early', expected: ['part-last', 'grip-metal'], mutations: partedEarly },
   {
     id: 'no-support',
     expected: ['support-overhang', 'support-bend'],
-    mutations: (route) => eachSetUp(route, (s) => (s.support && standsOut(route, s) ? { ...s, support: undefined } : null)),
+    mutations: (route) =>
+      eachSetUp(route, (s) => (s.support && standsOut(route, s) ? { ...s, support: undefined } : null)),
   },
   {
     id: 'no-centre-hole',
@@ -231,13 +291,19 @@ export const SABOTAGES: readonly Sabotage[] = [
       dropped(
         route,
         part,
-        (o) => o.method === 'centre-drill' && route.setups.some((s) => s.id === o.setup && s.support === 'centre'),
+        (o) =>
+          o.method === 'centre-drill' && route.setups.some((s) => s.id === o.setup && s.support === 'centre'),
       ),
   },
   {
     id: 'stop-length',
     expected: ['figures-fit'],
-    mutations: (route, part) => each(route, part, stopMoved((stop) => ({ ...stop, length: stop.length + 1 }))),
+    mutations: (route, part) =>
+      each(
+        route,
+        part,
+        stopMoved((stop) => ({ ...stop, length: stop.length + 1 })),
+      ),
   },
   {
     id: 'stop-reaches',
@@ -273,17 +339,20 @@ export const SABOTAGES: readonly Sabotage[] = [
   {
     id: 'wrong-angle',
     expected: ['figures-fit'],
-    mutations: (route, part) => each(route, part, (o) => (o.halfAngle === undefined ? null : { ...o, halfAngle: o.halfAngle * 2 })),
+    mutations: (route, part) =>
+      each(route, part, (o) => (o.halfAngle === undefined ? null : { ...o, halfAngle: o.halfAngle * 2 })),
   },
   {
     id: 'wrong-faces',
     expected: ['figures-fit'],
-    mutations: (route, part) => each(route, part, (o) => (o.faces === undefined ? null : { ...o, faces: o.faces - 1 })),
+    mutations: (route, part) =>
+      each(route, part, (o) => (o.faces === undefined ? null : { ...o, faces: o.faces - 1 })),
   },
   {
     id: 'wrong-depth',
     expected: ['figures-fit'],
-    mutations: (route, part) => each(route, part, (o) => (o.depth === undefined ? null : { ...o, depth: o.depth + 0.05 })),
+    mutations: (route, part) =>
+      each(route, part, (o) => (o.depth === undefined ? null : { ...o, depth: o.depth + 0.05 })),
   },
   {
     id: 'too-few-passes',
@@ -298,17 +367,20 @@ export const SABOTAGES: readonly Sabotage[] = [
   {
     id: 'no-speed',
     expected: ['figures-fit'],
-    mutations: (route, part) => each(route, part, (o) => (o.method === 'turn' || o.method === 'mill-flat' ? { ...o, speed: 0 } : null)),
+    mutations: (route, part) =>
+      each(route, part, (o) => (o.method === 'turn' || o.method === 'mill-flat' ? { ...o, speed: 0 } : null)),
   },
   {
     id: 'removes-off',
     expected: ['removes-metal'],
-    mutations: (route, part) => each(route, part, (o) => (o.removes > 0 ? { ...o, removes: o.removes * 1.0001 } : null), false),
+    mutations: (route, part) =>
+      each(route, part, (o) => (o.removes > 0 ? { ...o, removes: o.removes * 1.0001 } : null), false),
   },
   {
     id: 'removes-nothing-said',
     expected: ['removes-metal'],
-    mutations: (route, part) => each(route, part, (o) => (o.removes > 0 ? { ...o, removes: 0 } : null), false),
+    mutations: (route, part) =>
+      each(route, part, (o) => (o.removes > 0 ? { ...o, removes: 0 } : null), false),
   },
   {
     id: 'stage-of-another',
@@ -328,7 +400,10 @@ export const SABOTAGES: readonly Sabotage[] = [
     mutations: (route) =>
       (['blank', 'removed', 'kerf', 'remnant', 'part'] as const).map((name) => ({
         text: name,
-        route: { ...route, volumes: { ...route.volumes, [name]: route.volumes[name] + 1e-3 * route.volumes.blank } },
+        route: {
+          ...route,
+          volumes: { ...route.volumes, [name]: route.volumes[name] + 1e-3 * route.volumes.blank },
+        },
       })),
   },
 ];

@@ -54,7 +54,8 @@ function kernelVolume(body: Body): number {
   return solid.volume();
 }
 
-const cylinder = (id: string, length: number, diameter: number) => ({ form: 'cylinder', id, length, diameter }) as const;
+const cylinder = (id: string, length: number, diameter: number) =>
+  ({ form: 'cylinder', id, length, diameter }) as const;
 const cone = (id: string, length: number, startDiameter: number, endDiameter: number) =>
   ({ form: 'cone', id, length, startDiameter, endDiameter }) as const;
 

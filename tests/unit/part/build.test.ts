@@ -10,15 +10,21 @@ function problemsOf(given: Partial<PartInput>): { input: string; message: string
   const result = buildPart(input(given));
   return 'problems' in result ? result.problems : [];
 }
-const bar = (length: number, diameter: number) => ({ form: 'cylinder', id: 'bar', length, diameter }) as const;
+const bar = (length: number, diameter: number) =>
+  ({ form: 'cylinder', id: 'bar', length, diameter }) as const;
 
 describe('a part from its inputs', () => {
   it('measures plain solids by their formulas', () => {
-    const cone = built({ lengths: [{ form: 'cone', id: 'c', length: 30, startDiameter: 20, endDiameter: 10 }] });
+    const cone = built({
+      lengths: [{ form: 'cone', id: 'c', length: 30, startDiameter: 20, endDiameter: 10 }],
+    });
     expect(volume(cone.body)).toBeCloseTo((Math.PI * 30 * (100 + 50 + 25)) / 3, 8);
     const ball = built({ lengths: [bar(10, 20)], crowns: [{ id: 'k', end: 'right', radius: 10.0001 }] });
     expect(volume(ball.body) / ((2 / 3) * Math.PI * 1000)).toBeCloseTo(1, 4);
-    const hexagon = built({ lengths: [bar(10, 30)], flats: [{ id: 'h', from: 0, length: 10, count: 6, acrossFlats: 20 }] });
+    const hexagon = built({
+      lengths: [bar(10, 30)],
+      flats: [{ id: 'h', from: 0, length: 10, count: 6, acrossFlats: 20 }],
+    });
     expect(volume(hexagon.body)).toBeCloseTo((Math.sqrt(3) / 2) * 400 * 10, 8);
   });
 
@@ -58,7 +64,10 @@ describe('a part from its inputs', () => {
   });
 
   it('stops flats at a wall within a length and at a step up', () => {
-    const wall = built({ lengths: [bar(40, 20)], flats: [{ id: 'f', from: 0, length: 15, count: 2, acrossFlats: 16 }] });
+    const wall = built({
+      lengths: [bar(40, 20)],
+      flats: [{ id: 'f', from: 0, length: 15, count: 2, acrossFlats: 16 }],
+    });
     expect(wall.body.cuts[0]).toMatchObject({ from: 0, to: 15 });
     const step = built({
       lengths: [bar(20, 20), { form: 'cylinder', id: 'b', length: 10, diameter: 30 }],
@@ -85,7 +94,10 @@ describe('a part from its inputs', () => {
   });
 
   it('cuts centre holes at their nominal form', () => {
-    const part = built({ lengths: [bar(40, 20)], centreHoles: [{ id: 'c', end: 'right', designation: 'A2.5' }] });
+    const part = built({
+      lengths: [bar(40, 20)],
+      centreHoles: [{ id: 'c', end: 'right', designation: 'A2.5' }],
+    });
     expect(radiusAt(part.body.inner, 40, 'left')).toBeCloseTo(5.3 / 2, 9);
     const seat = (5.3 - 2.5) / 2 / Math.tan(Math.PI / 6);
     expect(radiusAt(part.body.inner, 40 - seat - 1, 'left')).toBeCloseTo(1.25, 9);
@@ -95,9 +107,24 @@ describe('a part from its inputs', () => {
 
 describe('what cannot be', () => {
   const refused: [string, Partial<PartInput>, string, RegExp][] = [
-    ['a crown too small for its bar', { lengths: [bar(40, 20)], crowns: [{ id: 'k', end: 'right', radius: 8 }] }, 'k', /at least 10 mm/],
-    ['a chamfer longer than its length', { lengths: [bar(2, 20)], chamfers: [{ id: 'c', on: 'bar', end: 'left', leg: 3 }] }, 'c', /at most 2 mm/],
-    ['a chamfer past the axis', { lengths: [bar(40, 4)], chamfers: [{ id: 'c', on: 'bar', end: 'left', leg: 3 }] }, 'c', /at most 2 mm/],
+    [
+      'a crown too small for its bar',
+      { lengths: [bar(40, 20)], crowns: [{ id: 'k', end: 'right', radius: 8 }] },
+      'k',
+      /at least 10 mm/,
+    ],
+    [
+      'a chamfer longer than its length',
+      { lengths: [bar(2, 20)], chamfers: [{ id: 'c', on: 'bar', end: 'left', leg: 3 }] },
+      'c',
+      /at most 2 mm/,
+    ],
+    [
+      'a chamfer past the axis',
+      { lengths: [bar(40, 4)], chamfers: [{ id: 'c', on: 'bar', end: 'left', leg: 3 }] },
+      'c',
+      /at most 2 mm/,
+    ],
     [
       'chamfers that overlap',
       {
@@ -110,13 +137,33 @@ describe('what cannot be', () => {
       'd',
       /at most 1.5 mm/,
     ],
-    ['flats that touch nothing', { lengths: [bar(40, 20)], flats: [{ id: 'f', from: 0, length: 9, count: 6, acrossFlats: 20 }] }, 'f', /less than/],
-    ['a flat past the axis', { lengths: [bar(40, 20)], flats: [{ id: 'f', from: 0, length: 9, count: 1, acrossFlats: 9 }] }, 'f', /more than 10 mm/],
-    ['a thread on another diameter', { lengths: [bar(40, 20)], threads: [{ id: 't', on: 'bar', spec: thread('M10') }] }, 't', /10 mm, not 20 mm/],
+    [
+      'flats that touch nothing',
+      { lengths: [bar(40, 20)], flats: [{ id: 'f', from: 0, length: 9, count: 6, acrossFlats: 20 }] },
+      'f',
+      /less than/,
+    ],
+    [
+      'a flat past the axis',
+      { lengths: [bar(40, 20)], flats: [{ id: 'f', from: 0, length: 9, count: 1, acrossFlats: 9 }] },
+      'f',
+      /more than 10 mm/,
+    ],
+    [
+      'a thread on another diameter',
+      { lengths: [bar(40, 20)], threads: [{ id: 't', on: 'bar', spec: thread('M10') }] },
+      't',
+      /10 mm, not 20 mm/,
+    ],
     ['a length of nothing', { lengths: [bar(0, 20)] }, 'bar', /more than 0/],
     ['not a number', { lengths: [bar(Number.NaN, 20)] }, 'bar', /more than 0/],
     ['no length at all', {}, 'lengths', /at least one/],
-    ['a centre larger than its face', { lengths: [bar(40, 5)], centreHoles: [{ id: 'h', end: 'left', designation: 'A2.5' }] }, 'h', /only 5 mm/],
+    [
+      'a centre larger than its face',
+      { lengths: [bar(40, 5)], centreHoles: [{ id: 'h', end: 'left', designation: 'A2.5' }] },
+      'h',
+      /only 5 mm/,
+    ],
   ];
   it.each(refused)('%s', (_name, given, id, sentence) => {
     const problems = problemsOf(given);
@@ -131,6 +178,8 @@ describe('what cannot be', () => {
     const angle = Math.atan(3 / 60);
     expect(least).toBeCloseTo((7 * Math.cos(angle)) / (1 - Math.sin(angle)), 2);
     expect(problemsOf({ lengths, crowns: [{ id: 'k', end: 'right', radius: least }] })).toEqual([]);
-    expect(problemsOf({ lengths, crowns: [{ id: 'k', end: 'right', radius: least - 0.002 }] })).toHaveLength(1);
+    expect(problemsOf({ lengths, crowns: [{ id: 'k', end: 'right', radius: least - 0.002 }] })).toHaveLength(
+      1,
+    );
   });
 });
