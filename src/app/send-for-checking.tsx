@@ -50,7 +50,7 @@ export function SendForChecking() {
         </p>
       )}
       {first ? (
-        <Button aria-disabled="true" aria-describedby="why-not-sent" onClick={goToFirst}>
+        <Button className="waits" aria-describedby="why-not-sent" onClick={goToFirst}>
           Send for checking: {countOf(problems.length, 'size')} wrong
         </Button>
       ) : (
