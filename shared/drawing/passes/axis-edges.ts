@@ -190,8 +190,11 @@ function longEdges(cut: FlatsCut, body: Body, map: XMap, merge: number): Mark[] 
 
 /** Two curves that part for good are drawn from where they leave one another; two that never do are one line. */
 function partingWidth(one: readonly Point[], two: readonly Point[], merge: number): number {
-  const widest = Math.max(...one.map((p, i) => Math.abs(p.y - (two[i]?.y ?? p.y))));
-  return widest >= merge ? Math.min(merge, PARTING) : merge;
+  const apart = one.map((p, i) => Math.abs(p.y - (two[i]?.y ?? p.y)));
+  const widest = Math.max(...apart);
+  const closest = Math.min(...apart.slice(0, -1));
+  // The strip of a rounded corner stays one line until its edges really part.
+  return widest >= merge ? Math.min(merge, Math.max(PARTING, closest + PARTING / 2)) : merge;
 }
 
 /** One line where the two edges of a rounded corner would print as a blot, two from where they part. */
