@@ -72,7 +72,7 @@ function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]):
   const cut = passesFor(metal, depth);
   const tool = turningTool(build.register, 'rough');
   const key = keyOf(session, `rough.${plateau.rows[0]?.id ?? ''}`);
-  const before = session.done.get('rough');
+  const before = session.done.get('plateau');
   addOperation(build, view, {
     key,
     method: 'rough-turn',
@@ -91,6 +91,7 @@ function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]):
     needs: [tool.need],
   });
   session.done.set('rough', key);
+  session.done.set('plateau', key);
   leansOnTail(session, key);
 }
 
@@ -173,7 +174,7 @@ function cutBehindCollar(session: Session, row: Row, radius: number, method: 'ro
   const depth = depthFor(session, method, to, wish, `Turning Ø${mm(2 * radius)} behind the collar`);
   const cut = passesFor(metal, depth);
   const key = keyOf(session, `${method}.${row.id}`);
-  const before = session.done.get(method === 'turn' ? 'turn' : 'rough') ?? session.done.get('rough');
+  const before = method === 'turn' ? session.done.get('rough') : undefined;
   const blank = method === 'turn' && row.thread ? threadBlank(row.thread) : undefined;
   addOperation(build, view, {
     key,
@@ -186,7 +187,7 @@ function cutBehindCollar(session: Session, row: Row, radius: number, method: 'ro
     toolFigures: tool.item?.figures,
     figures: { diameter: 2 * (radius + metal), travel: width, depth: cut.depth, passes: cut.passes },
     cut: { kind: 'outer', envelope: constant(from, to, radius) },
-    after: before ? [{ key: before, rule: method === 'turn' ? 'rough-before-finish' : 'rough-large-first' }] : beforeTurning(session),
+    after: before ? [{ key: before, rule: 'rough-before-finish' }] : beforeTurning(session),
     stops: [{ toX: to }, { toX: from }],
     reasons: ['way-in'],
     ...(blank ? { blank } : {}),
@@ -231,9 +232,8 @@ export function turnTapers(session: Session): void {
       const milled = session.done.get(`mill.${flats.id}`);
       if (milled && flats.runOutTo > row.from + 1e-9) after.push({ key: milled, rule: 'flats-before-taper' });
     }
-    const turned = session.done.get('turn') ?? session.done.get('rough');
-    if (turned && after.length === 0) after.push({ key: turned, rule: 'rough-before-finish' });
-    if (!turned && after.length === 0) after.push(...beforeTurning(session));
+    const rough = session.done.get('rough');
+    if (after.length === 0) after.push(...(rough ? [{ key: rough, rule: 'rough-before-finish' as const }] : beforeTurning(session)));
     const envelope: Generator = last && to > row.to + 1e-9
       ? [
           { kind: 'line', from: row.from, to: row.to, start: row.startR, end: row.endR },
