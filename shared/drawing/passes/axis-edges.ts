@@ -127,7 +127,9 @@ function readingStations(cut: FlatsCut, body: Body): number[] {
   for (const piece of body.outer) {
     const from = Math.max(piece.from, cut.from, body.x0);
     const to = Math.min(piece.to, cut.to, body.x1);
-    if (to - from <= SAME) continue;
+    // Where the metal lies within the flats there is no face and no edge.
+    if (to - from <= SAME || Math.max(radiusAt([piece], from), radiusAt([piece], to)) <= cut.distance + SAME)
+      continue;
     const steps = piece.kind === 'line' && piece.start === piece.end ? 1 : 16;
     for (let i = 0; i <= steps; i++) {
       // Closer together towards the end of a run-out, where the curve turns most.
