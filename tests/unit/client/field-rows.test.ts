@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { exampleValues } from '../../../shared/template/default-values';
 import { evaluate } from '../../../shared/template/evaluate';
-import type { TypedValues } from '../../../shared/template/template';
+import type { TypedRow, TypedValues } from '../../../shared/template/template';
 import { templateById } from '../../../templates';
 import { shownPaths } from '../../../src/engine/shown-paths';
 import { formRows } from '../../../src/features/fill-in/field-rows';
@@ -33,7 +33,7 @@ describe('the form of a family', () => {
   });
 
   it('gives every row of a table its cells, a new one too', () => {
-    const steps = [{ key: 'n', diameter: '20', length: '30' }, { key: 'm' }];
+    const steps: TypedRow[] = [{ key: 'n', diameter: '20', length: '30' }, { key: 'm' }];
     const [table] = rowsOf('stepped-shaft', { steps }).shape;
     if (table?.kind !== 'table') throw new Error('the first field of a stepped shaft is its steps');
     expect(table.rows.map(({ key }) => key)).toEqual(['n', 'm']);
