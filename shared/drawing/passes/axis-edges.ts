@@ -130,10 +130,10 @@ function readingStations(cut: FlatsCut, body: Body): number[] {
     // Where the metal lies within the flats there is no face and no edge.
     if (to - from <= SAME || Math.max(radiusAt([piece], from), radiusAt([piece], to)) <= cut.distance + SAME)
       continue;
-    const steps = piece.kind === 'line' && piece.start === piece.end ? 1 : 16;
+    const steps = piece.kind === 'line' && piece.start === piece.end ? 1 : 20;
     for (let i = 0; i <= steps; i++) {
-      // Closer together towards the end of a run-out, where the curve turns most.
-      const t = 1 - (1 - i / steps) ** 2;
+      // Closer together towards both ends: a run-out turns most where it ends, whichever way the work lies.
+      const t = (1 - Math.cos((Math.PI * i) / steps)) / 2;
       stations.push(from + (to - from) * t);
     }
   }
