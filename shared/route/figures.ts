@@ -58,7 +58,9 @@ export function ratesFor(build: Build, operation: DraftOperation, maximumSpeed: 
   const perMinute = feedPer === 'min' ? feed : feed * Math.max(speed, 1);
   const sides = milling ? (operation.faces ?? 1) : 1;
   // Every pass travels back as well, at the hand's or the machine's quick pace.
-  const cutting = (figures.travel / Math.max(perMinute, 1)) * figures.passes * sides;
+  const coarse = method === 'taper-turn' ? Math.max(1, turningFeed('roughing', material.group) / Math.max(feed, 0.01)) : 1;
+  // On a taper all passes but the last are roughing.
+  const cutting = (figures.travel / Math.max(perMinute, 1)) * ((figures.passes - 1) / coarse + 1) * sides;
   const back = 0.1 * figures.passes * sides;
   const minutes = cutting + back + operation.handling;
   return {

@@ -76,7 +76,7 @@ export const LIGHT_METHODS = ['face', 'form-turn', 'chamfer'] as const;
  * - in a set-up whose support is `centre` the tail stands in the free end as soon as there is a hole to enter (drilled
  *   in this set-up or an earlier one) and until a cut takes the hole away; it is out for facing, end forms and dies;
  * - free length runs from the grip's edge on the free side to the far end of the cut; the smallest diameter is that of
- *   the stage before the cut, flats counted across them, over that length;
+ *   the stage before the cut, flats counted across them, over that length (but for the chamfer at the tip of a thread);
  * - the bend is F / E · ∫ (xc − x)² / I dx over that length on the same stage, xc the far end of the cut,
  *   I = π (r⁴ − b⁴) / 4 with r held to a flat's distance, F = forcePerDepth × depthOfCut; × tailFactor with a centre;
  * - passes × depthOfCut is at least the metal gone: radially for turning, along the axis for facing, square to the

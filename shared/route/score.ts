@@ -23,13 +23,13 @@ export function compareOutlines(a: Outline, b: Outline): number {
   return a.rocks - b.rocks || a.setups + a.awkward - (b.setups + b.awkward) || a.apart - b.apart;
 }
 
-/** Negative where the first plan is better. Whole numbers first, then minutes to a tenth and metal to a cubic centimetre. */
+/** Negative where the first plan is better. Whole numbers first, then minutes and metal to a cubic centimetre. */
 export function compareScores(a: Score, b: Score): number {
   return (
     a.shorts - b.shorts ||
     compareOutlines(a, b) ||
     a.alternatives - b.alternatives ||
-    Math.round(a.minutes * 10) - Math.round(b.minutes * 10) ||
+    Math.round(a.minutes * 1e4) - Math.round(b.minutes * 1e4) ||
     Math.round(a.blank / 1000) - Math.round(b.blank / 1000)
   );
 }

@@ -54,9 +54,12 @@ export function depthFor(session: Session, method: Method, farEnd: number, wish:
   return answer.depth;
 }
 
+/** Neighbours that only touch an end of a span are none of its metal (mm). */
+const TOUCH = 1e-7;
+
 /** Radial metal between the stage and a radius over a span (mm); 0 where there is none. */
 export function metalOver(session: Session, from: number, to: number, radius: number): number {
-  return Math.max(0, largestRadius(stageOf(session).outer, from, to) - radius);
+  return Math.max(0, largestRadius(stageOf(session).outer, from + TOUCH, to - TOUCH) - radius);
 }
 
 /** Passes and the even depth of each. */

@@ -20,6 +20,12 @@ export type SupportAnswer = { depth: number; ratio: number } | { depth: null; ra
 
 const LEAST_DEPTH = 0.05;
 
+/** Where a chamfer at the tip begins: the lead of a thread carries nothing, so its small end does not count. */
+function leadFrom(stage: Body, farEnd: number): number {
+  const tip = stage.outer[stage.outer.length - 1];
+  return tip?.kind === 'line' && tip.end < tip.start && tip.to <= farEnd + 1e-9 ? tip.from : farEnd;
+}
+
 /**
  * The radial depth a cut may have on this stage: what is wished for, less where the work would bend more than its
  * limit, or null with the rule that stands against it (no centre where one is needed, or too slender with one).
@@ -30,7 +36,7 @@ export function depthAllowed(asked: SupportAsked): SupportAnswer {
   const light = (LIGHT_METHODS as readonly string[]).includes(method);
   if (!side && !light) return { depth: wish, ratio: 0 };
   const free = Math.max(0, farEnd - gripEdge);
-  const ratio = free <= 0 ? 0 : free / smallestDiameter(stage, gripEdge, farEnd);
+  const ratio = free <= 0 ? 0 : free / smallestDiameter(stage, gripEdge, method === 'thread-single-point' ? leadFrom(stage, farEnd) : farEnd);
   if (side && !tail && ratio > LIMITS.overhang.value) return { depth: null, ratio, rule: 'support-overhang' };
   const perDepth = bendPerDepth(stage, gripEdge, farEnd) * (tail ? LIMITS.tailFactor.value : 1);
   const ceiling = light && ratio > LIMITS.overhang.value ? LIMITS.lightDepth.value : wish;

@@ -64,7 +64,7 @@ function supportFaults(step: Step): Fault[] {
   const far = Math.min(before.x1, Math.max(...changes.map((change) => change.to)));
   if (far <= gripTo) return [];
   const number = operation.number;
-  const ratio = (far - gripTo) / smallestAcross(before, gripTo, far);
+  const ratio = (far - gripTo) / smallestAcross(before, gripTo, operation.method === 'thread-single-point' ? withoutLead(before, far) : far);
   const tail = standsInTail(step);
   const steadied =
     setup.support === 'steady' || (setup.support === 'outboard' && operation.method === 'mill-flat');
@@ -106,6 +106,12 @@ export function standsInTail(step: Step): boolean {
   const { setup, before, operation } = step;
   if (setup.support !== 'centre' || AT_THE_END.includes(operation.method)) return false;
   return radiusAt(before.inner, before.x1, 'left') > 0;
+}
+
+/** Where a chamfer at the tip begins: the lead of a thread carries nothing, so its small end does not count. */
+function withoutLead(body: Body, far: number): number {
+  const tip = body.outer[body.outer.length - 1];
+  return tip?.kind === 'line' && tip.end < tip.start && tip.to <= far + 1e-9 ? tip.from : far;
 }
 
 function round(ratio: number): string {

@@ -21,9 +21,12 @@ function pastEnd(session: Session, distance: number, end: number, way: 1 | -1): 
   const { part, length } = session.view;
   const over = LIMITS.overRun.value;
   if (way > 0 ? end >= length - 1e-9 : end <= 1e-9) return over;
-  const outside = way > 0 ? largestRadius(part.body.outer, end, Math.min(length, end + over)) : largestRadius(part.body.outer, Math.max(0, end - over), end);
-  const beside = radiusAt(part.body.outer, end, way > 0 ? 'right' : 'left');
-  if (beside > distance + 1e-6 || outside > Math.max(distance, beside) + 1e-6) return 0;
+  // Just past the end: arithmetic may leave the station itself on either side of a step.
+  const past = end + way * 1e-6;
+  const far = Math.min(length, Math.max(0, end + way * over));
+  const outside = largestRadius(part.body.outer, Math.min(past, far), Math.max(past, far));
+  const beside = radiusAt(part.body.outer, past);
+  if (beside > distance + 1e-5 || outside > Math.max(distance, beside) + 1e-5) return 0;
   return over;
 }
 

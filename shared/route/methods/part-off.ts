@@ -1,4 +1,4 @@
-import { constant, largestRadius, slice } from '../../part/generator';
+import { constant, slice } from '../../part/generator';
 import { addOperation } from '../draft';
 import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
@@ -72,7 +72,7 @@ export function chamferHeldEnd(session: Session, width: number): void {
 export function partOff(session: Session, cutAt: number, width: number, finishes: boolean): void {
   const { build, view } = session;
   const stage = stageOf(session);
-  const radius = largestRadius(stage.outer, cutAt - width, cutAt);
+  const radius = metalOver(session, cutAt - width, cutAt, 0);
   const blade = bladeFor(session, radius);
   const key = keyOf(session, 'part');
   const last = build.operations[build.operations.length - 1];

@@ -285,7 +285,7 @@ function taperMetal(session: Session, row: Row, to: number, slope: number): numb
   for (let k = 0; k <= steps; k += 1) {
     const x = row.from + ((to - row.from) * k) / steps;
     const target = row.startR + slope * (x - row.from);
-    const near = 1e-7;
+    const near = 2e-7;
     metal = Math.max(metal, metalOver(session, Math.max(stage.x0, x - near), Math.min(stage.x1, x + near), target));
   }
   return metal;
