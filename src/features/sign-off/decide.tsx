@@ -46,7 +46,7 @@ export function Decide() {
   return (
     <Plate head="Decide" aside={aside} decides>
       <div className="decide">
-        <p>{whatItDoes(revision.state, letter, may)}</p>
+        <p>{whatItDoes(revision.state, letter, revision.history.length === 0, may)}</p>
         {!may('approve') && revision.state === 'in review' && <p className="soft">{whyNot(answer)}</p>}
         {nothing && revision.state !== 'in review' && (
           <p className="soft">There is nothing for you to decide here.</p>
@@ -117,14 +117,19 @@ export function Decide() {
   );
 }
 
-function whatItDoes(state: string, letter: string, may: (ability: string) => boolean): string {
+function whatItDoes(
+  state: string,
+  letter: string,
+  isFirst: boolean,
+  may: (ability: string) => boolean,
+): string {
   if (state === 'draft')
     return may('submit')
       ? `Revision ${letter} is a draft. When its sizes are right, send it for checking with the button above.`
       : `Revision ${letter} is a draft. It is not for manufacture.`;
   if (state === 'in review')
     return may('approve')
-      ? `You wrote nothing in this revision, so you may approve it. Approving releases ${letter} and supersedes the release before it. Read the sheet, the route and the verdict first.`
+      ? `You may approve it. Approving releases ${letter}${isFirst ? '' : ' and supersedes the release before it'}. Read the sheet, the route and the verdict first.`
       : `Revision ${letter} waits for a second person to check it.`;
   if (state === 'released') return `Revision ${letter} is released: the bench works to it.`;
   if (state === 'superseded') return `Revision ${letter} is superseded. A later revision is released.`;
