@@ -9,7 +9,7 @@ import type { ServerConfig } from './config';
 import { serverConfig } from './config';
 import { openDatabase } from './database';
 import { openLog } from './middleware/request-log';
-import { faces } from './pdf/faces';
+import { prepareFaces } from './pdf/faces';
 import { decoyHash } from './services/sign-in';
 import { localDiskStore } from './storage/local-disk';
 
@@ -19,7 +19,7 @@ async function main(): Promise<void> {
   const logger = openLog(config.logLevel);
   const database = openDatabase(config.databaseUrl);
   const store = localDiskStore(config.storeFolder);
-  faces();
+  prepareFaces();
   await decoyHash(config.bcryptRounds);
   const app = buildApp({ config, database, store, engine: runEngine, now: () => new Date() }, logger);
   const server = listener(config, app);

@@ -1,6 +1,8 @@
 import PDFDocument from 'pdfkit';
 import SVGtoPDF from 'svg-to-pdfkit';
-import { faces } from './faces';
+import type { Subset } from './faces';
+import { face, subsets } from './faces';
+import { splitTexts } from './split-texts';
 
 const POINTS_PER_MM = 72 / 25.4;
 
@@ -15,7 +17,6 @@ export interface PdfFacts {
  * @throws Error when an SVG has no size in mm.
  */
 export function sheetPdf(svgs: readonly string[], facts: PdfFacts): Promise<Uint8Array> {
-  const { regular, bold } = faces();
   return new Promise((resolve, reject) => {
     const info = { Title: facts.title, Producer: 'Benchleaf', Creator: 'Benchleaf', CreationDate: facts.date ?? new Date(0) };
     const document = new PDFDocument({ autoFirstPage: false, margin: 0, info, lang: 'en-GB' });
@@ -23,21 +24,31 @@ export function sheetPdf(svgs: readonly string[], facts: PdfFacts): Promise<Uint
     document.on('data', (chunk: Buffer) => chunks.push(chunk));
     document.on('end', () => resolve(Buffer.concat(chunks)));
     document.on('error', reject);
-    document.registerFont('regular', regular);
-    document.registerFont('bold', bold);
+    const lettered = faceOf(document);
     try {
       for (const svg of svgs) {
         const { width, height } = sizeOf(svg);
         document.addPage({ size: [width * POINTS_PER_MM, height * POINTS_PER_MM], margin: 0 });
-        SVGtoPDF(document, svg, 0, 0, {
-          fontCallback: (_family: string, isBold: boolean) => (isBold ? 'bold' : 'regular'),
-        });
+        SVGtoPDF(document, splitTexts(svg), 0, 0, { fontCallback: lettered });
       }
       document.end();
     } catch (error) {
       reject(error instanceof Error ? error : new Error(String(error)));
     }
   });
+}
+
+/** Names the face of a run for the document; one that was not used yet is registered first, so that a sheet carries only its own. */
+function faceOf(document: PDFKit.PDFDocument): (family: string, isBold: boolean) => string {
+  const registered = new Set<string>();
+  return (family, isBold) => {
+    const subset: Subset = subsets.find((one) => one === family) ?? 'latin';
+    const weight = isBold ? 700 : 400;
+    const name = `${subset}-${weight}`;
+    if (!registered.has(name)) document.registerFont(name, face(subset, weight));
+    registered.add(name);
+    return name;
+  };
 }
 
 /** Millimetres, from the root's own attributes. */

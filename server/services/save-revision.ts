@@ -3,6 +3,7 @@ import { canonicalJson } from './content-hash';
 import { allow } from './allow';
 import { currentRegister } from './current-register';
 import { keepFacts } from './keep-facts';
+import { requirePrintable } from './printable';
 import { recordAudit } from './record';
 import type { RevisionAt, RevisionPlace } from './revision-at';
 import { revisionAt } from './revision-at';
@@ -18,6 +19,8 @@ export async function saveRevision(work: ShopWork, place: RevisionPlace, request
   const at = await revisionAt(work, place, { lock: true });
   const { revision, drawing } = at;
   await allow(work, at, 'edit', request.version);
+  // The sheet's revision table prints it; every other text has its own field, where the draft keeps what is wrong.
+  requirePrintable('change', request.change ?? '');
   const filled = {
     template: revision.template,
     title: request.title,

@@ -3,6 +3,7 @@ import { Refusal } from '../errors';
 import type { Revision } from '../models/revision';
 import { permit } from '../policies/permit';
 import { addDraft } from './add-draft';
+import { requirePrintable } from './printable';
 import type { RevisionAt } from './revision-at';
 import { drawingAt, matterOf } from './revision-at';
 import type { ShopWork } from './shop-work';
@@ -12,6 +13,7 @@ import type { ShopWork } from './shop-work';
  * @throws Refusal `wrong-state` when nothing is released, or another revision is being worked on.
  */
 export async function startRevision(work: ShopWork, drawingId: string, change: string): Promise<RevisionAt> {
+  requirePrintable('change', change);
   const { models } = work.services.database;
   const drawing = await drawingAt(work, drawingId);
   const scope = { shopId: work.shop.id, drawingId: drawing.id };

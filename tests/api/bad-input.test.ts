@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { RevisionAnswer } from '../../shared/api/drawings';
+import type { RevisionAnswer, SaveRevisionRequest } from '../../shared/api/drawings';
 import { searchAnswer } from '../../shared/api/drawings';
 import type { BrowserLike } from '../factories/browser-like';
 import { signedIn } from '../factories/browser-like';
@@ -157,5 +157,16 @@ describe('values that make no part', () => {
     const started = await startDrawing(lead, shop, { title });
     expect(started.revision.title).toBe(title);
     expect(started.revision.result?.svg).not.toContain('<b>');
+  });
+
+  it('lets no character onto the sheet that its face cannot letter', async () => {
+    const started = await startDrawing(lead, shop, { title: 'Łódź żółw Ωμέγα Шлюз' });
+    expect(started.revision.problems).toEqual([]);
+    const save = (changes: Partial<SaveRevisionRequest>) => lead.put(revisionPath(shop, started), saveRequest(started, changes));
+    const refused = expectRefusal(await save({ change: 'made longer 長' }), 422, 'bad-input');
+    expect(refused.fields?.map(({ path }) => path)).toEqual(['change']);
+    const saved = revisionOf(await save({ title: 'Shaft 長', change: 'кромка' }));
+    expect(saved.revision.problems.map(({ path }) => path)).toEqual(['title']);
+    expect(saved.revision.problems[0]?.message).toContain('U+9577');
   });
 });

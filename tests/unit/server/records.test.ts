@@ -2,7 +2,7 @@ import { mkdtemp, readdir, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
-import { faces } from '../../../server/pdf/faces';
+import { face } from '../../../server/pdf/faces';
 import { unpackWoff } from '../../../server/pdf/woff';
 import { canonicalJson, contentHash } from '../../../server/services/content-hash';
 import { revisionLetter } from '../../../server/services/revision-letter';
@@ -74,8 +74,8 @@ describe('the store on disk', () => {
 
 describe('the lettering', () => {
   it('is unpacked to a face without ligatures, and nothing else is taken for one', () => {
-    for (const face of [faces().regular, faces().bold]) {
-      const tags = Array.from({ length: face.readUInt16BE(4) }, (_, index) => face.toString('latin1', 12 + index * 16, 16 + index * 16));
+    for (const sfnt of [face('latin', 400), face('latin', 700)]) {
+      const tags = Array.from({ length: sfnt.readUInt16BE(4) }, (_, index) => sfnt.toString('latin1', 12 + index * 16, 16 + index * 16));
       expect(tags).toContain('cmap');
       expect(tags).not.toContain('GSUB');
       expect(tags).toEqual([...tags].sort());
