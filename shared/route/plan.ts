@@ -15,6 +15,7 @@ import { compareOutlines, compareScores, whyOutlineWorse, whyWorse } from './sco
 import type { Outline, Score } from './score';
 import { buildCandidate, candidateText } from './setups/candidate';
 import type { Candidate } from './setups/candidate';
+import { shutOut } from './setups/open-to';
 import { mm } from './shop';
 import { stockFor } from './stock';
 import type { StockAnswer, StockOption } from './stock';
@@ -98,6 +99,11 @@ function bestOf(
   for (const each of promised) {
     if (cannotWin(each.outline)) {
       beaten.push(each);
+      continue;
+    }
+    const shut = shutOut(views, each.candidate);
+    if (shut) {
+      failures.push({ text: candidateText(each.candidate), why: shut.message });
       continue;
     }
     try {

@@ -2,7 +2,7 @@ import { radiusAt } from '../../part/generator';
 import type { ThreadFeature } from '../../part/part';
 import { addOperation, RuledOut } from '../draft';
 import type { DraftNeed } from '../draft';
-import type { Row } from '../features';
+import type { Row, View } from '../features';
 import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
 import { alternative, dieFor, dieHolderFor, gearboxCuts, held, mm, short, threadingTool } from '../shop';
@@ -26,13 +26,21 @@ export function byDie(session: Session, row: Row, thread: ThreadFeature): boolea
     dieHolderFor(register, die) !== undefined &&
     thread.starts === 1 &&
     thread.major <= register.settings.dieLimit + 1e-6 &&
-    openToFreeEnd(session, row, thread)
+    openToFreeEnd(session.view, row, thread)
   );
 }
 
-function openToFreeEnd(session: Session, row: Row, thread: ThreadFeature): boolean {
-  const beyond = session.view.rows.filter((other) => other.from >= row.to - 1e-9);
+/** True where nothing between the thread and the free end is larger than its root. */
+export function openToFreeEnd(view: View, row: Row, thread: ThreadFeature): boolean {
+  const beyond = view.rows.filter((other) => other.from >= row.to - 1e-9);
   return beyond.every((other) => Math.max(other.startR, other.endR) <= thread.root / 2 + 1e-6);
+}
+
+export function shutIn(thread: ThreadFeature): RuledOut {
+  return new RuledOut(
+    'way-in',
+    `${thread.designation} stands behind a larger diameter from this end: no die passes over it and no tool can run in.`,
+  );
 }
 
 /** Plain length between the thread and what it runs into: infinite where a smaller neighbour lets the tool out. */
@@ -46,11 +54,8 @@ function runOutOf(session: Session, row: Row, thread: ThreadFeature): number {
 function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
   const { build, view } = session;
   const { register } = build;
-  if (!openToFreeEnd(session, row, thread))
-    throw new RuledOut(
-      'way-in',
-      `${thread.designation} stands behind a larger diameter from this end: no die passes over it and no tool can run in.`,
-    );
+  if (!openToFreeEnd(session.view, row, thread))
+    throw shutIn(thread);
   const exit = runOutOf(session, row, thread);
   const die = dieFor(register, thread);
   const holder = die && dieHolderFor(register, die);

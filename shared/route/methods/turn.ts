@@ -150,9 +150,17 @@ export function finishRows(session: Session): void {
 export function finishValleys(session: Session): void {
   for (const row of valleysOf(rowsWorked(session))) {
     if (row.kind === 'cone')
-      throw new RuledOut('way-in', 'A taper lies behind a larger diameter in this holding: the top slide cannot pass it.');
+      throw taperBehindCollar();
     cutBehindCollar(session, row, row.startR, 'turn');
   }
+}
+
+export function risesToFreeEnd(): RuledOut {
+  return new RuledOut('way-in', 'The taper rises towards the free end of this holding: it is cut from the other end.');
+}
+
+export function taperBehindCollar(): RuledOut {
+  return new RuledOut('way-in', 'A taper lies behind a larger diameter in this holding: the top slide cannot pass it.');
 }
 
 function valleySpan(session: Session, row: Row): { from: number; to: number } {
@@ -206,7 +214,7 @@ export function turnTapers(session: Session): void {
   for (const row of rowsWorked(session)) {
     if (row.kind !== 'cone') continue;
     if (row.endR >= row.startR)
-      throw new RuledOut('way-in', 'The taper rises towards the free end of this holding: it is cut from the other end.');
+      throw risesToFreeEnd();
     const stage = stageOf(session);
     const last = row.to >= view.length - 1e-9;
     const to = last ? stage.x1 : row.to;
