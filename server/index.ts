@@ -3,13 +3,12 @@ import { createServer as createHttpServer } from 'node:http';
 import type { Server } from 'node:http';
 import { createServer as createHttpsServer } from 'node:https';
 import type { Express } from 'express';
-import { runEngine } from '../shared/engine-run';
 import { buildApp } from './app';
 import type { ServerConfig } from './config';
 import { serverConfig } from './config';
 import { openDatabase } from './database';
+import { openPool } from './engine/pool';
 import { openLog } from './middleware/request-log';
-import { prepareFaces } from './pdf/faces';
 import { decoyHash } from './services/sign-in';
 import { localDiskStore } from './storage/local-disk';
 
@@ -19,14 +18,15 @@ async function main(): Promise<void> {
   const logger = openLog(config.logLevel);
   const database = openDatabase(config.databaseUrl);
   const store = localDiskStore(config.storeFolder);
-  prepareFaces();
+  const pool = openPool();
   await decoyHash(config.bcryptRounds);
-  const app = buildApp({ config, database, store, engine: runEngine, now: () => new Date() }, logger);
+  const app = buildApp({ config, database, store, ...pool, now: () => new Date() }, logger);
   const server = listener(config, app);
+  const leave = () => Promise.all([pool.close(), database.sequelize.close()]);
   server.on('error', (error) => {
     logger.fatal({ err: error }, 'the server cannot listen');
     process.exitCode = 1;
-    void database.sequelize.close();
+    void leave();
   });
   server.listen(config.port, config.host, () => logger.info({ host: config.host, port: config.port }, 'listening'));
 
@@ -35,7 +35,7 @@ async function main(): Promise<void> {
     if (ending) return;
     ending = true;
     // Whoever is being answered gets their answer; idle connections are not waited for.
-    server.close(() => void database.sequelize.close());
+    server.close(() => void leave());
     server.closeIdleConnections();
     setTimeout(() => server.closeAllConnections(), 5000).unref();
   };

@@ -1,9 +1,9 @@
 import { join } from 'node:path';
-import { runEngine } from '../../shared/engine-run';
 import { workedExamples, defaultValues } from '../../shared/template/default-values';
 import { templateById } from '../../templates';
 import { usualRateLimits } from '../../server/config';
 import type { Database } from '../../server/database';
+import { ownThread } from '../../server/engine/job';
 import { Refusal } from '../../server/errors';
 import { approveRevision } from '../../server/services/approve-revision';
 import { markTrial } from '../../server/services/mark-trial';
@@ -185,7 +185,7 @@ function seedServices(database: Database): Services {
     },
     database,
     store: localDiskStore(storeFolder),
-    engine: runEngine,
+    ...ownThread,
     now: () => new Date(),
   };
 }

@@ -54,7 +54,7 @@ export async function addDraft(
     changedAt: work.at,
   });
   const signed = await signedSheet(work, { drawing, revision: seed }, standing);
-  seed.set(snapshotOf(workOut(work, filled, register.content, signed)));
+  seed.set(snapshotOf(await workOut(work, filled, register.content, signed)));
   const revision = await seed.save({ transaction: work.t });
   await models.revisionEditors.create(
     { shopId: work.shop.id, revisionId: revision.id, personId: work.person.id },

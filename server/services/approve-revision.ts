@@ -1,5 +1,4 @@
 import { Refusal } from '../errors';
-import { sheetPdf } from '../pdf/sheet-pdf';
 import { allow, stale } from './allow';
 import { keepBlob } from './keep-blob';
 import { keepFacts } from './keep-facts';
@@ -39,7 +38,7 @@ export async function approveRevision(
   if (snapshotOf(result).contentHash !== revision.contentHash) throw new Refusal('engine-changed');
 
   const svgHash = await keepBlob(work, Buffer.from(good.svg, 'utf8'), 'image/svg+xml');
-  const pdf = await sheetPdf([good.svg], { title: `${drawing.number} ${revision.letter} ${revision.title}`, date: work.at });
+  const pdf = await work.services.pdf([good.svg], { title: `${drawing.number} ${revision.letter} ${revision.title}`, date: work.at });
   const pdfHash = await keepBlob(work, pdf, 'application/pdf');
   await supersede(work, at);
   await keepMove(work, revision, { ...standing, sheet: good.sheet, findings: good.findings, svgHash, pdfHash });

@@ -1,7 +1,6 @@
 import { renderSvg } from '../../shared/render/svg';
 import { Refusal } from '../errors';
 import { routeCard } from '../pdf/route-card/route-card';
-import { sheetPdf } from '../pdf/sheet-pdf';
 import { printedDate } from './printed-date';
 import { readRevision } from './read-revision';
 import { recordAudit } from './record';
@@ -56,7 +55,7 @@ async function pdfOf(work: ShopWork, at: RevisionAt, card: boolean): Promise<Uin
     });
     pages.push(...cards.map(renderSvg));
   }
-  return sheetPdf(pages, { title: `${drawing.number} ${revision.letter} ${revision.title}`, date: revision.changedAt });
+  return work.services.pdf(pages, { title: `${drawing.number} ${revision.letter} ${revision.title}`, date: revision.changedAt });
 }
 
 function stateText(work: ShopWork, { revision }: RevisionAt): string {

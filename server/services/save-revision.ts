@@ -37,9 +37,10 @@ export async function saveRevision(work: ShopWork, place: RevisionPlace, request
   const register = await currentRegister(work);
   const saved = { savedBy: work.person.id, savedAt: work.at };
   const signed = await signedSheet(work, at, { ...standingOf(revision), ...saved });
+  const result = await workOut(work, filled, register.content, signed);
   revision.set({
     ...filled,
-    ...snapshotOf(workOut(work, filled, register.content, signed)),
+    ...snapshotOf(result),
     ...saved,
     registerId: register.id,
     version: revision.version + 1,

@@ -4,12 +4,15 @@ import { inSight, look } from '../database';
 import { Refusal } from '../errors';
 import type { Shop } from '../models/shop';
 import type { Asker } from '../policies/permit';
+import type { EngineBeside } from './engine-beside';
+import { engineBeside } from './engine-beside';
 import type { Services } from './services';
 
 /** One piece of work in one shop: a transaction that sees this shop alone, and who asks. */
 export interface ShopWork {
   services: Services;
   t: Transaction;
+  engine: EngineBeside;
   shop: Shop;
   person: { id: string };
   asker: Asker;
@@ -26,9 +29,20 @@ export interface ShopAsker {
 
 /**
  * Runs `work` in one transaction inside the shop of that slug. Roles are read in the same transaction, so that a role
- * taken away counts at once. @throws Refusal `not-found` when there is no such shop or the person is not in it.
+ * taken away counts at once. Work that asks the engine may be begun again (see `engineBeside`): it does nothing but
+ * through its transaction. @throws Refusal `not-found` when there is no such shop or the person is not in it.
  */
 export function workInShop<T>(services: Services, asks: ShopAsker, work: (work: ShopWork) => Promise<T>): Promise<T> {
+  const at = services.now();
+  return engineBeside(services, (engine) => inOneTransaction(services, asks, { engine, at }, work));
+}
+
+function inOneTransaction<T>(
+  services: Services,
+  asks: ShopAsker,
+  given: { engine: EngineBeside; at: Date },
+  work: (work: ShopWork) => Promise<T>,
+): Promise<T> {
   const { database } = services;
   return inSight(database, { personId: asks.personId }, async (t) => {
     const shop = await database.models.shops.findOne({ where: { slug: asks.slug }, transaction: t });
@@ -44,10 +58,10 @@ export function workInShop<T>(services: Services, asks: ShopAsker, work: (work: 
       services,
       t,
       shop,
+      ...given,
       person: { id: asks.personId },
       asker: { roles, selfRelease: shop.selfRelease },
       requestId: asks.requestId ?? null,
-      at: services.now(),
     });
   });
 }

@@ -29,7 +29,7 @@ export async function submitRevision(work: ShopWork, place: RevisionPlace, versi
     drawnAt: revision.savedAt,
   };
   const signed = await signedSheet(work, at, { ...standingOf(revision), ...standing });
-  const result = workOut(work, revision, register.content, signed);
+  const result = await workOut(work, revision, register.content, signed);
   const inTheWay = faultsOf(goodOf(result));
   if (inTheWay.length > 0) throw new Refusal('not-ready', inTheWay);
 

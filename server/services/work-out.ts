@@ -32,14 +32,14 @@ export interface Signed {
   frozenBalloons?: Readonly<Record<string, number>>;
 }
 
-/** Asks the engine. @throws Refusal at `template` when there is no such family. */
-export function workOut(work: ShopWork, filled: Filled, register: Register, signed: Signed): EngineResult {
+/** Asks the engine, outside the transaction (see `engineBeside`). @throws Refusal at `template` when there is no such family. */
+export async function workOut(work: ShopWork, filled: Filled, register: Register, signed: Signed): Promise<EngineResult> {
   const template = templateById(filled.template);
   if (!template) {
     throw new Refusal('bad-input', [{ path: 'template', message: `There is no template named "${filled.template}".` }]);
   }
   const titled = template.parameters.some((parameter) => parameter.id === 'title');
-  return work.services.engine({
+  return work.engine({
     template: filled.template,
     typed: titled ? { ...filled.typed, title: filled.title } : filled.typed,
     entryUnit: filled.entryUnit,

@@ -4,12 +4,12 @@ import type { AddressInfo } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { pino } from 'pino';
-import { runEngine } from '../../shared/engine-run';
 import { buildApp } from '../../server/app';
 import type { ServerConfig } from '../../server/config';
 import { usualRateLimits } from '../../server/config';
 import type { Database } from '../../server/database';
 import { openDatabase } from '../../server/database';
+import { ownThread } from '../../server/engine/job';
 import type { Services } from '../../server/services/services';
 import { localDiskStore } from '../../server/storage/local-disk';
 import type { TestDatabase } from './database';
@@ -38,7 +38,7 @@ export interface TestServer {
 export async function startTestServer(
   changes: Partial<Pick<ServerConfig, 'rateLimits' | 'clientFolder' | 'bcryptRounds'>> & { engine?: Services['engine'] } = {},
 ): Promise<TestServer> {
-  const { engine = runEngine, ...configured } = changes;
+  const { engine = ownThread.engine, ...configured } = changes;
   const testDatabase = await createTestDatabase();
   const folder = await mkdtemp(join(tmpdir(), 'benchleaf-store-'));
   const config: ServerConfig = {
@@ -64,7 +64,7 @@ export async function startTestServer(
   const log: string[] = [];
   let ahead = 0;
   const clock: TestClock = { now: () => new Date(Date.now() + ahead), forward: (by) => void (ahead += by) };
-  const services: Services = { config, database, store: localDiskStore(folder), engine, now: clock.now };
+  const services: Services = { config, database, store: localDiskStore(folder), ...ownThread, engine, now: clock.now };
   const logger = pino({ level: 'info' }, { write: (line: string) => void log.push(line) });
   const server = createServer(buildApp(services, logger));
   await new Promise<void>((done) => server.listen(0, '127.0.0.1', done));
