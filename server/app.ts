@@ -6,6 +6,8 @@ import { existsSync } from 'node:fs';
 import { join, resolve } from 'node:path';
 import { Refusal } from './errors';
 import { answerErrors } from './middleware/answer-errors';
+import { compressAnswers } from './middleware/compress';
+import { neverKept } from './middleware/never-kept';
 import { limitRequests } from './middleware/rate-limits';
 import { readableText } from './middleware/readable-text';
 import { requestLog } from './middleware/request-log';
@@ -29,11 +31,14 @@ export function buildApp(services: Services, logger: Logger): Express {
   const { config } = services;
   const app = express();
   app.disable('x-powered-by');
+  // Nothing under /api is kept, so there is nothing to compare with; files have marks of their own.
+  app.disable('etag');
   // A proxy on this machine (https in front, the pages under development) may say whom it asks for; nobody else may.
   app.set('trust proxy', 'loopback');
   app.use(requestLog(logger));
   app.use(securityHeaders(config.secureCookies));
-  app.use('/api', apiRoutes(services));
+  app.use(compressAnswers());
+  app.use('/api', neverKept, apiRoutes(services));
   servePages(app, resolve(config.clientFolder));
   app.use(answerErrors);
   return app;

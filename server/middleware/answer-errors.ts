@@ -7,6 +7,8 @@ export const answerErrors: ErrorRequestHandler = (error: unknown, request, respo
   if (response.headersSent) return next(error);
   const refusal = refusalOf(error);
   if (refusal.code === 'internal') request.log?.error({ err: error }, 'a request failed');
+  // What is missing now may be there at the next look.
+  response.setHeader('cache-control', 'no-store');
   response.status(refusal.status).json(refusal.answer());
 };
 

@@ -12,7 +12,6 @@ export function requireSignedIn(services: Services): RequestHandler {
     if (!who) throw new Refusal('unsigned');
     const locals: { signedIn?: SignedIn } = response.locals;
     locals.signedIn = who;
-    response.setHeader('cache-control', 'no-store');
     next();
   };
 }

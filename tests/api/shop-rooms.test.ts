@@ -26,7 +26,7 @@ beforeAll(async () => {
   folder = await mkdtemp(join(tmpdir(), 'benchleaf-client-'));
   await mkdir(join(folder, 'assets'));
   await writeFile(join(folder, 'index.html'), '<!doctype html><div id="root"></div>');
-  await writeFile(join(folder, 'assets', 'main-abc.js'), 'export {};');
+  await writeFile(join(folder, 'assets', 'main-abc.js'), `export const words = '${'swarf '.repeat(1000)}';`);
   server = await startTestServer({ engine: rememberingEngine(), clientFolder: folder });
   shop = await makeShop(server);
   const enter = async (role: 'designer' | 'checker' | 'reader' | 'lead') => signedIn(server, await makePerson(server, shop, [role]));
@@ -121,9 +121,43 @@ describe('the pages', () => {
   it('keep their files for good by name, and answer for a missing one in the one error shape', async () => {
     const file = await anybody().get('/assets/main-abc.js');
     expect(file.headers.get('cache-control')).toContain('immutable');
+    expect(file.headers.get('cache-control')).toContain('max-age=31536000');
+    expect((await anybody().get('/')).headers.get('cache-control')).toBe('no-cache');
     expectRefusal(await anybody().get('/assets/main-old.js'), 404, 'not-found');
     for (const path of ['/assets/..%2f..%2f..%2fetc%2fpasswd', '/assets/%00', '/assets/%ff']) {
       expectRefusal(await anybody().get(path), 404, 'not-found');
+    }
+  });
+});
+
+describe('what is sent', () => {
+  const packed = (browser: BrowserLike, path: string, encoding: string) => browser.send('GET', path, undefined, { 'accept-encoding': encoding });
+
+  it('is packed where it is text and the asker can unpack it, and the same once unpacked', async () => {
+    const path = revisionPath(shop, await startDrawing(designer, shop));
+    for (const text of [path, `${path}/sheet.svg`, '/assets/main-abc.js']) {
+      const plain = await packed(designer, text, 'identity');
+      expect(plain.headers.get('content-encoding')).toBeNull();
+      for (const encoding of ['gzip', 'br']) {
+        const answer = await packed(designer, text, encoding);
+        expect(answer.headers.get('content-encoding')).toBe(encoding);
+        expect(answer.headers.get('vary')?.toLowerCase()).toContain('accept-encoding');
+        expect(answer.bytes.equals(plain.bytes)).toBe(true);
+      }
+    }
+    for (const whole of [`${path}/sheet.pdf`, '/api/session']) {
+      expect((await packed(designer, whole, 'gzip')).headers.get('content-encoding')).toBeNull();
+    }
+  });
+
+  it('under /api is kept by no cache, whatever the answer', async () => {
+    const drawing = await startDrawing(designer, shop);
+    const paths = ['/api/health', '/api/session', '/api/nothing', `/api/shops/${shop.slug}/drawings`, revisionPath(shop, drawing), revisionPath(shop, drawing, 'sheet.pdf'), '/api/shops/nowhere/drawings'];
+    for (const browser of [designer, new BrowserLike(server)]) {
+      for (const path of paths) {
+        const { headers } = await browser.get(path);
+        expect({ path, kept: headers.get('cache-control'), etag: headers.get('etag') }).toEqual({ path, kept: 'no-store', etag: null });
+      }
     }
   });
 });

@@ -21,13 +21,11 @@ export function sessionRoutes(services: Services): Router {
     const { mail, password } = readBody(request, signInRequest);
     const { issued } = await signIn(services, mail, password);
     setSessionCookies(response, config, issued);
-    response.setHeader('cache-control', 'no-store');
     response.status(201).json(await presentSession(services, issued));
   });
 
   router.post('/refresh', async (request, response) => {
     const token = cookieOf(request, REFRESH_COOKIE);
-    response.setHeader('cache-control', 'no-store');
     const issued = await refreshSession(services, token).catch((error: unknown) => {
       if (error instanceof Refusal) clearSessionCookies(response, config);
       throw error;
