@@ -7,7 +7,7 @@ export const STANDING_CAUTIONS: readonly string[] = [
 ];
 
 /** The usual cautions of an operation (common practice), the weightiest first; a first setting says the shop’s own. */
-export function cautionsFor(operation: DraftOperation, first: boolean, overhang: number, spindleEnd: number): string[] {
+export function cautionsFor(operation: DraftOperation, first: boolean, spindleEnd: number): string[] {
   const cautions: string[] = [];
   switch (operation.method) {
     case 'saw':
@@ -16,10 +16,14 @@ export function cautionsFor(operation: DraftOperation, first: boolean, overhang:
     case 'grip':
     case 'turn-round':
       cautions.push('Chuck key out before the switch. No sleeves, no gloves, eyes covered.');
-      if (spindleEnd > 150) cautions.push('Bar stands out behind the spindle: support it, and keep the speed down until it runs quietly.');
+      if (spindleEnd > 150)
+        cautions.push(
+          'Bar stands out behind the spindle: support it, and keep the speed down until it runs quietly.',
+        );
       break;
     case 'face':
-      if (overhang > 3) cautions.push('The end stands out: light cuts, no parting tool here.');
+      if (operation.key.endsWith('.trim'))
+        cautions.push('The end stands free once the centre is drawn back: light cuts, no parting tool here.');
       break;
     case 'taper-turn':
       cautions.push('Lock the carriage. The tail must clear the tool at the small end.');
@@ -48,7 +52,8 @@ export function cautionsFor(operation: DraftOperation, first: boolean, overhang:
     default:
       break;
   }
-  if (operation.tool.includes('ground here')) cautions.push('Ground here: look at its edge, and try it on scrap.');
+  if (operation.tool.includes('ground here'))
+    cautions.push('Ground here: look at its edge, and try it on scrap.');
   if (first) cautions.push(...STANDING_CAUTIONS);
   return cautions;
 }

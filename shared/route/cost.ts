@@ -18,9 +18,11 @@ export function costOf(asked: CostAsked): NonNullable<Route['cost']> {
   const { register, operations, quantity } = asked;
   const { labourPerHour, currency } = register.settings;
   const rates = new Map<string, number>();
-  for (const machine of [...register.lathes, ...register.mills, ...register.saws]) rates.set(machine.id, machine.ratePerHour);
+  for (const machine of [...register.lathes, ...register.mills, ...register.saws])
+    rates.set(machine.id, machine.ratePerHour);
   const machineRun = operations.reduce((sum, o) => sum + (o.minutes * (rates.get(o.machine) ?? 0)) / 60, 0);
-  const rate = rates.get(operations.find((o) => rates.has(o.machine) && o.method !== 'saw')?.machine ?? '') ?? 0;
+  const rate =
+    rates.get(operations.find((o) => rates.has(o.machine) && o.method !== 'saw')?.machine ?? '') ?? 0;
   const setup = (asked.setupMinutes * (labourPerHour + rate)) / 60;
   const run = (asked.runMinutes * labourPerHour) / 60 + machineRun;
   const perMetre = asked.bar?.costPerMetre ?? 0;
@@ -33,7 +35,11 @@ export function costOf(asked: CostAsked): NonNullable<Route['cost']> {
     total: cents(setup + each * quantity),
     currency,
     sums: [
-      { label: 'Setting up, once', amount: cents(setup), how: `${tenths(asked.setupMinutes)} min at ${labourPerHour} + ${rate} an hour` },
+      {
+        label: 'Setting up, once',
+        amount: cents(setup),
+        how: `${tenths(asked.setupMinutes)} min at ${labourPerHour} + ${rate} an hour`,
+      },
       {
         label: 'Running, each',
         amount: cents(run),

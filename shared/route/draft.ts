@@ -95,13 +95,25 @@ export interface Build {
 /** The stage with the free end of the view to the right. */
 export function stageIn(build: Build, view: View): Body {
   if (!view.flipped) return build.stage;
-  if (build.turned?.of !== build.stage) build.turned = { of: build.stage, body: mirrorBody(build.stage, view.length) };
+  if (build.turned?.of !== build.stage)
+    build.turned = { of: build.stage, body: mirrorBody(build.stage, view.length) };
   return build.turned.body;
 }
 
 export type OperationWish = Omit<
   DraftOperation,
-  'setup' | 'end' | 'cut' | 'after' | 'stops' | 'reasons' | 'notes' | 'needs' | 'handling' | 'machine' | 'toolMaterial' | 'toolFigures'
+  | 'setup'
+  | 'end'
+  | 'cut'
+  | 'after'
+  | 'stops'
+  | 'reasons'
+  | 'notes'
+  | 'needs'
+  | 'handling'
+  | 'machine'
+  | 'toolMaterial'
+  | 'toolFigures'
 > & {
   /** In the view's x. */
   cut?: Removal;

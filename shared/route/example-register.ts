@@ -1,5 +1,13 @@
 import type { Register } from './register';
-import { CHUCKS, COLLET_BLOCKS, COLLET_SETS, DIVIDING_HEADS, LATHES, MILLS, SAWS } from './example-shop/machines';
+import {
+  CHUCKS,
+  COLLET_BLOCKS,
+  COLLET_SETS,
+  DIVIDING_HEADS,
+  LATHES,
+  MILLS,
+  SAWS,
+} from './example-shop/machines';
 import { INSTRUMENTS } from './example-shop/instruments';
 import { BARS } from './example-shop/rack';
 import { TOOLS } from './example-shop/tools';

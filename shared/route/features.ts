@@ -51,7 +51,13 @@ const PLANNED: ReadonlySet<Feature['kind']> = new Set([
 
 /** Kinds of feature that no method here cuts yet, each once. */
 export function unplannedKinds(part: Part): string[] {
-  return [...new Set(part.features.filter((f) => !PLANNED.has(f.kind) || (f.kind === 'thread' && f.internal)).map((f) => f.kind))];
+  return [
+    ...new Set(
+      part.features
+        .filter((f) => !PLANNED.has(f.kind) || (f.kind === 'thread' && f.internal))
+        .map((f) => f.kind),
+    ),
+  ];
 }
 
 export interface Views {
@@ -70,7 +76,8 @@ function viewOf(part: Part, flipped: boolean): View {
     .filter((f) => f.kind === 'cylinder' || f.kind === 'cone')
     .map((f): Row => {
       const onIt = features.filter((g) => 'on' in g && g.on === f.id);
-      const chamfer = (end: 'left' | 'right') => onIt.find((g): g is ChamferFeature => g.kind === 'chamfer' && g.end === end);
+      const chamfer = (end: 'left' | 'right') =>
+        onIt.find((g): g is ChamferFeature => g.kind === 'chamfer' && g.end === end);
       const base =
         f.kind === 'cylinder'
           ? { startR: f.diameter / 2, endR: f.diameter / 2, asDrawn: f.asDrawn ?? false }
@@ -87,7 +94,8 @@ function viewOf(part: Part, flipped: boolean): View {
       };
     })
     .sort((a, b) => a.from - b.from);
-  const crown = (end: 'left' | 'right') => features.find((f): f is CrownFeature => f.kind === 'crown' && f.end === end);
+  const crown = (end: 'left' | 'right') =>
+    features.find((f): f is CrownFeature => f.kind === 'crown' && f.end === end);
   const centre = (end: 'left' | 'right') =>
     features.find((f): f is CentreHoleFeature => f.kind === 'centre-hole' && f.end === end);
   return {

@@ -45,20 +45,33 @@ export function ratesFor(build: Build, operation: DraftOperation, maximumSpeed: 
   const { figures, method } = operation;
   const kind = CUTTING[method];
   if (!figures || !kind)
-    return { speed: 0, surfaceSpeed: 0, feed: 0, feedPer: 'rev', minutes: operation.handling, how: `${operation.handling} min by hand.` };
+    return {
+      speed: 0,
+      surfaceSpeed: 0,
+      feed: 0,
+      feedPer: 'rev',
+      minutes: operation.handling,
+      how: `${operation.handling} min by hand.`,
+    };
   const material = materialOf(build.stock.material);
   const plunges = operation.toolFigures['reach'] !== undefined && method !== 'part-off';
   const wantedSpeed = cuttingSpeed(material, operation.toolMaterial, plunges ? 'grooving' : kind);
   const wanted = spindleSpeed(wantedSpeed, Math.max(figures.diameter, 1));
   const milling = method === 'mill-flat';
   const speeds = milling ? (build.mill?.speeds ?? []) : build.lathe.speeds;
-  const strong = milling ? Infinity : spindleSpeed(speedForPower(build, material, figures, method), Math.max(figures.diameter, 1));
-  const speed = nearestSpeed(speeds.length > 0 ? speeds : [Math.floor(wanted)], Math.min(wanted, maximumSpeed, strong));
+  const strong = milling
+    ? Infinity
+    : spindleSpeed(speedForPower(build, material, figures, method), Math.max(figures.diameter, 1));
+  const speed = nearestSpeed(
+    speeds.length > 0 ? speeds : [Math.floor(wanted)],
+    Math.min(wanted, maximumSpeed, strong),
+  );
   const { feed, feedPer } = feedFor(build, operation, material, speed, milling);
   const perMinute = feedPer === 'min' ? feed : feed * Math.max(speed, 1);
   const sides = milling ? (operation.faces ?? 1) : 1;
   // Every pass travels back as well, at the hand's or the machine's quick pace.
-  const coarse = method === 'taper-turn' ? Math.max(1, turningFeed('roughing', material.group) / Math.max(feed, 0.01)) : 1;
+  const coarse =
+    method === 'taper-turn' ? Math.max(1, turningFeed('roughing', material.group) / Math.max(feed, 0.01)) : 1;
   // On a taper all passes but the last are roughing.
   const cutting = (figures.travel / Math.max(perMinute, 1)) * ((figures.passes - 1) / coarse + 1) * sides;
   const back = 0.1 * figures.passes * sides;
@@ -92,13 +105,17 @@ function feedFor(
 ): { feed: number; feedPer: 'rev' | 'min' } {
   const { method } = operation;
   // A blade goes straight in, whatever it is called: it takes a blade's feed.
-  if (operation.toolFigures['reach'] !== undefined) return { feed: partingFeed(material.group), feedPer: 'rev' };
+  if (operation.toolFigures['reach'] !== undefined)
+    return { feed: partingFeed(material.group), feedPer: 'rev' };
   if (milling) {
     const perTooth = feedPerTooth(operation.figures?.diameter ?? 10, material.group, operation.toolMaterial);
     const wanted = tableFeed(speed, operation.toolFigures['teeth'] ?? 4, perTooth);
     return { feed: nearestFeed(build.mill?.feedsPerMin ?? [wanted], wanted), feedPer: 'min' };
   }
-  const lathe = (wanted: number) => ({ feed: nearestFeed(build.lathe.feeds, wanted), feedPer: 'rev' as const });
+  const lathe = (wanted: number) => ({
+    feed: nearestFeed(build.lathe.feeds, wanted),
+    feedPer: 'rev' as const,
+  });
   switch (method) {
     case 'rough-turn':
       return lathe(turningFeed('roughing', material.group));

@@ -12,7 +12,7 @@ import { instrumentFor, sizesOf } from './inspection';
 import { inOrder } from './order';
 import type { Bar } from './register';
 import type { Need, Operation, Route, Stage, Target, Volumes } from './route';
-import { held, mm } from './shop';
+import { mm } from './shop';
 import type { DraftNeed } from './draft';
 
 /** A plan put in order, with its figures and needs, but its metal not yet measured: what plans are compared by. */
@@ -35,7 +35,9 @@ export function weigh(build: Build, scheme: Scheme, whole: readonly DraftNeed[])
     rates.set(operation.key, ratesFor(build, operation, hold ? (maximum.get(hold) ?? Infinity) : Infinity));
   }
   const targets = sizesOf(ordered, scheme, build.views.right.length);
-  for (const operation of ordered) if (operation.method === 'inspect') targets.set(operation.key, sizesToInspect(ordered, operation, targets, scheme));
+  for (const operation of ordered)
+    if (operation.method === 'inspect')
+      targets.set(operation.key, sizesToInspect(ordered, operation, targets, scheme));
   const needs = [
     ...[...whole, ...build.planNeeds].map((need) => ({ key: '', need })),
     ...ordered.flatMap((o) => o.needs.map((need) => ({ key: o.key, need }))),
@@ -60,7 +62,9 @@ function sizesToInspect(
   scheme: Scheme,
 ): Size[] {
   if (operation.key === 'final') return scheme.sizes.filter((s) => !s.reference);
-  return ordered.filter((o) => o.setup === operation.setup && o.method !== 'inspect').flatMap((o) => targets.get(o.key) ?? []);
+  return ordered
+    .filter((o) => o.setup === operation.setup && o.method !== 'inspect')
+    .flatMap((o) => targets.get(o.key) ?? []);
 }
 
 /** Needs that say the same thing are one, at the first operation that has it; shorts and makeshifts are never dropped. */
@@ -102,7 +106,8 @@ export function finishRoute(plan: WeighedPlan, extras: RouteExtras): Route {
       const { kerfFrom, kerfTo, from, to } = draft.cut;
       volumes.kerf += volumeBetween(stage, kerfFrom, kerfTo);
       volumes.remnant +=
-        volumeBetween(stage, stage.x0, Math.min(kerfFrom, from)) + volumeBetween(stage, Math.max(kerfTo, to), stage.x1);
+        volumeBetween(stage, stage.x0, Math.min(kerfFrom, from)) +
+        volumeBetween(stage, Math.max(kerfTo, to), stage.x1);
     }
     if (draft.cut) stage = applyRemoval(stage, draft.cut);
     stages.push({ after: number, body: stage });
@@ -111,7 +116,7 @@ export function finishRoute(plan: WeighedPlan, extras: RouteExtras): Route {
   volumes.part = volume(stage);
   const kerf = build.saw?.kerf ?? 2;
   const blankLength = build.blank.x1 - build.blank.x0;
-  const stub = ordered.some((o) => o.cut?.kind === 'sever') ? stubLength(ordered) : 0;
+  const stub = stubLength(build, ordered);
   return {
     stock: build.stock,
     blankLength,
@@ -137,8 +142,12 @@ export function finishRoute(plan: WeighedPlan, extras: RouteExtras): Route {
   };
 }
 
-function stubLength(ordered: readonly DraftOperation[]): number {
-  for (const o of ordered) if (o.cut?.kind === 'sever') return Math.max(0, o.cut.kerfFrom - 0);
+/** Length of bar that is left in the jaws after parting; 0 where nothing is parted. */
+function stubLength(build: Build, ordered: readonly DraftOperation[]): number {
+  for (const { cut } of ordered) {
+    if (cut?.kind !== 'sever') continue;
+    return cut.kerfTo <= cut.from + 1e-9 ? cut.kerfFrom - build.blank.x0 : build.blank.x1 - cut.kerfTo;
+  }
   return 0;
 }
 
@@ -154,7 +163,9 @@ function operationOf(
   if (!rates) throw new Error(`operation ${draft.key} was not weighed`);
   const setup = plan.build.setups.find((s) => s.id === draft.setup);
   const sizes = plan.targets.get(draft.key) ?? [];
-  const measuring = sizes.map((size) => instrumentFor(plan.build.register, size)?.text).filter((t) => t !== undefined);
+  const measuring = sizes
+    .map((size) => instrumentFor(plan.build.register, size)?.text)
+    .filter((t) => t !== undefined);
   const checks = measuring.length > 0 ? [...new Set(measuring)] : draft.check ? [draft.check] : [];
   const behind = setup ? behindSpindle(plan.build, setup.gripFrom, setup.gripTo, setup.freeEnd) : 0;
   return {
@@ -190,7 +201,7 @@ function operationOf(
     ...(draft.runOut !== undefined ? { runOut: draft.runOut } : {}),
     ...(draft.blank !== undefined ? { blankDiameter: draft.blank.diameter } : {}),
     reasons: draft.reasons,
-    cautions: [...new Set([...draft.notes, ...cautionsFor(draft, first, 0, behind)])],
+    cautions: [...new Set([...draft.notes, ...cautionsFor(draft, first, behind)])],
     check: checks.join('; '),
   };
 }
@@ -201,15 +212,29 @@ function behindSpindle(build: Build, gripFrom: number, gripTo: number, freeEnd: 
 }
 
 function targetsOf(draft: DraftOperation, sizes: readonly Size[], plan: WeighedPlan): Target[] {
-  const targets = sizes.map((s) => ({ size: s.id, nominal: s.nominal, upperLimit: s.upperLimit, lowerLimit: s.lowerLimit }));
+  const targets = sizes.map((s) => ({
+    size: s.id,
+    nominal: s.nominal,
+    upperLimit: s.upperLimit,
+    lowerLimit: s.lowerLimit,
+  }));
   if (!draft.blank) return targets;
   const { diameter, upper, lower } = draft.blank;
   // The blank's own target carries the thread's size: the thread itself is the die's.
-  const thread = [...plan.targets.values()].flat().find((s) => s.kind === 'thread' && s.features.some((id) => draft.features.includes(id)));
-  return [{ size: thread?.id ?? draft.features[0] ?? '', nominal: diameter, upperLimit: upper, lowerLimit: lower }, ...targets];
+  const thread = [...plan.targets.values()]
+    .flat()
+    .find((s) => s.kind === 'thread' && s.features.some((id) => draft.features.includes(id)));
+  return [
+    { size: thread?.id ?? draft.features[0] ?? '', nominal: diameter, upperLimit: upper, lowerLimit: lower },
+    ...targets,
+  ];
 }
 
-function kittingOf(plan: WeighedPlan, operations: readonly Operation[], extras: RouteExtras): Route['kitting'] {
+function kittingOf(
+  plan: WeighedPlan,
+  operations: readonly Operation[],
+  extras: RouteExtras,
+): Route['kitting'] {
   const { build } = plan;
   const { register } = build;
   const list: { item: string; text: string; place: string }[] = [];
@@ -238,11 +263,7 @@ function kittingOf(plan: WeighedPlan, operations: readonly Operation[], extras: 
   };
   for (const setup of build.setups) pull(setup.holdingItem);
   for (const operation of operations) pull(operation.toolItem);
-  for (const { need } of plan.needs) if (need.kind === 'tool' || need.kind === 'instrument' || need.kind === 'holder') pull(need.by);
+  for (const { need } of plan.needs)
+    if (need.kind === 'tool' || need.kind === 'instrument' || need.kind === 'holder') pull(need.by);
   return list;
-}
-
-/** Needs of a plan that nothing could be made of: the reasons, in words. */
-export function reasonNeed(why: string): DraftNeed {
-  return { ...held('geometry', 'a way to make the part', undefined, why), state: 'short' };
 }

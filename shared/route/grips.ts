@@ -24,11 +24,18 @@ export function gripsOf(stage: Body, before: number, reach: number, spindleBore:
       const to = Math.min(span.to, before);
       const from = Math.max(span.from, to - reach);
       const grip = { from, to, diameter: 2 * piece.start };
-      if (longEnough(grip) && nothingLargerBehind(stage, grip) && passesSpindle(stage, grip, spindleBore, reach)) grips.push(grip);
+      if (
+        longEnough(grip) &&
+        nothingLargerBehind(stage, grip) &&
+        passesSpindle(stage, grip, spindleBore, reach)
+      )
+        grips.push(grip);
     }
   }
   // A round is held before flats are.
-  return grips.length > 0 ? grips.sort((a, b) => b.to - a.to) : polygonGrips(stage, before, reach, spindleBore);
+  return grips.length > 0
+    ? grips.sort((a, b) => b.to - a.to)
+    : polygonGrips(stage, before, reach, spindleBore);
 }
 
 /** Lengths on which a polygon of three, six, nine … faces runs whole, for padded jaws when no round is left. */
@@ -44,7 +51,13 @@ function polygonGrips(stage: Body, before: number, reach: number, spindleBore: n
       const from = Math.max(piece.from, span.from, to - reach);
       const marked = stage.treatments.some((t) => t.from < to && t.to > from);
       const grip: Grip = { from, to, diameter: 2 * piece.start, onFlats: true };
-      if (!marked && longEnough(grip) && nothingLargerBehind(stage, grip) && passesSpindle(stage, grip, spindleBore, reach)) grips.push(grip);
+      if (
+        !marked &&
+        longEnough(grip) &&
+        nothingLargerBehind(stage, grip) &&
+        passesSpindle(stage, grip, spindleBore, reach)
+      )
+        grips.push(grip);
     }
   }
   return grips.sort((a, b) => b.to - a.to);
@@ -64,7 +77,10 @@ function nothingLargerBehind(stage: Body, grip: Grip): boolean {
 function passesSpindle(stage: Body, grip: Grip, spindleBore: number, reach: number): boolean {
   const behind = grip.from - stage.x0;
   if (behind <= 1e-9) return true;
-  return 2 * largestRadius(stage.outer, stage.x0, grip.from) <= spindleBore || behind + (grip.to - grip.from) <= reach;
+  return (
+    2 * largestRadius(stage.outer, stage.x0, grip.from) <= spindleBore ||
+    behind + (grip.to - grip.from) <= reach
+  );
 }
 
 /** [from, to] less the spans of threads, knurls and flats that really leave a face. */

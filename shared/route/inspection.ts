@@ -22,11 +22,16 @@ const BROUGHT: Partial<Record<Method, readonly Size['kind'][]>> = {
 /**
  * Sizes by the operation that brings each to its figure; reference sizes and what the bar already is belong to none.
  */
-export function sizesOf(operations: readonly DraftOperation[], scheme: Scheme, length: number): Map<string, Size[]> {
+export function sizesOf(
+  operations: readonly DraftOperation[],
+  scheme: Scheme,
+  length: number,
+): Map<string, Size[]> {
   const found = new Map<string, Size[]>();
   for (const size of scheme.sizes) {
     if (size.reference) continue;
-    const maker = size.kind === 'length' ? lengthMaker(operations, size, length) : figureMaker(operations, size);
+    const maker =
+      size.kind === 'length' ? lengthMaker(operations, size, length) : figureMaker(operations, size);
     if (!maker) continue;
     found.set(maker.key, [...(found.get(maker.key) ?? []), size]);
   }
@@ -45,13 +50,19 @@ function figureMaker(operations: readonly DraftOperation[], size: Size): DraftOp
 }
 
 /** A length is brought about by the last cut at one of its shoulders; only where both are ends of the part by a facing. */
-function lengthMaker(operations: readonly DraftOperation[], size: Size, length: number): DraftOperation | undefined {
+function lengthMaker(
+  operations: readonly DraftOperation[],
+  size: Size,
+  length: number,
+): DraftOperation | undefined {
   if (size.anchor.kind !== 'span') return undefined;
   const stations = [size.anchor.from, size.anchor.to];
   const shoulders = stations.filter((x) => x > 1e-6 && x < length - 1e-6);
   const wanted = shoulders.length > 0 ? shoulders : stations;
   const makers = operations.filter(
-    (o) => BROUGHT[o.method]?.includes('length') && edgesOf(o).some((e) => wanted.some((x) => Math.abs(e - x) < 0.005)),
+    (o) =>
+      BROUGHT[o.method]?.includes('length') &&
+      edgesOf(o).some((e) => wanted.some((x) => Math.abs(e - x) < 0.005)),
   );
   return makers[makers.length - 1];
 }
@@ -99,21 +110,42 @@ export function instrumentFor(register: Register, size: Size): Measuring | null 
   if (size.kind === 'thread') return threadGauge(register, size, spec);
   const width = size.upperLimit - size.lowerLimit;
   const reach = register.instruments.filter(
-    (i) => kinds.includes(i.kind) && (i.kind === 'protractor' || (i.minimum <= size.nominal + 1e-9 && size.nominal <= i.maximum + 1e-9)),
+    (i) =>
+      kinds.includes(i.kind) &&
+      (i.kind === 'protractor' || (i.minimum <= size.nominal + 1e-9 && size.nominal <= i.maximum + 1e-9)),
   );
   if (size.kind === 'radius' || size.kind === 'angle' || size.kind === 'taper' || size.kind === 'chamfer') {
     const first = reach[0];
-    return first ? { text: first.name.toLowerCase(), need: held('instrument', spec, first.id, `${first.name}, ${first.place}.`) } : missing(spec, width);
+    return first
+      ? {
+          text: first.name.toLowerCase(),
+          need: held('instrument', spec, first.id, `${first.name}, ${first.place}.`),
+        }
+      : missing(spec, width);
   }
   const coarse = [...reach].sort((a, b) => b.permissibleError - a.permissibleError);
   const tenth = coarse.find((i) => i.permissibleError <= width / 10 + 1e-12);
-  if (tenth) return { text: tenth.name.toLowerCase(), need: held('instrument', spec, tenth.id, `${tenth.name}: ${mm(tenth.permissibleError)} is a tenth of ${mm(width)} or less.`) };
+  if (tenth)
+    return {
+      text: tenth.name.toLowerCase(),
+      need: held(
+        'instrument',
+        spec,
+        tenth.id,
+        `${tenth.name}: ${mm(tenth.permissibleError)} is a tenth of ${mm(width)} or less.`,
+      ),
+    };
   const ratio = Math.max(0.1, register.settings.instrumentRatio);
   const allowed = coarse.find((i) => i.permissibleError <= width * ratio + 1e-12);
   if (allowed)
     return {
       text: `${allowed.name.toLowerCase()}, twice`,
-      need: held('instrument', spec, allowed.id, `${allowed.name}: ${mm(allowed.permissibleError)} is more than a tenth of ${mm(width)} but within ${mm(ratio)} of it, which the shop allows; measure twice.`),
+      need: held(
+        'instrument',
+        spec,
+        allowed.id,
+        `${allowed.name}: ${mm(allowed.permissibleError)} is more than a tenth of ${mm(width)} but within ${mm(ratio)} of it, which the shop allows; measure twice.`,
+      ),
     };
   return missing(spec, width);
 }
@@ -121,22 +153,45 @@ export function instrumentFor(register: Register, size: Size): Measuring | null 
 function missing(spec: string, width: number): Measuring {
   return {
     text: 'no instrument fine enough',
-    need: short('instrument', spec, `Nothing in the register reads it to a tenth of ${mm(width)}, nor to the shop’s own share.`, [
-      'borrow or buy a finer instrument',
-      'gauge it against a master piece',
-    ]),
+    need: short(
+      'instrument',
+      spec,
+      `Nothing in the register reads it to a tenth of ${mm(width)}, nor to the shop’s own share.`,
+      ['borrow or buy a finer instrument', 'gauge it against a master piece'],
+    ),
   };
 }
 
 function threadGauge(register: Register, size: Size, spec: string): Measuring {
   const name = (size.designation ?? '').replace(/-\d*[a-zA-Z0-9]+$/, '');
-  const gauge = register.instruments.find((i) => i.kind === 'ring-gauge' && i.designation !== undefined && name.startsWith(i.designation) && (name.length === i.designation.length || !/[x0-9.]/i.test(name.charAt(i.designation.length))));
-  if (gauge) return { text: gauge.name.toLowerCase(), need: held('instrument', spec, gauge.id, `${gauge.name}, ${gauge.place}.`) };
+  const gauge = register.instruments.find(
+    (i) =>
+      i.kind === 'ring-gauge' &&
+      i.designation !== undefined &&
+      name.startsWith(i.designation) &&
+      (name.length === i.designation.length || !/[x0-9.]/i.test(name.charAt(i.designation.length))),
+  );
+  if (gauge)
+    return {
+      text: gauge.name.toLowerCase(),
+      need: held('instrument', spec, gauge.id, `${gauge.name}, ${gauge.place}.`),
+    };
   const wires = register.instruments.find((i) => i.kind === 'thread-wires');
   if (wires)
-    return { text: `${wires.name.toLowerCase()}, or the mate`, need: held('instrument', spec, wires.id, `No ring gauge for it: over ${wires.name.toLowerCase()} with a micrometer, and in the mate.`) };
+    return {
+      text: `${wires.name.toLowerCase()}, or the mate`,
+      need: held(
+        'instrument',
+        spec,
+        wires.id,
+        `No ring gauge for it: over ${wires.name.toLowerCase()} with a micrometer, and in the mate.`,
+      ),
+    };
   return {
     text: 'the mate',
-    need: alternative('instrument', spec, undefined, 'No ring gauge and no wires: it is tried in the mate.', ['try it in the mate', 'buy a ring gauge']),
+    need: alternative('instrument', spec, undefined, 'No ring gauge and no wires: it is tried in the mate.', [
+      'try it in the mate',
+      'buy a ring gauge',
+    ]),
   };
 }

@@ -6,7 +6,12 @@ import type { StockAnswer } from './stock';
 import { held, mm, short } from './shop';
 
 /** What the plan as a whole asks: bar, swing, bed. */
-export function planNeeds(build: Build, stock: StockAnswer, bar: Bar | undefined, quantity: number): DraftNeed[] {
+export function planNeeds(
+  build: Build,
+  stock: StockAnswer,
+  bar: Bar | undefined,
+  quantity: number,
+): DraftNeed[] {
   const needs: DraftNeed[] = [];
   const diameter = 2 * build.stockRadius;
   const length = build.blank.x1 - build.blank.x0;
@@ -14,25 +19,61 @@ export function planNeeds(build: Build, stock: StockAnswer, bar: Bar | undefined
   if (stock.short) needs.push(short('bar', stock.short.need, stock.short.why, stock.short.alternatives));
   else if (bar) {
     const spec = `${quantity} × ${mm(Math.round(length * 10) / 10)} of ${bar.name}, ${bar.material}`;
-    const same = build.register.bars.filter((b) => b.material === bar.material && b.shape === bar.shape && Math.abs(b.size - bar.size) < 1e-6 && b.quantity > 0);
+    const same = build.register.bars.filter(
+      (b) =>
+        b.material === bar.material &&
+        b.shape === bar.shape &&
+        Math.abs(b.size - bar.size) < 1e-6 &&
+        b.quantity > 0,
+    );
     const list = cutList(same, length, build.saw?.kerf ?? 2, quantity);
     needs.push(
       list.short === 0
-        ? held('bar', spec, bar.id, `${list.bars.length} bar${list.bars.length === 1 ? '' : 's'} from ${bar.place}, ${mm(Math.round(list.bars.at(-1)?.left ?? 0))} left of the last; ${bar.certified ? `certified, ${bar.certificate ?? 'certificate held'}` : 'material believed, no certificate'}.`)
-        : short('bar', spec, `The rack gives ${list.pieces} of ${quantity}; the longest bar is ${mm(Math.max(0, ...same.map((b) => b.length)))}.`, ['buy another bar', `make ${list.pieces} now`]),
+        ? held(
+            'bar',
+            spec,
+            bar.id,
+            `${list.bars.length} bar${list.bars.length === 1 ? '' : 's'} from ${bar.place}, ${mm(Math.round(list.bars.at(-1)?.left ?? 0))} left of the last; ${bar.certified ? `certified, ${bar.certificate ?? 'certificate held'}` : 'material believed, no certificate'}.`,
+          )
+        : short(
+            'bar',
+            spec,
+            `The rack gives ${list.pieces} of ${quantity}; the longest bar is ${mm(Math.max(0, ...same.map((b) => b.length)))}.`,
+            ['buy another bar', `make ${list.pieces} now`],
+          ),
     );
   }
   const between = length;
   needs.push(
     diameter <= lathe.swingOverSlide
-      ? held('machine', `swing Ø${mm(diameter)} over the slide`, lathe.id, `${lathe.name} swings ${mm(lathe.swingOverSlide)}.`)
-      : short('machine', `swing Ø${mm(diameter)} over the slide`, `${lathe.name} swings ${mm(lathe.swingOverSlide)}.`, ['another shop, with a larger lathe']),
+      ? held(
+          'machine',
+          `swing Ø${mm(diameter)} over the slide`,
+          lathe.id,
+          `${lathe.name} swings ${mm(lathe.swingOverSlide)}.`,
+        )
+      : short(
+          'machine',
+          `swing Ø${mm(diameter)} over the slide`,
+          `${lathe.name} swings ${mm(lathe.swingOverSlide)}.`,
+          ['another shop, with a larger lathe'],
+        ),
   );
   if (build.setups.some((s) => s.support === 'centre')) {
     needs.push(
       between <= lathe.betweenCentres
-        ? held('machine', `${mm(Math.ceil(between))} between chuck and centre`, lathe.id, `${lathe.name} takes ${mm(lathe.betweenCentres)} between centres.`)
-        : short('machine', `${mm(Math.ceil(between))} between chuck and centre`, `${lathe.name} takes ${mm(lathe.betweenCentres)}.`, ['another shop, with a longer bed']),
+        ? held(
+            'machine',
+            `${mm(Math.ceil(between))} between chuck and centre`,
+            lathe.id,
+            `${lathe.name} takes ${mm(lathe.betweenCentres)} between centres.`,
+          )
+        : short(
+            'machine',
+            `${mm(Math.ceil(between))} between chuck and centre`,
+            `${lathe.name} takes ${mm(lathe.betweenCentres)}.`,
+            ['another shop, with a longer bed'],
+          ),
     );
     const centre = build.register.tools.find((t) => t.kind === 'tail-centre');
     needs.push(

@@ -16,7 +16,10 @@ export function inOrder(operations: readonly DraftOperation[]): DraftOperation[]
     const next = waiting[index];
     if (!next) {
       const stuck = waiting[0];
-      throw new RuledOut(stuck?.after[0]?.rule ?? 'set-up-whole', 'The reasons for the order go round in a ring.');
+      throw new RuledOut(
+        stuck?.after[0]?.rule ?? 'set-up-whole',
+        'The reasons for the order go round in a ring.',
+      );
     }
     waiting.splice(index, 1);
     placed.add(next.key);

@@ -16,7 +16,6 @@ import type { Outline, Score } from './score';
 import { buildCandidate, candidateText } from './setups/candidate';
 import type { Candidate } from './setups/candidate';
 import { shutOut } from './setups/open-to';
-import { mm } from './shop';
 import { stockFor } from './stock';
 import type { StockAnswer, StockOption } from './stock';
 import { verdictOf } from './verdict';
@@ -58,7 +57,16 @@ export function planRoute(part: Part, scheme: Scheme, register: Register, asked:
   const failures: { text: string; why: string }[] = [];
   let ranked: { best: Weighed; losers: Route['others'] } | null = null;
   for (const lathe of lathesFor(register, stock)) {
-    const here = bestOf(made, views, scheme, register, candidatesFor(views, stock, lathe), stock, asked.quantity, failures);
+    const here = bestOf(
+      made,
+      views,
+      scheme,
+      register,
+      candidatesFor(views, stock, lathe),
+      stock,
+      asked.quantity,
+      failures,
+    );
     if (here && (!ranked || compareScores(here.best.score, ranked.best.score) < 0)) ranked = here;
     // The other lathe is only asked where this one leaves something short.
     if (ranked?.best.score.shorts === 0) break;
@@ -121,12 +129,19 @@ function bestOf(
   if (!best) return null;
   const losers = [
     ...rest.map((w) => ({ text: candidateText(w.candidate), why: whyWorse(best.score, w.score) })),
-    ...beaten.map((u) => ({ text: candidateText(u.candidate), why: whyOutlineWorse(best.outline, u.outline) ?? 'is no better' })),
+    ...beaten.map((u) => ({
+      text: candidateText(u.candidate),
+      why: whyOutlineWorse(best.outline, u.outline) ?? 'is no better',
+    })),
   ];
   return { best, losers: losers.slice(0, 8) };
 }
 
-function noRoute(reasons: readonly string[], kind: Need['kind'] = 'geometry', need = 'a way to make the part'): PlanAnswer {
+function noRoute(
+  reasons: readonly string[],
+  kind: Need['kind'] = 'geometry',
+  need = 'a way to make the part',
+): PlanAnswer {
   return {
     route: null,
     capacity: {
@@ -139,7 +154,9 @@ function noRoute(reasons: readonly string[], kind: Need['kind'] = 'geometry', ne
 /** Lathes whose slide the bar clears, the smallest first; all of them when none does, so that the short can be said. */
 function lathesFor(register: Register, stock: StockAnswer): Lathe[] {
   const diameter = stock.options[0]?.size ?? 0;
-  const sorted = [...register.lathes].sort((a, b) => b.swingOverSlide - a.swingOverSlide || (a.id < b.id ? -1 : 1));
+  const sorted = [...register.lathes].sort(
+    (a, b) => b.swingOverSlide - a.swingOverSlide || (a.id < b.id ? -1 : 1),
+  );
   const fit = sorted.filter((lathe) => lathe.swingOverSlide >= diameter);
   return fit.length > 0 ? fit : sorted;
 }
@@ -150,7 +167,16 @@ function candidatesFor(views: Views, stock: StockAnswer, lathe: Lathe): Candidat
   if (!option) return found;
   for (const first of ['right', 'left'] as const) {
     const view = views[first];
-    if (mayPartToLength(view)) found.push({ first, kind: 'stick', meets: 0, secondEnd: false, lathe, stock: option, flatsWith: 'first' });
+    if (mayPartToLength(view))
+      found.push({
+        first,
+        kind: 'stick',
+        meets: 0,
+        secondEnd: false,
+        lathe,
+        stock: option,
+        flatsWith: 'first',
+      });
     const boundaries = meetingPoints(view);
     for (const meets of [0, ...boundaries]) {
       for (const kind of ['stick', 'blank'] as const) {
@@ -230,23 +256,22 @@ function awkwardRows(views: Views, candidate: Candidate): number {
   const view = views[candidate.first];
   const other = candidate.first === 'right' ? views.left : views.right;
   const first = view.rows.filter((row) => row.from >= candidate.meets - 1e-9);
-  const second = candidate.secondEnd ? other.rows.filter((row) => row.from >= view.length - candidate.meets - 1e-9) : [];
+  const second = candidate.secondEnd
+    ? other.rows.filter((row) => row.from >= view.length - candidate.meets - 1e-9)
+    : [];
   return valleysOf(first).length + valleysOf(second).length;
 }
 
 /** Pairs of holdings that share the part's fits between them, less one: 0 where all fits are turned together. */
 function fitsApart(views: Views, candidate: Candidate, scheme: Scheme): number {
   const fitted = new Set(
-    scheme.sizes.filter((s) => s.kind === 'diameter' && s.tolerance.kind === 'fit').flatMap((s) => s.features),
+    scheme.sizes
+      .filter((s) => s.kind === 'diameter' && s.tolerance.kind === 'fit')
+      .flatMap((s) => s.features),
   );
   const view = views[candidate.first];
   const rows = view.rows.filter((row) => fitted.has(row.id));
   const first = rows.some((row) => row.from >= candidate.meets - 1e-9);
   const second = rows.some((row) => row.from < candidate.meets - 1e-9);
   return candidate.secondEnd && first && second ? 1 : 0;
-}
-
-/** For the record of a plan in words: `M10 stick of 25, 186 long`. */
-export function stockText(route: Route): string {
-  return `${mm(route.stock.size)} ${route.stock.shape}, ${mm(Math.round(route.blankLength * 10) / 10)} long`;
 }

@@ -40,7 +40,8 @@ export function whyWorse(best: Score, loser: Score): string {
   const outline = whyOutlineWorse(best, loser);
   if (outline) return outline;
   if (loser.alternatives > best.alternatives) return 'leans on more makeshifts';
-  if (loser.minutes > best.minutes + 0.05) return `${Math.round((loser.minutes - best.minutes) * 10) / 10} min longer`;
+  if (loser.minutes > best.minutes + 0.05)
+    return `${Math.round((loser.minutes - best.minutes) * 10) / 10} min longer`;
   return 'uses more metal, or is as good';
 }
 

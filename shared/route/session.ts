@@ -33,7 +33,13 @@ export function stageOf(session: Session): Body {
 }
 
 /** Radial depth a cut may have here; throws the rule that stands against it. */
-export function depthFor(session: Session, method: Method, farEnd: number, wish: number, what: string): number {
+export function depthFor(
+  session: Session,
+  method: Method,
+  farEnd: number,
+  wish: number,
+  what: string,
+): number {
   const answer = depthAllowed({
     method,
     stage: stageOf(session),

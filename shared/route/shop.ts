@@ -17,7 +17,12 @@ export function held(kind: DraftNeed['kind'], need: string, by: string | undefin
   return { kind, need, state: 'held', ...(by ? { by } : {}), why, alternatives: [] };
 }
 
-export function short(kind: DraftNeed['kind'], need: string, why: string, alternatives: readonly string[] = []): DraftNeed {
+export function short(
+  kind: DraftNeed['kind'],
+  need: string,
+  why: string,
+  alternatives: readonly string[] = [],
+): DraftNeed {
   return { kind, need, state: 'short', why, alternatives };
 }
 
@@ -32,7 +37,12 @@ export function alternative(
 }
 
 function pick(found: Tool | undefined, spec: string, buy: string): Pick {
-  if (found) return { name: found.name, item: found, need: held('tool', spec, found.id, `${found.name}, ${found.place}.`) };
+  if (found)
+    return {
+      name: found.name,
+      item: found,
+      need: held('tool', spec, found.id, `${found.name}, ${found.place}.`),
+    };
   return { name: spec, need: short('tool', spec, `None in the register. ${buy}`) };
 }
 
@@ -45,7 +55,8 @@ export function turningTool(register: Register, use: 'rough' | 'finish', hand: 1
 }
 
 export function facingTool(register: Register): Pick {
-  const found = register.tools.find((t) => t.kind === 'facing') ?? register.tools.find((t) => t.kind === 'turning');
+  const found =
+    register.tools.find((t) => t.kind === 'facing') ?? register.tools.find((t) => t.kind === 'turning');
   return pick(found, 'facing tool', 'Buy or grind one.');
 }
 
@@ -58,14 +69,21 @@ export function chamferTool(register: Register, degrees: number): Pick {
 /** The narrowest blade that reaches, and is no wider than the gap it must enter. */
 export function partingBlade(register: Register, reach: number, widest = Infinity): Pick {
   const blades = register.tools
-    .filter((t) => t.kind === 'parting' && (t.figures['reach'] ?? 0) >= reach && (t.figures['width'] ?? Infinity) <= widest)
+    .filter(
+      (t) =>
+        t.kind === 'parting' &&
+        (t.figures['reach'] ?? 0) >= reach &&
+        (t.figures['width'] ?? Infinity) <= widest,
+    )
     .sort((a, b) => (a.figures['width'] ?? 0) - (b.figures['width'] ?? 0));
   const spec = `parting blade, reach ${mm(reach)}${widest < Infinity ? `, ${mm(widest)} wide at most` : ''}`;
   return pick(blades[0], spec, 'Buy one, or let the saw cut the piece off.');
 }
 
 export function formTool(register: Register, radius: number): Pick {
-  const found = register.tools.find((t) => t.kind === 'form' && Math.abs((t.figures['radius'] ?? 0) - radius) <= 0.01);
+  const found = register.tools.find(
+    (t) => t.kind === 'form' && Math.abs((t.figures['radius'] ?? 0) - radius) <= 0.01,
+  );
   if (found) return pick(found, `form tool, hollow R${mm(radius)}`, '');
   return {
     name: `form tool R${mm(radius)}, to be ground here`,
@@ -74,7 +92,10 @@ export function formTool(register: Register, radius: number): Pick {
       `form tool, hollow R${mm(radius)}`,
       undefined,
       'None in the register: the crown is turned freehand in steps and filed to a radius gauge, or a tool is ground here.',
-      [`grind a form tool R${mm(radius)} and try it on scrap`, 'turn in steps and file to the gauge, 10 min more'],
+      [
+        `grind a form tool R${mm(radius)} and try it on scrap`,
+        'turn in steps and file to the gauge, 10 min more',
+      ],
     ),
   };
 }
@@ -91,7 +112,8 @@ export function dieFor(register: Register, thread: ThreadFeature): Tool | undefi
 
 export function dieHolderFor(register: Register, die: Tool): Tool | undefined {
   return register.tools.find(
-    (t) => t.kind === 'die-holder' && Math.abs((t.figures['outside'] ?? 0) - (die.figures['outside'] ?? 0)) < 0.5,
+    (t) =>
+      t.kind === 'die-holder' && Math.abs((t.figures['outside'] ?? 0) - (die.figures['outside'] ?? 0)) < 0.5,
   );
 }
 
@@ -104,13 +126,16 @@ export function threadingTool(register: Register, thread: ThreadFeature): Pick {
 /** True where the lathe's gearbox cuts the lead. */
 export function gearboxCuts(lathe: Lathe, lead: number): boolean {
   return (
-    lathe.pitches.some((p) => Math.abs(p - lead) < 1e-6) || lathe.threadsPerInch.some((n) => Math.abs(25.4 / n - lead) < 1e-6)
+    lathe.pitches.some((p) => Math.abs(p - lead) < 1e-6) ||
+    lathe.threadsPerInch.some((n) => Math.abs(25.4 / n - lead) < 1e-6)
   );
 }
 
 /** The centre drill of this pilot size. */
 export function centreDrill(register: Register, pilot: number, designation: string): Pick {
-  const found = register.tools.find((t) => t.kind === 'centre-drill' && Math.abs((t.figures['diameter'] ?? 0) - pilot) < 0.01);
+  const found = register.tools.find(
+    (t) => t.kind === 'centre-drill' && Math.abs((t.figures['diameter'] ?? 0) - pilot) < 0.01,
+  );
   return pick(found, `centre drill ${designation}`, 'Buy one; they are cheap.');
 }
 
@@ -210,7 +235,10 @@ export function indexingFor(register: Register, faces: number, grip: number): In
     return {
       name: `${block.name}, collet ${mm(size ?? grip)}`,
       item: block.id,
-      text: step === 1 ? 'Turn the block to its next face in the vice.' : `Turn the block ${step} faces on in the vice.`,
+      text:
+        step === 1
+          ? 'Turn the block to its next face in the vice.'
+          : `Turn the block ${step} faces on in the vice.`,
       minutes: 6,
       minutesPerFace: 1,
       rule: 'index-block',
@@ -222,7 +250,10 @@ export function indexingFor(register: Register, faces: number, grip: number): In
     if (grip < head.minimum || grip > head.maximum) continue;
     const turn = dividingTurns(head.ratio, head.plates, faces);
     if (!turn) continue;
-    const whole = turn.holes === 0 ? `${turn.turns} turns` : `${turn.turns} turns and ${turn.holes} holes of ${turn.circle}`;
+    const whole =
+      turn.holes === 0
+        ? `${turn.turns} turns`
+        : `${turn.turns} turns and ${turn.holes} holes of ${turn.circle}`;
     return {
       name: head.name,
       item: head.id,

@@ -32,7 +32,13 @@ function inertia(r: number, bore: number): number {
 }
 
 /** True where neither surface, flats nor bore change between two stations with no break between them. */
-function isEven(body: Body, a: number, b: number, r: number, carrying: (body: Body, x: number) => number): boolean {
+function isEven(
+  body: Body,
+  a: number,
+  b: number,
+  r: number,
+  carrying: (body: Body, x: number) => number,
+): boolean {
   const near = (b - a) * 1e-3;
   const same = (x: number): boolean => Math.abs(carrying(body, x) - r) < 1e-9;
   const bore = radiusAt(body.inner, (a + b) / 2);
@@ -64,7 +70,8 @@ export function bendPerDepth(body: Body, gripEdge: number, cut: number): number 
     const middle = (a + b) / 2;
     const r = carryingRadius(body, middle);
     // A length of one radius has a closed form; only slopes and arcs are integrated.
-    if (isEven(body, a, b, r, carryingRadius)) sum += ((to - a) ** 3 - (to - b) ** 3) / 3 / inertia(r, radiusAt(body.inner, middle));
+    if (isEven(body, a, b, r, carryingRadius))
+      sum += ((to - a) ** 3 - (to - b) ** 3) / 3 / inertia(r, radiusAt(body.inner, middle));
     else sum += integrate(compliance, a, b);
   }
   return (LIMITS.forcePerDepth.value / LIMITS.elasticModulus.value) * sum;

@@ -67,16 +67,36 @@ export function stockFor(part: Part, scheme: Scheme, register: Register, materia
   for (const bar of bars) {
     if (bar.shape !== 'round') continue;
     const asDrawn = asDrawnRows(part, scheme, bar.size);
-    const covers = bar.size >= largest + CLEAN_UP - 1e-9 || (Math.abs(bar.size - largest) <= 1e-6 && covered(part, asDrawn, bar.size));
-    if (covers) options.push({ shape: 'round', size: bar.size, radius: bar.size / 2, bar, asDrawn, text: `${mm(bar.size)} round` });
+    const covers =
+      bar.size >= largest + CLEAN_UP - 1e-9 ||
+      (Math.abs(bar.size - largest) <= 1e-6 && covered(part, asDrawn, bar.size));
+    if (covers)
+      options.push({
+        shape: 'round',
+        size: bar.size,
+        radius: bar.size / 2,
+        bar,
+        asDrawn,
+        text: `${mm(bar.size)} round`,
+      });
     if (options.length === 2) break;
   }
   if (options.length > 0) return { options };
   const size = largest + CLEAN_UP;
-  const others = register.bars.filter((b) => b.shape === 'round' && b.quantity > 0 && b.size >= size).map((b) => b.material);
+  const others = register.bars
+    .filter((b) => b.shape === 'round' && b.quantity > 0 && b.size >= size)
+    .map((b) => b.material);
   const biggest = bars.filter((b) => b.shape === 'round').at(-1);
   return {
-    options: [{ shape: 'round', size, radius: size / 2, asDrawn: [], text: `round of ${mm(size)} or the next size up` }],
+    options: [
+      {
+        shape: 'round',
+        size,
+        radius: size / 2,
+        asDrawn: [],
+        text: `round of ${mm(size)} or the next size up`,
+      },
+    ],
     short: {
       need: `round bar of ${material}, Ø${mm(size)} at least`,
       why: biggest
@@ -84,7 +104,9 @@ export function stockFor(part: Part, scheme: Scheme, register: Register, materia
         : 'The rack has no round bar of this material.',
       alternatives: [
         `buy Ø${mm(size)} or the next size up`,
-        ...(others.length > 0 ? [`another material that is in the rack: ${[...new Set(others)].slice(0, 3).join(', ')}`] : []),
+        ...(others.length > 0
+          ? [`another material that is in the rack: ${[...new Set(others)].slice(0, 3).join(', ')}`]
+          : []),
       ],
     },
   };

@@ -16,7 +16,9 @@ export interface SupportAsked {
   wish: number;
 }
 
-export type SupportAnswer = { depth: number; ratio: number } | { depth: null; ratio: number; rule: 'support-overhang' | 'support-bend' };
+export type SupportAnswer =
+  | { depth: number; ratio: number }
+  | { depth: null; ratio: number; rule: 'support-overhang' | 'support-bend' };
 
 const LEAST_DEPTH = 0.05;
 
@@ -27,7 +29,9 @@ function leadFrom(stage: Body, farEnd: number): number {
 }
 
 function withinLimit(depth: number, perDepth: number): boolean {
-  return perDepth * depth <= (depth > LIMITS.lightDepth.value ? LIMITS.bendRough.value : LIMITS.bendFinish.value);
+  return (
+    perDepth * depth <= (depth > LIMITS.lightDepth.value ? LIMITS.bendRough.value : LIMITS.bendFinish.value)
+  );
 }
 
 /** Bend for each millimetre of depth of an even bar of this diameter, a third weaker for a hole in it: never too little. */
@@ -47,10 +51,14 @@ export function depthAllowed(asked: SupportAsked): SupportAnswer {
   if (!side && !light) return { depth: wish, ratio: 0 };
   const free = Math.max(0, farEnd - gripEdge);
   const smallest = free <= 0 ? Infinity : smallestDiameter(stage, gripEdge, farEnd);
-  const counted = method === 'thread-single-point' && free > 0 ? smallestDiameter(stage, gripEdge, leadFrom(stage, farEnd)) : smallest;
+  const counted =
+    method === 'thread-single-point' && free > 0
+      ? smallestDiameter(stage, gripEdge, leadFrom(stage, farEnd))
+      : smallest;
   const ratio = free / counted;
   if (side && !tail && ratio > LIMITS.overhang.value) return { depth: null, ratio, rule: 'support-overhang' };
-  const ceiling = light && ratio > LIMITS.overhang.value ? LIMITS.lightDepth.value : wish;
+  const ceiling =
+    light && method !== 'face' && ratio > LIMITS.overhang.value ? LIMITS.lightDepth.value : wish;
   let depth = Math.min(wish, ceiling);
   const left = tail ? LIMITS.tailFactor.value : 1;
   // As stiff as its thinnest place all along, and hollowed by a centre: when even that is enough, nothing is integrated.
@@ -63,5 +71,7 @@ export function depthAllowed(asked: SupportAsked): SupportAnswer {
   if (depth <= LIMITS.lightDepth.value && perDepth * depth > LIMITS.bendFinish.value) {
     depth = Math.floor((LIMITS.bendFinish.value / perDepth) * 100) / 100;
   }
-  return depth >= LEAST_DEPTH || depth >= wish ? { depth, ratio } : { depth: null, ratio, rule: 'support-bend' };
+  return depth >= LEAST_DEPTH || depth >= wish
+    ? { depth, ratio }
+    : { depth: null, ratio, rule: 'support-bend' };
 }

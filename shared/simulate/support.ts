@@ -80,7 +80,7 @@ function supportFaults(step: Step): Fault[] {
     );
   }
   const depth = operation.depthOfCut;
-  if (light && ratio > LIMITS.overhang.value * SLACK && depth > LIMITS.lightDepth.value + 1e-9)
+  if (light && operation.method !== 'face' && ratio > LIMITS.overhang.value * SLACK && depth > LIMITS.lightDepth.value + 1e-9)
     faults.push(
       fault(
         'support-overhang',

@@ -32,7 +32,8 @@ function casesOf(id: keyof typeof FAMILIES, count: number, seed?: number): Case[
   return pinned(FAMILIES[id], count, seed).map((typed) => {
     const evaluation = evaluate(template, typed, { entryUnit: 'mm' });
     const { part } = evaluation;
-    if (!part) throw new Error(`the generator gave values that are no part: ${JSON.stringify(evaluation.problems)}`);
+    if (!part)
+      throw new Error(`the generator gave values that are no part: ${JSON.stringify(evaluation.problems)}`);
     const scheme = buildScheme(template, { ...evaluation, part }, { generalTolerance: 'ISO 2768-m' });
     return { part, scheme, answer: plan(part, scheme) };
   });
@@ -44,7 +45,9 @@ describe.each(Object.keys(FAMILIES) as (keyof typeof FAMILIES)[])('routes of 200
 
   it('are accepted by the simulator, every one', () => {
     const refused = planned.flatMap(({ part, answer }, index) =>
-      (answer.route ? simulate(answer.route, part) : []).map((fault) => `${index}: ${fault.rule} ${fault.operation} ${fault.message}`),
+      (answer.route ? simulate(answer.route, part) : []).map(
+        (fault) => `${index}: ${fault.rule} ${fault.operation} ${fault.message}`,
+      ),
     );
     expect(refused).toEqual([]);
   });
@@ -82,13 +85,18 @@ describe.each(Object.keys(FAMILIES) as (keyof typeof FAMILIES)[])('routes of 200
   it('keep the verdict to the worst need', () => {
     for (const { answer } of planned) {
       const states = answer.capacity.needs.map((need) => need.state);
-      const expected = states.includes('short') ? 'cannot' : states.includes('alternative') ? 'with-changes' : 'can';
+      const expected = states.includes('short')
+        ? 'cannot'
+        : states.includes('alternative')
+          ? 'with-changes'
+          : 'can';
       expect(answer.capacity.verdict).toBe(expected);
     }
   });
 
   it('are the same when asked again', () => {
-    for (const { part, scheme, answer } of cases.slice(0, 40)) expect(JSON.stringify(plan(part, scheme))).toBe(JSON.stringify(answer));
+    for (const { part, scheme, answer } of cases.slice(0, 40))
+      expect(JSON.stringify(plan(part, scheme))).toBe(JSON.stringify(answer));
   });
 
   it('are as good for the part turned end for end', () => {
@@ -112,7 +120,8 @@ describe.each(Object.keys(FAMILIES) as (keyof typeof FAMILIES)[])('routes of 200
       for (const sabotage of SABOTAGES) {
         for (const spoiled of sabotage.mutations(route, part)) {
           made += 1;
-          if (simulate(spoiled.route, part).length === 0) accepted.push(`${index} ${sabotage.id}: ${spoiled.text}`);
+          if (simulate(spoiled.route, part).length === 0)
+            accepted.push(`${index} ${sabotage.id}: ${spoiled.text}`);
         }
       }
     }
@@ -122,10 +131,15 @@ describe.each(Object.keys(FAMILIES) as (keyof typeof FAMILIES)[])('routes of 200
 });
 
 describe('fresh parts that nothing was tuned on', () => {
-  it.each(Object.keys(FAMILIES) as (keyof typeof FAMILIES)[])('%s: the simulator accepts what is planned', (id) => {
-    const refused = casesOf(id, 60, 90_210_007).flatMap(({ part, answer }, index) =>
-      (answer.route ? simulate(answer.route, part) : []).map((fault) => `${index}: ${fault.rule} ${fault.operation} ${fault.message}`),
-    );
-    expect(refused).toEqual([]);
-  });
+  it.each(Object.keys(FAMILIES) as (keyof typeof FAMILIES)[])(
+    '%s: the simulator accepts what is planned',
+    (id) => {
+      const refused = casesOf(id, 60, 90_210_007).flatMap(({ part, answer }, index) =>
+        (answer.route ? simulate(answer.route, part) : []).map(
+          (fault) => `${index}: ${fault.rule} ${fault.operation} ${fault.message}`,
+        ),
+      );
+      expect(refused).toEqual([]);
+    },
+  );
 });

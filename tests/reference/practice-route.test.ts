@@ -21,7 +21,12 @@ describe('six flats on 3/4 in round', () => {
   });
 
   it('are planned at that depth, with rounded corners said, before the taper they run into', () => {
-    const { route, part } = plannedHandle({ bar: 0.75 * inch, acrossFlats: 0.67 * inch, taperEnd: 0.5 * inch, taperLength: 89 });
+    const { route, part } = plannedHandle({
+      bar: 0.75 * inch,
+      acrossFlats: 0.67 * inch,
+      taperEnd: 0.5 * inch,
+      taperLength: 89,
+    });
     const mill = route.operations.find((o) => o.method === 'mill-flat');
     expect(mill?.depth).toBeCloseTo(0.04 * inch, 9);
     expect(mill?.faces).toBe(6);
@@ -56,20 +61,33 @@ describe('a taper on the top slide', () => {
   it('takes one setting while the slide reaches, a second when it is longer than the travel', () => {
     const short = plannedHandle({ bar: 25, taperEnd: 16, taperLength: 60 });
     const long = plannedHandle({ bar: 25, taperEnd: 16, taperLength: 130 });
-    const travel = exampleRegister.lathes.find((l) => l.id === taperOf(long.route.operations).machine)?.slideTravel ?? 0;
+    const travel =
+      exampleRegister.lathes.find((l) => l.id === taperOf(long.route.operations).machine)?.slideTravel ?? 0;
     expect(travel).toBe(90);
     expect(taperOf(short.route.operations).settings).toBe(1);
     // ceil((slant + run-off − overlap) / (travel − overlap)) with 3 mm of overlap
     expect(taperOf(long.route.operations).settings).toBe(2);
-    expect(taperOf(long.route.operations).cautions.join(' ')).toMatch(/Setting 2: carriage on by .* cross slide out by/);
+    expect(taperOf(long.route.operations).cautions.join(' ')).toMatch(
+      /Setting 2: carriage on by .* cross slide out by/,
+    );
     expect(long.capacity.verdict).toBe('can');
   });
 });
 
 describe('support', () => {
   it('a shaft of three diameters stands alone; a longer one gets a centre, drilled before it is leant on and cut away', () => {
-    const short = plannedHandle({ rows: [{ diameter: 20, length: 40 }, { diameter: 18, length: 10 }] });
-    const long = plannedHandle({ rows: [{ diameter: 20, length: 120 }, { diameter: 18, length: 10 }] });
+    const short = plannedHandle({
+      rows: [
+        { diameter: 20, length: 40 },
+        { diameter: 18, length: 10 },
+      ],
+    });
+    const long = plannedHandle({
+      rows: [
+        { diameter: 20, length: 120 },
+        { diameter: 18, length: 10 },
+      ],
+    });
     expect(short.route.setups.some((s) => s.support)).toBe(false);
     expect(long.route.setups.some((s) => s.support === 'centre')).toBe(true);
     const centre = long.route.operations.find((o) => o.method === 'centre-drill');
@@ -124,21 +142,37 @@ describe('threads', () => {
 
 describe('holding', () => {
   it('a short shaft stays on its bar until all else is done', () => {
-    const { route } = plannedHandle({ rows: [{ diameter: 24, length: 6 }, { diameter: 16, length: 30 }] });
+    const { route } = plannedHandle({
+      rows: [
+        { diameter: 24, length: 6 },
+        { diameter: 16, length: 30 },
+      ],
+    });
     const parting = route.operations.findIndex((o) => o.method === 'part-off');
     const cuts = route.operations.slice(parting + 1).filter((o) => o.cut);
     expect(parting).toBeGreaterThan(0);
     expect(cuts).toEqual([]);
   });
   it('a part that cannot be had is told in words', () => {
-    const { answer } = plannedHandle({ rows: [{ diameter: 60, length: 20 }, { diameter: 12, length: 20, thread: 'M12' }, { diameter: 60, length: 20 }] }, undefined, true);
+    const { answer } = plannedHandle(
+      {
+        rows: [
+          { diameter: 60, length: 20 },
+          { diameter: 12, length: 20, thread: 'M12' },
+          { diameter: 60, length: 20 },
+        ],
+      },
+      undefined,
+      true,
+    );
     expect(answer.route).toBeNull();
     expect(answer.capacity.verdict).toBe('cannot');
     expect(answer.capacity.needs.map((n) => n.why).join(' ')).toMatch(/behind a larger diameter/);
   });
   it('plans again in the same words', () => {
     const { part, scheme } = plannedHandle({ bar: 25, acrossFlats: 22, taperEnd: 16, taperLength: 95 });
-    const ask = () => JSON.stringify(planRoute(part, scheme, exampleRegister, { quantity: 3, material: part.material }));
+    const ask = () =>
+      JSON.stringify(planRoute(part, scheme, exampleRegister, { quantity: 3, material: part.material }));
     expect(ask()).toBe(ask());
   });
 });

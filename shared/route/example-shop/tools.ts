@@ -3,9 +3,19 @@ import type { Tool } from '../register';
 
 /** Tools of the invented depot: sizes are what such a shop would plausibly hold. */
 const turning: readonly Tool[] = [
-  tool('knife-r', 'turning', 'Knife tool, right hand, 12', 'drawer 1', 'carbide', { noseRadius: 0.4, shank: 12 }),
-  tool('knife-l', 'turning', 'Knife tool, left hand, 12', 'drawer 1', 'carbide', { noseRadius: 0.4, shank: 12, hand: -1 }),
-  tool('knife-hss', 'turning', 'Knife tool, finishing, 12', 'drawer 1', 'hss', { noseRadius: 0.2, shank: 12 }),
+  tool('knife-r', 'turning', 'Knife tool, right hand, 12', 'drawer 1', 'carbide', {
+    noseRadius: 0.4,
+    shank: 12,
+  }),
+  tool('knife-l', 'turning', 'Knife tool, left hand, 12', 'drawer 1', 'carbide', {
+    noseRadius: 0.4,
+    shank: 12,
+    hand: -1,
+  }),
+  tool('knife-hss', 'turning', 'Knife tool, finishing, 12', 'drawer 1', 'hss', {
+    noseRadius: 0.2,
+    shank: 12,
+  }),
   tool('knife-hss-l', 'turning', 'Knife tool, finishing, left hand, 12', 'drawer 1', 'hss', {
     noseRadius: 0.2,
     shank: 12,
@@ -21,7 +31,10 @@ const turning: readonly Tool[] = [
 ];
 
 const crowns: readonly Tool[] = [6, 8, 10, 12, 15, 16, 20, 25, 30, 40, 50].map((radius) => ({
-  ...tool(`form-r${radius}`, 'form', `Form tool, hollow R${radius}`, 'drawer 2', 'hss', { radius, width: 12 }),
+  ...tool(`form-r${radius}`, 'form', `Form tool, hollow R${radius}`, 'drawer 2', 'hss', {
+    radius,
+    width: 12,
+  }),
   madeHere: true,
   caution: 'Ground here: light cuts at a slow speed, and look at its edge first.',
 }));
@@ -50,7 +63,11 @@ const DIES: readonly (readonly [string, number, number])[] = [
 ];
 
 const dies: readonly Tool[] = DIES.map(([designation, major, pitch]) => ({
-  ...tool(`die-${slug(designation)}`, 'die', `Die ${designation}`, 'drawer 6', 'hss', { major, pitch, outside: 38 }),
+  ...tool(`die-${slug(designation)}`, 'die', `Die ${designation}`, 'drawer 6', 'hss', {
+    major,
+    pitch,
+    outside: 38,
+  }),
   designation,
 }));
 
@@ -66,7 +83,11 @@ const TAPS: readonly (readonly [string, number, number])[] = [
 ];
 
 const taps: readonly Tool[] = TAPS.map(([designation, major, pitch]) => ({
-  ...tool(`tap-${slug(designation)}`, 'tap', `Tap ${designation}, second`, 'drawer 7', 'hss', { major, pitch, lead: 4 }),
+  ...tool(`tap-${slug(designation)}`, 'tap', `Tap ${designation}, second`, 'drawer 7', 'hss', {
+    major,
+    pitch,
+    lead: 4,
+  }),
   designation,
 }));
 
@@ -104,7 +125,11 @@ const endMills: readonly Tool[] = [6, 8, 10, 12, 16, 20].map((diameter) =>
 );
 
 const rest: readonly Tool[] = [
-  tool('die-holder-1', 'die-holder', 'Die holder for the tail, 38', 'drawer 6', 'other', { outside: 38, bore: 26, depth: 90 }),
+  tool('die-holder-1', 'die-holder', 'Die holder for the tail, 38', 'drawer 6', 'other', {
+    outside: 38,
+    bore: 26,
+    depth: 90,
+  }),
   tool('tail-centre-1', 'tail-centre', 'Running centre', 'drawer 5', 'other', {}),
   tool('steady-1', 'steady', 'Fixed steady', 'shelf 1', 'other', { minimum: 8, maximum: 80 }),
   {

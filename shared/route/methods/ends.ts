@@ -84,7 +84,10 @@ export function drillCentre(session: Session): void {
     ? slice(session.view.part.body.inner, drawn.from, drawn.to)
     : centreEnvelope(hole, stage.x1);
   if (!drawn && session.trim <= hole.depth)
-    throw new RuledOut('centre-before-support', `The centre ${hole.designation} is deeper than the length that is cut away with it.`);
+    throw new RuledOut(
+      'centre-before-support',
+      `The centre ${hole.designation} is deeper than the length that is cut away with it.`,
+    );
   const key = keyOf(session, 'centre');
   const face = session.done.get('face');
   addOperation(session.build, session.view, {
@@ -121,8 +124,13 @@ export function turnCrown(session: Session): void {
   const build = session.build;
   const tool = formTool(build.register, crown.radius);
   const metal = metalOver(session, crown.from, crown.to, 0);
-  const depth = Math.min(LIMITS.lightDepth.value, depthFor(session, 'form-turn', crown.to, LIMITS.lightDepth.value, 'Crown'));
-  const cut = passesFor(metal, depth);
+  // The tool is fed in along the axis: what it goes through is the height of the crown.
+  const height = crown.to - crown.from;
+  const depth = Math.min(
+    LIMITS.lightDepth.value,
+    depthFor(session, 'form-turn', crown.to, LIMITS.lightDepth.value, 'Crown'),
+  );
+  const cut = passesFor(height, depth);
   const key = keyOf(session, 'crown');
   const after: { key: string; rule: RuleId }[] = [];
   const face = session.done.get('face');
@@ -169,7 +177,8 @@ export function cutChamfers(session: Session): void {
     const turned = session.done.get(`row.${row.id}`);
     if (turned) after.push({ key: turned, rule: 'row-before-chamfer' });
     const trim = session.done.get('trim');
-    if (trim && chamfer.to >= session.view.length - 1e-9) after.push({ key: trim, rule: 'trim-before-end-form' });
+    if (trim && chamfer.to >= session.view.length - 1e-9)
+      after.push({ key: trim, rule: 'trim-before-end-form' });
     addOperation(session.build, session.view, {
       key,
       method: 'chamfer',

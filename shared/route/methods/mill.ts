@@ -13,7 +13,10 @@ import type { Session } from '../session';
 /** Span that the cutter really travels: past the ends that a later taper or the trim clears, exact at a wall. */
 export function milledSpan(session: Session, flats: FlatsFeature): { from: number; to: number } {
   const cut = flatsCutOf(session.view.part.body, flats.id);
-  return { from: cut.from - pastEnd(session, cut.distance, cut.from, -1), to: cut.to + pastEnd(session, cut.distance, cut.to, 1) };
+  return {
+    from: cut.from - pastEnd(session, cut.distance, cut.from, -1),
+    to: cut.to + pastEnd(session, cut.distance, cut.to, 1),
+  };
 }
 
 /** How far past an end the flats may run without touching the part: where its outline is within the flats there. */
@@ -48,7 +51,11 @@ export function markOut(session: Session, flats: FlatsFeature): void {
     stops: [{ toX: span.from }],
     reasons: ['mark-before-mill'],
     check: 'rule',
-    needs: [scriber ? held('tool', 'scriber and blue', scriber.id, `${scriber.name}, ${scriber.place}.`) : short('tool', 'scriber and blue', 'None in the register.')],
+    needs: [
+      scriber
+        ? held('tool', 'scriber and blue', scriber.id, `${scriber.name}, ${scriber.place}.`)
+        : short('tool', 'scriber and blue', 'None in the register.'),
+    ],
     handling: 2,
   });
   session.done.set(`mark.${flats.id}`, key);
@@ -59,7 +66,8 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
   const { build, view } = session;
   const cut = flatsCutOf(view.part.body, flats.id);
   const span = milledSpan(session, flats);
-  if (span.from < session.gripTo - 1e-9) throw new RuledOut('grip-uncut', 'The flats run under the jaws in this holding.');
+  if (span.from < session.gripTo - 1e-9)
+    throw new RuledOut('grip-uncut', 'The flats run under the jaws in this holding.');
   const stage = stageOf(session);
   const to = Math.min(span.to, stage.x1);
   const round = largestRadius(stage.outer, Math.max(span.from, stage.x0), to);
@@ -108,15 +116,25 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
       arc > 0.02
         ? `The corners stay round, ${mm(Math.round(arc * 100) / 100)} of arc at each; a face is ${mm(Math.round(2 * half * 100) / 100)} wide.`
         : `The corners come up sharp; a face is ${mm(Math.round(2 * half * 100) / 100)} wide.`,
-      ...(to > cut.to + 1e-6 || flats.runOutTo > flats.to + 1e-6 ? ['The flats run on past their length; the taper cut trims their ends.'] : []),
+      ...(to > cut.to + 1e-6 || flats.runOutTo > flats.to + 1e-6
+        ? ['The flats run on past their length; the taper cut trims their ends.']
+        : []),
     ],
     check: 'over opposite flats',
     needs: [
       tool.need,
       indexing.need,
       machine
-        ? held('machine', `mill, travel ${mm(Math.ceil(to - span.from))}`, machine.id, `${machine.name}, ${machine.place}.`)
-        : short('machine', 'a mill for the flats', 'No mill in the register.', ['file the flats to a gauge, slow and less true', 'send the piece out for its flats']),
+        ? held(
+            'machine',
+            `mill, travel ${mm(Math.ceil(to - span.from))}`,
+            machine.id,
+            `${machine.name}, ${machine.place}.`,
+          )
+        : short('machine', 'a mill for the flats', 'No mill in the register.', [
+            'file the flats to a gauge, slow and less true',
+            'send the piece out for its flats',
+          ]),
     ],
     handling: indexing.minutesPerFace * flats.count,
   });

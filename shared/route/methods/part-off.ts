@@ -8,7 +8,10 @@ import { depthFor, keyOf, metalOver, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
 
 /** Blade for a radius, as the whole plan uses it. */
-export function bladeFor(session: { build: Session['build'] }, radius: number): { pick: Pick; width: number } {
+export function bladeFor(
+  session: { build: Session['build'] },
+  radius: number,
+): { pick: Pick; width: number } {
   const pick = partingBlade(session.build.register, radius + LIMITS.collarClear.value);
   return { pick, width: pick.item?.figures['width'] ?? 3 };
 }

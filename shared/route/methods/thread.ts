@@ -54,8 +54,7 @@ function runOutOf(session: Session, row: Row, thread: ThreadFeature): number {
 function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
   const { build, view } = session;
   const { register } = build;
-  if (!openToFreeEnd(session.view, row, thread))
-    throw shutIn(thread);
+  if (!openToFreeEnd(session.view, row, thread)) throw shutIn(thread);
   const exit = runOutOf(session, row, thread);
   const die = dieFor(register, thread);
   const holder = die && dieHolderFor(register, die);
@@ -91,12 +90,19 @@ function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
       figures: { diameter: thread.major, travel: thread.to - thread.from, depth, passes: 1 },
       reasons: turnRound ? ['die-when-held', 'die-turned-round'] : ['die-when-held'],
       notes: turnRound
-        ? [`No run-out at the shoulder: turn the die round for the last threads; about one pitch (${mm(thread.pitch)}) stays incomplete.`]
+        ? [
+            `No run-out at the shoulder: turn the die round for the last threads; about one pitch (${mm(thread.pitch)}) stays incomplete.`,
+          ]
         : ['Start square, oil, and stop at the length with the spindle turned by hand.'],
       check: 'the mate',
       needs: [
         held('tool', `die ${thread.designation}`, die.id, `${die.name}, ${die.place}.`),
-        held('holder', `die holder ${mm(die.figures['outside'] ?? 0)}`, holder.id, `${holder.name}, ${holder.place}.`),
+        held(
+          'holder',
+          `die holder ${mm(die.figures['outside'] ?? 0)}`,
+          holder.id,
+          `${holder.name}, ${holder.place}.`,
+        ),
       ],
       handling: turnRound ? 4 : 3,
     });
@@ -124,13 +130,23 @@ function singlePoint(
     ? `Over the ${mm(register.settings.dieLimit)} the shop cuts by die.`
     : `No ${thread.designation} die in the register.`;
   if (!gearboxCuts(lathe, thread.lead)) {
-    needs.push(short('machine', spec, `${lathe.name} does not cut this lead, and ${why.charAt(0).toLowerCase()}${why.slice(1)}`, ['buy the die', 'change wheels']));
+    needs.push(
+      short(
+        'machine',
+        spec,
+        `${lathe.name} does not cut this lead, and ${why.charAt(0).toLowerCase()}${why.slice(1)}`,
+        ['buy the die', 'change wheels'],
+      ),
+    );
   } else if (!dieHeld && thread.major <= register.settings.dieLimit + 1e-6) {
     needs.push(
-      alternative('tool', `die ${thread.designation}`, lathe.id, `${why} Single point: ${lathe.name} cuts ${mm(thread.lead)}.`, [
-        `single point on ${lathe.name}, about 15 min more`,
-        'buy the die',
-      ]),
+      alternative(
+        'tool',
+        `die ${thread.designation}`,
+        lathe.id,
+        `${why} Single point: ${lathe.name} cuts ${mm(thread.lead)}.`,
+        [`single point on ${lathe.name}, about 15 min more`, 'buy the die'],
+      ),
     );
   } else needs.push(held('machine', spec, lathe.id, `${why} ${lathe.name} cuts ${mm(thread.lead)}.`));
   const shallow = exit < LIMITS.threadExit.value * thread.pitch;
@@ -141,10 +157,20 @@ function singlePoint(
         `run-out or relief where ${thread.designation} meets its shoulder`,
         undefined,
         `A single-point tool is drawn out in the last turn: about ${mm(2 * thread.pitch)} at the shoulder stays shallow.`,
-        ['say the run-out on the drawing', 'draw a relief', ...(dieHeld ? [] : ['buy the die and turn it round for the last threads'])],
+        [
+          'say the run-out on the drawing',
+          'draw a relief',
+          ...(dieHeld ? [] : ['buy the die and turn it round for the last threads']),
+        ],
       ),
     );
-  const allowed = depthFor(session, 'thread-single-point', thread.to, Math.min(0.2, depth), `Thread ${thread.designation}`);
+  const allowed = depthFor(
+    session,
+    'thread-single-point',
+    thread.to,
+    Math.min(0.2, depth),
+    `Thread ${thread.designation}`,
+  );
   const cut = passesFor(depth, allowed);
   addOperation(build, view, {
     ...common,
@@ -153,13 +179,28 @@ function singlePoint(
     tool: tool.name,
     toolItem: tool.item?.id,
     toolFigures: tool.item?.figures,
-    figures: { diameter: thread.major, travel: thread.to - thread.from + 3 * thread.pitch, depth: cut.depth, passes: cut.passes + 2 },
+    figures: {
+      diameter: thread.major,
+      travel: thread.to - thread.from + 3 * thread.pitch,
+      depth: cut.depth,
+      passes: cut.passes + 2,
+    },
     reasons: shallow ? ['single-point', 'thread-run-out'] : ['single-point'],
     ...(shallow ? { runOut: 2 * thread.pitch } : {}),
     notes: [
       `Gearbox to ${mm(thread.lead)}; infeed ${mm(Math.round(depth * 1000) / 1000)} in all, two spring passes.`,
-      ...(shallow ? [`Draw the tool out in the last turn before the shoulder, the spindle turned by hand; ${mm(2 * thread.pitch)} stays shallow.`] : []),
-      ...(thread.hand === 'left' ? ['Left hand: the tool travels away from the chuck.'] : []),
+      ...(shallow
+        ? [
+            `Draw the tool out in the last turn before the shoulder, the spindle turned by hand; ${mm(2 * thread.pitch)} stays shallow.`,
+          ]
+        : []),
+      ...(thread.hand === 'left'
+        ? [
+            shallow
+              ? 'Left hand, and no relief to start in: spindle reversed, the tool turned over, so that it still cuts towards the chuck.'
+              : 'Left hand: the tool starts in the relief and travels away from the chuck.',
+          ]
+        : []),
       ...(thread.starts > 1 ? [`${thread.starts} starts, each a pitch of ${mm(thread.pitch)} on.`] : []),
     ],
     check: 'the mate',

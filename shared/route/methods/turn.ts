@@ -54,7 +54,10 @@ export function valleysOf(rows: readonly Row[]): Row[] {
 export function roughRows(session: Session): void {
   const rows = rowsWorked(session);
   const jobs = [
-    ...plateausOf(rows).map((plateau) => ({ radius: plateau.radius, cut: () => roughPlateau(session, plateau, rows) })),
+    ...plateausOf(rows).map((plateau) => ({
+      radius: plateau.radius,
+      cut: () => roughPlateau(session, plateau, rows),
+    })),
     ...valleysOf(rows).map((row) => ({ radius: rowMax(row), cut: () => roughValley(session, row) })),
   ];
   for (const job of jobs.sort((a, b) => b.radius - a.radius)) job.cut();
@@ -68,7 +71,13 @@ function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]):
   const target = plateau.radius + leave;
   const metal = metalOver(session, from, stage.x1, target);
   if (metal <= leave) return;
-  const depth = depthFor(session, 'rough-turn', stage.x1, LIMITS.roughDepth.value, `Roughing to Ø${mm(2 * target)}`);
+  const depth = depthFor(
+    session,
+    'rough-turn',
+    stage.x1,
+    LIMITS.roughDepth.value,
+    `Roughing to Ø${mm(2 * target)}`,
+  );
   const cut = passesFor(metal, depth);
   const tool = turningTool(build.register, 'rough');
   const key = keyOf(session, `rough.${plateau.rows[0]?.id ?? ''}`);
@@ -82,7 +91,12 @@ function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]):
     toolItem: tool.item?.id,
     toolMaterial: tool.item?.material === 'carbide' ? 'carbide' : 'hss',
     toolFigures: tool.item?.figures,
-    figures: { diameter: 2 * (target + metal), travel: stage.x1 - from, depth: cut.depth, passes: cut.passes },
+    figures: {
+      diameter: 2 * (target + metal),
+      travel: stage.x1 - from,
+      depth: cut.depth,
+      passes: cut.passes,
+    },
     cut: { kind: 'outer', envelope: constant(from, stage.x1, target) },
     after: before ? [{ key: before, rule: 'rough-large-first' }] : beforeTurning(session),
     stops: [{ toX: from }],
@@ -98,7 +112,8 @@ function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]):
 function roughValley(session: Session, row: Row): void {
   const leave = LIMITS.roughAllowance.value;
   const span = valleySpan(session, row);
-  if (metalOver(session, span.from, span.to, rowMax(row) + leave) > leave) cutBehindCollar(session, row, rowMax(row) + leave, 'rough-turn');
+  if (metalOver(session, span.from, span.to, rowMax(row) + leave) > leave)
+    cutBehindCollar(session, row, rowMax(row) + leave, 'rough-turn');
 }
 
 /** Turns every row to size, largest first; rows that the bar is already are left. */
@@ -149,18 +164,23 @@ export function finishRows(session: Session): void {
 /** Brings rows behind a collar to size. */
 export function finishValleys(session: Session): void {
   for (const row of valleysOf(rowsWorked(session))) {
-    if (row.kind === 'cone')
-      throw taperBehindCollar();
+    if (row.kind === 'cone') throw taperBehindCollar();
     cutBehindCollar(session, row, row.startR, 'turn');
   }
 }
 
 export function risesToFreeEnd(): RuledOut {
-  return new RuledOut('way-in', 'The taper rises towards the free end of this holding: it is cut from the other end.');
+  return new RuledOut(
+    'way-in',
+    'The taper rises towards the free end of this holding: it is cut from the other end.',
+  );
 }
 
 export function taperBehindCollar(): RuledOut {
-  return new RuledOut('way-in', 'A taper lies behind a larger diameter in this holding: the top slide cannot pass it.');
+  return new RuledOut(
+    'way-in',
+    'A taper lies behind a larger diameter in this holding: the top slide cannot pass it.',
+  );
 }
 
 function valleySpan(session: Session, row: Row): { from: number; to: number } {
@@ -213,8 +233,7 @@ export function turnTapers(session: Session): void {
   const { build, view } = session;
   for (const row of rowsWorked(session)) {
     if (row.kind !== 'cone') continue;
-    if (row.endR >= row.startR)
-      throw risesToFreeEnd();
+    if (row.endR >= row.startR) throw risesToFreeEnd();
     const stage = stageOf(session);
     const last = row.to >= view.length - 1e-9;
     const to = last ? stage.x1 : row.to;
@@ -241,13 +260,17 @@ export function turnTapers(session: Session): void {
       if (milled && flats.runOutTo > row.from + 1e-9) after.push({ key: milled, rule: 'flats-before-taper' });
     }
     const rough = session.done.get('rough');
-    if (after.length === 0) after.push(...(rough ? [{ key: rough, rule: 'rough-before-finish' as const }] : beforeTurning(session)));
-    const envelope: Generator = last && to > row.to + 1e-9
-      ? [
-          { kind: 'line', from: row.from, to: row.to, start: row.startR, end: row.endR },
-          { kind: 'line', from: row.to, to, start: row.endR, end: farR },
-        ]
-      : [{ kind: 'line', from: row.from, to: row.to, start: row.startR, end: row.endR }];
+    if (after.length === 0)
+      after.push(
+        ...(rough ? [{ key: rough, rule: 'rough-before-finish' as const }] : beforeTurning(session)),
+      );
+    const envelope: Generator =
+      last && to > row.to + 1e-9
+        ? [
+            { kind: 'line', from: row.from, to: row.to, start: row.startR, end: row.endR },
+            { kind: 'line', from: row.to, to, start: row.endR, end: farR },
+          ]
+        : [{ kind: 'line', from: row.from, to: row.to, start: row.startR, end: row.endR }];
     addOperation(build, view, {
       key,
       method: 'taper-turn',
@@ -294,7 +317,10 @@ function taperMetal(session: Session, row: Row, to: number, slope: number): numb
     const x = row.from + ((to - row.from) * k) / steps;
     const target = row.startR + slope * (x - row.from);
     const near = 2e-7;
-    metal = Math.max(metal, metalOver(session, Math.max(stage.x0, x - near), Math.min(stage.x1, x + near), target));
+    metal = Math.max(
+      metal,
+      metalOver(session, Math.max(stage.x0, x - near), Math.min(stage.x1, x + near), target),
+    );
   }
   return metal;
 }
@@ -305,7 +331,14 @@ function centreMouth(session: Session): number {
   return last && last.kind === 'line' ? last.end : 0;
 }
 
-function taperNotes(half: number, slant: number, path: number, travel: number, settings: number, graduation: number): string[] {
+function taperNotes(
+  half: number,
+  slant: number,
+  path: number,
+  travel: number,
+  settings: number,
+  graduation: number,
+): string[] {
   const notes = ['Lock the carriage. The tail must clear the tool at the small end.'];
   const rise = Math.round(slant * Math.sin(half) * 1000) / 1000;
   notes.push(

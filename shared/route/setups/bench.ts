@@ -33,7 +33,12 @@ export function sawPiece(build: Build, view: View, kind: 'bar' | 'stick' | 'blan
     needs: [
       fits && saw
         ? held('machine', spec, saw.id, `${saw.name} takes ${mm(saw.maximumDiameter)}; kerf ${mm(saw.kerf)}.`)
-        : short('machine', spec, saw ? `${saw.name} takes ${mm(saw.maximumDiameter)}.` : 'No saw in the register.', ['saw by hand', 'buy the piece cut to length']),
+        : short(
+            'machine',
+            spec,
+            saw ? `${saw.name} takes ${mm(saw.maximumDiameter)}.` : 'No saw in the register.',
+            ['saw by hand', 'buy the piece cut to length'],
+          ),
     ],
   });
 }
@@ -42,7 +47,19 @@ export function sawPiece(build: Build, view: View, kind: 'bar' | 'stick' | 'blan
 export function finishPiece(build: Build, session: Session): void {
   const file = build.register.tools.find((t) => t.kind === 'file');
   const threads = build.views.right.part.features.filter((f) => f.kind === 'thread');
-  const step = (key: string, method: 'deburr' | 'fit-check' | 'inspect', title: string, rest: { features: string[]; tool: string; toolItem?: string; check: string; handling: number; rule: 'edges-last' | 'fit-before-inspect' | 'inspect-last' }): void => {
+  const step = (
+    key: string,
+    method: 'deburr' | 'fit-check' | 'inspect',
+    title: string,
+    rest: {
+      features: string[];
+      tool: string;
+      toolItem?: string;
+      check: string;
+      handling: number;
+      rule: 'edges-last' | 'fit-before-inspect' | 'inspect-last';
+    },
+  ): void => {
     const before = build.operations[build.operations.length - 1];
     build.operations.push({
       key,
@@ -65,7 +82,11 @@ export function finishPiece(build: Build, session: Session): void {
       handling: rest.handling,
       needs:
         method === 'deburr'
-          ? [file ? held('tool', 'file', file.id, `${file.name}, ${file.place}.`) : short('tool', 'file', 'None in the register.')]
+          ? [
+              file
+                ? held('tool', 'file', file.id, `${file.name}, ${file.place}.`)
+                : short('tool', 'file', 'None in the register.'),
+            ]
           : [],
     });
   };

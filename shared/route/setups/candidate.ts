@@ -17,7 +17,7 @@ import type { StockOption } from '../stock';
 import { finishPiece, sawPiece } from './bench';
 import { inspectSetUp, openEnd, workEnd } from './end-work';
 import { isSupport, markOf, openWithSteady } from './steady';
-import { indicate, latheHold, needGrip, openSetUp, standsOut } from './holding';
+import { indicate, latheHold, openSetUp, standsOut } from './holding';
 
 export type CandidateKind = 'bar' | 'stick' | 'blank';
 
@@ -47,7 +47,9 @@ const KIND_TEXT: Record<CandidateKind, string> = {
 };
 
 export function candidateText(candidate: Candidate): string {
-  const turned = candidate.secondEnd ? `, turned round at ${mm(candidate.meets)} from the far end` : ', in one holding';
+  const turned = candidate.secondEnd
+    ? `, turned round at ${mm(candidate.meets)} from the far end`
+    : ', in one holding';
   return `${candidate.stock.text} ${KIND_TEXT[candidate.kind]}, ${candidate.first} end first${turned}, ${candidate.lathe.name.toLowerCase()}`;
 }
 
@@ -137,7 +139,12 @@ interface Layout {
 }
 
 /** Blank and first grip, in the first end's view, then the blank in the part's own x. */
-function layOut(register: Register, view: View, candidate: Candidate, trims: { first: number; second: number }): Layout {
+function layOut(
+  register: Register,
+  view: View,
+  candidate: Candidate,
+  trims: { first: number; second: number },
+): Layout {
   const radius = candidate.stock.radius;
   const face = LIMITS.faceAllowance.value;
   const x1 = view.length + face + trims.first;
@@ -151,7 +158,8 @@ function layOut(register: Register, view: View, candidate: Candidate, trims: { f
     x0 = -(face + trims.second);
     const begins = workBegins(view, candidate) - 2;
     grip = { from: Math.max(x0, begins - reach), to: begins, diameter: 2 * radius };
-    if (!longEnough(grip)) throw new RuledOut('grip-length', `Only ${mm(Math.max(0, begins - x0))} of the blank is left to hold.`);
+    if (!longEnough(grip))
+      throw new RuledOut('grip-length', `Only ${mm(Math.max(0, begins - x0))} of the blank is left to hold.`);
   } else {
     const to = cutAt - width - LIMITS.partingClear.value;
     const hold = Math.min(Math.max(20, 1.2 * radius), 38);
@@ -185,7 +193,9 @@ function shareFlats(view: View, candidate: Candidate): { first: FlatsFeature[]; 
   const first: FlatsFeature[] = [];
   const second: FlatsFeature[] = [];
   for (const flats of view.flats) {
-    const under = view.rows.filter((row) => row.from < flats.runOutTo - 1e-9 && row.to > flats.runOutFrom + 1e-9);
+    const under = view.rows.filter(
+      (row) => row.from < flats.runOutTo - 1e-9 && row.to > flats.runOutFrom + 1e-9,
+    );
     const round = under.filter((row) => row.kind === 'cylinder');
     const inFirst = (row: { from: number }) => row.from >= candidate.meets - 1e-9;
     const bar = (row: { id: string }) => candidate.stock.asDrawn.includes(row.id);
@@ -193,7 +203,11 @@ function shareFlats(view: View, candidate: Candidate): { first: FlatsFeature[]; 
     const maySecond = candidate.secondEnd && round.every((row) => !inFirst(row) || bar(row));
     if (mayFirst && (candidate.flatsWith === 'first' || !maySecond)) first.push(flats);
     else if (maySecond) second.push(flats);
-    else throw new RuledOut('turn-before-mill', 'The flats lie over lengths that are turned from different ends.');
+    else
+      throw new RuledOut(
+        'turn-before-mill',
+        'The flats lie over lengths that are turned from different ends.',
+      );
   }
   return { first, second };
 }
@@ -209,13 +223,24 @@ function firstEnd(
 ): Session {
   const { lathe } = build;
   const diameter = layout.grip.diameter;
-  const keeps = view.rows.some((row) => candidate.stock.asDrawn.includes(row.id) && row.from < layout.grip.to && row.to > layout.grip.from);
+  const keeps = view.rows.some(
+    (row) =>
+      candidate.stock.asDrawn.includes(row.id) && row.from < layout.grip.to && row.to > layout.grip.from,
+  );
   const hold = latheHold(build, diameter, keeps);
   const passes = diameter <= lathe.spindleBore + 1e-9;
   if (candidate.kind === 'bar' && !passes)
-    throw new RuledOut('bar-through-spindle', `Ø${mm(diameter)} does not pass the spindle, bore ${mm(lathe.spindleBore)}.`);
-  const run = { trim: trims.first, from: candidate.meets, runOn: candidate.meets <= 1e-9 && candidate.kind !== 'blank' ? layout.width - layout.cutAt : 0 };
-  const work = candidate.kind === 'bar' ? 'Bar through the spindle' : candidate.kind === 'stick' ? 'Stick' : 'Blank';
+    throw new RuledOut(
+      'bar-through-spindle',
+      `Ø${mm(diameter)} does not pass the spindle, bore ${mm(lathe.spindleBore)}.`,
+    );
+  const run = {
+    trim: trims.first,
+    from: candidate.meets,
+    runOn: candidate.meets <= 1e-9 && candidate.kind !== 'blank' ? layout.width - layout.cutAt : 0,
+  };
+  const work =
+    candidate.kind === 'bar' ? 'Bar through the spindle' : candidate.kind === 'stick' ? 'Stick' : 'Blank';
   const datum = 'Stops are from the faced end.';
   const open = (support: boolean, first: boolean): Session =>
     openSetUp(
@@ -231,8 +256,15 @@ function firstEnd(
         datum,
         minutes: hold.minutes + (support ? 2 : 0),
         turned: false,
-        title: first ? `grip, ${standsOut(build, view, layout.grip)}` : 'grip again as before, against the same face',
-        reasons: candidate.kind === 'bar' ? ['bar-through-spindle'] : candidate.kind === 'stick' ? ['stick-for-milling'] : ['saw-blank'],
+        title: first
+          ? `grip, ${standsOut(build, view, layout.grip)}`
+          : 'grip again as before, against the same face',
+        reasons:
+          candidate.kind === 'bar'
+            ? ['bar-through-spindle']
+            : candidate.kind === 'stick'
+              ? ['stick-for-milling']
+              : ['saw-blank'],
       },
       run,
     );
@@ -253,7 +285,14 @@ function firstEnd(
         build,
         view,
         layout.grip,
-        { machine: lathe.id, holding: hold.name, ...(hold.item ? { holdingItem: hold.item } : {}), datum, minutes: hold.minutes + 6, turned: false },
+        {
+          machine: lathe.id,
+          holding: hold.name,
+          ...(hold.item ? { holdingItem: hold.item } : {}),
+          datum,
+          minutes: hold.minutes + 6,
+          turned: false,
+        },
         run,
         otherwise,
       ),
@@ -309,7 +348,12 @@ function pullOut(
 }
 
 /** Turns the work round and opens its end; with a steady beside it first where it stands out too far even for that. */
-function beginSecond(build: Build, open: (first: boolean) => Session, steady: (otherwise: RuledOut) => Session, tail: boolean): Session {
+function beginSecond(
+  build: Build,
+  open: (first: boolean) => Session,
+  steady: (otherwise: RuledOut) => Session,
+  tail: boolean,
+): Session {
   const back = markOf(build);
   try {
     const session = open(true);
@@ -345,7 +389,11 @@ function secondEnd(
   const begins = Math.min(from, ...flats.map((f) => f.runOutFrom - LIMITS.overRun.value)) - 2;
   const stage = stageIn(build, view);
   const grips = gripsOf(stage, begins, 38, build.lathe.spindleBore);
-  needGrip(grips[0], 'Nothing plain is left to hold the other end by: threads, flats or tapers all the way.');
+  if (grips.length === 0)
+    throw new RuledOut(
+      'grip-plain',
+      'Nothing plain is left to hold the other end by: threads or tapers all the way.',
+    );
   const back = markOf(build);
   let failure: RuledOut | null = null;
   for (const grip of grips.slice(0, 3)) {
@@ -371,7 +419,8 @@ function holdSecond(
 ): Session {
   const hold = latheHold(build, found.diameter, true, found.onFlats ?? false);
   const grip = { ...found, from: Math.max(found.from, found.to - hold.reach) };
-  if (!longEnough(grip)) throw new RuledOut('grip-length', `Ø${mm(grip.diameter)} is held on too short a length.`);
+  if (!longEnough(grip))
+    throw new RuledOut('grip-length', `Ø${mm(grip.diameter)} is held on too short a length.`);
   const run = { trim: trims.second, from, runOn: 0 };
   const open = (first: boolean): Session =>
     openSetUp(
@@ -387,7 +436,9 @@ function holdSecond(
         datum: 'Stops are from the end faced here.',
         minutes: hold.minutes + 1 + (tails.second ? 2 : 0),
         turned: first,
-        title: first ? `turn round, grip on ${grip.onFlats ? 'the flats' : `Ø${mm(grip.diameter)}`}` : 'grip again as before, against the same face',
+        title: first
+          ? `turn round, grip on ${grip.onFlats ? 'the flats' : `Ø${mm(grip.diameter)}`}`
+          : 'grip again as before, against the same face',
         reasons: grip.onFlats ? ['turn-round', 'grip-polygon'] : ['turn-round'],
       },
       run,
@@ -397,10 +448,25 @@ function holdSecond(
       build,
       view,
       grip,
-      { machine: build.lathe.id, holding: hold.name, ...(hold.item ? { holdingItem: hold.item } : {}), datum: 'Stops are from the end faced here.', minutes: hold.minutes + 6, turned: false },
+      {
+        machine: build.lathe.id,
+        holding: hold.name,
+        ...(hold.item ? { holdingItem: hold.item } : {}),
+        datum: 'Stops are from the end faced here.',
+        minutes: hold.minutes + 6,
+        turned: false,
+      },
       run,
       otherwise,
     );
   const session = beginSecond(build, open, steady, tails.second);
-  return workEnd(session, { tail: tails.second, flats, grip, regrip: () => open(false), regripSteady: steady, comesBack: false, partingWidth: 0 });
+  return workEnd(session, {
+    tail: tails.second,
+    flats,
+    grip,
+    regrip: () => open(false),
+    regripSteady: steady,
+    comesBack: false,
+    partingWidth: 0,
+  });
 }

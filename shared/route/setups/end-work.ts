@@ -47,7 +47,9 @@ export function workEnd(session: Session, work: EndWork): Session {
   if (work.flats.length === 0) return endForms(session, work);
   const rows = rowsWorked(session);
   const trims = rows.some(
-    (row) => row.kind === 'cone' && work.flats.some((f) => f.runOutTo > row.from + 1e-9 && f.runOutFrom < row.to - 1e-9),
+    (row) =>
+      row.kind === 'cone' &&
+      work.flats.some((f) => f.runOutTo > row.from + 1e-9 && f.runOutFrom < row.to - 1e-9),
   );
   const later = trims || session.tail;
   if (!later) endForms(session, work);

@@ -1,5 +1,5 @@
 import type { Build } from '../draft';
-import { addOperation, RuledOut, stageIn } from '../draft';
+import { addOperation, stageIn } from '../draft';
 import type { View } from '../features';
 import type { Grip } from '../grips';
 import { LIMITS } from '../rules';
@@ -26,7 +26,11 @@ export interface SetUpWish {
 }
 
 /** Opens a set-up, grips the work in it, and gives the session its methods work in. */
-export function openSetUp(build: Build, wish: SetUpWish, before: { trim: number; from: number; runOn: number }): Session {
+export function openSetUp(
+  build: Build,
+  wish: SetUpWish,
+  before: { trim: number; from: number; runOn: number },
+): Session {
   const { view, grip } = wish;
   const number = build.setups.length + 1;
   const id = `S${number}`;
@@ -69,7 +73,9 @@ export function openSetUp(build: Build, wish: SetUpWish, before: { trim: number;
     tool: wish.holding,
     toolItem: wish.holdingItem,
     figures: null,
-    after: last ? [{ key: last.key, rule: wish.turned ? 'turn-round' : number === 1 ? 'saw-first' : 'set-up-whole' }] : [],
+    after: last
+      ? [{ key: last.key, rule: wish.turned ? 'turn-round' : number === 1 ? 'saw-first' : 'set-up-whole' }]
+      : [],
     reasons: wish.reasons,
     check: wish.turned ? 'runs true' : 'tight, key out',
     handling: 0,
@@ -96,7 +102,14 @@ export function indicate(session: Session, within: number): void {
     check: `dial, ${mm(within)}`,
     needs: [
       dial
-        ? { kind: 'instrument', need: 'dial indicator', state: 'held', by: dial.id, why: `${dial.name}, ${dial.place}.`, alternatives: [] }
+        ? {
+            kind: 'instrument',
+            need: 'dial indicator',
+            state: 'held',
+            by: dial.id,
+            why: `${dial.name}, ${dial.place}.`,
+            alternatives: [],
+          }
         : short('instrument', 'dial indicator', 'None in the register.'),
     ],
     handling: 2,
@@ -115,14 +128,28 @@ export interface LatheHold {
 /** The lathe's hold on a diameter; without one, a short is written down and the plan goes on with a plain chuck. */
 export function latheHold(build: Build, diameter: number, finished: boolean, onFlats = false): LatheHold {
   // A round collet does not sit on flats: three jaws do.
-  const hold = holdsFor(build.register, build.lathe, diameter, finished).find((h) => !onFlats || (h.kind === 'chuck' && 'kind' in h.item && h.item.kind === 'three-jaw')) ?? null;
+  const hold =
+    holdsFor(build.register, build.lathe, diameter, finished).find(
+      (h) => !onFlats || (h.kind === 'chuck' && 'kind' in h.item && h.item.kind === 'three-jaw'),
+    ) ?? null;
   const spec = `hold ${onFlats ? 'the flats of ' : ''}Ø${mm(diameter)} on ${build.lathe.name.toLowerCase()}`;
   if (!hold) {
-    build.planNeeds.push(short('hold', spec, 'No chuck or collet of this lathe closes on it.', ['buy the collet, or bore soft jaws']));
+    build.planNeeds.push(
+      short('hold', spec, 'No chuck or collet of this lathe closes on it.', [
+        'buy the collet, or bore soft jaws',
+      ]),
+    );
     return { hold, name: 'Three-jaw chuck', minutes: 3, reach: LIMITS.mouthOfJaw.value };
   }
   if (!build.planNeeds.some((n) => n.need === spec))
-    build.planNeeds.push({ kind: 'hold', need: spec, state: 'held', by: hold.item.id, why: `${hold.name}, ${hold.item.place}.`, alternatives: [] });
+    build.planNeeds.push({
+      kind: 'hold',
+      need: spec,
+      state: 'held',
+      by: hold.item.id,
+      why: `${hold.name}, ${hold.item.place}.`,
+      alternatives: [],
+    });
   return { hold, name: hold.name, item: hold.item.id, minutes: hold.minutes, reach: hold.reach };
 }
 
@@ -132,7 +159,13 @@ export function standsOut(build: Build, view: View, grip: Grip): string {
   return `${mm(Math.round((stage.x1 - grip.to) * 10) / 10)} out of the jaws`;
 }
 
-export function millSetUp(build: Build, view: View, grip: Grip, indexing: Indexing, outboard: boolean): SetUpWish {
+export function millSetUp(
+  build: Build,
+  view: View,
+  grip: Grip,
+  indexing: Indexing,
+  outboard: boolean,
+): SetUpWish {
   const machine = build.mill;
   return {
     view,
@@ -148,9 +181,4 @@ export function millSetUp(build: Build, view: View, grip: Grip, indexing: Indexi
     title: `grip in ${indexing.name.toLowerCase()}`,
     reasons: ['stick-for-milling', indexing.rule],
   };
-}
-
-export function needGrip(grip: Grip | undefined, why: string): Grip {
-  if (!grip) throw new RuledOut('grip-plain', why);
-  return grip;
 }

@@ -8,7 +8,10 @@ import type { Candidate } from './candidate';
 export function shutOut(views: Views, candidate: Candidate): RuledOut | null {
   const view = candidate.first === 'right' ? views.right : views.left;
   const other = candidate.first === 'right' ? views.left : views.right;
-  return endShut(view, candidate.meets) ?? (candidate.secondEnd ? endShut(other, view.length - candidate.meets) : null);
+  return (
+    endShut(view, candidate.meets) ??
+    (candidate.secondEnd ? endShut(other, view.length - candidate.meets) : null)
+  );
 }
 
 function endShut(view: View, from: number): RuledOut | null {

@@ -64,8 +64,18 @@ export function openWithSteady(
   const spec = `fixed steady on Ø${mm(place.diameter)}`;
   build.planNeeds.push(
     steady
-      ? { kind: 'tool', need: spec, state: 'held', by: steady.id, why: `${steady.name}, ${steady.place}.`, alternatives: [] }
-      : short('tool', spec, 'No steady in the register.', ['borrow or make a steady', 'leave the centre hole in the drawing']),
+      ? {
+          kind: 'tool',
+          need: spec,
+          state: 'held',
+          by: steady.id,
+          why: `${steady.name}, ${steady.place}.`,
+          alternatives: [],
+        }
+      : short('tool', spec, 'No steady in the register.', [
+          'borrow or make a steady',
+          'leave the centre hole in the drawing',
+        ]),
   );
   const session = openSetUp(
     build,

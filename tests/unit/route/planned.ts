@@ -31,11 +31,17 @@ export interface Planned {
 }
 
 /** A handle (or shaft) of the demo depot planned in a shop; a missing route fails unless it is expected. */
-export function plannedHandle(wish: HandleWish, register: Register = exampleRegister, mayFail = false): Planned {
+export function plannedHandle(
+  wish: HandleWish,
+  register: Register = exampleRegister,
+  mayFail = false,
+): Planned {
   const id = wish.rows ? 'stepped-shaft' : 'tapered-handle';
   const template = templateById(id);
   if (!template) throw new Error(`no template ${id}`);
-  const evaluation = evaluate(template, wish.rows ? shaftValues(wish) : handleValues(wish), { entryUnit: 'mm' });
+  const evaluation = evaluate(template, wish.rows ? shaftValues(wish) : handleValues(wish), {
+    entryUnit: 'mm',
+  });
   const { part } = evaluation;
   if (!part) throw new Error(JSON.stringify(evaluation.problems));
   const scheme = buildScheme(template, { ...evaluation, part }, { generalTolerance: 'ISO 2768-m' });

@@ -12,7 +12,8 @@ import { planRoute } from '../../../shared/route/plan';
 import { plannedHandle } from './planned';
 
 const without = (change: Partial<Register>): Register => ({ ...exampleRegister, ...change });
-const tools = (keep: (tool: Register['tools'][number]) => boolean): Register => without({ tools: exampleRegister.tools.filter(keep) });
+const tools = (keep: (tool: Register['tools'][number]) => boolean): Register =>
+  without({ tools: exampleRegister.tools.filter(keep) });
 const HEX = { bar: 25, acrossFlats: 22, taperEnd: 16, taperLength: 95 };
 
 describe('the example shop', () => {
@@ -25,7 +26,9 @@ describe('the example shop', () => {
     ]; // prettier-ignore
     const ids = items.map((item) => item.id);
     expect(ids.filter((id, index) => ids.indexOf(id) !== index)).toEqual([]);
-    expect(exampleRegister.bars.filter((bar) => !materialById(bar.material)).map((bar) => bar.id)).toEqual([]);
+    expect(exampleRegister.bars.filter((bar) => !materialById(bar.material)).map((bar) => bar.id)).toEqual(
+      [],
+    );
   });
 
   it('can make every worked example, and the simulator agrees', () => {
@@ -35,7 +38,10 @@ describe('the example shop', () => {
         const { part } = evaluation;
         if (!part) throw new Error(`${example.id} is no part`);
         const scheme = buildScheme(template, { ...evaluation, part }, { generalTolerance: 'ISO 2768-m' });
-        const { route, capacity } = planRoute(part, scheme, exampleRegister, { quantity: 3, material: part.material });
+        const { route, capacity } = planRoute(part, scheme, exampleRegister, {
+          quantity: 3,
+          material: part.material,
+        });
         expect(capacity.needs.filter((need) => need.state !== 'held')).toEqual([]);
         expect(capacity.verdict).toBe('can');
         if (route) expect(simulate(route, part)).toEqual([]);
@@ -52,7 +58,10 @@ describe('a register that lacks something', () => {
   });
 
   it('no bar thick enough: a route with what to buy', () => {
-    const { capacity, route } = plannedHandle(HEX, without({ bars: exampleRegister.bars.filter((bar) => bar.size < 20) }));
+    const { capacity, route } = plannedHandle(
+      HEX,
+      without({ bars: exampleRegister.bars.filter((bar) => bar.size < 20) }),
+    );
     expect(capacity.verdict).toBe('cannot');
     const bar = capacity.needs.find((need) => need.kind === 'bar');
     expect(bar).toMatchObject({ state: 'short' });
@@ -61,13 +70,23 @@ describe('a register that lacks something', () => {
   });
 
   it('an empty rack is the same as none of it', () => {
-    const { capacity } = plannedHandle(HEX, without({ bars: exampleRegister.bars.map((bar) => ({ ...bar, quantity: 0 })) }));
+    const { capacity } = plannedHandle(
+      HEX,
+      without({ bars: exampleRegister.bars.map((bar) => ({ ...bar, quantity: 0 })) }),
+    );
     expect(capacity.needs.find((need) => need.kind === 'bar')?.why).toMatch(/no round bar of this material/);
   });
 
   it('no die, thread with room to run out: single point, as another way', () => {
-    const rows = [{ diameter: 20, length: 40 }, { diameter: 8, length: 4 }, { diameter: 10, length: 16, thread: 'M10' }];
-    const { route, part, capacity } = plannedHandle({ rows }, tools((tool) => tool.kind !== 'die'));
+    const rows = [
+      { diameter: 20, length: 40 },
+      { diameter: 8, length: 4 },
+      { diameter: 10, length: 16, thread: 'M10' },
+    ];
+    const { route, part, capacity } = plannedHandle(
+      { rows },
+      tools((tool) => tool.kind !== 'die'),
+    );
     expect(route.operations.some((o) => o.method === 'thread-single-point')).toBe(true);
     expect(capacity.verdict).toBe('with-changes');
     const need = capacity.needs.find((each) => each.state === 'alternative' && each.need.startsWith('die'));
@@ -76,11 +95,17 @@ describe('a register that lacks something', () => {
   });
 
   it('no die, thread up to a shoulder: the run-out that stays is said', () => {
-    const { route, part } = plannedHandle(HEX, tools((tool) => tool.kind !== 'die'));
+    const { route, part } = plannedHandle(
+      HEX,
+      tools((tool) => tool.kind !== 'die'),
+    );
     const thread = route.operations.find((o) => o.method === 'thread-single-point');
     expect(thread?.runOut).toBeCloseTo(3, 9);
     expect(simulate(route, part)).toEqual([]);
-    const silent = { ...route, operations: route.operations.map((o) => (o === thread ? { ...o, runOut: undefined } : o)) };
+    const silent = {
+      ...route,
+      operations: route.operations.map((o) => (o === thread ? { ...o, runOut: undefined } : o)),
+    };
     expect(simulate(silent, part).map((fault) => fault.rule)).toContain('thread-run-out');
   });
 
@@ -100,7 +125,10 @@ describe('a register that lacks something', () => {
   });
 
   it('what is short, when it is supplied, turns the verdict', () => {
-    const short = plannedHandle(HEX, tools((tool) => tool.kind !== 'tail-centre')).capacity;
+    const short = plannedHandle(
+      HEX,
+      tools((tool) => tool.kind !== 'tail-centre'),
+    ).capacity;
     expect(short.verdict).toBe('cannot');
     expect(plannedHandle(HEX).capacity.verdict).toBe('can');
   });
@@ -108,9 +136,18 @@ describe('a register that lacks something', () => {
   it('never does better than the whole shop', () => {
     const rank = { can: 0, 'with-changes': 1, cannot: 2 };
     for (const kind of new Set(exampleRegister.tools.map((tool) => tool.kind))) {
-      const { answer } = plannedHandle(HEX, tools((tool) => tool.kind !== kind), true);
+      const { answer } = plannedHandle(
+        HEX,
+        tools((tool) => tool.kind !== kind),
+        true,
+      );
       expect(rank[answer.capacity.verdict]).toBeGreaterThanOrEqual(rank.can);
-      if (answer.route) expect(answer.route.operations.every((o) => exampleRegister.tools.find((t) => t.id === o.toolItem)?.kind !== kind)).toBe(true);
+      if (answer.route)
+        expect(
+          answer.route.operations.every(
+            (o) => exampleRegister.tools.find((t) => t.id === o.toolItem)?.kind !== kind,
+          ),
+        ).toBe(true);
     }
   });
 });
