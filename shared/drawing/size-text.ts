@@ -38,6 +38,19 @@ export function formatOf(size: Size, writing: Writing): LengthFormat {
   return writing.unit === 'in' && writing.style === 'asme' ? { ...base, decimals: inchDecimals(size) } : base;
 }
 
+/** Two limits one over the other show the same number of decimals; a plain zero stays as it is (ISO 129-1). */
+function alike(upper: string, lower: string): [string, string] {
+  const decimals = (text: string): number => /[.,](\d*)$/.exec(text)?.[1]?.length ?? 0;
+  const most = Math.max(decimals(upper), decimals(lower));
+  const sign = upper.includes(',') || lower.includes(',') ? ',' : '.';
+  const fill = (text: string): string => {
+    const lacking = most - decimals(text);
+    if (text === '0' || lacking === 0) return text;
+    return `${text}${decimals(text) === 0 ? sign : ''}${'0'.repeat(lacking)}`;
+  };
+  return [fill(upper), fill(lower)];
+}
+
 function toleranceRuns(size: Size, format: LengthFormat): { runs: Run[]; text: string } {
   const { kind, upper, lower, code } = size.tolerance;
   if (kind === 'symmetric') {
@@ -46,8 +59,7 @@ function toleranceRuns(size: Size, format: LengthFormat): { runs: Run[]; text: s
   }
   if (kind !== 'limits' && kind !== 'fit') return { runs: [], text: '' };
   const name = kind === 'fit' && code ? ` ${code}` : '';
-  const high = formatSigned(upper, format);
-  const low = formatSigned(lower, format);
+  const [high, low] = alike(formatSigned(upper, format), formatSigned(lower, format));
   const runs: Run[] = name ? [{ kind: 'text', text: name }] : [];
   return { runs: [...runs, { kind: 'stack', upper: high, lower: low }], text: `${name} ${high}/${low}` };
 }

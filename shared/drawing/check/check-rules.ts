@@ -16,6 +16,7 @@ import { scaleSeries } from './rules/scale-series';
 import { sizeMissing } from './rules/size-missing';
 import { sizeTwice } from './rules/size-twice';
 import { spacing } from './rules/spacing';
+import { stackedLimits } from './rules/stacked-limits';
 import { textDirection } from './rules/text-direction';
 import { textSize } from './rules/text-size';
 import { textStroke } from './rules/text-stroke';
@@ -46,6 +47,7 @@ export const checkRules: readonly CheckRule[] = [
   sizeTwice,
   geometry,
   figure,
+  stackedLimits,
   balloons,
   numbers,
 ];

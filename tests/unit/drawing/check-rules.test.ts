@@ -223,6 +223,13 @@ const cases: readonly Case[] = [
     })),
   },
   {
+    rule: 'stacked-limits',
+    spoil: change(size('spigotDiameter'), (g) => ({
+      ...g,
+      marks: g.marks.map((m) => (m.type === 'text' && m.text === '0' ? { ...m, text: '+0.01' } : m)),
+    })),
+  },
+  {
     rule: 'balloons',
     from: numbered,
     spoil: (s) => ({
