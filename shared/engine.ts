@@ -32,7 +32,7 @@ export interface EngineRequest {
 /** Title-block fields that the records know; the engine fills in the rest. */
 export type EngineTitleBlock = Pick<
   TitleBlock,
-  'number' | 'revision' | 'drawn' | 'checked' | 'state' | 'owner' | 'revisions'
+  'number' | 'revision' | 'drawn' | 'checked' | 'state' | 'stateDate' | 'owner' | 'revisions'
 >;
 
 export interface EngineGood {

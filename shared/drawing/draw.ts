@@ -3,6 +3,7 @@ import type { Problem } from '../problem';
 import type { Scheme } from '../scheme/scheme';
 import { SHEET_SIZES } from '../standards/sheets';
 import { formatLength } from '../units/format';
+import { adviseSheet } from './check/advise-sheet';
 import type { Box } from './geometry/box';
 import { moveMarks } from './move';
 import { notesOf } from './notes/notes';
@@ -11,10 +12,11 @@ import type { Arrangement } from './passes/arrange';
 import { attemptsFor } from './passes/choose-sheet';
 import type { Attempt } from './passes/choose-sheet';
 import { notesColumn } from './passes/notes-column';
-import { foot, frameBox } from './passes/title-block';
+import { frameBox } from './passes/frame';
+import { foot } from './passes/title-block';
 import type { Foot } from './passes/title-block';
 import { stampGroup } from './passes/stamp';
-import type { DrawingOptions, Group, Sheet } from './sheet';
+import type { AdviceFinding, DrawingOptions, Group, Sheet } from './sheet';
 import type { Writing } from './size-text';
 
 /** Clean layouts compared before the best is taken; counted in work, so that the same values give the same bytes. */
@@ -25,6 +27,7 @@ const PRICE_WEIGHT = 1.2;
 const EDGE = 4;
 const NEARLY = 50;
 const OVER_FOOT = 4;
+const OVER_REVISIONS = 2;
 
 interface Tried {
   attempt: Attempt;
@@ -52,11 +55,8 @@ function ground(attempt: Attempt, part: Part, options: DrawingOptions, writing: 
     title: options.titleBlock,
   });
   const [x0, y0, x1] = frameBox(attempt.sheet);
-  const said = strip.overflow.map(
-    ({ label, text }) => `${label.charAt(0)}${label.slice(1).toLowerCase()}: ${text}`,
-  );
-  const bottom = strip.block[1];
-  const notes = notesColumn([...said, ...notesOf(part, writing)], options.unit, x0 + EDGE, bottom);
+  const bottom = Math.min(strip.block[1], strip.revisionsTop - OVER_REVISIONS);
+  const notes = notesColumn(notesOf(part, writing), options.unit, x0 + EDGE, bottom);
   const over: Box = [x0 + EDGE, y0 + EDGE, x1 - EDGE, notes.box[1] - 3];
   const beside: Box = [notes.box[2] + 5, y0 + EDGE, x1 - EDGE, strip.block[1] - OVER_FOOT];
   return { foot: strip, notes: notes.group, beside: notes.box[2], rooms: [over, beside] };
@@ -174,13 +174,13 @@ function nothingFits(part: Part, options: DrawingOptions, writing: Writing): Pro
 
 /**
  * Part and scheme to a finished sheet: views, sizes, balloons, notes, title block, the stamp of an unreleased sheet.
- * A problem when nothing listed holds the part. The same input gives the same sheet anywhere.
+ * Advice beside it: what could be lovelier. A problem when nothing listed holds the part. The same input gives the same sheet anywhere.
  */
 export function drawSheet(
   part: Part,
   scheme: Scheme,
   options: DrawingOptions,
-): { sheet: Sheet } | { problem: Problem } {
+): { sheet: Sheet; advice: readonly AdviceFinding[] } | { problem: Problem } {
   const writing: Writing = {
     style: options.style,
     unit: options.unit,
@@ -188,5 +188,6 @@ export function drawSheet(
   };
   const best = search(part, scheme, options, writing);
   if (!best || !best.place) return { problem: nothingFits(part, options, writing) };
-  return { sheet: assemble(best, options, writing) };
+  const sheet = assemble(best, options, writing);
+  return { sheet, advice: adviseSheet(sheet, scheme, part) };
 }

@@ -147,6 +147,9 @@ export interface CheckFinding {
   entities: readonly string[];
 }
 
+/** What a draughtsman would do better, though no checker refuses it. */
+export type AdviceFinding = CheckFinding;
+
 /** What the title block says that no geometry knows. Absent strings print as a dash. */
 export interface TitleBlock {
   title: string;
@@ -162,7 +165,10 @@ export interface TitleBlock {
   quantity: string;
   drawn: { by: string; date: string } | null;
   checked: { by: string; date: string } | 'NO SECOND CHECK' | null;
+  /** `RELEASED` or, with its date, `RELEASED 2026-03-09`: the stamp's words. */
   state: string;
+  /** Date of the state where `state` has none; absent: that of the signature which made it. */
+  stateDate?: string;
   owner: string;
   revisions: readonly { letter: string; change: string; by: string; date: string }[];
 }

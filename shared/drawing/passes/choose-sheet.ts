@@ -6,7 +6,7 @@ import { INCH_SHEETS, ISO_SHEETS } from '../../standards/sheets';
 import type { DrawingOptions, SheetSize } from '../sheet';
 import { makeXMap } from '../x-map';
 import type { XMap } from '../x-map';
-import { frameBox } from './title-block';
+import { frameBox } from './frame';
 
 export interface Attempt {
   sheet: SheetSize;

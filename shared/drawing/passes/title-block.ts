@@ -1,36 +1,38 @@
-/** The strip at the foot of the sheet: title block (fields of ISO 7200), revision table, place for the code that says whether the paper is current. */
-import { frameOf, SHEET_SIZES } from '../../standards/sheets';
+/**
+ * The title block (fields of ISO 7200) with the state's stamp at its left, where a code will say whether the paper is
+ * current. Afterwards: nothing in it is cut short; a row grows where its words need a second line.
+ */
 import { lineMark } from '../arrow';
 import type { Box } from '../geometry/box';
 import type { DraftingStyle, Group, Mark, SheetSize, TitleBlock } from '../sheet';
 import { projectionSymbol } from '../symbols/projection';
 import { TEXTURE_ROOM, textureSymbol } from '../symbols/texture';
 import { fontSizeFor, textWidth } from '../text-metrics';
+import { wrapWords } from './cell-words';
+import { frameBox, frameMarks } from './frame';
+import { revisionTable } from './revision-table';
+import { stateParts, stateStamp } from './state-stamp';
 
 const BLOCK_WIDTH = 170;
 const CODE_WIDTH = 26;
 const CODE_SIDE = 22;
+const STAMP_WIDTH = 24;
 const ROW = 10;
-const REVISION_ROW = 6;
-const REVISION_WIDTH = 96;
-const MOST_REVISIONS = 4;
+const ROWS = 4;
 const PAD = 1.2;
+/** Baselines of a label and of one line under it; of the label and the first of several lines; and what several need. */
+const ONE_LINE = { label: 3.2, first: 8.8 } as const;
+const MORE_LINES = { label: 3.3, first: 7.55, under: 1 } as const;
+const LINE_PITCH = 4.2;
 const SMALL = fontSizeFor(2.5);
 /** Title and number: as large as they fit. */
 const TITLE_SIZES = [3.5, 3].map(fontSizeFor);
-
-/** A field whose words are longer than its room: they are said in the notes. */
-export interface Overflow {
-  label: string;
-  text: string;
-}
 
 export interface Foot {
   groups: Group[];
   block: Box;
   /** Top of the revision table beside the block. */
   revisionsTop: number;
-  overflow: Overflow[];
 }
 
 interface Cell {
@@ -38,53 +40,9 @@ interface Cell {
   text: string;
   width: number;
   large?: boolean;
-  /** Figures are never cut short: the cell points to the notes instead. */
-  inNotes?: boolean;
+  /** A date, on the line of the label. */
+  date?: string;
   draw?: (x: number, y: number) => Mark[];
-}
-
-/** The frame of a sheet: x0, y0, x1, y1. */
-export function frameBox(size: SheetSize): Box {
-  const f = frameOf(SHEET_SIZES[size]);
-  return [f.x, f.y, f.x + f.width, f.y + f.height];
-}
-
-function blockBox(size: SheetSize): Box {
-  const [, , x1, y1] = frameBox(size);
-  return [x1 - BLOCK_WIDTH, y1 - 4 * ROW, x1, y1];
-}
-
-/** The square, on paper, that is kept for the code of a released sheet. */
-export function codePlace(size: SheetSize): Box {
-  const [x0, y0] = blockBox(size);
-  const edge = (CODE_WIDTH - CODE_SIDE) / 2;
-  return [x0 + edge, y0 + edge, x0 + edge + CODE_SIDE, y0 + edge + CODE_SIDE];
-}
-
-function fitted(text: string, size: number, room: number): string {
-  if (textWidth(text, size) <= room) return text;
-  return `${[...text].slice(0, Math.max(1, Math.floor(room / (0.6 * size)) - 1)).join('')}…`;
-}
-
-function write(x: number, y: number, size: number, text: string, weight: 400 | 700 = 400): Mark {
-  return { type: 'text', x, y, size, anchor: 'start', text, weight };
-}
-
-function fillCell(cell: Cell, x: number, y: number, overflow: Overflow[]): Mark[] {
-  const marks: Mark[] = [write(x + PAD, y + 3.6, SMALL, cell.label)];
-  if (cell.draw) return [...marks, ...cell.draw(x, y)];
-  const text = cell.text === '' ? '–' : cell.text;
-  const room = cell.width - 2 * PAD;
-  const size = (cell.large ? TITLE_SIZES : []).find((each) => textWidth(text, each) <= room) ?? SMALL;
-  const whole = textWidth(text, size) <= room;
-  if (!whole) overflow.push({ label: cell.label, text });
-  const shown = whole ? text : cell.inNotes ? 'see notes' : fitted(text, size, room);
-  return [...marks, write(x + PAD, y + 8.7, size, shown, 700)];
-}
-
-function person(signed: TitleBlock['drawn'] | TitleBlock['checked']): string {
-  if (signed === null) return 'not yet';
-  return typeof signed === 'string' ? signed : `${signed.by}, ${signed.date}`;
 }
 
 interface BlockFacts {
@@ -95,15 +53,72 @@ interface BlockFacts {
   title: TitleBlock;
 }
 
+/** The square, on paper, that is kept for the code of a released sheet. */
+export function codePlace(size: SheetSize): Box {
+  const [, , x1, y1] = frameBox(size);
+  const edge = (CODE_WIDTH - CODE_SIDE) / 2;
+  const x = x1 - BLOCK_WIDTH + edge;
+  const y = y1 - ROWS * ROW + edge;
+  return [x, y, x + CODE_SIDE, y + CODE_SIDE];
+}
+
+function write(x: number, y: number, size: number, text: string, weight: 400 | 700 = 400): Mark {
+  return { type: 'text', x, y, size, anchor: 'start', text, weight };
+}
+
+/** A cell's words in the largest letters that hold them, in as many lines as they need. */
+function lettered(cell: Cell): { size: number; lines: string[] } {
+  const text = cell.text === '' ? '–' : cell.text;
+  const room = cell.width - 2 * PAD;
+  const size = (cell.large ? TITLE_SIZES : []).find((each) => textWidth(text, each) <= room) ?? SMALL;
+  return { size, lines: wrapWords(text, size, room) };
+}
+
+function fillCell(cell: Cell, x: number, y: number): Mark[] {
+  const { size, lines } = cell.draw ? { size: SMALL, lines: [''] } : lettered(cell);
+  const set = lines.length > 1 ? MORE_LINES : ONE_LINE;
+  const marks: Mark[] = [write(x + PAD, y + set.label, SMALL, cell.label)];
+  if (cell.date)
+    marks.push({
+      type: 'text',
+      x: x + cell.width - PAD,
+      y: y + set.label,
+      size: SMALL,
+      anchor: 'end',
+      text: cell.date,
+    });
+  if (cell.draw) return [...marks, ...cell.draw(x, y)];
+  lines.forEach((line, i) => marks.push(write(x + PAD, y + set.first + i * LINE_PITCH, size, line, 700)));
+  return marks;
+}
+
+function rowHeight(cells: readonly Cell[]): number {
+  const lines = Math.max(...cells.map((cell) => (cell.draw ? 1 : lettered(cell).lines.length)));
+  return lines > 1 ? MORE_LINES.first + (lines - 1) * LINE_PITCH + MORE_LINES.under : ROW;
+}
+
+function signedCell(label: string, signed: TitleBlock['drawn'] | TitleBlock['checked'], width: number): Cell {
+  if (signed === null) return { label, text: 'not yet', width };
+  return typeof signed === 'string'
+    ? { label, text: signed, width }
+    : { label, text: signed.by, date: signed.date, width };
+}
+
 function rows({ size, style, unit, scaleText, title }: BlockFacts): Cell[][] {
   const material = [title.materialText, title.stockText].filter((t) => t !== '').join('; ');
   const texture = (x: number, y: number): Mark[] => [
     textureSymbol(x + PAD, y + 8.9, 2.5),
-    write(x + PAD + 2.5 * TEXTURE_ROOM + 0.6, y + 8.7, SMALL, fitted(title.texture || '–', SMALL, 15), 700),
+    write(x + PAD + 2.5 * TEXTURE_ROOM + 0.6, y + ONE_LINE.first, SMALL, title.texture || '–', 700),
   ];
   const projection = (x: number, y: number): Mark[] => [
     projectionSymbol(x + 15, y + 7.2, 3.6, style === 'iso' ? 'first' : 'third'),
   ];
+  const brief: Cell = { label: 'GENERAL TOLERANCE', text: title.generalTolerance, width: 42 };
+  // A table by decimal places takes a row of its own.
+  const besides = lettered(brief).lines.length === 1;
+  const tolerance: Cell = besides
+    ? brief
+    : { ...brief, label: 'GENERAL TOLERANCE, UNLESS A SIZE SAYS OTHERWISE', width: 144 };
   return [
     [
       { label: 'TITLE', text: title.title, width: 84, large: true },
@@ -117,24 +132,39 @@ function rows({ size, style, unit, scaleText, title }: BlockFacts): Cell[][] {
       { label: 'QTY', text: title.quantity, width: 12 },
       { label: 'MASS', text: title.mass, width: 18 },
     ],
+    ...(besides ? [] : [[tolerance]]),
     [
-      { label: 'GENERAL TOLERANCE', text: title.generalTolerance, width: 42, inNotes: true },
-      { label: 'TEXTURE', text: title.texture, width: 22, draw: texture },
-      { label: 'SCALE', text: scaleText, width: 20 },
+      ...(besides ? [tolerance] : []),
+      { label: 'TEXTURE', text: title.texture, width: besides ? 22 : 42, draw: texture },
+      { label: 'SCALE', text: scaleText, width: besides ? 20 : 42 },
       { label: 'PROJECTION', text: '', width: 30, draw: projection },
       { label: 'UNIT', text: unit, width: 12 },
       { label: 'SIZE', text: size, width: 18 },
     ],
     [
-      { label: 'DRAWN', text: person(title.drawn), width: 49 },
-      { label: 'CHECKED', text: person(title.checked), width: 49 },
-      { label: 'STATE', text: title.state, width: 46 },
+      signedCell('DRAWN', title.drawn, 49),
+      signedCell('CHECKED', title.checked, 49),
+      { label: 'OWNER', text: title.owner, width: 46 },
     ],
   ];
 }
 
-function block(facts: BlockFacts, overflow: Overflow[]): Mark[] {
-  const [x0, y0, x1, y1] = blockBox(facts.size);
+/** The date of a state: as the records give it, else of the signature that made it. */
+function stateOf(title: TitleBlock): { word: string; date: string } {
+  const { word, date } = stateParts(title.state);
+  if (date !== '') return { word, date };
+  if (title.stateDate) return { word, date: title.stateDate };
+  const checked = typeof title.checked === 'object' && title.checked !== null ? title.checked.date : '';
+  if (word === 'RELEASED') return { word, date: checked || (title.drawn?.date ?? '') };
+  const open = ['DRAFT', 'TRIAL', 'IN REVIEW'].includes(word);
+  return { word, date: open ? (title.drawn?.date ?? '') : '' };
+}
+
+function block(facts: BlockFacts): { marks: Mark[]; box: Box } {
+  const [, , x1, y1] = frameBox(facts.size);
+  const x0 = x1 - BLOCK_WIDTH;
+  const table = rows(facts).map((cells) => ({ cells, height: rowHeight(cells) }));
+  const y0 = y1 - table.reduce((sum, row) => sum + row.height, 0);
   const marks: Mark[] = [
     {
       type: 'polyline',
@@ -147,101 +177,38 @@ function block(facts: BlockFacts, overflow: Overflow[]): Mark[] {
     },
     lineMark('table', x0 + CODE_WIDTH, y0, x0 + CODE_WIDTH, y1),
   ];
-  rows(facts).forEach((cells, i) => {
-    const y = y0 + i * ROW;
-    if (i > 0) marks.push(lineMark('table', x0 + CODE_WIDTH, y, x1, y));
+  let y = y0;
+  for (const { cells, height } of table) {
+    if (y > y0) marks.push(lineMark('table', x0 + CODE_WIDTH, y, x1, y));
     let x = x0 + CODE_WIDTH;
     cells.forEach((cell, k) => {
-      if (k > 0) marks.push(lineMark('table', x, y, x, y + ROW));
-      marks.push(...fillCell(cell, x, y, overflow));
+      if (k > 0) marks.push(lineMark('table', x, y, x, y + height));
+      marks.push(...fillCell(cell, x, y));
       x += cell.width;
     });
-  });
-  const code = codePlace(facts.size);
-  marks.push({
-    type: 'polyline',
-    line: 'table',
-    closed: true,
-    points: [
-      { x: code[0], y: code[1] },
-      { x: code[2], y: code[1] },
-      { x: code[2], y: code[3] },
-      { x: code[0], y: code[3] },
-    ],
-  });
-  ['IS THIS', 'PAPER', 'CURRENT?'].forEach((line, i) =>
-    marks.push(write(x0 + 2, y0 + 29.4 + i * 4, SMALL, line, i === 2 ? 700 : 400)),
+    y += height;
+  }
+  const [cx0, , cx1, cy1] = codePlace(facts.size);
+  const wider = (STAMP_WIDTH - CODE_SIDE) / 2;
+  marks.push(
+    ...stateStamp(stateOf(facts.title), [cx0 - wider, y0 + (CODE_WIDTH - CODE_SIDE) / 2, cx1 + wider, cy1]),
+    write(x0 + 2, cy1 + 5.4, SMALL, 'STATE WHEN'),
+    write(x0 + 2, cy1 + 9.4, SMALL, 'PRINTED'),
   );
-  return marks;
-}
-
-function revisionTable(size: SheetSize, title: TitleBlock): { marks: Mark[]; top: number } {
-  const [bx0, , , y1] = blockBox(size);
-  const frameLeft = frameBox(size)[0];
-  const x0 = bx0 - REVISION_WIDTH < frameLeft + 3 ? frameLeft : bx0 - REVISION_WIDTH;
-  const widths = [8.6, bx0 - x0 - 8.6 - 22.5 - 23.2, 22.5, 23.2];
-  const lines = [
-    ...title.revisions
-      .slice(-MOST_REVISIONS)
-      .reverse()
-      .map((r) => [r.letter, r.change, r.by, r.date]),
-    ['REV', 'WHAT CHANGED', 'BY', 'DATE'],
-  ];
-  const top = y1 - lines.length * REVISION_ROW;
-  const marks: Mark[] = [lineMark('table', x0, top, x0, y1)];
-  lines.forEach((texts, i) => {
-    const y = top + i * REVISION_ROW;
-    marks.push(lineMark('table', x0, y, bx0, y));
-    let x = x0;
-    texts.forEach((text, k) => {
-      const width = widths[k] ?? 0;
-      if (k > 0) marks.push(lineMark('table', x, y, x, y + REVISION_ROW));
-      if (text !== '') marks.push(write(x + 0.8, y + 4.2, SMALL, fitted(text, SMALL, width - 1.4)));
-      x += width;
-    });
-  });
-  return { marks, top };
-}
-
-function frame(size: SheetSize): Mark[] {
-  const [x0, y0, x1, y1] = frameBox(size);
-  const { width, height } = SHEET_SIZES[size];
-  const mx = width / 2;
-  const my = height / 2;
-  const rect: Mark = {
-    type: 'polyline',
-    line: 'frame',
-    closed: true,
-    points: [
-      { x: x0, y: y0 },
-      { x: x1, y: y0 },
-      { x: x1, y: y1 },
-      { x: x0, y: y1 },
-    ],
-  };
-  // Centring marks, from the paper's edge into the frame (ISO 5457).
-  return [
-    rect,
-    lineMark('table', mx, Math.max(0, y0 - 5), mx, y0 + 3),
-    lineMark('table', mx, y1, mx, Math.min(height, y1 + 5)),
-    lineMark('table', Math.max(0, x0 - 5), my, x0 + 3, my),
-    lineMark('table', x1 - 3, my, Math.min(width, x1 + 5), my),
-  ];
+  return { marks, box: [x0, y0, x1, y1] };
 }
 
 /** Frame, title block and revision table of one sheet. */
 export function foot(facts: BlockFacts): Foot {
-  const overflow: Overflow[] = [];
-  const blockMarks = block(facts, overflow);
-  const revisions = revisionTable(facts.size, facts.title);
+  const { marks, box } = block(facts);
+  const revisions = revisionTable(facts.size, facts.title.revisions, box[0]);
   return {
     groups: [
-      { role: 'frame', marks: frame(facts.size) },
-      { role: 'title-block', marks: blockMarks },
+      { role: 'frame', marks: frameMarks(facts.size) },
+      { role: 'title-block', marks },
       { role: 'revision-table', marks: revisions.marks },
     ],
-    block: blockBox(facts.size),
+    block: box,
     revisionsTop: revisions.top,
-    overflow,
   };
 }
