@@ -14,6 +14,9 @@ const LEAF_WORDS: Readonly<Record<Leaf, string>> = {
   'sign-off': 'Sign-off',
 };
 
+/** Longer titles are lettered smaller, so that the head keeps one line. */
+const LONG_TITLE = 24;
+
 /** Number, title, stamp, how it is kept; the leaves; the one main act. */
 export function RevisionHead() {
   const { address, answer, draft, shop, keeper, editable } = useOpenRevision();
@@ -35,7 +38,7 @@ export function RevisionHead() {
   return (
     <div className="head">
       <div className="head-name">
-        <h1>
+        <h1 data-long={draft.title.length > LONG_TITLE ? '' : undefined}>
           <span>{revision.drawing.number}</span> {draft.title}
         </h1>
         <Stamp revision={revision} timeZone={shop.timeZone} />

@@ -40,9 +40,10 @@ export function limitsText(size: Size, format: LengthFormat): string {
   return `${fixed(size.upperLimit, format)} / ${fixed(size.lowerLimit, format)}`;
 }
 
-/** Limits stand with the same decimals, so that they can be compared at a glance. */
-function fixed(mm: number, format: LengthFormat): string {
+/** A limit as it stands beside another, with the same decimals, so that both can be compared at a glance. */
+export function fixed(mm: number, format: LengthFormat): string {
   const decimals = format.unit === 'in' ? 4 : 3;
   const value = format.unit === 'in' ? mm / 25.4 : mm;
-  return formatNumber(value, decimals, { fixed: true });
+  const text = formatNumber(value, decimals, { fixed: true });
+  return format.style === 'asme' ? text.replace(/^(-?)0\./, '$1.') : text;
 }

@@ -12,6 +12,7 @@ import { useDocumentTitle } from '../../lib/document-title';
 import { isTyping } from '../../lib/keyboard';
 import { paths } from '../../lib/paths';
 import { useShop } from '../../lib/session';
+import { useSingleKeys } from '../../lib/single-keys';
 import { readAddress, writeAddress } from './address-search';
 import { Ledger } from './ledger';
 import { NothingFound } from './nothing-found';
@@ -29,6 +30,7 @@ export function DrawingsPage() {
   const [search, setSearch] = useSearchParams();
   const address = readAddress(search);
   const [line, setLine] = useState(address.line);
+  const [singleKeys, setSingleKeys] = useSingleKeys();
   const box = useRef<HTMLInputElement>(null);
   useDocumentTitle(address.line ? `${address.line}, drawings` : 'Drawings');
 
@@ -39,6 +41,7 @@ export function DrawingsPage() {
     return () => window.clearTimeout(wait);
   });
   useEffect(() => {
+    if (!singleKeys) return undefined;
     const toLine = (event: KeyboardEvent) => {
       if (event.key !== '/' || isTyping(event.target) || event.ctrlKey || event.metaKey || event.altKey)
         return;
@@ -47,7 +50,7 @@ export function DrawingsPage() {
     };
     window.addEventListener('keydown', toLine);
     return () => window.removeEventListener('keydown', toLine);
-  }, []);
+  }, [singleKeys]);
 
   const entryUnit = shop?.entryUnit ?? 'mm';
   const reading = useMemo(
@@ -138,7 +141,14 @@ export function DrawingsPage() {
           <NoDrawings shop={slug} mayStart={mayStart} />
         ))}
       {rows.length > 0 && (
-        <Ledger shop={slug} rows={rows} unit={entryUnit} timeZone={shop?.timeZone} mayStart={mayStart} />
+        <Ledger
+          shop={slug}
+          rows={rows}
+          unit={entryUnit}
+          timeZone={shop?.timeZone}
+          mayStart={mayStart}
+          singleKeys={singleKeys}
+        />
       )}
       {drawings.hasNextPage && (
         <p className="more">
@@ -148,11 +158,12 @@ export function DrawingsPage() {
         </p>
       )}
       {rows.length > 0 && (
-        <p className="keys">
+        <div className="keys">
           <span>Enter opens the marked row</span>
-          {mayStart && <span>S starts a drawing like it</span>}
-          <span>/ goes to the search line</span>
-        </p>
+          {singleKeys && mayStart && <span>S starts a drawing like it</span>}
+          {singleKeys && <span>/ goes to the search line</span>}
+          <Tick label="single keys" checked={singleKeys} onChange={setSingleKeys} />
+        </div>
       )}
     </main>
   );

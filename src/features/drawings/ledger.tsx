@@ -16,6 +16,8 @@ interface LedgerProps {
   unit: LengthUnit;
   timeZone?: string;
   mayStart: boolean;
+  /** Whether S starts a drawing like the marked row. */
+  singleKeys: boolean;
 }
 
 const VERDICTS: Readonly<Record<NonNullable<DrawingRow['verdict']>, string>> = {
@@ -25,7 +27,7 @@ const VERDICTS: Readonly<Record<NonNullable<DrawingRow['verdict']>, string>> = {
 };
 
 /** A stores ledger of drawings with their last set-up; arrows move from row to row. */
-export function Ledger({ shop, rows, unit, timeZone, mayStart }: LedgerProps) {
+export function Ledger({ shop, rows, unit, timeZone, mayStart, singleKeys }: LedgerProps) {
   const table = useRef<HTMLTableElement>(null);
   const navigate = useNavigate();
   const length = (mm: number | null) => (mm === null ? '–' : formatLength(mm, { unit, style: 'iso' }));
@@ -37,7 +39,7 @@ export function Ledger({ shop, rows, unit, timeZone, mayStart }: LedgerProps) {
     if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
       event.preventDefault();
       links[at + (event.key === 'ArrowDown' ? 1 : -1)]?.focus();
-    } else if (event.key.toLowerCase() === 's' && mayStart) {
+    } else if (event.key.toLowerCase() === 's' && mayStart && singleKeys) {
       const row = rows[at];
       if (row) void navigate(paths.startDrawing(shop, { drawing: row.id, revision: row.revision.id }));
     }

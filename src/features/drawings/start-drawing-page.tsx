@@ -18,7 +18,7 @@ import { useShop, type Shop } from '../../lib/session';
 import { useRevision } from '../../revision/api/revision';
 import { FamilyPicture } from './family-picture';
 import { useStartDrawing } from './start-drawing';
-import { startingSettings, startingValues } from './starting-values';
+import { beginsWith, startingSettings, startingValues } from './starting-values';
 
 /** Starts a drawing from a family, or like one that is there. */
 export function StartDrawingPage() {
@@ -137,10 +137,10 @@ function StartForm({ shop, family, like }: StartFormProps) {
             wrong={titleWrong}
           />
           <div className="field">
-            <span className="hint">A figure without a unit means</span>
+            <span className="label">A figure typed without a unit means</span>
             <ChoiceRow
               name="entry-unit"
-              label="A figure without a unit means"
+              label="A figure typed without a unit means"
               choices={UNITS}
               value={entryUnit}
               disabled={like !== undefined}
@@ -149,9 +149,14 @@ function StartForm({ shop, family, like }: StartFormProps) {
                 setStyle(unit === 'in' ? 'asme' : 'iso');
               }}
             />
+            <p className="hint">
+              {like
+                ? `As in ${like.drawing.number}, whose figures stay as they were typed.`
+                : 'It stays so for this drawing. A figure with its unit, such as 1/2 in, is read as it says.'}
+            </p>
           </div>
           <div className="field">
-            <span className="hint">Drafting style</span>
+            <span className="label">Drafting style</span>
             <ChoiceRow
               name="style"
               label="Drafting style"
@@ -160,6 +165,7 @@ function StartForm({ shop, family, like }: StartFormProps) {
               onChange={setStyle}
             />
           </div>
+          {!like && <p className="begins-with">{beginsWith(template, entryUnit)}</p>}
           {start.error && !titleWrong && (
             <p className="wrong" role="alert">
               {allWords(start.error)}

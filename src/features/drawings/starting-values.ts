@@ -13,6 +13,14 @@ export function startingValues(template: Template, entryUnit: LengthUnit, title:
   return { ...values, title };
 }
 
+/** Whose sizes a new drawing begins with, in words. */
+export function beginsWith(template: Template, entryUnit: LengthUnit): string {
+  const example = workedExamples(template).find((each) => each.entryUnit === entryUnit);
+  return example
+    ? `It begins with the sizes of a worked example, ${example.name}, so that there is a sheet to look at at once. Type your own over them.`
+    : 'It begins with the usual sizes of the family, in millimetres, so that there is a sheet to look at at once. Type your own over them.';
+}
+
 /** A sheet as the style draws it unless somebody says otherwise. */
 export function startingSettings(style: 'iso' | 'asme', unit: LengthUnit): StartDrawingRequest['settings'] {
   return { unit, style, sheet: 'auto', scale: 'auto', balloons: true };

@@ -1,6 +1,6 @@
 import type { ParameterBase, TableParameter, Template, TypedValues } from '../../../shared/template/template';
 import { isTable } from '../../revision/labels';
-import { rowsOf } from '../../revision/draft';
+import { rowsOf, textAt } from '../../revision/draft';
 
 export interface OneRow {
   kind: 'one';
@@ -21,6 +21,28 @@ export interface FormRows {
   sheet: readonly OneRow[];
   /** Parameters that cannot be used yet; shown apart, each with its sentence. */
   notYet: readonly OneRow[];
+  /** Choices that cannot be used yet, of fields that have others; shown apart too. */
+  notYetChoices: readonly { label: string; sentence: string }[];
+}
+
+/** What may be chosen now, and what is chosen though it may not be, so that it can be left. */
+export function offeredChoices({ choices = [] }: ParameterBase, typed: string) {
+  return choices.filter(({ id, notYet }) => notYet === undefined || id === typed);
+}
+
+function choicesNotYet({ label, choices = [] }: ParameterBase): { label: string; sentence: string }[] {
+  const bySentence = new Map<string, string[]>();
+  for (const { label: choice, notYet } of choices)
+    if (notYet !== undefined)
+      bySentence.set(notYet, [...(bySentence.get(notYet) ?? []), choice.toLowerCase()]);
+  return [...bySentence].map(([sentence, names]) => ({ label: `${label}: ${names.join(', ')}`, sentence }));
+}
+
+/** A choice that leaves nothing to choose is no field. */
+function isSettled({ kind, choices, default: usual }: ParameterBase, typed: string): boolean {
+  if (kind !== 'choice' || !choices?.some(({ notYet }) => notYet !== undefined)) return false;
+  const [only, ...others] = choices.filter(({ notYet }) => notYet === undefined);
+  return only !== undefined && others.length === 0 && (typed === '' ? usual : typed) === only.id;
 }
 
 const OF_SHEET = ['title', 'material', 'quantity'];
@@ -33,6 +55,7 @@ export function formRows(template: Template, values: TypedValues, shown: readonl
   const shape: FormRow[] = [];
   const sheet: OneRow[] = [];
   const notYet: OneRow[] = [];
+  const notYetChoices: { label: string; sentence: string }[] = [];
   for (const parameter of template.parameters) {
     if (isTable(parameter)) {
       shape.push(tableRows(parameter, values, isShown));
@@ -41,10 +64,13 @@ export function formRows(template: Template, values: TypedValues, shown: readonl
     const row: OneRow = { kind: 'one', path: parameter.id, parameter };
     if (parameter.notYet !== undefined) notYet.push(row);
     else if (OF_SHEET.includes(parameter.id)) sheet.push(row);
-    else if (isShown(row)) shape.push(row);
+    else if (isShown(row)) {
+      notYetChoices.push(...choicesNotYet(parameter));
+      if (!isSettled(parameter, textAt(values, parameter.id))) shape.push(row);
+    }
   }
   sheet.sort((a, b) => OF_SHEET.indexOf(a.path) - OF_SHEET.indexOf(b.path));
-  return { shape, sheet, notYet };
+  return { shape, sheet, notYet, notYetChoices };
 }
 
 function tableRows(

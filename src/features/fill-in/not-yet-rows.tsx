@@ -3,9 +3,15 @@ import { SizeInput } from './size-input';
 import { useSizeForm } from './size-form';
 
 /** Fields that cannot be used yet. One that holds something is a field to empty; the rest only say their sentence. */
-export function NotYetRows({ rows }: { rows: readonly OneRow[] }) {
+export function NotYetRows({
+  rows,
+  choices = [],
+}: {
+  rows: readonly OneRow[];
+  choices?: readonly { label: string; sentence: string }[];
+}) {
   const form = useSizeForm();
-  if (rows.length === 0) return null;
+  if (rows.length + choices.length === 0) return null;
   return (
     <div className="not-yet">
       {rows.map(({ path, parameter }) => {
@@ -26,6 +32,12 @@ export function NotYetRows({ rows }: { rows: readonly OneRow[] }) {
           </div>
         );
       })}
+      {choices.map(({ label, sentence }) => (
+        <div key={label} className="not-yet-row">
+          <b>{label}</b>
+          <p>{sentence}</p>
+        </div>
+      ))}
     </div>
   );
 }

@@ -1,23 +1,27 @@
 import { v7 as uuid } from 'uuid';
 import { Button } from '../../components/button';
-import { withRowAdded, withRowMoved, withRowRemoved } from '../../revision/draft';
+import { withRowAdded } from '../../revision/draft';
 import { rowNoun } from '../../revision/labels';
 import { useOpenRevision } from '../../revision/open-revision';
-import type { OneRow, TableRows } from './field-rows';
-import { NotYetRows } from './not-yet-rows';
-import { SizeInput } from './size-input';
+import type { TableRows } from './field-rows';
 import { useSizeForm } from './size-form';
+import { StepRow } from './step-row';
+
+/** Room for what is typed, by kind of column: a toleranced diameter and a thread need more than a length. */
+const WIDTHS: Readonly<Record<string, number>> = { diameter: 118, thread: 118, length: 84 };
+const USUAL_WIDTH = 98;
 
 /** Repeating rows: added at the end, moved, removed; each keeps its hidden key, so its balloons and comments stay with it. */
 export function RowTable({ table }: { table: TableRows }) {
   const { change, draft } = useOpenRevision();
   const form = useSizeForm();
-  const { id, label, minimumRows, maximumRows, columns, hint } = table.parameter;
+  const { id, label, maximumRows, hint } = table.parameter;
+  const columns = table.parameter.columns.filter(({ notYet }) => notYet === undefined);
   const noun = rowNoun(label);
   const count = table.rows.length;
   const add = () => {
     const cells = Object.fromEntries(
-      columns.flatMap(({ id: column, default: text }) => (text ? [[column, text]] : [])),
+      table.parameter.columns.flatMap(({ id: column, default: text }) => (text ? [[column, text]] : [])),
     );
     change((before) => ({ ...before, values: withRowAdded(before.values, id, uuid().slice(0, 36), cells) }));
     window.setTimeout(
@@ -26,6 +30,8 @@ export function RowTable({ table }: { table: TableRows }) {
     );
   };
   const problem = form.problemOf(id);
+  const widths = columns.map(({ kind, id: column }) => WIDTHS[column] ?? WIDTHS[kind] ?? USUAL_WIDTH);
+  const gridTemplateColumns = `28px ${widths.map((width) => `minmax(0, ${width}fr)`).join(' ')}`;
   return (
     <section className="row-table" aria-label={label}>
       <header className="row-table-head">
@@ -39,89 +45,33 @@ export function RowTable({ table }: { table: TableRows }) {
           </Button>
         )}
       </header>
-      {(problem ?? hint) && (
-        <p className={problem ? 'row-under is-wrong-text' : 'row-under'}>{problem ?? hint}</p>
+      {problem && <p className="row-under is-wrong-text">{problem}</p>}
+      {!problem && form.editable && (
+        <p className="row-under">
+          {hint} Press the number of a {noun.toLowerCase()} to move or remove it.
+        </p>
+      )}
+      {count > 0 && (
+        <div className="step-heads" style={{ gridTemplateColumns }} aria-hidden="true">
+          <span />
+          {columns.map(({ id: column, label: words }) => (
+            <span key={column}>{words.toLowerCase()}</span>
+          ))}
+        </div>
       )}
       <ol>
         {table.rows.map((row) => (
-          <li key={row.key} className="step">
-            <div className="step-head">
-              <b>
-                {noun} {row.index + 1}
-              </b>
-              {form.editable && (
-                <span className="step-acts">
-                  <Button
-                    size="dense"
-                    disabled={row.index === 0}
-                    aria-label={`Move ${noun.toLowerCase()} ${row.index + 1} left`}
-                    onClick={() =>
-                      change((b) => ({ ...b, values: withRowMoved(b.values, id, row.index, -1) }))
-                    }
-                  >
-                    Left
-                  </Button>
-                  <Button
-                    size="dense"
-                    disabled={row.index === count - 1}
-                    aria-label={`Move ${noun.toLowerCase()} ${row.index + 1} right`}
-                    onClick={() =>
-                      change((b) => ({ ...b, values: withRowMoved(b.values, id, row.index, 1) }))
-                    }
-                  >
-                    Right
-                  </Button>
-                  <Button
-                    size="dense"
-                    disabled={count <= minimumRows}
-                    aria-label={`Remove ${noun.toLowerCase()} ${row.index + 1}`}
-                    onClick={() => change((b) => ({ ...b, values: withRowRemoved(b.values, id, row.index) }))}
-                  >
-                    Remove
-                  </Button>
-                </span>
-              )}
-            </div>
-            <div className="step-cells">
-              {row.cells.map((cell) => (
-                <StepCell key={cell.parameter.id} cell={cell} />
-              ))}
-            </div>
-            <NotYetRows rows={row.notYet.filter(({ path }) => form.textOf(path) !== '')} />
-          </li>
+          <StepRow
+            key={row.key}
+            table={table.parameter}
+            row={row}
+            columns={columns.map(({ id: column }) => column)}
+            grid={gridTemplateColumns}
+            count={count}
+          />
         ))}
       </ol>
       {draft.values[id] === undefined && <p className="row-under">No rows yet.</p>}
     </section>
-  );
-}
-
-function StepCell({ cell }: { cell: OneRow }) {
-  const form = useSizeForm();
-  const { path, parameter } = cell;
-  const problem = form.problemOf(path);
-  const size = form.sizeOf(path);
-  const figure = form.figureOf(path);
-  const typed = form.textOf(path);
-  const figureWords = figure === '–' || figure === '' || figure === typed.trim() ? '' : figure;
-  return (
-    <div
-      className="step-cell moves"
-      data-lit={form.lit === path ? '' : undefined}
-      data-wrong={problem ? '' : undefined}
-      onPointerEnter={() => size && form.setLit(path)}
-      onPointerLeave={() => form.setLit(null)}
-      onFocus={() => form.setLit(path)}
-      onBlur={() => form.setLit(null)}
-    >
-      <label htmlFor={`field-${path}`}>
-        {size && size.balloon > 0 && <i>{size.balloon}</i>}
-        {parameter.label}
-      </label>
-      <SizeInput path={path} parameter={parameter} describedBy={`under-${path}`} />
-      <p id={`under-${path}`} className={problem ? 'is-wrong-text' : ''}>
-        {problem ?? [figureWords, form.limitsOf(path)].filter(Boolean).join('  ')}
-      </p>
-    </div>
   );
 }

@@ -5,6 +5,9 @@ import { countOf, verdictWords } from '../../components/verdict';
 import { paths } from '../../lib/paths';
 import { labelOf } from '../../revision/labels';
 import { useOpenRevision } from '../../revision/open-revision';
+import { CHECKED_WORDS } from './checked-words';
+
+const RULES = Object.values(CHECKED_WORDS);
 
 /** What the sheet check and the register say, and the caution that always stands. */
 export function SheetLines() {
@@ -20,14 +23,19 @@ export function SheetLines() {
         head="Sheet check"
         live
         act={
-          findings.length > 0 && (
-            <Button size="dense" aria-expanded={open} onClick={() => setOpen(!open)}>
-              What was found
+          good && (
+            <Button size="dense" aria-expanded={open} aria-controls="checked" onClick={() => setOpen(!open)}>
+              {findings.length > 0 ? 'What was found' : 'What was checked'}
             </Button>
           )
         }
       >
-        {good && (findings.length === 0 ? 'Clean. ' : <b className="is-no">{findings.length} found. </b>)}
+        {good &&
+          (findings.length === 0 ? (
+            `Clean, ${RULES.length} rules. `
+          ) : (
+            <b className="is-no">{findings.length} found. </b>
+          ))}
         {first && (
           <span className="is-wrong-text">
             {labelOf(template, first.path)} {good ? 'stands at its last good figure.' : 'is wrong.'}
@@ -35,12 +43,22 @@ export function SheetLines() {
         )}
         {!good && !first && 'No sheet yet.'}
       </SpeakingLine>
-      {open && findings.length > 0 && (
-        <ul className="plain-list">
-          {findings.map((finding, index) => (
-            <li key={index}>{finding.message}</li>
-          ))}
-        </ul>
+      {open && good && (
+        <div id="checked" className="checked">
+          {findings.length > 0 && (
+            <ul className="plain-list is-wrong-text">
+              {findings.map((finding, index) => (
+                <li key={index}>{finding.message}</li>
+              ))}
+            </ul>
+          )}
+          <p className="soft">The sheet is checked as a drawing office checks it:</p>
+          <ul className="plain-list">
+            {RULES.map((words) => (
+              <li key={words}>{words}</li>
+            ))}
+          </ul>
+        </div>
       )}
       <SpeakingLine
         head="Can we make it?"

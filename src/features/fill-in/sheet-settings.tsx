@@ -74,10 +74,14 @@ export function SheetSettingsPlate({ onClose }: { onClose: () => void }) {
           onChange={(style) => set({ style, sheet: 'auto', scale: 'auto' })}
         />
       </Row>
-      <p className="hint">
-        {good ? `${good.sheet.choice.replace(/\.?$/, '.')} ` : ''}The unit is for showing only: a figure typed
-        without a unit stays in {draft.entryUnit}.
-      </p>
+      <Row label="Typed in">
+        <p className="typed-in">
+          <b>{draft.entryUnit === 'in' ? 'inches' : 'millimetres'}</b>, as the drawing was started. The unit
+          above is for showing only: if this changed with it, every figure typed without a unit would become
+          another size. Type the unit with a figure, such as 1/2 in or 12 mm, to mix them.
+        </p>
+      </Row>
+      {good && <p className="hint">{good.sheet.choice.replace(/\.?$/, '.')}</p>}
       <Button size="dense" onClick={onClose}>
         Done
       </Button>

@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { ChoiceRow } from '../../components/choice-row';
-import type { OneRow } from './field-rows';
+import { offeredChoices, type OneRow } from './field-rows';
 import { SizeInput } from './size-input';
 import { useSizeForm } from './size-form';
 
@@ -8,6 +8,9 @@ const YES_NO = [
   { id: 'yes', label: 'yes' },
   { id: 'no', label: 'no' },
 ] as const;
+
+/** Longer names are lettered smaller, so that every row keeps one line. */
+const LONG_NAME = 15;
 
 /** One row of the table of sizes: number, name, as typed, figure, limits; a wrong one with its sentence under it. */
 export function SizeRow({ row }: { row: OneRow }) {
@@ -41,7 +44,11 @@ export function SizeRow({ row }: { row: OneRow }) {
       {isChoice ? (
         <span className="row-name">{parameter.label}</span>
       ) : (
-        <label className="row-name" htmlFor={`field-${path}`}>
+        <label
+          className="row-name"
+          data-long={parameter.label.length > LONG_NAME ? '' : undefined}
+          htmlFor={`field-${path}`}
+        >
           {parameter.label}
           <small className="limits-under">{form.limitsOf(path)}</small>
         </label>
@@ -50,7 +57,7 @@ export function SizeRow({ row }: { row: OneRow }) {
         <ChoiceRow
           name={path}
           label={parameter.label}
-          choices={parameter.kind === 'yes-no' ? YES_NO : (parameter.choices ?? [])}
+          choices={parameter.kind === 'yes-no' ? YES_NO : offeredChoices(parameter, form.textOf(path))}
           value={form.textOf(path) || (parameter.default ?? '')}
           onChange={(id) => form.setText(path, id)}
           disabled={!form.editable}

@@ -4,10 +4,11 @@ import { SetUpPictures } from '../../components/set-up-pictures';
 import { countOf } from '../../components/verdict';
 import { paths } from '../../lib/paths';
 import { useOpenRevision } from '../../revision/open-revision';
-import { itemName } from '../../revision/item-name';
+import { machineWord } from '../../revision/item-name';
 import { cardsOf, inShort } from '../../revision/set-up-stages';
 
-const SMALL = { width: 200, height: 66 };
+/** Drawn larger than it is shown, so that the jaws leave room for the work. */
+const SMALL = { width: 270, height: 88 };
 
 /** From bar to part: the set-ups small, pictures left, words right. */
 export function SmallCards() {
@@ -30,12 +31,16 @@ export function SmallCards() {
         {cardsOf(route).map((card, index) => (
           <li key={card.setUp.id}>
             <span className="card-number">{index + 1}</span>
-            <SetUpPictures card={card} label={`Set-up ${index + 1}, before and after`} size={SMALL} />
+            <SetUpPictures
+              card={{ ...card, stops: undefined }}
+              label={`Set-up ${index + 1}, before and after`}
+              size={SMALL}
+            />
             <p>
               <Link to={`${paths.revision(shop, drawing, revision, 'route')}#${card.setUp.id}`}>
-                {itemName(register, card.setUp.machine)}, {card.setUp.holding}
+                {machineWord(register, card.setUp.machine)}, {lowerFirst(card.setUp.holding)}
               </Link>
-              {inShort(card.operations).map((words) => (
+              {inShort(card.operations.filter(({ method }) => method !== 'inspect')).map((words) => (
                 <span key={words}>{words}</span>
               ))}
             </p>
@@ -44,4 +49,9 @@ export function SmallCards() {
       </ol>
     </Plate>
   );
+}
+
+/** A name within a sentence; one that begins with capitals or figures keeps them. */
+function lowerFirst(name: string): string {
+  return /^[A-Z][a-z]/.test(name) ? name.charAt(0).toLowerCase() + name.slice(1) : name;
 }

@@ -3,6 +3,7 @@ import { moveField } from '../../lib/keyboard';
 import { useOpenRevision } from '../../revision/open-revision';
 import { formRows } from './field-rows';
 import { NotYetRows } from './not-yet-rows';
+import { NoteRow } from './note-row';
 import { RowTable } from './row-table';
 import { useSizeForm } from './size-form';
 import { SizeRow } from './size-row';
@@ -18,12 +19,14 @@ export function TableOfSizes() {
         Its sheet stands as it is stored.
       </p>
     );
-  const { shape, sheet, notYet } = formRows(template, draft.values, shown);
+  const { shape, sheet, notYet, notYetChoices } = formRows(template, draft.values, shown);
   const onKeyDown = (event: KeyboardEvent<HTMLElement>) => {
     const { target } = event;
     if (!(target instanceof HTMLElement) || !target.hasAttribute('data-field')) return;
     const isText = target instanceof HTMLInputElement && target.type === 'text';
-    const down = event.key === 'Enter' || (event.key === 'ArrowDown' && isText);
+    // A note has lines of its own.
+    if (target instanceof HTMLTextAreaElement) return;
+    const down = (event.key === 'Enter' && !event.shiftKey) || (event.key === 'ArrowDown' && isText);
     const up = (event.key === 'ArrowUp' && isText) || (event.key === 'Enter' && event.shiftKey);
     if ((!down && !up) || target instanceof HTMLButtonElement) return;
     if (moveField(event.currentTarget, target, up ? -1 : 1)) event.preventDefault();
@@ -50,11 +53,12 @@ export function TableOfSizes() {
         {sheet.map((row) => (
           <SizeRow key={row.path} row={row} />
         ))}
+        <NoteRow />
       </div>
-      {emptyNotYet.length > 0 && (
+      {emptyNotYet.length + notYetChoices.length > 0 && (
         <details className="not-yet-fold">
-          <summary>{emptyNotYet.length} more that cannot be asked for yet</summary>
-          <NotYetRows rows={emptyNotYet} />
+          <summary>{emptyNotYet.length + notYetChoices.length} more that cannot be asked for yet</summary>
+          <NotYetRows rows={emptyNotYet} choices={notYetChoices} />
         </details>
       )}
     </section>

@@ -51,11 +51,11 @@ export function useSizeForm(): SizeForm {
         if (!parameter || wrong.has(path)) return '–';
         const size = sizes.get(path);
         const value = evaluatedAt(result, path);
-        if (!value && size)
+        if ((!value || value.value === null || value.value === '') && size)
           return figureText({ ...parameter, kind: 'length' }, { text: '', value: size.nominal }, format);
         if (size && parameter.kind === 'thread')
           return figureText({ ...parameter, kind: 'length' }, { text: '', value: size.nominal }, format);
-        return figureText(parameter, value, format);
+        return parameter.kind === 'count' ? '' : figureText(parameter, value, format);
       },
       limitsOf: (path) => {
         const size = sizes.get(path);

@@ -73,7 +73,7 @@ export function CapacityPage() {
         </Plate>
       ))}
       {lost.length > 0 && (
-        <Plate head="Ways that lost" aside={lost.length}>
+        <Plate head="Ways not taken" aside={lost.length}>
           <table className="ruled needs">
             <tbody>
               {lost.map((other) => (

@@ -7,7 +7,7 @@ export const NEED_WORDS: Readonly<Record<Need['state'], string>> = {
 };
 
 export function operationWords(operation: number): string {
-  return operation === 0 ? 'the plan as a whole' : `operation ${operation}`;
+  return operation === 0 ? 'the whole route' : `operation ${operation}`;
 }
 
 /** One need that wants a decision: needed, short, instead. */

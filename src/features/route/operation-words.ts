@@ -1,6 +1,7 @@
 import type { Operation, Target } from '../../../shared/route/route';
 import type { Size } from '../../../shared/scheme/scheme';
 import { formatAngle, formatLength, formatNumber, type LengthFormat } from '../../../shared/units/format';
+import { fixed } from '../../revision/figures';
 import { toRadians } from '../../../shared/units/angle';
 
 /** Stop lengths from the set-up's datum, in the order they are met. */
@@ -10,7 +11,13 @@ export function stopWords({ stops }: Operation, format: LengthFormat): string {
     .join(', ');
 }
 
-const ACROSS: ReadonlySet<string> = new Set(['diameter', 'thread', 'knurl', 'hole']);
+const SIGNS: Readonly<Partial<Record<Size['kind'], string>>> = {
+  diameter: 'Ø',
+  thread: 'Ø',
+  knurl: 'Ø',
+  hole: 'Ø',
+  radius: 'R',
+};
 
 /** What to reach, with limits: `Ø14 14.000 / 13.957`. */
 export function targetWords(
@@ -55,14 +62,11 @@ function balloonWords(targets: readonly Target[], sizes: ReadonlyMap<string, Siz
 
 function oneTarget(target: Target, size: Size | undefined, format: LengthFormat): string {
   if (size?.designation) return size.designation;
-  const sign = size && ACROSS.has(size.kind) ? 'Ø' : '';
+  const sign = size ? (SIGNS[size.kind] ?? '') : '';
   if (size?.kind === 'angle') return `${formatNumber(target.nominal, 3)}°`;
   const nominal = `${sign}${formatLength(target.nominal, format)}`;
   if (target.upperLimit === target.lowerLimit) return nominal;
-  const decimals = format.unit === 'in' ? 4 : 3;
-  const limit = (mm: number) =>
-    formatNumber(format.unit === 'in' ? mm / 25.4 : mm, decimals, { fixed: true });
-  return `${nominal}  ${limit(target.upperLimit)} / ${limit(target.lowerLimit)}`;
+  return `${nominal}  ${fixed(target.upperLimit, format)} / ${fixed(target.lowerLimit, format)}`;
 }
 
 export function feedWords({ feed, feedPer }: Operation, format: LengthFormat): string {

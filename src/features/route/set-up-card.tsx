@@ -2,6 +2,7 @@ import { CautionLine } from '../../components/lines';
 import { WithDiameters } from '../../components/diameter';
 import { SetUpPictures } from '../../components/set-up-pictures';
 import { STANDING_CAUTIONS } from '../../../shared/route/cautions';
+import type { Operation } from '../../../shared/route/route';
 import type { Size } from '../../../shared/scheme/scheme';
 import type { LengthFormat } from '../../../shared/units/format';
 import type { CardFacts } from '../../revision/set-up-stages';
@@ -81,19 +82,7 @@ export function SetUpCard({ card, number, sizes, format, machine }: SetUpCardPro
               <td className="op-target">
                 <WithDiameters text={targetWords(operation, sizes, format)} />
               </td>
-              <td className="op-tool">{operation.tool}</td>
-              <td className="figure op-rpm" data-word="rpm">
-                {operation.speed > 0 ? Math.round(operation.speed) : ''}
-              </td>
-              <td className="figure op-feed" data-word="feed">
-                {operation.cut ? feedWords(operation, format) : ''}
-              </td>
-              <td className="op-passes" data-word="passes">
-                {operation.passes > 0 ? operation.passes : ''}
-              </td>
-              <td className="op-check" data-word="check">
-                {operation.check}
-              </td>
+              <ToolCells operation={operation} format={format} />
               <td className="op-done">
                 <span className="paper-square" aria-hidden="true" />
               </td>
@@ -111,6 +100,41 @@ export function SetUpCard({ card, number, sizes, format, machine }: SetUpCardPro
       </table>
       <p className="card-foot">{STANDING_CAUTIONS.join(' ')}</p>
     </article>
+  );
+}
+
+/** Tool, figures and check. What has no figures gives their room to the tool, or to what it is measured with. */
+function ToolCells({ operation, format }: { operation: Operation; format: LengthFormat }) {
+  const { method, tool, check, speed, cut, passes } = operation;
+  const checked = (
+    <td className="op-check" data-word="check" colSpan={method === 'inspect' ? 5 : 1}>
+      {check}
+    </td>
+  );
+  if (method === 'inspect') return checked;
+  if (speed <= 0 && !cut && passes <= 0)
+    return (
+      <>
+        <td className="op-tool" colSpan={4}>
+          {tool}
+        </td>
+        {checked}
+      </>
+    );
+  return (
+    <>
+      <td className="op-tool">{tool}</td>
+      <td className="figure op-rpm" data-word="rpm">
+        {speed > 0 ? Math.round(speed) : ''}
+      </td>
+      <td className="figure op-feed" data-word="feed">
+        {cut ? feedWords(operation, format) : ''}
+      </td>
+      <td className="op-passes" data-word="passes">
+        {passes > 0 ? passes : ''}
+      </td>
+      {checked}
+    </>
   );
 }
 

@@ -70,10 +70,10 @@ export function Signatures() {
         <dd>{signed(drawn ?? saved)}</dd>
         <dt>checked</dt>
         <dd>{noSecondCheck ? <b className="is-other">NO SECOND CHECK</b> : signed(checked)}</dd>
-        {contentHash && (
+        {checked && contentHash && (
           <>
-            <dt>contents</dt>
-            <dd className="hash">{contentHash.slice(0, 16)}</dd>
+            <dt>signed for</dt>
+            <dd className="hash">contents {contentHash.slice(0, 12)}</dd>
           </>
         )}
       </dl>

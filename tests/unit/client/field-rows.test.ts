@@ -4,7 +4,7 @@ import { evaluate } from '../../../shared/template/evaluate';
 import type { TypedRow, TypedValues } from '../../../shared/template/template';
 import { templateById } from '../../../templates';
 import { shownPaths } from '../../../src/engine/shown-paths';
-import { formRows } from '../../../src/features/fill-in/field-rows';
+import { formRows, offeredChoices } from '../../../src/features/fill-in/field-rows';
 
 function rowsOf(id: string, change: TypedValues = {}) {
   const template = templateById(id);
@@ -30,6 +30,19 @@ describe('the form of a family', () => {
     for (const { parameter } of rows.notYet) expect(parameter.notYet).toBeTruthy();
     const shown = paths(rows);
     for (const { path } of rows.notYet) expect(shown).not.toContain(path);
+  });
+
+  it('offers no choice that cannot be drawn yet, and no field that leaves nothing to choose', () => {
+    const rows = rowsOf('tapered-handle');
+    expect(paths(rows)).not.toContain('taperBy');
+    const grip = rows.shape.find((row) => row.kind === 'one' && row.path === 'grip');
+    if (grip?.kind !== 'one') throw new Error('a tapered handle asks for its grip');
+    expect(offeredChoices(grip.parameter, 'hex').map(({ id }) => id)).toEqual(['round', 'hex']);
+    expect(offeredChoices(grip.parameter, 'knurled').map(({ id }) => id)).toContain('knurled');
+    expect(rows.notYetChoices.map(({ label }) => label)).toEqual(
+      expect.arrayContaining(['Grip: knurled', 'Taper given by: half angle, included angle, ratio']),
+    );
+    expect(paths(rowsOf('tapered-handle', { taperBy: 'ratio' }))).toContain('taperBy');
   });
 
   it('gives every row of a table its cells, a new one too', () => {
