@@ -4,6 +4,7 @@ import type { Build } from './draft';
 import { RuledOut, stageIn } from './draft';
 import type { View } from './features';
 import type { Method } from './route';
+import { LIMITS } from './rules';
 import { depthAllowed } from './support';
 
 /** One holding of the work, its free end to the right: what the methods need to know of it. */
@@ -68,10 +69,15 @@ export function metalOver(session: Session, from: number, to: number, radius: nu
   return Math.max(0, largestRadius(stageOf(session).outer, from + TOUCH, to - TOUCH) - radius);
 }
 
-/** Passes and the even depth of each. */
+/**
+ * Passes and the even depth of each. A depth that was allowed as a roughing cut stays one: evened out to a light cut
+ * it would be held to the finishing limit of bend.
+ */
 export function passesFor(metal: number, depth: number): { passes: number; depth: number } {
   const passes = Math.max(1, Math.ceil(metal / depth - 1e-9));
-  return { passes, depth: metal / passes };
+  const even = metal / passes;
+  const light = LIMITS.lightDepth.value;
+  return { passes, depth: depth > light && even <= light && passes > 1 ? depth : even };
 }
 
 export function keyOf(session: Session, name: string): string {

@@ -64,6 +64,9 @@ export function depthAllowed(asked: SupportAsked): SupportAnswer {
   // As stiff as its thinnest place all along, and hollowed by a centre: when even that is enough, nothing is integrated.
   if (withinLimit(depth, roughBend(free, smallest) * left)) return { depth, ratio };
   const perDepth = bendPerDepth(stage, gripEdge, farEnd) * left;
+  // A face is finished where it is cut, however deep the cut: it is held to the finishing limit.
+  if (method === 'face')
+    depth = Math.min(depth, Math.floor((LIMITS.bendFinish.value / perDepth) * 100) / 100);
   if (depth > LIMITS.lightDepth.value && perDepth * depth > LIMITS.bendRough.value) {
     depth = Math.floor((LIMITS.bendRough.value / perDepth) * 20) / 20;
     if (depth <= LIMITS.lightDepth.value) depth = LIMITS.lightDepth.value;

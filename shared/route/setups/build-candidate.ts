@@ -1,0 +1,92 @@
+import type { Part } from '../../part/part';
+import type { Build } from '../draft';
+import { RuledOut } from '../draft';
+import type { Views } from '../features';
+import { trimFor } from '../methods/ends';
+import { partOff } from '../methods/part-off';
+import type { Register } from '../register';
+import { LIMITS } from '../rules';
+import { firstMill } from '../shop';
+import { finishPiece, sawPiece } from './bench';
+import type { Candidate, Tails } from './candidate';
+import { inspectSetUp } from './end-work';
+import { firstEnd } from './first-end';
+import { layOut, shareFlats } from './layout';
+import { secondEnd } from './second-end';
+
+/** Builds the plan; where work stands out too far it is planned again with a centre. Throws RuledOut when it cannot be. */
+export function buildCandidate(part: Part, views: Views, register: Register, candidate: Candidate): Build {
+  let tails: Tails = { first: surelyNeedsCentre(views, candidate), second: false };
+  for (let attempt = 0; ; attempt += 1) {
+    const where = { end: 'first' as 'first' | 'second' };
+    try {
+      return attemptPlan(part, views, register, candidate, tails, where);
+    } catch (error) {
+      if (!(error instanceof RuledOut) || attempt >= 3) throw error;
+      const wantsCentre = error.rule === 'support-overhang' || error.rule === 'support-bend';
+      if (!wantsCentre || tails[where.end]) throw error;
+      tails = { ...tails, [where.end]: true };
+    }
+  }
+}
+
+/** True where even the raw bar stands out too far for the turning that its free end gets: spares a vain attempt. */
+function surelyNeedsCentre(views: Views, candidate: Candidate): boolean {
+  const view = candidate.first === 'right' ? views.right : views.left;
+  const last = view.rows[view.rows.length - 1];
+  if (!last || candidate.stock.asDrawn.includes(last.id)) return false;
+  return (view.length - candidate.meets) / (2 * candidate.stock.radius) > LIMITS.overhang.value;
+}
+
+function attemptPlan(
+  part: Part,
+  views: Views,
+  register: Register,
+  candidate: Candidate,
+  tails: Tails,
+  where: { end: 'first' | 'second' },
+): Build {
+  const view = candidate.first === 'right' ? views.right : views.left;
+  const other = candidate.first === 'right' ? views.left : views.right;
+  const trims = {
+    first: tails.first ? trimFor(view) : 0,
+    second: tails.second ? trimFor(other) : 0,
+  };
+  const layout = layOut(register, view, candidate, trims);
+  const build: Build = {
+    register,
+    lathe: candidate.lathe,
+    mill: firstMill(register),
+    saw: register.saws[0] ?? null,
+    stock: {
+      shape: candidate.stock.shape,
+      size: candidate.stock.size,
+      material: part.material,
+      ...(candidate.stock.bar ? { bar: candidate.stock.bar.id } : {}),
+      certified: candidate.stock.bar?.certified ?? false,
+    },
+    stockRadius: candidate.stock.radius,
+    views,
+    blank: layout.blank,
+    stage: layout.blank,
+    setups: [],
+    operations: [],
+    planNeeds: [],
+    notes: [],
+  };
+  const sides = shareFlats(view, candidate);
+  sawPiece(build, view, candidate.kind);
+  const end = firstEnd(build, view, candidate, tails, trims, layout, sides.first);
+  if (candidate.kind !== 'blank') {
+    inspectSetUp(end);
+    partOff(end, layout.cutAt, layout.width, !candidate.secondEnd);
+  } else inspectSetUp(end);
+  let last = end;
+  if (candidate.secondEnd) {
+    where.end = 'second';
+    last = secondEnd(build, other, candidate, tails, trims, sides.second);
+    inspectSetUp(last);
+  }
+  finishPiece(build, last);
+  return build;
+}
