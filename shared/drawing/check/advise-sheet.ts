@@ -6,6 +6,7 @@ import { extensionHugs } from './advice/extension-hugs';
 import { leaderLength } from './advice/leader-length';
 import { leaderOverOutline } from './advice/leader-over-outline';
 import { leadersLean } from './advice/leaders-lean';
+import { outlinesMerge } from './advice/outlines-merge';
 import { smallDetail } from './advice/small-detail';
 import { smallOnSheet } from './advice/small-on-sheet';
 import type { CheckRule } from './reading';
@@ -15,6 +16,7 @@ import { readSheet } from './reading';
 export const adviceRules: readonly CheckRule[] = [
   smallDetail,
   smallOnSheet,
+  outlinesMerge,
   leaderOverOutline,
   extensionHugs,
   breakInStubby,

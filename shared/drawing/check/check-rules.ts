@@ -4,6 +4,7 @@ import { centreLine } from './rules/centre-line';
 import { dimensionCrossing } from './rules/dimension-crossing';
 import { dimensionOverlap } from './rules/dimension-overlap';
 import { extensionEdge } from './rules/extension-edge';
+import { extensionTwice } from './rules/extension-twice';
 import { figure } from './rules/figure';
 import { foreignOutline } from './rules/foreign-outline';
 import { geometry } from './rules/geometry';
@@ -35,6 +36,7 @@ export const checkRules: readonly CheckRule[] = [
   foreignOutline,
   spacing,
   extensionEdge,
+  extensionTwice,
   leaderAngle,
   leadersCross,
   insideFrame,

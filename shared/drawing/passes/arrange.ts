@@ -21,6 +21,7 @@ import type { EndName, EndView } from './end-view';
 import { flatsSize } from './flats-size';
 import { interrupt } from './interrupt';
 import { noteDrafts } from './note-drafts';
+import { shareExtensions } from './share-extensions';
 import { stackLengths } from './stack-lengths';
 import { weighDrafts } from './weigh';
 
@@ -187,7 +188,7 @@ export function arrange(
   const others = readies.filter((r) => r.size.anchor.kind !== 'span' && !inEnd.includes(r));
   const chosen = chooseSizes(paper, others, lengths, narrow);
   const placed = [...lengths, ...chosen.placed];
-  const cutMarks = interrupt(placed.map((p) => p.candidate.marks));
+  const cutMarks = interrupt(shareExtensions(placed.map((p) => p.candidate.marks)));
   const drawings = placed.map((p, i): Drawing => ({
     view: p.forView,
     ready: p.ready,

@@ -9,8 +9,10 @@ import { toPaper } from '../x-map';
 import type { XMap } from '../x-map';
 
 const SAME = 1e-6;
-/** Where curves part for good, mm on paper: under it they print as one line that thins out. */
-const PARTING = 0.25;
+/** Where curves part for good, mm on paper: under the width of a line they would print as one thick one. */
+const PARTING = 0.4;
+/** An edge leaves the line it was one with over so many times the gap, so that it seems to bend away and not to jump. */
+const EASE = 5;
 /** A bend of the outline under this (radians) is no edge. */
 const LEAST_BEND = 0.01;
 
@@ -86,6 +88,8 @@ export function shoulderEdges(profile: readonly ProfileSpan[], { body, map, merg
     if (Math.abs(a.top - b.top) > SAME || Math.abs(a.bottom - b.bottom) > SAME) continue;
     const bend = Math.abs(Math.atan(slopeAt(left, 'end')) - Math.atan(slopeAt(right, 'start')));
     if (bend < LEAST_BEND) continue;
+    // A chamfer or a crown this flat on paper would print its edge and its end as one blot.
+    if (Math.min(left.to - left.from, right.to - right.from) * map.scale < merge) continue;
     for (const [low, high] of seenEdge(r, cutsTouching(body, left.to)))
       if ((high - low) * map.scale >= merge)
         marks.push(lineMark('visible', x, -high * map.scale, x, -low * map.scale));
@@ -199,6 +203,17 @@ function partingWidth(one: readonly Point[], two: readonly Point[], merge: numbe
   return widest >= merge ? Math.min(merge, Math.max(PARTING, closest + PARTING / 2)) : merge;
 }
 
+/** The line as far as x, its end worked out between two points; at least its first point. */
+function upTo(line: readonly Point[], x: number): Point[] {
+  const kept = line.filter((p) => p.x <= x);
+  const last = kept[kept.length - 1];
+  const next = line[kept.length];
+  if (!last) return line.slice(0, 1);
+  if (!next || next.x <= last.x) return kept;
+  const t = (x - last.x) / (next.x - last.x);
+  return [...kept, { x, y: last.y + t * (next.y - last.y) }];
+}
+
 /** One line where the two edges of a rounded corner would print as a blot, two from where they part. */
 function drawCorner(
   one: readonly Point[],
@@ -230,12 +245,13 @@ function drawCorner(
       joint.push(middle);
     } else {
       if (joint.length > 0) {
-        const last = joint[joint.length - 1];
+        const eased = upTo(joint, p.x - (EASE * Math.abs(p.y - q.y)) / 2);
+        const last = eased[eased.length - 1];
         if (last) {
           a.push(last);
           b.push(last);
         }
-        draw(joint);
+        draw(eased);
         joint = [];
       }
       a.push(p);
@@ -258,7 +274,10 @@ function drawLeaving(
     const o = outline[i];
     if (!o) return;
     if (Math.abs(p.y - o.y) >= merge) {
-      if (run.length === 0 && i > 0) run.push(outline[i - 1] ?? o);
+      if (run.length === 0 && i > 0) {
+        const from = upTo(outline.slice(0, i), p.x - EASE * Math.abs(p.y - o.y));
+        run.push(from[from.length - 1] ?? o);
+      }
       run.push(p);
     } else if (run.length > 0) {
       draw([...run, o]);

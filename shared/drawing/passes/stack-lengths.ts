@@ -31,6 +31,7 @@ const ISO_LEAST_IN = 8;
 const ASME_IN_AIR = 9.6;
 const OUTSIDE_TEXT = 4.2;
 const LANE_AIR = 0.9;
+const BESIDE_END = 1.3;
 /** What a plain figure reaches under its baseline; stacked limits reach lower and are lifted. */
 const PLAIN_DOWN = 1.06;
 
@@ -197,7 +198,10 @@ function outsideSide(span: Span, placed: readonly Span[], paper: AxisPaper): voi
 function extension(paper: AxisPaper, x: number, y: number): Mark {
   const { extensionGap, extensionPast } = paper.rules;
   const way = Math.sign(y);
-  const from = reachWithin(way > 0 ? paper.bottom : paper.top, x - 0.02, x + 0.02);
+  // At an end that falls away (a crown, a chamfer) the line starts clear of the metal beside it.
+  const atEnd = Math.abs(x - paper.left) < SAME || Math.abs(x - paper.right) < SAME;
+  const beside = atEnd ? BESIDE_END : 0.02;
+  const from = reachWithin(way > 0 ? paper.bottom : paper.top, x - beside, x + beside);
   return lineMark('extension', x, way * (from + extensionGap), x, y + way * extensionPast);
 }
 

@@ -132,6 +132,10 @@ const cases: readonly Case[] = [
     spoil: change(size('gripLength'), add(line('extension', FREE.x, FREE.y, FREE.x, FREE.y + 4))),
   },
   {
+    rule: 'extension-twice',
+    spoil: change(size('gripLength'), add(line('extension', base.x2, base.y2 - 4, base.x2, base.y2 + 1))),
+  },
+  {
     rule: 'leader-angle',
     spoil: change(
       size('threadChamfer'),
