@@ -13,11 +13,14 @@ export const BASELINE = 3.2;
 
 /** Room of pictures and of how the work is held, left of the operations. */
 export const PICTURE_WIDTH = 58;
+/** Left edge of the table of operations, and how many characters stand in it side by side. */
+export const TABLE_LEFT = PAGE.left + PICTURE_WIDTH;
+export const CHARACTERS = Math.floor((PAGE.right - TABLE_LEFT) / GLYPH);
 
 export interface Column {
   id: 'number' | 'operation' | 'stop' | 'target' | 'tool' | 'speed' | 'feed' | 'passes' | 'check' | 'tick';
   head: string;
-  /** Characters of room, with one for the gap. */
+  /** Characters of room, with one for the gap; in the list below the most that its longest word is given. */
   characters: number;
   align: 'start' | 'end';
 }
@@ -37,10 +40,10 @@ export const COLUMNS: readonly Column[] = [
 ];
 
 /** Left edge of each column on paper (mm). */
-export function columnStarts(): number[] {
+export function columnStarts(columns: readonly Column[]): number[] {
   const starts: number[] = [];
-  let x = PAGE.left + PICTURE_WIDTH;
-  for (const column of COLUMNS) {
+  let x: number = TABLE_LEFT;
+  for (const column of columns) {
     starts.push(x);
     x += column.characters * GLYPH;
   }

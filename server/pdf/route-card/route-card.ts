@@ -1,18 +1,20 @@
 import type { Group, Mark, Sheet } from '../../../shared/drawing/sheet';
 import { STANDING_CAUTIONS } from '../../../shared/route/cautions';
 import type { Register } from '../../../shared/route/register';
-import type { Route, SetUp } from '../../../shared/route/route';
+import type { Operation, Route, SetUp } from '../../../shared/route/route';
 import type { Scheme } from '../../../shared/scheme/scheme';
 import type { LengthFormat } from '../../../shared/units/format';
 import { formatLength, formatNumber } from '../../../shared/units/format';
 import { cellsOf } from './cells';
+import { fitColumns } from './columns';
 import { lettering } from './lettering';
 import { BASELINE, GLYPH, LINE, PAGE } from './measures';
 import type { HeadFacts } from './page-head';
 import { kittingStrip, titleStrip } from './page-head';
-import { operationRow } from './rows';
+import type { Row } from './rows';
+import { headRow, operationRow } from './rows';
 import type { Block, CardPicture, SetUpCard } from './setup-block';
-import { setUpBlocks } from './setup-block';
+import { cardBlock, rowsThatFit } from './setup-block';
 import { setUpPicture } from './setup-picture';
 import { wrap } from './wrap';
 
@@ -27,11 +29,11 @@ export interface CardFacts {
   register: Register;
 }
 
-const GAP = 2.5;
+const GAP = 2;
 
 /** The route as cards on landscape A4, one page after another, drawn with the marks every sheet is made of. */
 export function routeCard(route: Route, scheme: Scheme, facts: CardFacts): Sheet[] {
-  const caution = standingCaution();
+  const caution = standingCaution(facts.format);
   const bottom = PAGE.bottom - caution.height;
   const head: HeadFacts = { ...facts, bar: barText(route, facts.format) };
   const first = titleStrip(head, '').height + GAP;
@@ -44,14 +46,17 @@ export function routeCard(route: Route, scheme: Scheme, facts: CardFacts): Sheet
     y = PAGE.top + first;
   };
   const put = (block: Block) => {
-    if (y + block.height > bottom && marks.length > 0) turn();
     marks.push(...block.marks(y));
     y += block.height + GAP;
   };
   put(kittingStrip(route.kitting));
   for (const card of cardsOf(route, scheme, facts)) {
-    const page = bottom - PAGE.top - first;
-    for (const block of setUpBlocks(card, roomFor(card, bottom - y, page), page)) put(block);
+    for (let from = 0; from < card.rows.length;) {
+      const count = rowsHere(card, from, bottom - y, marks.length === 0);
+      if (count > 0) put(cardBlock(card, from, from + count));
+      from += count;
+      if (from < card.rows.length) turn();
+    }
   }
   pages.push(marks);
   return pages.map((content, index) => {
@@ -60,14 +65,29 @@ export function routeCard(route: Route, scheme: Scheme, facts: CardFacts): Sheet
   });
 }
 
-/** A card that fits on a page of its own is not split over two. */
-function roomFor(card: SetUpCard, left: number, page: number): number {
-  const whole = setUpBlocks(card, page, page);
-  return whole.length === 1 ? page : left;
+/** Rows of the card for the rest of this page: none rather than one alone, and no last one left alone for the next. */
+function rowsHere(card: SetUpCard, from: number, room: number, pageIsEmpty: boolean): number {
+  const left = card.rows.length - from;
+  const fit = rowsThatFit(card, from, room);
+  if (fit === left) return left;
+  const kept = fit === left - 1 ? fit - 1 : fit;
+  if (kept >= 2) return kept;
+  return pageIsEmpty ? Math.max(1, fit) : 0;
 }
 
 function cardsOf(route: Route, scheme: Scheme, facts: CardFacts): SetUpCard[] {
+  const holdings = new Map(route.setups.map((setup) => [setup.id, setup.holding]));
+  const cells = (operation: Operation) =>
+    cellsOf(operation, scheme, facts.format, holdings.get(operation.setup) ?? '');
+  const columns = fitColumns(route.operations.map(cells));
   return route.setups.map((setup, index) => {
+    // What stands at the foot of every page, or further up on this card, is not said again.
+    const said = new Set<string>(STANDING_CAUTIONS);
+    const row = (operation: Operation): Row => {
+      const own = operation.cautions.filter((caution) => !said.has(caution));
+      own.forEach((caution) => said.add(caution));
+      return operationRow(columns, cells(operation), own);
+    };
     const operations = route.operations.filter((operation) => operation.setup === setup.id);
     const minutes = operations.reduce((sum, operation) => sum + operation.minutes, 0);
     const picture: CardPicture | null = setUpPicture(route, setup);
@@ -77,7 +97,8 @@ function cardsOf(route: Route, scheme: Scheme, facts: CardFacts): SetUpCard[] {
       machine: machineName(setup, facts.register),
       minutes: `${formatNumber(setup.minutes, 0)} min, then ${formatNumber(Math.max(minutes, 1), 0)}`,
       picture,
-      rows: operations.map((operation) => operationRow(operation, cellsOf(operation, scheme, facts.format))),
+      head: headRow(columns),
+      rows: operations.map(row),
     };
   });
 }
@@ -93,10 +114,13 @@ function barText(route: Route, format: LengthFormat): string {
   return `${formatLength(size, format)} ${shape}, ${formatLength(route.blankLength, { ...format, decimals: 1 })} long`;
 }
 
+/** The route words its operations in millimetres, whatever the sheet is dimensioned in. */
+const MIXED_UNITS = 'Columns and bar are in inches; figures within sentences are in millimetres.';
+
 /** What stands on every card, at its foot. */
-function standingCaution(): Block {
+function standingCaution({ unit }: LengthFormat): Block {
   const room = Math.floor((PAGE.right - PAGE.left) / GLYPH);
-  const lines = wrap(STANDING_CAUTIONS.join(' '), room);
+  const lines = wrap([...STANDING_CAUTIONS, ...(unit === 'in' ? [MIXED_UNITS] : [])].join(' '), room);
   return {
     height: lines.length * LINE,
     marks: (y) => lines.flatMap((text, line) => lettering(PAGE.left, y + BASELINE + line * LINE, text)),
@@ -107,7 +131,16 @@ function pageSheet(marks: readonly Mark[], { stamp, format }: CardFacts): Sheet 
   const groups: Group[] = [{ role: 'notes', marks }];
   if (stamp) {
     const size = Math.min(20, ((PAGE.right - PAGE.left) * 0.8) / (0.6 * stamp.length));
-    const text: Mark = { type: 'text', x: PAGE.width / 2, y: PAGE.height / 2, size, anchor: 'middle', weight: 800, text: stamp, faint: true };
+    const text: Mark = {
+      type: 'text',
+      x: PAGE.width / 2,
+      y: PAGE.height / 2,
+      size,
+      anchor: 'middle',
+      weight: 800,
+      text: stamp,
+      faint: true,
+    };
     groups.push({ role: 'stamp', marks: [text] });
   }
   return {

@@ -20,7 +20,11 @@ function scaleMark(mark: Mark, k: number): Mark {
       return { ...mark, x: mark.x * k, y: mark.y * k, size: mark.size * k };
     case 'symbol': {
       const [x0, y0, x1, y1] = mark.box;
-      return { ...mark, box: [x0 * k, y0 * k, x1 * k, y1 * k], marks: mark.marks.map((inner) => scaleMark(inner, k)) };
+      return {
+        ...mark,
+        box: [x0 * k, y0 * k, x1 * k, y1 * k],
+        marks: mark.marks.map((inner) => scaleMark(inner, k)),
+      };
     }
   }
 }

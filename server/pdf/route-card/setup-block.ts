@@ -3,7 +3,6 @@ import type { SetUp } from '../../../shared/route/route';
 import { box, lettering, rule } from './lettering';
 import { BASELINE, GLYPH, LINE, PAGE, PICTURE_WIDTH } from './measures';
 import type { Row } from './rows';
-import { headRow } from './rows';
 import { wrap } from './wrap';
 
 /** A picture with its size (mm), its marks at the origin. */
@@ -20,6 +19,8 @@ export interface SetUpCard {
   machine: string;
   minutes: string;
   picture: CardPicture | null;
+  /** The names of the columns. */
+  head: Row;
   rows: readonly Row[];
 }
 
@@ -29,61 +30,44 @@ export interface Block {
   marks: (y: number) => Mark[];
 }
 
-const HEAD = 6.6;
-const AIR = 1.5;
+const HEAD = 6;
+const AIR = 1;
 
-/** The whole card; or, when it does not fit into `room` and `split` is allowed, its first rows and then the rest. */
-export function setUpBlocks(card: SetUpCard, room: number, page: number): Block[] {
-  const whole = blockOf(card, card.rows, false);
-  if (whole.height <= room) return [whole];
-  const blocks: Block[] = [];
-  let rest = [...card.rows];
-  let space = room;
-  while (rest.length > 0) {
-    const continued = blocks.length > 0;
-    const fits = rowsThatFit(card, rest, space, continued);
-    // A card's head with no row under it would say nothing; the first page may be too full for any.
-    if (fits === 0 && !continued && space < page) {
-      space = page;
-      blocks.push({ height: Infinity, marks: () => [] });
-      continue;
-    }
-    const taken = Math.max(1, fits);
-    blocks.push(blockOf(card, rest.slice(0, taken), continued));
-    rest = rest.slice(taken);
-    space = page;
-  }
-  return blocks.filter((block) => block.height !== Infinity);
-}
-
-function rowsThatFit(card: SetUpCard, rows: readonly Row[], room: number, continued: boolean): number {
+/** How many rows from `from` on fit into `room` (mm), with the card's head over them. */
+export function rowsThatFit(card: SetUpCard, from: number, room: number): number {
   let count = 0;
-  while (count < rows.length && blockOf(card, rows.slice(0, count + 1), continued).height <= room) count += 1;
+  while (from + count < card.rows.length && cardBlock(card, from, from + count + 1).height <= room)
+    count += 1;
   return count;
 }
 
-function blockOf(card: SetUpCard, rows: readonly Row[], continued: boolean): Block {
-  const head = headRow();
-  const table = head.height + rows.reduce((sum, row) => sum + row.height, 0);
-  const left = leftSide(card, continued);
+/** The card with its rows `from` up to, not with, `to`. Where rows went before, its head says `continued`. */
+export function cardBlock(card: SetUpCard, from: number, to: number): Block {
+  const rows = card.rows.slice(from, to);
+  const table = card.head.height + rows.reduce((sum, row) => sum + row.height, 0);
+  const left = from === 0 ? leftSide(card) : leftAgain(card, table);
   const height = HEAD + Math.max(table, left.height);
   return {
     height,
     marks: (y) => {
-      const marks = [...headMarks(card, y, continued), ...left.marks(y + HEAD), ...head.marks(y + HEAD)];
-      let at = y + HEAD + head.height;
+      const marks = [...headMarks(card, y, from > 0), ...left.marks(y + HEAD), ...card.head.marks(y + HEAD)];
+      let at = y + HEAD + card.head.height;
       for (const row of rows) {
         marks.push(...row.marks(at));
         at += row.height;
       }
       const edge = PAGE.left + PICTURE_WIDTH;
-      return [...marks, rule(edge, y + HEAD, edge, y + height), box(PAGE.left, y, PAGE.right, y + height, true)];
+      return [
+        ...marks,
+        rule(edge, y + HEAD, edge, y + height),
+        box(PAGE.left, y, PAGE.right, y + height, true),
+      ];
     },
   };
 }
 
 function headMarks(card: SetUpCard, y: number, continued: boolean): Mark[] {
-  const baseline = y + 4.4;
+  const baseline = y + 4.1;
   const title = `${card.machine}, ${card.setup.holding}${continued ? ', continued' : ''}`;
   const room = Math.floor((PAGE.right - PAGE.left) / GLYPH) - card.minutes.length - 10;
   return [
@@ -96,16 +80,30 @@ function headMarks(card: SetUpCard, y: number, continued: boolean): Mark[] {
 }
 
 /** Pictures of the work before and after, and under them how it is held. */
-function leftSide({ setup, picture }: SetUpCard, continued: boolean): Block {
-  if (continued) return { height: 0, marks: () => [] };
-  const characters = Math.floor((PICTURE_WIDTH - 3) / GLYPH);
-  const texts = [setup.heldText, setup.datumText].flatMap((text) => wrap(text, characters));
-  const pictureHeight = picture ? picture.height + AIR : 0;
+function leftSide({ setup, picture }: SetUpCard): Block {
+  const pictureHeight = picture ? AIR + picture.height : 0;
+  const words = wordsBlock([setup.heldText, setup.datumText]);
   return {
-    height: AIR + pictureHeight + texts.length * LINE + AIR,
+    height: pictureHeight + words.height,
     marks: (y) => [
       ...(picture ? picture.marks(PAGE.left + (PICTURE_WIDTH - picture.width) / 2, y + AIR) : []),
-      ...texts.flatMap((text, line) => lettering(PAGE.left + 1.5, y + AIR + pictureHeight + BASELINE + line * LINE, text)),
+      ...words.marks(y + pictureHeight),
     ],
+  };
+}
+
+/** On the next page again, as far as there is room beside the rows: pictures and words, or the words, or nothing. */
+function leftAgain(card: SetUpCard, room: number): Block {
+  const words = wordsBlock([card.setup.heldText, card.setup.datumText]);
+  const again = [leftSide(card), words].find((side) => side.height <= room);
+  return again ?? { height: 0, marks: () => [] };
+}
+
+function wordsBlock(texts: readonly string[]): Block {
+  const lines = texts.flatMap((text) => wrap(text, Math.floor((PICTURE_WIDTH - 3) / GLYPH)));
+  return {
+    height: AIR + lines.length * LINE + AIR,
+    marks: (y) =>
+      lines.flatMap((text, line) => lettering(PAGE.left + 1.5, y + AIR + BASELINE + line * LINE, text)),
   };
 }

@@ -3,11 +3,14 @@ export function charactersOf(text: string): number {
   return [...text].reduce((sum, letter) => sum + (letter === 'Ø' ? 2 : 1), 0);
 }
 
+/** What stands beside a × belongs to it: `1.5 × 45°`. */
+const BETWEEN_WORDS = /(?<!×)\s+(?!×)/;
+
 /** Text in lines of at most `characters`, broken between words; a longer word is broken where it must be. */
 export function wrap(text: string, characters: number): string[] {
   const lines: string[] = [];
   let line = '';
-  for (const word of text.split(/\s+/).filter((one) => one !== '')) {
+  for (const word of text.split(BETWEEN_WORDS).filter((one) => one !== '')) {
     let rest = word;
     if (line !== '' && charactersOf(line) + 1 + charactersOf(rest) <= characters) {
       line += ` ${rest}`;
