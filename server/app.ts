@@ -73,7 +73,10 @@ function apiRoutes(services: Services): express.Router {
 function servePages(app: Express, folder: string): void {
   const page = join(folder, 'index.html');
   if (!existsSync(page)) return;
-  app.use('/assets', express.static(join(folder, 'assets'), { immutable: true, maxAge: '1y', fallthrough: false }));
+  app.use(
+    '/assets',
+    express.static(join(folder, 'assets'), { immutable: true, maxAge: '1y', fallthrough: false }),
+  );
   app.use(express.static(folder, { index: false }));
   app.get('/{*splat}', (_request, response) => {
     response.setHeader('cache-control', 'no-cache');

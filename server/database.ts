@@ -26,12 +26,19 @@ const SETTINGS: Readonly<Record<keyof Sight, string>> = {
 
 /** Opens a pool as whoever the address names. */
 export function openDatabase(url: string): Database {
-  const sequelize = new Sequelize(url, { ...sequelizeOptions(), pool: { max: 10, min: 0, idle: 10_000, acquire: 20_000 } });
+  const sequelize = new Sequelize(url, {
+    ...sequelizeOptions(),
+    pool: { max: 10, min: 0, idle: 10_000, acquire: 20_000 },
+  });
   return { sequelize, models: defineModels(sequelize) };
 }
 
 /** Runs `work` in one transaction that sees no more than `sight` allows. */
-export function inSight<T>(database: Database, sight: Sight, work: (t: Transaction) => Promise<T>): Promise<T> {
+export function inSight<T>(
+  database: Database,
+  sight: Sight,
+  work: (t: Transaction) => Promise<T>,
+): Promise<T> {
   return database.sequelize.transaction(async (t) => {
     await look(database, sight, t);
     return work(t);

@@ -15,12 +15,19 @@ export const errorCatalogue = {
   stale: { status: 409, message: 'Somebody else changed this meanwhile. Look at what differs.' },
   'engine-changed': {
     status: 409,
-    message: 'The program was renewed since this was submitted and works it out differently. Take it back, look at it and submit it again.',
+    message:
+      'The program was renewed since this was submitted and works it out differently. Take it back, look at it and submit it again.',
   },
   exists: { status: 409, message: 'This id is in use already.' },
   'too-large': { status: 413, message: 'The request is larger than 256 kB.' },
-  'unknown-encoding': { status: 415, message: 'The request is written in an encoding that is not understood.' },
-  'not-drawn': { status: 409, message: 'There is no sheet yet: the sizes have never been right. Mend the fields first.' },
+  'unknown-encoding': {
+    status: 415,
+    message: 'The request is written in an encoding that is not understood.',
+  },
+  'not-drawn': {
+    status: 409,
+    message: 'There is no sheet yet: the sizes have never been right. Mend the fields first.',
+  },
   'not-ready': { status: 422, message: 'This cannot be sent for checking yet. See the fields.' },
   'too-many': { status: 429, message: 'Too many tries. Wait a few minutes and try again.' },
   internal: { status: 500, message: 'Something failed on our side. Nothing was changed. Try again.' },

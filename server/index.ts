@@ -28,7 +28,9 @@ async function main(): Promise<void> {
     process.exitCode = 1;
     void leave();
   });
-  server.listen(config.port, config.host, () => logger.info({ host: config.host, port: config.port }, 'listening'));
+  server.listen(config.port, config.host, () =>
+    logger.info({ host: config.host, port: config.port }, 'listening'),
+  );
 
   let ending = false;
   const end = () => {

@@ -76,7 +76,11 @@ const DRAWINGS: readonly DemoDrawing[] = [
 const CHECKER = 'checker@pellworth.example';
 
 /** Draws the demo drawings of that shop as its own people, through the services that serve everybody. */
-export async function demoDrawings(database: Database, slug: string, people: ReadonlyMap<string, string>): Promise<void> {
+export async function demoDrawings(
+  database: Database,
+  slug: string,
+  people: ReadonlyMap<string, string>,
+): Promise<void> {
   const services = seedServices(database);
   for (const drawing of DRAWINGS) {
     const as = <T>(mail: string, work: (work: ShopWork) => Promise<T>): Promise<T> => {
@@ -110,7 +114,10 @@ async function isThere(as: As, drawing: DemoDrawing): Promise<boolean> {
 
 type As = <T>(mail: string, work: (work: ShopWork) => Promise<T>) => Promise<T>;
 
-async function draw({ template: id, example: exampleId, course, designer, note }: DemoDrawing, as: As): Promise<void> {
+async function draw(
+  { template: id, example: exampleId, course, designer, note }: DemoDrawing,
+  as: As,
+): Promise<void> {
   const template = templateById(id);
   const example = template && workedExamples(template).find((one) => one.id === exampleId);
   if (!template || !example) throw new Error(`There is no worked example ${exampleId} of ${id}.`);
@@ -120,7 +127,13 @@ async function draw({ template: id, example: exampleId, course, designer, note }
     title: typeof example.values['title'] === 'string' ? example.values['title'] : example.name,
     note,
     entryUnit: unit,
-    settings: { unit, style: unit === 'in' ? ('asme' as const) : ('iso' as const), sheet: 'auto' as const, scale: 'auto' as const, balloons: true },
+    settings: {
+      unit,
+      style: unit === 'in' ? ('asme' as const) : ('iso' as const),
+      sheet: 'auto' as const,
+      scale: 'auto' as const,
+      balloons: true,
+    },
     values: { ...defaultValues(template, unit), ...example.values },
   };
   const started = await as(designer, (work) => startDrawing(work, filled));
@@ -142,7 +155,12 @@ async function draw({ template: id, example: exampleId, course, designer, note }
 }
 
 /** A second release in place of the first: the grip a little longer, as the lock keepers asked. */
-async function revise(as: As, designer: string, first: RevisionAt, filled: Parameters<typeof startDrawing>[1]): Promise<void> {
+async function revise(
+  as: As,
+  designer: string,
+  first: RevisionAt,
+  filled: Parameters<typeof startDrawing>[1],
+): Promise<void> {
   const next = await as(designer, (work) => startRevision(work, first.drawing.id, 'longer grip'));
   const values = { ...filled.values, gripLength: '66' };
   const { title, note, entryUnit, settings } = filled;

@@ -38,26 +38,49 @@ export async function up({ context }: StepParams): Promise<void> {
 
 /** Makes the shop, its people and its register in one transaction, unless it is there; gives the people's ids by mail. */
 async function shopWithPeople(database: Database): Promise<ReadonlyMap<string, string>> {
-  const demo = demoPeople.parse(JSON.parse(readFileSync(new URL('./demo-people.json', import.meta.url), 'utf8')));
+  const demo = demoPeople.parse(
+    JSON.parse(readFileSync(new URL('./demo-people.json', import.meta.url), 'utf8')),
+  );
   const passwordHash = await hashPassword(demo.password, BCRYPT_ROUNDS);
   return inSight(database, { shopId: SHOP_ID }, async (transaction) => {
     const { models } = database;
-    if (await models.shops.findOne({ where: { id: SHOP_ID }, transaction })) return idsByMail(database, transaction);
+    if (await models.shops.findOne({ where: { id: SHOP_ID }, transaction }))
+      return idsByMail(database, transaction);
     await models.shops.create(
-      { id: SHOP_ID, slug: SLUG, name: 'Pellworth Navigation', timeZone: 'Europe/London', entryUnit: 'mm', style: 'iso' },
+      {
+        id: SHOP_ID,
+        slug: SLUG,
+        name: 'Pellworth Navigation',
+        timeZone: 'Europe/London',
+        entryUnit: 'mm',
+        style: 'iso',
+      },
       { transaction },
     );
     for (const person of demo.people) {
       const id = uuid();
       await look(database, { personId: id }, transaction);
-      await models.people.create({ id, name: person.name, mail: person.email, passwordHash }, { transaction });
-      await models.memberships.create({ shopId: SHOP_ID, personId: id, roles: [person.role] }, { transaction });
+      await models.people.create(
+        { id, name: person.name, mail: person.email, passwordHash },
+        { transaction },
+      );
+      await models.memberships.create(
+        { shopId: SHOP_ID, personId: id, roles: [person.role] },
+        { transaction },
+      );
     }
     const ids = await idsByMail(database, transaction);
     const lead = ids.get('lead@pellworth.example');
     if (lead === undefined) throw new Error('The demo shop has no lead.');
     await models.registers.create(
-      { id: uuid(), shopId: SHOP_ID, version: 1, content: exampleRegister, savedBy: lead, savedAt: new Date() },
+      {
+        id: uuid(),
+        shopId: SHOP_ID,
+        version: 1,
+        content: exampleRegister,
+        savedBy: lead,
+        savedAt: new Date(),
+      },
       { transaction },
     );
     return ids;

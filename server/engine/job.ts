@@ -4,7 +4,8 @@ import type { PdfFacts } from '../pdf/sheet-pdf';
 import { sheetPdf } from '../pdf/sheet-pdf';
 
 /** Work that takes long enough to keep others waiting: a part worked out, or sheets written as PDF. */
-export type Job = { kind: 'engine'; request: EngineRequest } | { kind: 'pdf'; svgs: readonly string[]; facts: PdfFacts };
+export type Job =
+  { kind: 'engine'; request: EngineRequest } | { kind: 'pdf'; svgs: readonly string[]; facts: PdfFacts };
 export type JobResult = EngineResult | Uint8Array;
 
 /** Whoever does such work: the pool beside the server's own thread, or that thread itself in programs that serve nobody. */

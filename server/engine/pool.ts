@@ -41,7 +41,10 @@ export function openPool(size: number = usualSize(), longest: number = LONGEST):
       const waiting = thread.ready && !thread.at ? queue.shift() : undefined;
       if (!waiting) continue;
       thread.at = waiting;
-      thread.timer = setTimeout(() => lose(thread, new Error(`A job took longer than ${longest} ms.`)), longest);
+      thread.timer = setTimeout(
+        () => lose(thread, new Error(`A job took longer than ${longest} ms.`)),
+        longest,
+      );
       try {
         thread.worker.postMessage(waiting.job);
       } catch (error) {
@@ -74,8 +77,12 @@ export function openPool(size: number = usualSize(), longest: number = LONGEST):
       else free(thread)?.reject(told.failed);
       next();
     });
-    thread.worker.on('error', (error) => lose(thread, error instanceof Error ? error : new Error(String(error))));
-    thread.worker.on('exit', (code) => lose(thread, new Error(`A thread of the engine ended with code ${code}.`)));
+    thread.worker.on('error', (error) =>
+      lose(thread, error instanceof Error ? error : new Error(String(error))),
+    );
+    thread.worker.on('exit', (code) =>
+      lose(thread, new Error(`A thread of the engine ended with code ${code}.`)),
+    );
   };
   const ask = (job: Job): Promise<JobResult> =>
     new Promise((resolve, reject) => {

@@ -7,6 +7,7 @@ import type { RequestHandler } from 'express';
  */
 export function compressAnswers(): RequestHandler {
   return compression({
-    filter: (request, response) => !request.originalUrl.startsWith('/api/session') && compression.filter(request, response),
+    filter: (request, response) =>
+      !request.originalUrl.startsWith('/api/session') && compression.filter(request, response),
   });
 }

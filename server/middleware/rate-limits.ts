@@ -8,12 +8,24 @@ const MINUTE = 60_000;
 
 /** Every request, by address. */
 export function limitRequests(limits: RateLimits): RequestHandler {
-  return rateLimit({ windowMs: MINUTE, limit: limits.requestsPerMinute, standardHeaders: 'draft-8', legacyHeaders: false, handler: refuse });
+  return rateLimit({
+    windowMs: MINUTE,
+    limit: limits.requestsPerMinute,
+    standardHeaders: 'draft-8',
+    legacyHeaders: false,
+    handler: refuse,
+  });
 }
 
 /** Wrong sign-ins, by address and by the mail that was tried; right ones are not counted. */
 export function limitSignIn(limits: RateLimits): RequestHandler[] {
-  const shared = { windowMs: limits.windowMs, skipSuccessfulRequests: true, standardHeaders: false, legacyHeaders: false, handler: refuse } as const;
+  const shared = {
+    windowMs: limits.windowMs,
+    skipSuccessfulRequests: true,
+    standardHeaders: false,
+    legacyHeaders: false,
+    handler: refuse,
+  } as const;
   return [
     rateLimit({ ...shared, limit: limits.signInPerAddress }),
     rateLimit({ ...shared, limit: limits.signInPerMail, keyGenerator: (request) => mailKey(request.body) }),

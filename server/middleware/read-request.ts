@@ -17,6 +17,9 @@ export function readQuery<Schema extends z.ZodType>(request: Request, schema: Sc
 function read<Schema extends z.ZodType>(value: unknown, schema: Schema): z.output<Schema> {
   const result = schema.safeParse(value);
   if (result.success) return result.data;
-  const fields = result.error.issues.map((issue) => ({ path: issue.path.join('.'), message: plainIssue(issue) }));
+  const fields = result.error.issues.map((issue) => ({
+    path: issue.path.join('.'),
+    message: plainIssue(issue),
+  }));
   throw new Refusal('bad-input', fields);
 }

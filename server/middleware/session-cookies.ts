@@ -7,9 +7,17 @@ export const REFRESH_COOKIE = 'benchleaf_refresh';
 
 /** Scripts cannot read them and other sites cannot send them; the refresh token goes to the sign-in's own address only. */
 export function setSessionCookies(response: Response, config: ServerConfig, issued: Issued): void {
-  response.cookie(ACCESS_COOKIE, issued.access, { ...options(config), path: '/api', maxAge: config.accessLife });
+  response.cookie(ACCESS_COOKIE, issued.access, {
+    ...options(config),
+    path: '/api',
+    maxAge: config.accessLife,
+  });
   if (issued.refresh === undefined) return;
-  response.cookie(REFRESH_COOKIE, issued.refresh, { ...options(config), path: '/api/session', maxAge: config.refreshLife });
+  response.cookie(REFRESH_COOKIE, issued.refresh, {
+    ...options(config),
+    path: '/api/session',
+    maxAge: config.refreshLife,
+  });
 }
 
 export function clearSessionCookies(response: Response, config: ServerConfig): void {

@@ -2,7 +2,10 @@ import { DataTypes } from 'sequelize';
 import type { InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
 import type { Register } from '../../shared/route/register';
 
-export interface RegisterVersion extends Model<InferAttributes<RegisterVersion>, InferCreationAttributes<RegisterVersion>> {
+export interface RegisterVersion extends Model<
+  InferAttributes<RegisterVersion>,
+  InferCreationAttributes<RegisterVersion>
+> {
   id: string;
   shopId: string;
   version: number;

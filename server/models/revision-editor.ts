@@ -2,7 +2,10 @@ import { DataTypes } from 'sequelize';
 import type { InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
 
 /** Everybody who ever saved a value of a revision: for them it is their own. */
-export interface RevisionEditor extends Model<InferAttributes<RevisionEditor>, InferCreationAttributes<RevisionEditor>> {
+export interface RevisionEditor extends Model<
+  InferAttributes<RevisionEditor>,
+  InferCreationAttributes<RevisionEditor>
+> {
   shopId: string;
   revisionId: string;
   personId: string;

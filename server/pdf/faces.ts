@@ -16,7 +16,9 @@ const mapped = new Map<Subset, ReadonlySet<number>>();
 export function face(subset: Subset, weight: Weight): Buffer {
   const name = `jetbrains-mono-${subset}-${weight}-normal.woff`;
   // Without its substitutions the face has no ligatures: `->` and `--` stay the characters that were typed.
-  const sfnt = unpacked.get(name) ?? unpackWoff(readFileSync(require.resolve(`@fontsource/jetbrains-mono/files/${name}`)), ['GSUB']);
+  const sfnt =
+    unpacked.get(name) ??
+    unpackWoff(readFileSync(require.resolve(`@fontsource/jetbrains-mono/files/${name}`)), ['GSUB']);
   unpacked.set(name, sfnt);
   return sfnt;
 }

@@ -18,7 +18,12 @@ export interface PdfFacts {
  */
 export function sheetPdf(svgs: readonly string[], facts: PdfFacts): Promise<Uint8Array> {
   return new Promise((resolve, reject) => {
-    const info = { Title: facts.title, Producer: 'Benchleaf', Creator: 'Benchleaf', CreationDate: facts.date ?? new Date(0) };
+    const info = {
+      Title: facts.title,
+      Producer: 'Benchleaf',
+      Creator: 'Benchleaf',
+      CreationDate: facts.date ?? new Date(0),
+    };
     const document = new PDFDocument({ autoFirstPage: false, margin: 0, info, lang: 'en-GB' });
     const chunks: Buffer[] = [];
     document.on('data', (chunk: Buffer) => chunks.push(chunk));

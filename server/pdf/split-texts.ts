@@ -24,7 +24,12 @@ export function splitTexts(svg: string): string {
     const written = content.match(/&[a-z]+;|[^]/gu) ?? [];
     const runs = runsOf(written);
     if (runs.every((run) => run.subset === 'latin')) return whole;
-    return runs.map((run) => `<text ${placed(attributes, run, written.length)} font-family="${run.subset}">${run.written.join('')}</text>`).join('');
+    return runs
+      .map(
+        (run) =>
+          `<text ${placed(attributes, run, written.length)} font-family="${run.subset}">${run.written.join('')}</text>`,
+      )
+      .join('');
   });
 }
 
@@ -33,7 +38,8 @@ function runsOf(written: readonly string[]): Run[] {
   written.forEach((character, from) => {
     const last = runs.at(-1);
     // A space has no ink: it stays with what stands before it.
-    const subset = character === ' ' && last ? last.subset : (subsetOf(ENTITIES[character] ?? character) ?? 'latin');
+    const subset =
+      character === ' ' && last ? last.subset : (subsetOf(ENTITIES[character] ?? character) ?? 'latin');
     if (last?.subset === subset) last.written.push(character);
     else runs.push({ subset, from, written: [character] });
   });
@@ -47,5 +53,7 @@ function placed(attributes: string, { from }: Run, characters: number): string {
   const glyph = ADVANCE * figure('font-size');
   const before = anchor === 'middle' ? characters / 2 : anchor === 'end' ? characters : 0;
   const x = figure('x') + (from - before) * glyph;
-  return attributes.replace(/(^| )x="[^"]*"/, `$1x="${x.toFixed(4)}"`).replace(/text-anchor="[^"]*"/, 'text-anchor="start"');
+  return attributes
+    .replace(/(^| )x="[^"]*"/, `$1x="${x.toFixed(4)}"`)
+    .replace(/text-anchor="[^"]*"/, 'text-anchor="start"');
 }

@@ -16,7 +16,8 @@ interface Table {
  * spares it on every page. Tables named in `without` are left out. Source: W3C Recommendation "WOFF File Format 1.0". @throws Error when the bytes are no WOFF.
  */
 export function unpackWoff(woff: Buffer, without: readonly string[] = []): Buffer {
-  if (woff.length < WOFF_HEADER || woff.toString('latin1', 0, 4) !== 'wOFF') throw new Error('These bytes are no WOFF 1.0 face.');
+  if (woff.length < WOFF_HEADER || woff.toString('latin1', 0, 4) !== 'wOFF')
+    throw new Error('These bytes are no WOFF 1.0 face.');
   const left = new Set(without.map((tag) => Buffer.from(tag, 'latin1').readUInt32BE(0)));
   return packSfnt(
     woff.readUInt32BE(4),

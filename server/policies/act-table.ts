@@ -22,21 +22,36 @@ const open = ['draft', 'in review'] as const;
 
 type Scopes = readonly [reader: Scope, machinist: Scope, designer: Scope, checker: Scope, lead: Scope];
 
-function act<Id extends string>(id: Id, text: string, scopes: Scopes, states?: readonly RevisionState[]): Act & { id: Id } {
+function act<Id extends string>(
+  id: Id,
+  text: string,
+  scopes: Scopes,
+  states?: readonly RevisionState[],
+): Act & { id: Id } {
   const [reader, machinist, designer, checker, lead] = scopes;
   return { id, text, roles: { reader, machinist, designer, checker, lead }, states };
 }
 
 /** Who may do what: the one table that the server's rules and the abilities in its answers are made from. */
 export const actTable = [
-  act('read-published', 'read and print released sheets, routes, verdicts', ['any', 'any', 'any', 'any', 'any'], published),
+  act(
+    'read-published',
+    'read and print released sheets, routes, verdicts',
+    ['any', 'any', 'any', 'any', 'any'],
+    published,
+  ),
   act('read-open', 'read drafts and revisions in review', ['never', 'trial', 'any', 'any', 'any'], open),
   act('start-drawing', 'start a drawing', ['never', 'never', 'any', 'never', 'any']),
   act('start-revision', 'start a new revision', ['never', 'never', 'any', 'never', 'any'], ['released']),
   act('edit', 'fill in and save a draft', ['never', 'never', 'any', 'never', 'any'], ['draft']),
   act('trial', 'mark a draft as trial piece', ['never', 'never', 'any', 'never', 'any'], ['draft']),
   act('submit', 'send a draft for checking', ['never', 'never', 'own', 'never', 'any'], ['draft']),
-  act('take-back', 'take a revision back from checking', ['never', 'never', 'own', 'never', 'any'], ['in review']),
+  act(
+    'take-back',
+    'take a revision back from checking',
+    ['never', 'never', 'own', 'never', 'any'],
+    ['in review'],
+  ),
   act('return', 'return a revision with reasons', ['never', 'never', 'never', 'any', 'any'], ['in review']),
   act('approve', 'approve, which releases', ['never', 'never', 'never', 'not-own', 'not-own'], ['in review']),
   act('withdraw', 'withdraw a released revision', ['never', 'never', 'never', 'never', 'any'], ['released']),

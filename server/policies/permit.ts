@@ -59,5 +59,7 @@ export function permit(id: ActId, asker: Asker, matter?: Matter): void {
 
 /** Whether the asker may read that revision at all. */
 export function mayRead(asker: Asker, matter: Matter): boolean {
-  return judge('read-published', asker, matter) === 'allowed' || judge('read-open', asker, matter) === 'allowed';
+  return (
+    judge('read-published', asker, matter) === 'allowed' || judge('read-open', asker, matter) === 'allowed'
+  );
 }

@@ -15,7 +15,10 @@ export interface AuditAnswer {
 }
 
 export async function presentAudit(work: ShopWork, events: readonly AuditEvent[]): Promise<AuditAnswer> {
-  const name = await namesOf(work, events.map((event) => event.personId));
+  const name = await namesOf(
+    work,
+    events.map((event) => event.personId),
+  );
   return {
     events: events.map(({ id, act, personId, at, drawingId, revisionId, detail }) => ({
       ...{ id, act, detail },

@@ -30,7 +30,9 @@ export async function presentDrawing(work: ShopWork, drawing: Drawing): Promise<
 function drawingAbilities(work: ShopWork, revisions: readonly Revision[]): Abilities {
   const released = revisions.find((revision) => revision.state === 'released');
   const open = revisions.some(isOpen);
-  const may = released && judge('start-revision', work.asker, { state: 'released', trial: false, own: false }) === 'allowed';
+  const may =
+    released &&
+    judge('start-revision', work.asker, { state: 'released', trial: false, own: false }) === 'allowed';
   return { ...shopAbilities(work.asker), 'start-revision': Boolean(may) && !open };
 }
 
@@ -47,7 +49,18 @@ function isOpen(revision: Revision): boolean {
 function revisionsOf(work: ShopWork, drawingId: string): Promise<Revision[]> {
   return work.services.database.models.revisions.findAll({
     where: { shopId: work.shop.id, drawingId },
-    attributes: ['id', 'letter', 'state', 'trial', 'returned', 'version', 'changedAt', 'change', 'title', 'sequence'],
+    attributes: [
+      'id',
+      'letter',
+      'state',
+      'trial',
+      'returned',
+      'version',
+      'changedAt',
+      'change',
+      'title',
+      'sequence',
+    ],
     order: [['sequence', 'DESC']],
     transaction: work.t,
   });

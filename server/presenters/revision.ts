@@ -41,14 +41,27 @@ export async function presentRevision(work: ShopWork, at: RevisionAt): Promise<R
     history: await revisionHistory(work, revision),
     result: await presentResult(work, revision),
   };
-  return { revision: presented, abilities: revisionAbilities(work.asker, matter, await openRevision(work, revision)) };
+  return {
+    revision: presented,
+    abilities: revisionAbilities(work.asker, matter, await openRevision(work, revision)),
+  };
 }
 
 async function presentResult(work: ShopWork, revision: Revision): Promise<Presented['result']> {
   const { part, scheme, route, capacity, faults, sheet, findings } = revision;
   if (!part || !scheme || !sheet || !findings || !faults || !capacity) return null;
   const svg = await sheetSvg(work, revision, sheet);
-  return { schemaVersion: 1, part, scheme, sheet, findings: [...findings], route, capacity, faults: [...faults], svg };
+  return {
+    schemaVersion: 1,
+    part,
+    scheme,
+    sheet,
+    findings: [...findings],
+    route,
+    capacity,
+    faults: [...faults],
+    svg,
+  };
 }
 
 function signature(id: string | null, at: Date | null, name: (id: string) => string): Presented['drawn'] {

@@ -17,7 +17,8 @@ export function presentSearch(
 }
 
 function presentRow(row: FoundRow): DrawingRow {
-  const { number, title, template, maxDiameter, length, threads, material, operations, verdict, picture } = row;
+  const { number, title, template, maxDiameter, length, threads, material, operations, verdict, picture } =
+    row;
   return {
     id: row.drawingId,
     ...{ number, title, template, maxDiameter, length, threads, material, operations, verdict, picture },

@@ -12,7 +12,10 @@ export async function presentSession(services: Services, who: SignedIn): Promise
   return inSight(database, { personId: who.personId }, async (t) => {
     const person = await models.people.findOne({ where: { id: who.personId }, transaction: t });
     if (!person) throw new Refusal('session-ended');
-    const memberships = await models.memberships.findAll({ where: { personId: who.personId }, transaction: t });
+    const memberships = await models.memberships.findAll({
+      where: { personId: who.personId },
+      transaction: t,
+    });
     const rolesIn = new Map(memberships.map((membership) => [membership.shopId, membership.roles]));
     const shops = await models.shops.findAll({
       where: { id: [...rolesIn.keys()] },

@@ -11,9 +11,16 @@ import type { ShopWork } from './shop-work';
  * version, is shown what is there now; only then does the state count.
  * @throws Refusal `forbidden`, `own-work`, `stale` or `wrong-state`
  */
-export async function allow(work: ShopWork, at: RevisionAt, act: ActId, version: number, asker: Asker = work.asker): Promise<void> {
+export async function allow(
+  work: ShopWork,
+  at: RevisionAt,
+  act: ActId,
+  version: number,
+  asker: Asker = work.asker,
+): Promise<void> {
   const verdict = judge(act, asker, at.matter);
-  if ((verdict === 'allowed' || verdict === 'state') && version !== at.revision.version) throw await stale(work, at);
+  if ((verdict === 'allowed' || verdict === 'state') && version !== at.revision.version)
+    throw await stale(work, at);
   permit(act, asker, at.matter);
 }
 

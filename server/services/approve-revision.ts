@@ -38,11 +38,23 @@ export async function approveRevision(
   if (snapshotOf(result).contentHash !== revision.contentHash) throw new Refusal('engine-changed');
 
   const svgHash = await keepBlob(work, Buffer.from(good.svg, 'utf8'), 'image/svg+xml');
-  const pdf = await work.services.pdf([good.svg], { title: `${drawing.number} ${revision.letter} ${revision.title}`, date: work.at });
+  const pdf = await work.services.pdf([good.svg], {
+    title: `${drawing.number} ${revision.letter} ${revision.title}`,
+    date: work.at,
+  });
   const pdfHash = await keepBlob(work, pdf, 'application/pdf');
   await supersede(work, at);
-  await keepMove(work, revision, { ...standing, sheet: good.sheet, findings: good.findings, svgHash, pdfHash });
-  await recordDecision(work, revision, 'approved', { contentHash: revision.contentHash, noSecondCheck: at.matter.own });
+  await keepMove(work, revision, {
+    ...standing,
+    sheet: good.sheet,
+    findings: good.findings,
+    svgHash,
+    pdfHash,
+  });
+  await recordDecision(work, revision, 'approved', {
+    contentHash: revision.contentHash,
+    noSecondCheck: at.matter.own,
+  });
   await keepFacts(work, drawing, revision);
   return { ...at, matter: { ...at.matter, state: 'released' } };
 }

@@ -10,7 +10,12 @@ export function canonicalJson(value: unknown): string {
 }
 
 /** What a checker approves: SHA-256 over values, part, scheme and route (64 hex digits). */
-export function contentHash(content: { values: unknown; part: unknown; scheme: unknown; route: unknown }): string {
+export function contentHash(content: {
+  values: unknown;
+  part: unknown;
+  scheme: unknown;
+  route: unknown;
+}): string {
   const { values, part, scheme, route } = content;
   return createHash('sha256').update(canonicalJson({ values, part, scheme, route })).digest('hex');
 }

@@ -25,7 +25,10 @@ const TRIES = 5;
  * its locks, and the answer counts only for exactly the same question. A drawing number, version, register or signature
  * that has changed meanwhile is another question, or a refusal.
  */
-export async function engineBeside<T>(bench: Pick<Bench, 'engine'>, transaction: (engine: EngineBeside) => Promise<T>): Promise<T> {
+export async function engineBeside<T>(
+  bench: Pick<Bench, 'engine'>,
+  transaction: (engine: EngineBeside) => Promise<T>,
+): Promise<T> {
   const answers = new Map<string, EngineResult>();
   for (let tried = 1; ; tried += 1) {
     try {

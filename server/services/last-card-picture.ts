@@ -8,7 +8,9 @@ const SIZE = { width: 300, height: 96 } as const;
 
 /** The work before and after the last set-up that cuts metal, small, as SVG for lists; null when none does. */
 export function lastCardPicture(route: Route): string | null {
-  const cutting = new Set(route.operations.filter((operation) => operation.cut).map((operation) => operation.setup));
+  const cutting = new Set(
+    route.operations.filter((operation) => operation.cut).map((operation) => operation.setup),
+  );
   const last = route.setups.filter((setup) => cutting.has(setup.id)).at(-1);
   const stages = last && setUpStages(route, last);
   return last && stages ? renderPicture(pairPicture(stages.before, stages.after, last, SIZE)) : null;

@@ -7,7 +7,12 @@ import { revisionAt } from './revision-at';
 import type { ShopWork } from './shop-work';
 
 /** Marks a draft as trial piece, or takes the mark off. */
-export async function markTrial(work: ShopWork, place: RevisionPlace, version: number, trial: boolean): Promise<RevisionAt> {
+export async function markTrial(
+  work: ShopWork,
+  place: RevisionPlace,
+  version: number,
+  trial: boolean,
+): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
   await allow(work, at, 'trial', version);
   const { revision, drawing } = at;

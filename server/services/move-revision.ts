@@ -11,7 +11,11 @@ import { workOut } from './work-out';
  * Draws a revision as its sheet looks once it stands so, from its stored values and the register it was judged by.
  * Part, scheme and route do not depend on how it stands.
  */
-export async function drawStanding(work: ShopWork, at: RevisionAt, change: Partial<Standing>): Promise<EngineResult> {
+export async function drawStanding(
+  work: ShopWork,
+  at: RevisionAt,
+  change: Partial<Standing>,
+): Promise<EngineResult> {
   const register = await work.services.database.models.registers.findOne({
     where: { shopId: work.shop.id, id: at.revision.registerId },
     transaction: work.t,

@@ -1,7 +1,10 @@
 import type { ShopWork } from './shop-work';
 
 /** Names of people of this shop by id; one who is no longer seen here is `somebody who left`. */
-export async function namesOf(work: ShopWork, ids: readonly (string | null)[]): Promise<(id: string) => string> {
+export async function namesOf(
+  work: ShopWork,
+  ids: readonly (string | null)[],
+): Promise<(id: string) => string> {
   const wanted = [...new Set(ids.filter((id): id is string => id !== null))];
   const people = await work.services.database.models.people.findAll({
     where: { id: wanted },

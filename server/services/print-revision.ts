@@ -10,7 +10,10 @@ import { sheetSvg } from './sheet-svg';
 import { stampAcross, stateWord } from './state-words';
 
 /** The sheet of a revision as SVG, and a name for its file. @throws Refusal `not-drawn` while there is none. */
-export async function readSheetSvg(work: ShopWork, place: RevisionPlace): Promise<{ svg: string; name: string }> {
+export async function readSheetSvg(
+  work: ShopWork,
+  place: RevisionPlace,
+): Promise<{ svg: string; name: string }> {
   const at = await readRevision(work, place);
   return { svg: await svgOf(work, at), name: fileName(at) };
 }
@@ -55,7 +58,10 @@ async function pdfOf(work: ShopWork, at: RevisionAt, card: boolean): Promise<Uin
     });
     pages.push(...cards.map(renderSvg));
   }
-  return work.services.pdf(pages, { title: `${drawing.number} ${revision.letter} ${revision.title}`, date: revision.changedAt });
+  return work.services.pdf(pages, {
+    title: `${drawing.number} ${revision.letter} ${revision.title}`,
+    date: revision.changedAt,
+  });
 }
 
 function stateText(work: ShopWork, { revision }: RevisionAt): string {

@@ -21,7 +21,11 @@ export interface RevisionPlace {
  * Loads a revision. With `lock` its row is held until the transaction ends, so that what was judged is what is changed.
  * @throws Refusal `not-found`: ids of another shop look exactly like ids that never were.
  */
-export async function revisionAt(work: ShopWork, place: RevisionPlace, options: { lock?: boolean } = {}): Promise<RevisionAt> {
+export async function revisionAt(
+  work: ShopWork,
+  place: RevisionPlace,
+  options: { lock?: boolean } = {},
+): Promise<RevisionAt> {
   const { models } = work.services.database;
   const drawing = await drawingAt(work, place.drawing);
   if (!validate(place.revision)) throw new Refusal('not-found');

@@ -27,12 +27,16 @@ export async function revisionHistory(
     order: [['sequence', 'ASC']],
     transaction: work.t,
   });
-  const name = await namesOf(work, earlier.map((one) => one.checkedBy));
+  const name = await namesOf(
+    work,
+    earlier.map((one) => one.checkedBy),
+  );
   return earlier.map((one) => lineOf(one, name, work.shop.timeZone));
 }
 
 function lineOf(revision: Revision, name: (id: string) => string, timeZone: string): HistoryLine {
-  if (!revision.checkedBy || !revision.checkedAt) throw new Error('A released revision has no second signature.');
+  if (!revision.checkedBy || !revision.checkedAt)
+    throw new Error('A released revision has no second signature.');
   return {
     letter: revision.letter,
     change: revision.change,

@@ -15,7 +15,11 @@ import { snapshotOf, workOut } from './work-out';
  * Saves a draft. Wrong values are kept with what is wrong about them, and the last good drawing stays. Saving what is
  * there already changes nothing.
  */
-export async function saveRevision(work: ShopWork, place: RevisionPlace, request: SaveRevisionRequest): Promise<RevisionAt> {
+export async function saveRevision(
+  work: ShopWork,
+  place: RevisionPlace,
+  request: SaveRevisionRequest,
+): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
   const { revision, drawing } = at;
   await allow(work, at, 'edit', request.version);
@@ -51,7 +55,11 @@ export async function saveRevision(work: ShopWork, place: RevisionPlace, request
     `INSERT INTO revision_editors (shop_id, revision_id, person_id) VALUES ($1, $2, $3) ON CONFLICT DO NOTHING`,
     { bind: [work.shop.id, revision.id, work.person.id], transaction: work.t },
   );
-  await recordAudit(work, 'saved', { drawingId: drawing.id, revisionId: revision.id, detail: { version: revision.version } });
+  await recordAudit(work, 'saved', {
+    drawingId: drawing.id,
+    revisionId: revision.id,
+    detail: { version: revision.version },
+  });
   await keepFacts(work, drawing, revision);
   return { ...at, matter: { ...at.matter, own: true } };
 }

@@ -67,7 +67,10 @@ export async function searchDrawings(
   };
 }
 
-function termsOf(work: ShopWork, query: z.output<typeof searchQuery>): { conditions: string[]; bind: unknown[] } {
+function termsOf(
+  work: ShopWork,
+  query: z.output<typeof searchQuery>,
+): { conditions: string[]; bind: unknown[] } {
   const conditions: string[] = [];
   const bind: unknown[] = [];
   const add = (condition: (place: string) => string, value: unknown) => {
@@ -94,8 +97,10 @@ function termsOf(work: ShopWork, query: z.output<typeof searchQuery>): { conditi
   if (query.template) add((place) => `f.template = ${place}`, query.template);
   if (query.lengthFrom !== undefined) add((place) => `f.length >= ${place}`, query.lengthFrom - ROUNDING);
   if (query.lengthTo !== undefined) add((place) => `f.length <= ${place}`, query.lengthTo + ROUNDING);
-  if (query.diameterFrom !== undefined) add((place) => `f.max_diameter >= ${place}`, query.diameterFrom - ROUNDING);
-  if (query.diameterTo !== undefined) add((place) => `f.max_diameter <= ${place}`, query.diameterTo + ROUNDING);
+  if (query.diameterFrom !== undefined)
+    add((place) => `f.max_diameter >= ${place}`, query.diameterFrom - ROUNDING);
+  if (query.diameterTo !== undefined)
+    add((place) => `f.max_diameter <= ${place}`, query.diameterTo + ROUNDING);
   return { conditions, bind };
 }
 
@@ -104,7 +109,9 @@ const ROUNDING = 1e-6;
 
 /** Which mark of the facts says that this asker finds the row. */
 function readerOf(work: ShopWork, states: readonly string[]): 'for_all' | 'for_bench' | 'for_office' {
-  const office = work.asker.roles.some((role) => role === 'designer' || role === 'checker' || role === 'lead');
+  const office = work.asker.roles.some(
+    (role) => role === 'designer' || role === 'checker' || role === 'lead',
+  );
   // Asked for releases alone, a drawing is found by its release, though a newer draft be open.
   if (states.length > 0 && states.every((state) => PUBLISHED.includes(state))) return 'for_all';
   if (office) return 'for_office';
@@ -112,7 +119,10 @@ function readerOf(work: ShopWork, states: readonly string[]): 'for_all' | 'for_b
 }
 
 function statesOf(text: string): string[] {
-  const wanted = text.split(',').map((word) => word.trim()).filter((word) => word !== '');
+  const wanted = text
+    .split(',')
+    .map((word) => word.trim())
+    .filter((word) => word !== '');
   const wrong = wanted.filter((word) => !(revisionStates as readonly string[]).includes(word));
   if (wrong.length === 0) return wanted;
   throw new Refusal('bad-input', [
@@ -125,12 +135,15 @@ function writeCursor(at: Date, id: string): string {
 }
 
 function readCursor(text: string): { at: Date; id: string } {
-  const match = /^(\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{3}Z) ([0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12})$/.exec(
-    Buffer.from(text, 'base64url').toString(),
-  );
+  const match =
+    /^(\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{3}Z) ([0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12})$/.exec(
+      Buffer.from(text, 'base64url').toString(),
+    );
   const at = new Date(match?.[1] ?? '');
   if (!match?.[2] || Number.isNaN(at.getTime())) {
-    throw new Refusal('bad-input', [{ path: 'cursor', message: 'This is no place in the list. Begin at its top again.' }]);
+    throw new Refusal('bad-input', [
+      { path: 'cursor', message: 'This is no place in the list. Begin at its top again.' },
+    ]);
   }
   return { at, id: match[2] };
 }

@@ -25,7 +25,9 @@ export function wordsQuery(text: string): string | null {
 
 /** A thread's designation, or part of one, in the form it is kept in: `M10×1,25 - 6g` is `m10x1.25-6g`. */
 export function threadWords(text: string): string {
-  return normalised(text).replace(/\s*([x-])\s*/gu, '$1').trim();
+  return normalised(text)
+    .replace(/\s*([x-])\s*/gu, '$1')
+    .trim();
 }
 
 /** A lexeme of PostgreSQL may be 2046 bytes; nobody searches for more than this. */

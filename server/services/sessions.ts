@@ -42,7 +42,11 @@ export async function refreshSession(services: Services, token: string): Promise
     const seen = await models.sessions.findOne({ where: { tokenHash }, transaction: t });
     if (!seen) return null;
     await look(database, { personId: seen.personId }, t);
-    const session = await models.sessions.findOne({ where: { id: seen.id }, transaction: t, lock: t.LOCK.UPDATE });
+    const session = await models.sessions.findOne({
+      where: { id: seen.id },
+      transaction: t,
+      lock: t.LOCK.UPDATE,
+    });
     const now = services.now();
     if (!session || session.endedAt || session.expiresAt <= now) return null;
     const { personId, familyId } = session;
@@ -118,7 +122,12 @@ async function issue(services: Services, t: Transaction, who: SignedIn): Promise
 
 function signAccess(config: ServerConfig, who: SignedIn, now: Date): string {
   const iat = Math.floor(now.getTime() / 1000);
-  const claims = { sub: who.personId, family: who.familyId, iat, exp: iat + Math.floor(config.accessLife / 1000) };
+  const claims = {
+    sub: who.personId,
+    family: who.familyId,
+    iat,
+    exp: iat + Math.floor(config.accessLife / 1000),
+  };
   return jwt.sign(claims, config.jwtSecret, { algorithm: ALGORITHM });
 }
 

@@ -26,7 +26,18 @@ export function nowStamped(revision: Revision, sheet: Sheet): Sheet {
   const size = Math.min(24, ((x1 - x0) * 0.8) / (0.6 * words.length));
   const stamp: Group = {
     role: 'stamp',
-    marks: [{ type: 'text', x: (x0 + x1) / 2, y: (y0 + y1) / 2, size, anchor: 'middle', weight: 800, text: words, faint: true }],
+    marks: [
+      {
+        type: 'text',
+        x: (x0 + x1) / 2,
+        y: (y0 + y1) / 2,
+        size,
+        anchor: 'middle',
+        weight: 800,
+        text: words,
+        faint: true,
+      },
+    ],
   };
   return { ...sheet, groups: [...sheet.groups, stamp] };
 }

@@ -4,7 +4,11 @@ import { recordAudit } from './record';
 import type { ShopWork } from './shop-work';
 
 export interface SettingsAnswer {
-  settings: { version: number; selfRelease: boolean; /** People who may check, the lead among them. */ checkers: number };
+  settings: {
+    version: number;
+    selfRelease: boolean;
+    /** People who may check, the lead among them. */ checkers: number;
+  };
 }
 
 export async function presentSettings(work: ShopWork): Promise<SettingsAnswer> {
@@ -23,10 +27,16 @@ export async function changeSettings(
   permit('settings', work.asker);
   const { shop, t } = work;
   await shop.reload({ transaction: t, lock: t.LOCK.UPDATE });
-  if (request.version !== shop.version) throw new Refusal('stale', undefined, { current: await presentSettings(work) });
+  if (request.version !== shop.version)
+    throw new Refusal('stale', undefined, { current: await presentSettings(work) });
   if (request.selfRelease === shop.selfRelease) return presentSettings(work);
   if (request.selfRelease && (await checkersOf(work)) > 1) {
-    throw new Refusal('wrong-state', undefined, undefined, 'A second person may check in this shop, so nobody releases their own.');
+    throw new Refusal(
+      'wrong-state',
+      undefined,
+      undefined,
+      'A second person may check in this shop, so nobody releases their own.',
+    );
   }
   await shop.update({ selfRelease: request.selfRelease, version: shop.version + 1 }, { transaction: t });
   await recordAudit(work, request.selfRelease ? 'self-release switched on' : 'self-release switched off', {});

@@ -32,7 +32,11 @@ export interface ShopAsker {
  * taken away counts at once. Work that asks the engine may be begun again (see `engineBeside`): it does nothing but
  * through its transaction. @throws Refusal `not-found` when there is no such shop or the person is not in it.
  */
-export function workInShop<T>(services: Services, asks: ShopAsker, work: (work: ShopWork) => Promise<T>): Promise<T> {
+export function workInShop<T>(
+  services: Services,
+  asks: ShopAsker,
+  work: (work: ShopWork) => Promise<T>,
+): Promise<T> {
   const at = services.now();
   return engineBeside(services, (engine) => inOneTransaction(services, asks, { engine, at }, work));
 }

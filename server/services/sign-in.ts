@@ -10,13 +10,20 @@ import type { Services } from './services';
 const decoys = new Map<number, Promise<string>>();
 
 /** @throws Refusal `wrong-sign-in`, the same for an unknown mail and a wrong password. */
-export async function signIn(services: Services, mail: string, password: string): Promise<{ person: Person; issued: Issued }> {
+export async function signIn(
+  services: Services,
+  mail: string,
+  password: string,
+): Promise<{ person: Person; issued: Issued }> {
   const { database, config } = services;
   const asked = mail.trim().toLowerCase();
   const person = await inSight(database, { mail: asked }, (t) =>
     database.models.people.findOne({ where: { mail: asked }, transaction: t }),
   );
-  const right = await bcrypt.compare(password, person?.passwordHash ?? (await decoyHash(config.bcryptRounds)));
+  const right = await bcrypt.compare(
+    password,
+    person?.passwordHash ?? (await decoyHash(config.bcryptRounds)),
+  );
   if (!person || !right) throw new Refusal('wrong-sign-in');
   return { person, issued: await startSession(services, person.id) };
 }

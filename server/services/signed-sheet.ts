@@ -11,11 +11,24 @@ import type { Revision } from '../models/revision';
 /** The parts of a revision that decide what its sheet says about itself. */
 export type Standing = Pick<
   Revision,
-  'state' | 'trial' | 'returned' | 'savedBy' | 'savedAt' | 'drawnBy' | 'drawnAt' | 'checkedBy' | 'checkedAt' | 'noSecondCheck'
+  | 'state'
+  | 'trial'
+  | 'returned'
+  | 'savedBy'
+  | 'savedAt'
+  | 'drawnBy'
+  | 'drawnAt'
+  | 'checkedBy'
+  | 'checkedAt'
+  | 'noSecondCheck'
 >;
 
 /** What the sheet of a revision prints when it stands so; before it is sent for checking its last saver drew it. */
-export async function signedSheet(work: ShopWork, at: Pick<RevisionAt, 'drawing' | 'revision'>, standing: Standing): Promise<Signed> {
+export async function signedSheet(
+  work: ShopWork,
+  at: Pick<RevisionAt, 'drawing' | 'revision'>,
+  standing: Standing,
+): Promise<Signed> {
   const drawnBy = standing.drawnBy ?? standing.savedBy;
   const drawnAt = standing.drawnAt ?? standing.savedAt;
   const name = await namesOf(work, [drawnBy, standing.checkedBy]);
@@ -38,6 +51,7 @@ export async function signedSheet(work: ShopWork, at: Pick<RevisionAt, 'drawing'
 
 /** How a revision stands now. */
 export function standingOf(revision: Revision): Standing {
-  const { state, trial, returned, savedBy, savedAt, drawnBy, drawnAt, checkedBy, checkedAt, noSecondCheck } = revision;
+  const { state, trial, returned, savedBy, savedAt, drawnBy, drawnAt, checkedBy, checkedAt, noSecondCheck } =
+    revision;
   return { state, trial, returned, savedBy, savedAt, drawnBy, drawnAt, checkedBy, checkedAt, noSecondCheck };
 }

@@ -24,7 +24,12 @@ export async function startRevision(work: ShopWork, drawingId: string, change: s
   });
   if (!released) {
     permit('start-drawing', work.asker);
-    throw new Refusal('wrong-state', undefined, undefined, 'Nothing of this drawing is released that a new revision could start from.');
+    throw new Refusal(
+      'wrong-state',
+      undefined,
+      undefined,
+      'Nothing of this drawing is released that a new revision could start from.',
+    );
   }
   permit('start-revision', work.asker, await matterOf(work, released));
   const openOne = await models.revisions.findOne({
@@ -33,7 +38,10 @@ export async function startRevision(work: ShopWork, drawingId: string, change: s
     transaction: work.t,
   });
   if (openOne) throw alreadyOpen(openOne.letter);
-  const last = await models.revisions.max<number, typeof released>('sequence', { where: scope, transaction: work.t });
+  const last = await models.revisions.max<number, typeof released>('sequence', {
+    where: scope,
+    transaction: work.t,
+  });
   try {
     return await addDraft(work, drawing, filledFrom(released), { sequence: last + 1, change });
   } catch (error) {
@@ -43,7 +51,12 @@ export async function startRevision(work: ShopWork, drawingId: string, change: s
 }
 
 function alreadyOpen(letter: string): Refusal {
-  return new Refusal('wrong-state', undefined, undefined, `Revision ${letter} of this drawing is being worked on already.`.replace('  ', ' '));
+  return new Refusal(
+    'wrong-state',
+    undefined,
+    undefined,
+    `Revision ${letter} of this drawing is being worked on already.`.replace('  ', ' '),
+  );
 }
 
 function filledFrom({ template, title, note, entryUnit, settings, typed }: Revision) {

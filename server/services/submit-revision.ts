@@ -16,7 +16,11 @@ import { snapshotOf, workOut } from './work-out';
  * Sends a draft for checking: worked out once more against today's register, which is then the one it is judged by.
  * Its last saver is the one who drew it. A trial mark goes off. @throws Refusal `not-ready` with what is in the way.
  */
-export async function submitRevision(work: ShopWork, place: RevisionPlace, version: number): Promise<RevisionAt> {
+export async function submitRevision(
+  work: ShopWork,
+  place: RevisionPlace,
+  version: number,
+): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
   const { revision, drawing } = at;
   await allow(work, at, 'submit', version);
@@ -41,12 +45,21 @@ export async function submitRevision(work: ShopWork, place: RevisionPlace, versi
 }
 
 /** Takes a revision back from checking; it is a draft again. */
-export async function takeBackRevision(work: ShopWork, place: RevisionPlace, version: number): Promise<RevisionAt> {
+export async function takeBackRevision(
+  work: ShopWork,
+  place: RevisionPlace,
+  version: number,
+): Promise<RevisionAt> {
   return reopen(work, place, version, 'take-back');
 }
 
 /** Sends a revision back to its drawer with reasons; it is a draft again and says that it came back. */
-export async function returnRevision(work: ShopWork, place: RevisionPlace, version: number, reason: string): Promise<RevisionAt> {
+export async function returnRevision(
+  work: ShopWork,
+  place: RevisionPlace,
+  version: number,
+  reason: string,
+): Promise<RevisionAt> {
   return reopen(work, place, version, 'return', reason);
 }
 

@@ -7,7 +7,12 @@ import { revisionAt } from './revision-at';
 import type { ShopWork } from './shop-work';
 
 /** Withdraws a release, with the reason: nobody may work from it any more. */
-export async function withdrawRevision(work: ShopWork, place: RevisionPlace, version: number, reason: string): Promise<RevisionAt> {
+export async function withdrawRevision(
+  work: ShopWork,
+  place: RevisionPlace,
+  version: number,
+  reason: string,
+): Promise<RevisionAt> {
   const at = await revisionAt(work, place, { lock: true });
   await allow(work, at, 'withdraw', version);
   await keepMove(work, at.revision, { state: 'withdrawn' });

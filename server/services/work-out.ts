@@ -33,10 +33,17 @@ export interface Signed {
 }
 
 /** Asks the engine, outside the transaction (see `engineBeside`). @throws Refusal at `template` when there is no such family. */
-export async function workOut(work: ShopWork, filled: Filled, register: Register, signed: Signed): Promise<EngineResult> {
+export async function workOut(
+  work: ShopWork,
+  filled: Filled,
+  register: Register,
+  signed: Signed,
+): Promise<EngineResult> {
   const template = templateById(filled.template);
   if (!template) {
-    throw new Refusal('bad-input', [{ path: 'template', message: `There is no template named "${filled.template}".` }]);
+    throw new Refusal('bad-input', [
+      { path: 'template', message: `There is no template named "${filled.template}".` },
+    ]);
   }
   const titled = template.parameters.some((parameter) => parameter.id === 'title');
   return work.engine({
@@ -65,14 +72,27 @@ export async function workOut(work: ShopWork, filled: Filled, register: Register
 
 type Snapshot = Pick<
   Revision,
-  'templateHash' | 'engine' | 'evaluated' | 'problems' | 'part' | 'scheme' | 'route' | 'capacity' | 'faults' | 'sheet' | 'findings' | 'contentHash'
+  | 'templateHash'
+  | 'engine'
+  | 'evaluated'
+  | 'problems'
+  | 'part'
+  | 'scheme'
+  | 'route'
+  | 'capacity'
+  | 'faults'
+  | 'sheet'
+  | 'findings'
+  | 'contentHash'
 >;
 
 /**
  * What is kept of a result. While a value is wrong the last good drawing stays (those columns are left out) and there
  * is no hash that anybody could approve.
  */
-export function snapshotOf(result: EngineResult): Partial<Snapshot> & Pick<Snapshot, 'templateHash' | 'engine' | 'evaluated' | 'problems'> {
+export function snapshotOf(
+  result: EngineResult,
+): Partial<Snapshot> & Pick<Snapshot, 'templateHash' | 'engine' | 'evaluated' | 'problems'> {
   const { evaluation, problems, good } = result;
   const judged = {
     templateHash: evaluation.templateHash,

@@ -7,7 +7,15 @@ import type { Matter } from '../../server/policies/permit';
 import { judge } from '../../server/policies/permit';
 import type { BrowserLike } from '../factories/browser-like';
 import { signedIn } from '../factories/browser-like';
-import { approve, releasedDrawing, revisionOf, revisionPath, saveRequest, startDrawing, submit } from '../factories/drawing';
+import {
+  approve,
+  releasedDrawing,
+  revisionOf,
+  revisionPath,
+  saveRequest,
+  startDrawing,
+  submit,
+} from '../factories/drawing';
 import { expectRefusal } from '../factories/refusal';
 import { rememberingEngine } from '../factories/remembering-engine';
 import type { TestServer } from '../factories/server';
@@ -48,7 +56,10 @@ const expected: Expected[] = PRODUCT.trim()
   .split('\n')
   .map((line) => {
     const [act = '', ...rest] = line.trim().split(/\s+/);
-    const letters = Object.fromEntries(roleNames.map((role, index) => [role, rest[index] ?? ''])) as Record<Role, string>;
+    const letters = Object.fromEntries(roleNames.map((role, index) => [role, rest[index] ?? ''])) as Record<
+      Role,
+      string
+    >;
     return { act, letters, states: rest.slice(5).map((state) => (state === 'review' ? 'in review' : state)) };
   });
 
@@ -71,21 +82,29 @@ describe('the act table', () => {
     expect(actTable.map((act) => act.id).sort()).toEqual(expected.map((line) => line.act).sort());
   });
 
-  it.each(actTable.map((act) => act.id))('allows %s to whom the product does, in the states it does', (id) => {
-    const line = expected.find((one) => one.act === id);
-    if (!line) throw new Error(`The product says nothing of ${id}.`);
-    for (const role of roleNames) {
-      for (const matter of matters) {
-        const verdict = judge(id, { roles: [role], selfRelease: false }, matter);
-        expect({ role, matter, may: verdict === 'allowed' }).toEqual({ role, matter, may: allowed(line, role, matter) });
+  it.each(actTable.map((act) => act.id))(
+    'allows %s to whom the product does, in the states it does',
+    (id) => {
+      const line = expected.find((one) => one.act === id);
+      if (!line) throw new Error(`The product says nothing of ${id}.`);
+      for (const role of roleNames) {
+        for (const matter of matters) {
+          const verdict = judge(id, { roles: [role], selfRelease: false }, matter);
+          expect({ role, matter, may: verdict === 'allowed' }).toEqual({
+            role,
+            matter,
+            may: allowed(line, role, matter),
+          });
+        }
       }
-    }
-  });
+    },
+  );
 
   it('gives nobody the approval of their own through a second role', () => {
     const matter: Matter = { state: 'in review', own: true, trial: false };
     for (const one of roleNames) {
-      for (const two of roleNames) expect(judge('approve', { roles: [one, two], selfRelease: false }, matter)).not.toBe('allowed');
+      for (const two of roleNames)
+        expect(judge('approve', { roles: [one, two], selfRelease: false }, matter)).not.toBe('allowed');
     }
   });
 });
@@ -100,7 +119,8 @@ describe('the routes', () => {
   beforeAll(async () => {
     server = await startTestServer({ engine: rememberingEngine() });
     shop = await makeShop(server);
-    for (const role of roleNames) people[role] = await signedIn(server, await makePerson(server, shop, [role]));
+    for (const role of roleNames)
+      people[role] = await signedIn(server, await makePerson(server, shop, [role]));
     author = await signedIn(server, await makePerson(server, shop, ['designer']));
     checker = await signedIn(server, await makePerson(server, shop, ['checker']));
   });
@@ -110,7 +130,8 @@ describe('the routes', () => {
   async function inState(state: (typeof STATES)[number] | 'trial'): Promise<RevisionAnswer> {
     const started = await startDrawing(author, shop);
     if (state === 'draft') return started;
-    if (state === 'trial') return revisionOf(await author.post(revisionPath(shop, started, 'trial'), { version: 0, trial: true }));
+    if (state === 'trial')
+      return revisionOf(await author.post(revisionPath(shop, started, 'trial'), { version: 0, trial: true }));
     const sent = await submit(author, shop, started);
     if (state === 'in review') return sent;
     const released = await approve(checker, shop, sent);
@@ -134,33 +155,48 @@ describe('the routes', () => {
     withdraw: ({ revision }) => ({ version: revision.version, reason: 'the mate was measured wrong' }),
   };
 
-  it.each(STATES)('do on a revision that is %s what the product allows each role, and answer abilities that say so', async (state) => {
-    let revision = await inState(state);
-    for (const role of roleNames) {
-      const browser = people[role];
-      const matter = (): Matter => ({ state: revision.revision.state, own: false, trial: false });
-      const may = (act: string) => {
-        const line = expected.find((one) => one.act === act);
-        return line !== undefined && allowed(line, role, matter());
-      };
-      const mayRead = may('read-published') || may('read-open');
-      const read = await browser.get(revisionPath(shop, revision));
-      expect((await browser.get(revisionPath(shop, revision, 'sheet.svg'))).status).toBe(mayRead ? 200 : 403);
-      if (!mayRead) expectRefusal(read, 403, 'forbidden');
-      else expect(named(revisionOf(read).abilities)).toEqual(named(Object.fromEntries(Object.keys(bodies).map((act) => [act, may(act)]))));
+  it.each(STATES)(
+    'do on a revision that is %s what the product allows each role, and answer abilities that say so',
+    async (state) => {
+      let revision = await inState(state);
+      for (const role of roleNames) {
+        const browser = people[role];
+        const matter = (): Matter => ({ state: revision.revision.state, own: false, trial: false });
+        const may = (act: string) => {
+          const line = expected.find((one) => one.act === act);
+          return line !== undefined && allowed(line, role, matter());
+        };
+        const mayRead = may('read-published') || may('read-open');
+        const read = await browser.get(revisionPath(shop, revision));
+        expect((await browser.get(revisionPath(shop, revision, 'sheet.svg'))).status).toBe(
+          mayRead ? 200 : 403,
+        );
+        if (!mayRead) expectRefusal(read, 403, 'forbidden');
+        else
+          expect(named(revisionOf(read).abilities)).toEqual(
+            named(Object.fromEntries(Object.keys(bodies).map((act) => [act, may(act)]))),
+          );
 
-      for (const [act, body] of Object.entries(bodies)) {
-        const could = may(act);
-        const path = revisionPath(shop, revision, act === 'edit' ? '' : act);
-        const answer = act === 'edit' ? await browser.put(path, body(revision)) : await browser.post(path, body(revision));
-        const label = { role, state, act };
-        expect({ ...label, done: answer.status === 200 }).toEqual({ ...label, done: could });
-        if (!could) expect({ ...label, status: answer.status }).toEqual({ ...label, status: expect.toBeOneOf([403, 409]) });
-        // An act that was done changes the state or makes the doer an editor: the next one gets a fresh revision.
-        if (could) revision = await inState(state);
+        for (const [act, body] of Object.entries(bodies)) {
+          const could = may(act);
+          const path = revisionPath(shop, revision, act === 'edit' ? '' : act);
+          const answer =
+            act === 'edit'
+              ? await browser.put(path, body(revision))
+              : await browser.post(path, body(revision));
+          const label = { role, state, act };
+          expect({ ...label, done: answer.status === 200 }).toEqual({ ...label, done: could });
+          if (!could)
+            expect({ ...label, status: answer.status }).toEqual({
+              ...label,
+              status: expect.toBeOneOf([403, 409]),
+            });
+          // An act that was done changes the state or makes the doer an editor: the next one gets a fresh revision.
+          if (could) revision = await inState(state);
+        }
       }
-    }
-  });
+    },
+  );
 
   function named(abilities: Abilities): Abilities {
     return Object.fromEntries(Object.keys(bodies).map((act) => [act, abilities[act] === true]));
@@ -178,10 +214,17 @@ describe('the routes', () => {
     const path = `/api/shops/${shop.slug}/drawings`;
     for (const role of ['reader', 'machinist', 'checker'] as const) {
       expectRefusal(await people[role].post(path, saveableDrawing(released)), 403, 'forbidden');
-      expectRefusal(await people[role].post(`${path}/${released.revision.drawing.id}/revisions`), 403, 'forbidden');
+      expectRefusal(
+        await people[role].post(`${path}/${released.revision.drawing.id}/revisions`),
+        403,
+        'forbidden',
+      );
     }
-    for (const role of ['designer', 'lead'] as const) expect((await people[role].post(path, saveableDrawing(released))).status).toBe(201);
-    expect((await people.designer.post(`${path}/${released.revision.drawing.id}/revisions`)).status).toBe(201);
+    for (const role of ['designer', 'lead'] as const)
+      expect((await people[role].post(path, saveableDrawing(released))).status).toBe(201);
+    expect((await people.designer.post(`${path}/${released.revision.drawing.id}/revisions`)).status).toBe(
+      201,
+    );
   });
 
   function saveableDrawing({ revision }: RevisionAnswer): unknown {
@@ -192,20 +235,36 @@ describe('the routes', () => {
   it('count as own every draft one ever saved: the lead who mended a size cannot approve it, nor can a checker who is also designer', async () => {
     const both = await signedIn(server, await makePerson(server, shop, ['designer', 'checker']));
     const started = await startDrawing(author, shop);
-    const mended = revisionOf(await people.lead.put(revisionPath(shop, started), saveRequest(started, { note: 'mended' })));
-    const again = revisionOf(await both.put(revisionPath(shop, mended), saveRequest(mended, { note: 'mended twice' })));
+    const mended = revisionOf(
+      await people.lead.put(revisionPath(shop, started), saveRequest(started, { note: 'mended' })),
+    );
+    const again = revisionOf(
+      await both.put(revisionPath(shop, mended), saveRequest(mended, { note: 'mended twice' })),
+    );
     const sent = await submit(author, shop, again);
     const { version, contentHash } = sent.revision;
     for (const browser of [people.lead, both]) {
-      expectRefusal(await browser.post(revisionPath(shop, sent, 'approve'), { version, contentHash }), 403, 'own-work');
+      expectRefusal(
+        await browser.post(revisionPath(shop, sent, 'approve'), { version, contentHash }),
+        403,
+        'own-work',
+      );
     }
-    expectRefusal(await author.post(revisionPath(shop, sent, 'approve'), { version, contentHash }), 403, 'forbidden');
+    expectRefusal(
+      await author.post(revisionPath(shop, sent, 'approve'), { version, contentHash }),
+      403,
+      'forbidden',
+    );
     expect((await approve(people.checker, shop, sent)).revision.state).toBe('released');
   });
 
   it('let a designer submit and take back their own only', async () => {
     const draft = await inState('draft');
-    expectRefusal(await people.designer.post(revisionPath(shop, draft, 'submit'), { version: 0 }), 403, 'forbidden');
+    expectRefusal(
+      await people.designer.post(revisionPath(shop, draft, 'submit'), { version: 0 }),
+      403,
+      'forbidden',
+    );
     const sent = await submit(author, shop, draft);
     const body = { version: sent.revision.version };
     expectRefusal(await people.designer.post(revisionPath(shop, sent, 'take-back'), body), 403, 'forbidden');
@@ -220,6 +279,7 @@ describe('the routes', () => {
         else expectRefusal(answer, 403, 'forbidden');
       }
     }
-    for (const role of roleNames) expect((await people[role].get(`/api/shops/${shop.slug}/register`)).status).toBe(200);
+    for (const role of roleNames)
+      expect((await people[role].get(`/api/shops/${shop.slug}/register`)).status).toBe(200);
   });
 });

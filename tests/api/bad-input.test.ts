@@ -33,12 +33,18 @@ async function nothingWritten(): Promise<void> {
 }
 
 describe('a body that cannot be read', () => {
-  it.each(['{', '{"title": ', 'null', '"text"', '[1,', '\u0000', '{"a":1}}'])('is refused as broken: %s', async (body) => {
-    for (const [method, path] of [['POST', drawings], ['PUT', revisionPath(shop, draft)]] as const) {
-      expectRefusal(await lead.send(method, path, body), 400, 'broken-json');
-    }
-    await nothingWritten();
-  });
+  it.each(['{', '{"title": ', 'null', '"text"', '[1,', '\u0000', '{"a":1}}'])(
+    'is refused as broken: %s',
+    async (body) => {
+      for (const [method, path] of [
+        ['POST', drawings],
+        ['PUT', revisionPath(shop, draft)],
+      ] as const) {
+        expectRefusal(await lead.send(method, path, body), 400, 'broken-json');
+      }
+      await nothingWritten();
+    },
+  );
 
   it('is refused when it is larger than 256 kB, by what it says and by what it is', async () => {
     const huge = JSON.stringify(drawingRequest({ note: 'x'.repeat(1_000_000) }));
@@ -48,12 +54,24 @@ describe('a body that cannot be read', () => {
   });
 
   it('is refused in an encoding that is not understood', async () => {
-    expectRefusal(await lead.send('POST', drawings, '{}', { 'content-encoding': 'zebra' }), 415, 'unknown-encoding');
-    expectRefusal(await lead.send('POST', drawings, '{}', { 'content-type': 'application/json; charset=ebcdic' }), 415, 'unknown-encoding');
+    expectRefusal(
+      await lead.send('POST', drawings, '{}', { 'content-encoding': 'zebra' }),
+      415,
+      'unknown-encoding',
+    );
+    expectRefusal(
+      await lead.send('POST', drawings, '{}', { 'content-type': 'application/json; charset=ebcdic' }),
+      415,
+      'unknown-encoding',
+    );
   });
 
   it('of another kind counts as no body', async () => {
-    expectRefusal(await lead.send('POST', drawings, 'title=x', { 'content-type': 'application/x-www-form-urlencoded' }), 422, 'bad-input');
+    expectRefusal(
+      await lead.send('POST', drawings, 'title=x', { 'content-type': 'application/x-www-form-urlencoded' }),
+      422,
+      'bad-input',
+    );
   });
 });
 
@@ -76,15 +94,27 @@ describe('a request that is not one', () => {
     ['a title of 81 characters', { title: 'x'.repeat(81) }, 'title'],
     ['a note of 2001 characters', { note: 'x'.repeat(2001) }, 'note'],
     ['a value of 201 characters', { values: { rightChamfer: '1'.repeat(201) } }, 'values.rightChamfer'],
-    ['21 rows', { values: { steps: Array.from({ length: 21 }, (_, n) => ({ key: `r${n}` })) } }, 'values.steps'],
-    ['81 values', { values: Object.fromEntries(Array.from({ length: 81 }, (_, n) => [`v${n}`, '1'])) }, 'values'],
+    [
+      '21 rows',
+      { values: { steps: Array.from({ length: 21 }, (_, n) => ({ key: `r${n}` })) } },
+      'values.steps',
+    ],
+    [
+      '81 values',
+      { values: Object.fromEntries(Array.from({ length: 81 }, (_, n) => [`v${n}`, '1'])) },
+      'values',
+    ],
     ['a template that is none', { template: 'teapot' }, 'template'],
     ['a template named like part of the language', { template: '__proto__' }, 'template'],
     ['a NUL in the title', { title: 'a\u0000b' }, 'title'],
     ['half a character in the note', { note: '\ud83d' }, 'note'],
     ['an id that is none', { id: 'first' }, 'id'],
   ])('is refused for %s', async (_name, change, path) => {
-    const { fields = [] } = expectRefusal(await lead.post(drawings, { ...drawingRequest(), ...change }), 422, 'bad-input');
+    const { fields = [] } = expectRefusal(
+      await lead.post(drawings, { ...drawingRequest(), ...change }),
+      422,
+      'bad-input',
+    );
     expect(fields.map((field) => field.path)).toContain(path);
     for (const field of fields) expect(field.message).toMatch(/\.$/);
     await nothingWritten();
@@ -137,7 +167,10 @@ describe('values that make no part', () => {
     const started = await startDrawing(lead, shop);
     const steps = started.revision.values['steps'];
     if (!Array.isArray(steps)) throw new Error('The example has steps.');
-    const values = { ...started.revision.values, steps: steps.map((row, index) => (index === 1 ? { ...row, length: text } : row)) };
+    const values = {
+      ...started.revision.values,
+      steps: steps.map((row, index) => (index === 1 ? { ...row, length: text } : row)),
+    };
     const saved = revisionOf(await lead.put(revisionPath(shop, started), saveRequest(started, { values })));
     expect(saved.revision.values).toEqual(values);
     expect(saved.revision.problems.map((problem) => problem.path)).toEqual(['steps[1].length']);
@@ -145,11 +178,17 @@ describe('values that make no part', () => {
   });
 
   it('from the first save leave a draft without a sheet, which says so when it is printed', async () => {
-    const started = await startDrawing(lead, shop, { values: {} , template: 'stepped-shaft', title: 'Nothing yet' });
-    const wrong = started.revision.result === null ? started : await startDrawing(lead, shop, { values: { steps: [] } });
+    const started = await startDrawing(lead, shop, {
+      values: {},
+      template: 'stepped-shaft',
+      title: 'Nothing yet',
+    });
+    const wrong =
+      started.revision.result === null ? started : await startDrawing(lead, shop, { values: { steps: [] } });
     expect(wrong.revision.problems.length).toBeGreaterThan(0);
     expect(wrong.revision.result).toBeNull();
-    for (const sheet of ['sheet.svg', 'sheet.pdf']) expectRefusal(await lead.get(revisionPath(shop, wrong, sheet)), 409, 'not-drawn');
+    for (const sheet of ['sheet.svg', 'sheet.pdf'])
+      expectRefusal(await lead.get(revisionPath(shop, wrong, sheet)), 409, 'not-drawn');
   });
 
   it('keeps a title with marks of its own exactly, and prints it', async () => {
@@ -162,7 +201,8 @@ describe('values that make no part', () => {
   it('lets no character onto the sheet that its face cannot letter', async () => {
     const started = await startDrawing(lead, shop, { title: 'Łódź żółw Ωμέγα Шлюз' });
     expect(started.revision.problems).toEqual([]);
-    const save = (changes: Partial<SaveRevisionRequest>) => lead.put(revisionPath(shop, started), saveRequest(started, changes));
+    const save = (changes: Partial<SaveRevisionRequest>) =>
+      lead.put(revisionPath(shop, started), saveRequest(started, changes));
     const refused = expectRefusal(await save({ change: 'made longer 長' }), 422, 'bad-input');
     expect(refused.fields?.map(({ path }) => path)).toEqual(['change']);
     const saved = revisionOf(await save({ title: 'Shaft 長', change: 'кромка' }));

@@ -33,7 +33,9 @@ describe('the database a shop starts with', () => {
   });
 
   it('lets the application make no table', async () => {
-    await expect(ask(database.appUrl, 'CREATE TABLE public.mine (id int)')).rejects.toThrow(/permission denied/);
+    await expect(ask(database.appUrl, 'CREATE TABLE public.mine (id int)')).rejects.toThrow(
+      /permission denied/,
+    );
   });
 
   it('walls every table that names a shop', async () => {

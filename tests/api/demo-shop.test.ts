@@ -36,14 +36,26 @@ describe('the demo shop', () => {
     for (const { email, role } of demo.people) {
       const browser = await signedIn(server, { mail: email, password: demo.password });
       const { shops } = sessionAnswer.parse((await browser.get('/api/session')).body);
-      expect(shops.map((shop) => ({ slug: shop.slug, roles: shop.roles }))).toEqual([{ slug: 'pellworth', roles: [role] }]);
+      expect(shops.map((shop) => ({ slug: shop.slug, roles: shop.roles }))).toEqual([
+        { slug: 'pellworth', roles: [role] },
+      ]);
     }
   });
 
   it('holds drawings in different states, each proved by the engine and with a picture', async () => {
     const { drawings } = await list('designer@pellworth.example');
-    const states = drawings.map(({ revision }) => `${revision.letter} ${revision.trial ? 'trial' : revision.returned ? 'returned' : revision.state}`);
-    expect(states.sort()).toEqual(['A in review', 'A released', 'A released', 'A returned', 'A trial', 'B released']);
+    const states = drawings.map(
+      ({ revision }) =>
+        `${revision.letter} ${revision.trial ? 'trial' : revision.returned ? 'returned' : revision.state}`,
+    );
+    expect(states.sort()).toEqual([
+      'A in review',
+      'A released',
+      'A released',
+      'A returned',
+      'A trial',
+      'B released',
+    ]);
     for (const drawing of drawings) {
       expect(drawing.verdict).not.toBeNull();
       expect(drawing.picture).toMatch(/^<svg /);

@@ -5,7 +5,15 @@ import { runEngine } from '../../shared/engine-run';
 import { openPool } from '../../server/engine/pool';
 import type { BrowserLike } from '../factories/browser-like';
 import { signedIn } from '../factories/browser-like';
-import { approve, drawingRequest, revisionOf, revisionPath, saveRequest, startDrawing, submit } from '../factories/drawing';
+import {
+  approve,
+  drawingRequest,
+  revisionOf,
+  revisionPath,
+  saveRequest,
+  startDrawing,
+  submit,
+} from '../factories/drawing';
 import { readPdf } from '../factories/pdf';
 import { expectRefusal } from '../factories/refusal';
 import type { TestServer } from '../factories/server';
@@ -55,10 +63,19 @@ describe('the engine', () => {
     const open: number[] = [];
     watch = async () => void open.push(await openTransactions());
     const started = await startDrawing(designer, shop);
-    const saved = revisionOf(await designer.put(revisionPath(shop, started), saveRequest(started, { title: 'Longer shaft' })));
-    const trial = revisionOf(await designer.post(revisionPath(shop, saved, 'trial'), { version: saved.revision.version, trial: true }));
+    const saved = revisionOf(
+      await designer.put(revisionPath(shop, started), saveRequest(started, { title: 'Longer shaft' })),
+    );
+    const trial = revisionOf(
+      await designer.post(revisionPath(shop, saved, 'trial'), {
+        version: saved.revision.version,
+        trial: true,
+      }),
+    );
     const sent = await submit(designer, shop, trial);
-    const back = revisionOf(await designer.post(revisionPath(shop, sent, 'take-back'), { version: sent.revision.version }));
+    const back = revisionOf(
+      await designer.post(revisionPath(shop, sent, 'take-back'), { version: sent.revision.version }),
+    );
     const again = await submit(designer, shop, back);
     const body = { version: again.revision.version, reason: 'The shoulder should have a fillet.' };
     const returned = revisionOf(await checker.post(revisionPath(shop, again, 'return'), body));
@@ -82,7 +99,9 @@ describe('the engine', () => {
     const slow = designer.put(revisionPath(shop, started), saveRequest(started, { title: 'Slow' }));
     await working;
     expect((await designer.get(revisionPath(shop, started))).status).toBe(200);
-    const quick = revisionOf(await designer.put(revisionPath(shop, started), saveRequest(started, { title: 'Quick' })));
+    const quick = revisionOf(
+      await designer.put(revisionPath(shop, started), saveRequest(started, { title: 'Quick' })),
+    );
     letGo();
     const late = await slow;
     expectRefusal(late, 409, 'stale');
@@ -114,7 +133,9 @@ describe('the threads beside the server', () => {
     if (!request) throw new Error('The engine was not asked.');
     const result = await pool.engine(request);
     expect(result).toEqual(runEngine(request));
-    const { pages } = await readPdf(Buffer.from(await pool.pdf([result.good?.svg ?? ''], { title: 'sheet' })));
+    const { pages } = await readPdf(
+      Buffer.from(await pool.pdf([result.good?.svg ?? ''], { title: 'sheet' })),
+    );
     expect(pages[0]?.ink).toBeGreaterThan(5000);
   });
 
@@ -123,8 +144,14 @@ describe('the threads beside the server', () => {
     const unhandable = { title: '', date: (() => undefined) as unknown as Date };
     await expect(pool.pdf(['no sheet'], unhandable)).rejects.toThrow(/could not be cloned/);
     const impatient = openPool(1, 0);
-    const bar = '<svg xmlns="http://www.w3.org/2000/svg" width="297mm" height="210mm" viewBox="0 0 297 210"></svg>';
-    const jobs = [1, 2].map(() => impatient.pdf(Array.from({ length: 200 }, () => bar), { title: '' }));
+    const bar =
+      '<svg xmlns="http://www.w3.org/2000/svg" width="297mm" height="210mm" viewBox="0 0 297 210"></svg>';
+    const jobs = [1, 2].map(() =>
+      impatient.pdf(
+        Array.from({ length: 200 }, () => bar),
+        { title: '' },
+      ),
+    );
     for (const { status } of await Promise.allSettled(jobs)) expect(status).toBe('rejected');
     await impatient.close();
     expect((await pool.pdf([bar], { title: '' })).length).toBeGreaterThan(100);

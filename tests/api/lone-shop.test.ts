@@ -32,7 +32,9 @@ async function release(): Promise<ReturnType<typeof revisionOf> | string> {
 describe('a shop where nobody else may check', () => {
   it('does not let its lead release their own unless they switch it on', async () => {
     expect(await release()).toBe('own-work');
-    expect((await lead.get(settings)).body).toEqual({ settings: { version: 0, selfRelease: false, checkers: 1 } });
+    expect((await lead.get(settings)).body).toEqual({
+      settings: { version: 0, selfRelease: false, checkers: 1 },
+    });
   });
 
   it('prints NO SECOND CHECK on what is released so, and the audit says so', async () => {
@@ -43,7 +45,14 @@ describe('a shop where nobody else may check', () => {
     expect(released.revision).toMatchObject({ state: 'released', noSecondCheck: true });
     expect(released.revision.result?.svg).toContain('NO SECOND CHECK');
     const { body } = await lead.get(`/api/shops/${shop.slug}/audit?drawing=${released.revision.drawing.id}`);
-    expect(body).toMatchObject({ events: expect.arrayContaining([expect.objectContaining({ act: 'approved', detail: expect.objectContaining({ noSecondCheck: true }) })]) });
+    expect(body).toMatchObject({
+      events: expect.arrayContaining([
+        expect.objectContaining({
+          act: 'approved',
+          detail: expect.objectContaining({ noSecondCheck: true }),
+        }),
+      ]),
+    });
   });
 
   it('refuses a switch made from an older version', async () => {
@@ -57,7 +66,9 @@ describe('a shop where nobody else may check', () => {
     await makePerson(server, shop, ['designer', 'machinist']);
     expect((await lead.get(settings)).body).toMatchObject({ settings: { selfRelease: true } });
     await makePerson(server, shop, ['checker']);
-    expect((await lead.get(settings)).body).toEqual({ settings: { version: 2, selfRelease: false, checkers: 2 } });
+    expect((await lead.get(settings)).body).toEqual({
+      settings: { version: 2, selfRelease: false, checkers: 2 },
+    });
     expect(await release()).toBe('own-work');
     expectRefusal(await lead.put(settings, { version: 2, selfRelease: true }), 409, 'wrong-state');
     const { body } = await lead.get(`/api/shops/${shop.slug}/audit`);
@@ -69,7 +80,9 @@ describe('a shop where nobody else may check', () => {
   it('cannot be switched on past the application while a second person may check', async () => {
     const { ask, close } = await rawConnection(server.testDatabase.appUrl, { 'benchleaf.shop_id': shop.id });
     try {
-      await expect(ask('UPDATE shops SET self_release = true')).rejects.toThrow(/a second person may check here/);
+      await expect(ask('UPDATE shops SET self_release = true')).rejects.toThrow(
+        /a second person may check here/,
+      );
     } finally {
       await close();
     }

@@ -24,7 +24,8 @@ let released: RevisionAnswer;
 beforeAll(async () => {
   server = await startTestServer();
   shop = await makeShop(server);
-  const enter = async (role: 'designer' | 'checker' | 'reader' | 'lead') => signedIn(server, await makePerson(server, shop, [role]));
+  const enter = async (role: 'designer' | 'checker' | 'reader' | 'lead') =>
+    signedIn(server, await makePerson(server, shop, [role]));
   designer = await enter('designer');
   reader = await enter('reader');
   lead = await enter('lead');
@@ -36,7 +37,9 @@ async function pdfOf(browser: BrowserLike, answer: RevisionAnswer, query = ''): 
   const response = await browser.get(revisionPath(shop, answer, `sheet.pdf${query}`));
   expect(response.status).toBe(200);
   expect(response.headers.get('content-type')).toBe('application/pdf');
-  expect(response.headers.get('content-disposition')).toContain(`${answer.revision.drawing.number}-${answer.revision.letter}.pdf`);
+  expect(response.headers.get('content-disposition')).toContain(
+    `${answer.revision.drawing.number}-${answer.revision.letter}.pdf`,
+  );
   return response.bytes;
 }
 
@@ -71,7 +74,9 @@ describe('a printed sheet', () => {
     const [page] = (await readPdf(Buffer.from(await sheetPdf([svg], { title: 'bar' })))).pages;
     if (!page) throw new Error('no page');
     const row = Math.round((50 / 25.4) * 100);
-    const dark = Array.from({ length: page.dots.width }, (_, x) => x).filter((x) => page.dots.at(x, row) < 128);
+    const dark = Array.from({ length: page.dots.width }, (_, x) => x).filter(
+      (x) => page.dots.at(x, row) < 128,
+    );
     const [left = 0, right = 0] = [dark.at(0), dark.at(-1)];
     expect(Math.abs(((right - left + 1) / 100) * 25.4 - 100)).toBeLessThan(0.6);
     expect(Math.abs((left / 100) * 25.4 - 20)).toBeLessThan(0.4);
@@ -91,8 +96,16 @@ describe('a printed sheet', () => {
 
   it('carries its state across it in grey until it is released, and again when it no longer holds', async () => {
     const draft = await startDrawing(designer, shop);
-    const trial = revisionOf(await designer.post(revisionPath(shop, await startDrawing(designer, shop), 'trial'), { version: 0, trial: true }));
-    for (const [answer, words] of [[draft, 'DRAFT'], [trial, 'TRIAL PIECE ONLY']] as const) {
+    const trial = revisionOf(
+      await designer.post(revisionPath(shop, await startDrawing(designer, shop), 'trial'), {
+        version: 0,
+        trial: true,
+      }),
+    );
+    for (const [answer, words] of [
+      [draft, 'DRAFT'],
+      [trial, 'TRIAL PIECE ONLY'],
+    ] as const) {
       const { pages, text } = await readPdf(await pdfOf(designer, answer));
       expect(text.replace(/\s+/g, ' ')).toContain(words);
       expect(pages[0]?.grey).toBeGreaterThan(5000);
@@ -107,8 +120,12 @@ describe('a printed sheet', () => {
 
   it('is written down, with who printed it', async () => {
     await pdfOf(reader, released);
-    const { body } = await lead.get(`/api/shops/${shop.slug}/audit?drawing=${released.revision.drawing.id}&limit=1`);
-    expect(body).toMatchObject({ events: [{ act: 'printed', by: expect.stringMatching(/^reader/), revision: released.revision.id }] });
+    const { body } = await lead.get(
+      `/api/shops/${shop.slug}/audit?drawing=${released.revision.drawing.id}&limit=1`,
+    );
+    expect(body).toMatchObject({
+      events: [{ act: 'printed', by: expect.stringMatching(/^reader/), revision: released.revision.id }],
+    });
   });
 });
 
@@ -121,7 +138,10 @@ describe('a sheet with its route card', () => {
       expect(page.height).toBeCloseTo(210 * POINTS_PER_MM, 1);
       expect(page.ink).toBeGreaterThan(5000);
     }
-    const route = released.revision.result?.route as { operations: { number: number; title: string }[]; setups: unknown[] };
+    const route = released.revision.result?.route as {
+      operations: { number: number; title: string }[];
+      setups: unknown[];
+    };
     expect(text).toContain('ROUTE CARD');
     expect(text).toContain('PULL FIRST');
     expect(text).toContain('CAUTION');

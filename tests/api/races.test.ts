@@ -4,7 +4,15 @@ import { z } from 'zod';
 import { revisionAnswer } from '../../shared/api/drawings';
 import type { BrowserLike } from '../factories/browser-like';
 import { signedIn } from '../factories/browser-like';
-import { drawingRequest, releasedDrawing, revisionOf, revisionPath, saveRequest, startDrawing, submit } from '../factories/drawing';
+import {
+  drawingRequest,
+  releasedDrawing,
+  revisionOf,
+  revisionPath,
+  saveRequest,
+  startDrawing,
+  submit,
+} from '../factories/drawing';
 import { expectRefusal } from '../factories/refusal';
 import { rememberingEngine } from '../factories/remembering-engine';
 import type { TestServer } from '../factories/server';
@@ -21,7 +29,8 @@ let checkers: BrowserLike[];
 beforeAll(async () => {
   server = await startTestServer({ engine: rememberingEngine() });
   shop = await makeShop(server);
-  const enter = async (role: 'designer' | 'checker') => signedIn(server, await makePerson(server, shop, [role]));
+  const enter = async (role: 'designer' | 'checker') =>
+    signedIn(server, await makePerson(server, shop, [role]));
   designer = await enter('designer');
   second = await enter('designer');
   checkers = [await enter('checker'), await enter('checker')];
@@ -36,10 +45,18 @@ describe('at the same moment', () => {
     const browser = await signedIn(server, await makePerson(server, fresh, ['designer']));
     const path = `/api/shops/${fresh.slug}/drawings`;
     const id = uuid();
-    const requests = [drawingRequest({ id }), drawingRequest({ id }), drawingRequest(), drawingRequest(), drawingRequest()];
+    const requests = [
+      drawingRequest({ id }),
+      drawingRequest({ id }),
+      drawingRequest(),
+      drawingRequest(),
+      drawingRequest(),
+    ];
     const answers = await Promise.all(requests.map((request) => browser.post(path, request)));
     expect(answers.map((answer) => answer.status).sort()).toEqual([201, 201, 201, 201, 409]);
-    const numbers = answers.filter((answer) => answer.status === 201).map((answer) => revisionOf(answer).revision.drawing.number);
+    const numbers = answers
+      .filter((answer) => answer.status === 201)
+      .map((answer) => revisionOf(answer).revision.drawing.number);
     expect(numbers.sort()).toEqual(['PN-0001', 'PN-0002', 'PN-0003', 'PN-0004']);
   });
 
@@ -74,7 +91,10 @@ describe('at the same moment', () => {
     ]);
     const kept = answers.find((answer) => answer.status === 200);
     const refused = answers.find((answer) => answer.status === 409);
-    if (!kept || !refused) throw new Error(`One save must be kept and one refused: ${answers.map((answer) => answer.status).join()}`);
+    if (!kept || !refused)
+      throw new Error(
+        `One save must be kept and one refused: ${answers.map((answer) => answer.status).join()}`,
+      );
     expectRefusal(refused, 409, 'stale');
     const { current } = staleAnswer.parse(refused.body);
     expect(current.revision).toEqual(revisionOf(kept).revision);
@@ -102,12 +122,17 @@ describe('at the same moment', () => {
 describe('from an older version', () => {
   it('nothing is saved, sent, taken back, returned, approved, withdrawn or marked, and each says what is there now', async () => {
     const started = await startDrawing(designer, shop);
-    const saved = revisionOf(await designer.put(revisionPath(shop, started), saveRequest(started, { note: 'newer' })));
+    const saved = revisionOf(
+      await designer.put(revisionPath(shop, started), saveRequest(started, { note: 'newer' })),
+    );
     const check = async (browser: BrowserLike, act: string, body: unknown, state: string) => {
       const path = revisionPath(shop, started, act);
       const answer = act === '' ? await browser.put(path, body) : await browser.post(path, body);
       expectRefusal(answer, 409, 'stale');
-      expect(staleAnswer.parse(answer.body).current.revision).toMatchObject({ id: started.revision.id, state });
+      expect(staleAnswer.parse(answer.body).current.revision).toMatchObject({
+        id: started.revision.id,
+        state,
+      });
     };
     await check(designer, '', saveRequest(started, { note: 'older' }), 'draft');
     await check(designer, 'submit', { version: 0 }, 'draft');
@@ -117,6 +142,11 @@ describe('from an older version', () => {
     await check(designer, 'take-back', { version: 1 }, 'in review');
     await check(checker, 'return', { version: 1, reason: 'a size is missing' }, 'in review');
     await check(checker, 'approve', { version: 1, contentHash: sent.revision.contentHash }, 'in review');
-    await check(checker, 'approve', { version: sent.revision.version, contentHash: '0'.repeat(64) }, 'in review');
+    await check(
+      checker,
+      'approve',
+      { version: sent.revision.version, contentHash: '0'.repeat(64) },
+      'in review',
+    );
   });
 });

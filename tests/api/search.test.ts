@@ -5,7 +5,15 @@ import { exampleValues } from '../../shared/template/default-values';
 import { templateById } from '../../templates';
 import type { BrowserLike } from '../factories/browser-like';
 import { signedIn } from '../factories/browser-like';
-import { approve, drawingRequest, releasedDrawing, revisionOf, revisionPath, startDrawing, submit } from '../factories/drawing';
+import {
+  approve,
+  drawingRequest,
+  releasedDrawing,
+  revisionOf,
+  revisionPath,
+  startDrawing,
+  submit,
+} from '../factories/drawing';
 import { expectRefusal } from '../factories/refusal';
 import { rememberingEngine } from '../factories/remembering-engine';
 import type { TestServer } from '../factories/server';
@@ -22,7 +30,13 @@ let machinist: BrowserLike;
 
 const pin: Pick<StartDrawingRequest, 'template' | 'values'> = {
   template: 'stepped-shaft',
-  values: { ...exampleValues(templateById('stepped-shaft') ?? missing()), steps: [{ key: 'a', diameter: '16', length: '12.7' }, { key: 'b', length: '20', thread: 'M12x1.25' }] },
+  values: {
+    ...exampleValues(templateById('stepped-shaft') ?? missing()),
+    steps: [
+      { key: 'a', diameter: '16', length: '12.7' },
+      { key: 'b', length: '20', thread: 'M12x1.25' },
+    ],
+  },
 };
 
 function missing(): never {
@@ -32,9 +46,18 @@ function missing(): never {
 beforeAll(async () => {
   server = await startTestServer({ engine: rememberingEngine() });
   shop = await makeShop(server);
-  const enter = async (role: 'designer' | 'checker' | 'reader' | 'machinist') => signedIn(server, await makePerson(server, shop, [role]));
-  [designer, checker, reader, machinist] = [await enter('designer'), await enter('checker'), await enter('reader'), await enter('machinist')];
-  await releasedDrawing(designer, checker, shop, { title: 'Paddle-gear shaft', note: 'Lock 7, ground paddle' });
+  const enter = async (role: 'designer' | 'checker' | 'reader' | 'machinist') =>
+    signedIn(server, await makePerson(server, shop, [role]));
+  [designer, checker, reader, machinist] = [
+    await enter('designer'),
+    await enter('checker'),
+    await enter('reader'),
+    await enter('machinist'),
+  ];
+  await releasedDrawing(designer, checker, shop, {
+    title: 'Paddle-gear shaft',
+    note: 'Lock 7, ground paddle',
+  });
   await startDrawing(designer, shop, { ...pin, title: 'Pawl pin', note: 'Écluse du midi' });
   const trial = await startDrawing(designer, shop, { ...pin, title: 'Trial pin' });
   await designer.post(revisionPath(shop, trial, 'trial'), { version: 0, trial: true });
@@ -45,10 +68,12 @@ afterAll(() => server.close());
 
 async function find(browser: BrowserLike, terms: Record<string, string> = {}): Promise<SearchAnswer> {
   const answer = await browser.get(`/api/shops/${shop.slug}/drawings?${new URLSearchParams(terms)}`);
-  if (answer.status !== 200) throw new Error(`${JSON.stringify(terms)}: ${answer.status} ${answer.bytes.toString('utf8')}`);
+  if (answer.status !== 200)
+    throw new Error(`${JSON.stringify(terms)}: ${answer.status} ${answer.bytes.toString('utf8')}`);
   return searchAnswer.parse(answer.body);
 }
-const titles = async (browser: BrowserLike, terms: Record<string, string>) => (await find(browser, terms)).drawings.map((drawing) => drawing.title);
+const titles = async (browser: BrowserLike, terms: Record<string, string>) =>
+  (await find(browser, terms)).drawings.map((drawing) => drawing.title);
 
 describe('the list', () => {
   it('shows the newest change first, each drawing once, with what is known of the part', async () => {
@@ -60,7 +85,12 @@ describe('the list', () => {
       'Paddle-gear shaft A released',
     ]);
     expect([total, next]).toEqual([4, null]);
-    expect(drawings[2]).toMatchObject({ length: 32.7, maxDiameter: 16, threads: [expect.stringMatching(/^M12/)], template: 'stepped-shaft' });
+    expect(drawings[2]).toMatchObject({
+      length: 32.7,
+      maxDiameter: 16,
+      threads: [expect.stringMatching(/^M12/)],
+      template: 'stepped-shaft',
+    });
     expect(drawings[2]?.operations).toBeGreaterThan(0);
     expect(drawings[2]?.picture).toMatch(/^<svg /);
   });
@@ -128,8 +158,15 @@ describe('sizes and the rest', () => {
     expect(await titles(reader, { words: 'mooring' })).toEqual([]);
     const released = await approve(checker, shop, await submit(designer, shop, started));
     expect(await titles(reader, { words: 'mooring' })).toEqual(['Mooring stud']);
-    const next = revisionOf(await designer.post(`/api/shops/${shop.slug}/drawings/${released.revision.drawing.id}/revisions`));
-    await designer.put(revisionPath(shop, next), { ...drawingRequest(pin), version: 0, title: 'Bollard stud', note: '' });
+    const next = revisionOf(
+      await designer.post(`/api/shops/${shop.slug}/drawings/${released.revision.drawing.id}/revisions`),
+    );
+    await designer.put(revisionPath(shop, next), {
+      ...drawingRequest(pin),
+      version: 0,
+      title: 'Bollard stud',
+      note: '',
+    });
     expect(await titles(designer, { words: 'bollard' })).toEqual(['Bollard stud']);
     expect(await titles(reader, { words: 'bollard' })).toEqual([]);
     expect(await titles(reader, { words: 'mooring' })).toEqual(['Mooring stud']);
@@ -163,8 +200,24 @@ describe('whatever is typed', () => {
   });
 
   it('is refused in a sentence where it is no term at all', async () => {
-    for (const query of ['state=sold', 'lengthFrom=long', 'lengthFrom=-1', 'lengthTo=Infinity', 'limit=0', 'limit=1000', 'cursor=%22', 'cursor=AAAA', 'words=a%00b', `words=${'x'.repeat(201)}`, 'words=a&words=b']) {
-      const { fields = [] } = expectRefusal(await designer.get(`/api/shops/${shop.slug}/drawings?${query}`), 422, 'bad-input');
+    for (const query of [
+      'state=sold',
+      'lengthFrom=long',
+      'lengthFrom=-1',
+      'lengthTo=Infinity',
+      'limit=0',
+      'limit=1000',
+      'cursor=%22',
+      'cursor=AAAA',
+      'words=a%00b',
+      `words=${'x'.repeat(201)}`,
+      'words=a&words=b',
+    ]) {
+      const { fields = [] } = expectRefusal(
+        await designer.get(`/api/shops/${shop.slug}/drawings?${query}`),
+        422,
+        'bad-input',
+      );
       expect(fields.length).toBeGreaterThan(0);
     }
   });

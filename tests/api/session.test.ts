@@ -25,7 +25,10 @@ describe('signing in', () => {
     const other = await makeShop(server);
     await giveRoles(server, other, person, ['lead']);
     const browser = new BrowserLike(server);
-    const answer = await browser.post('/api/session', { mail: ` ${person.mail.toUpperCase()} `, password: person.password });
+    const answer = await browser.post('/api/session', {
+      mail: ` ${person.mail.toUpperCase()} `,
+      password: person.password,
+    });
     expect(answer.status).toBe(201);
     const session = sessionAnswer.parse(answer.body);
     expect(session.person).toEqual({ id: person.id, name: person.name, mail: person.mail });
@@ -54,7 +57,10 @@ describe('signing in', () => {
         compare.mockClear();
         const answer = await browser.post('/api/session', { mail, password: 'not the password' });
         const error = expectRefusal(answer, 401, 'wrong-sign-in');
-        expect(error).toEqual({ code: 'wrong-sign-in', message: 'This mail and password do not belong together.' });
+        expect(error).toEqual({
+          code: 'wrong-sign-in',
+          message: 'This mail and password do not belong together.',
+        });
         expect(answer.headers.getSetCookie()).toEqual([]);
         expect(compare).toHaveBeenCalledTimes(1);
         costs.push(bcrypt.getRounds(compare.mock.calls[0]?.[1] ?? ''));
@@ -66,7 +72,11 @@ describe('signing in', () => {
   });
 
   it('refuses a request that is not one, field by field', async () => {
-    const error = expectRefusal(await new BrowserLike(server).post('/api/session', { mail: 'x', password: 7 }), 422, 'bad-input');
+    const error = expectRefusal(
+      await new BrowserLike(server).post('/api/session', { mail: 'x', password: 7 }),
+      422,
+      'bad-input',
+    );
     expect(error.fields?.map((field) => field.path).sort()).toEqual(['mail', 'password']);
   });
 
@@ -76,14 +86,21 @@ describe('signing in', () => {
     });
     try {
       const place = await makeShop(guarded);
-      const [one, two] = [await makePerson(guarded, place, ['reader']), await makePerson(guarded, place, ['reader'])];
+      const [one, two] = [
+        await makePerson(guarded, place, ['reader']),
+        await makePerson(guarded, place, ['reader']),
+      ];
       const browser = new BrowserLike(guarded);
       const wrong = (mail: string) => browser.post('/api/session', { mail, password: 'guess' });
       for (let round = 0; round < 3; round += 1) expectRefusal(await wrong(one.mail), 401, 'wrong-sign-in');
       expectRefusal(await wrong(one.mail.toUpperCase()), 429, 'too-many');
       await signedIn(guarded, two);
       for (const mail of ['a@depot.example', 'b@depot.example']) await wrong(mail);
-      expectRefusal(await browser.post('/api/session', { mail: two.mail, password: two.password }), 429, 'too-many');
+      expectRefusal(
+        await browser.post('/api/session', { mail: two.mail, password: two.password }),
+        429,
+        'too-many',
+      );
     } finally {
       await guarded.close();
     }
@@ -95,7 +112,11 @@ describe('signing in', () => {
     await browser.post('/api/session/refresh');
     const log = server.log.join('');
     expect(log).toContain('/api/session');
-    for (const secret of [person.password, browser.csrf, ...[...browser.cookies.values()].map((cookie) => cookie.value)]) {
+    for (const secret of [
+      person.password,
+      browser.csrf,
+      ...[...browser.cookies.values()].map((cookie) => cookie.value),
+    ]) {
       expect(log).not.toContain(secret);
     }
   });
@@ -164,7 +185,9 @@ describe('staying signed in', () => {
     const tabs = [browser, browser.copy(), browser.copy()];
     const answers = await Promise.all(tabs.map((tab) => tab.post('/api/session/refresh')));
     expect(answers.map((answer) => answer.status)).toEqual([200, 200, 200]);
-    const renewed = answers.filter((answer) => answer.headers.getSetCookie().join().includes('benchleaf_refresh'));
+    const renewed = answers.filter((answer) =>
+      answer.headers.getSetCookie().join().includes('benchleaf_refresh'),
+    );
     expect(renewed).toHaveLength(1);
   });
 
@@ -179,7 +202,10 @@ describe('staying signed in', () => {
     const browser = await signedIn(server, person);
     const token = browser.cookies.get('benchleaf_refresh')?.value ?? '';
     const [rows] = await server.owner.sequelize.transaction(async (transaction) => {
-      await server.owner.sequelize.query(`SELECT set_config('benchleaf.person_id', $1, true)`, { bind: [person.id], transaction });
+      await server.owner.sequelize.query(`SELECT set_config('benchleaf.person_id', $1, true)`, {
+        bind: [person.id],
+        transaction,
+      });
       return server.owner.sequelize.query('SELECT * FROM sessions', { transaction });
     });
     expect(rows.length).toBeGreaterThan(0);
@@ -226,7 +252,11 @@ describe('a request that another site made', () => {
   it('is refused by where it came from, sign-in included', async () => {
     const browser = await signedIn(server, person);
     const body = JSON.stringify({ mail: person.mail, password: person.password });
-    const origins: Record<string, string>[] = [{ origin: 'https://elsewhere.example' }, { origin: 'null' }, { 'sec-fetch-site': 'cross-site' }];
+    const origins: Record<string, string>[] = [
+      { origin: 'https://elsewhere.example' },
+      { origin: 'null' },
+      { 'sec-fetch-site': 'cross-site' },
+    ];
     for (const headers of origins) {
       expectRefusal(await browser.send('POST', '/api/session', body, headers), 403, 'forged');
       expectRefusal(await browser.send('POST', '/api/session/refresh', '{}', headers), 403, 'forged');

@@ -5,7 +5,14 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { drawingAnswer } from '../../shared/api/drawings';
 import { exampleRegister } from '../../shared/route/example-register';
 import { BrowserLike, signedIn } from '../factories/browser-like';
-import { drawingRequest, releasedDrawing, revisionOf, revisionPath, saveRequest, startDrawing } from '../factories/drawing';
+import {
+  drawingRequest,
+  releasedDrawing,
+  revisionOf,
+  revisionPath,
+  saveRequest,
+  startDrawing,
+} from '../factories/drawing';
 import { rawConnection } from '../factories/raw-connection';
 import { expectRefusal } from '../factories/refusal';
 import { rememberingEngine } from '../factories/remembering-engine';
@@ -29,8 +36,14 @@ beforeAll(async () => {
   await writeFile(join(folder, 'assets', 'main-abc.js'), `export const words = '${'swarf '.repeat(1000)}';`);
   server = await startTestServer({ engine: rememberingEngine(), clientFolder: folder });
   shop = await makeShop(server);
-  const enter = async (role: 'designer' | 'checker' | 'reader' | 'lead') => signedIn(server, await makePerson(server, shop, [role]));
-  [designer, checker, reader, lead] = [await enter('designer'), await enter('checker'), await enter('reader'), await enter('lead')];
+  const enter = async (role: 'designer' | 'checker' | 'reader' | 'lead') =>
+    signedIn(server, await makePerson(server, shop, [role]));
+  [designer, checker, reader, lead] = [
+    await enter('designer'),
+    await enter('checker'),
+    await enter('reader'),
+    await enter('lead'),
+  ];
 });
 afterAll(async () => {
   await server.close();
@@ -44,17 +57,26 @@ describe('a drawing', () => {
     expect(drawingAnswer.parse((await designer.get(path)).body).abilities['start-revision']).toBe(true);
     await designer.post(`${path}/revisions`);
     const all = drawingAnswer.parse((await designer.get(path)).body);
-    expect(all.revisions.map((revision) => `${revision.letter} ${revision.state}`)).toEqual(['B draft', 'A released']);
+    expect(all.revisions.map((revision) => `${revision.letter} ${revision.state}`)).toEqual([
+      'B draft',
+      'A released',
+    ]);
     expect(all.abilities['start-revision']).toBe(false);
     const some = drawingAnswer.parse((await reader.get(path)).body);
     expect(some.revisions.map((revision) => revision.letter)).toEqual(['A']);
     const draft = await startDrawing(designer, shop);
-    expectRefusal(await reader.get(`/api/shops/${shop.slug}/drawings/${draft.revision.drawing.id}`), 403, 'forbidden');
+    expectRefusal(
+      await reader.get(`/api/shops/${shop.slug}/drawings/${draft.revision.drawing.id}`),
+      403,
+      'forbidden',
+    );
   });
 
   it('is released with the numbers of its balloons, and its next revision keeps them', async () => {
     const released = await releasedDrawing(designer, checker, shop);
-    const next = revisionOf(await designer.post(`/api/shops/${shop.slug}/drawings/${released.revision.drawing.id}/revisions`));
+    const next = revisionOf(
+      await designer.post(`/api/shops/${shop.slug}/drawings/${released.revision.drawing.id}/revisions`),
+    );
     const balloons = (answer: typeof next) => {
       const scheme = answer.revision.result?.scheme as { sizes: { id: string; balloon: number }[] };
       return Object.fromEntries(scheme.sizes.map((size) => [size.id, size.balloon]));
@@ -66,7 +88,10 @@ describe('a drawing', () => {
 describe('the register', () => {
   it('is answered as the plans are judged by', async () => {
     const { body } = await reader.get(`/api/shops/${shop.slug}/register`);
-    expect(body).toMatchObject({ version: 1, register: JSON.parse(JSON.stringify(exampleRegister)) as unknown });
+    expect(body).toMatchObject({
+      version: 1,
+      register: JSON.parse(JSON.stringify(exampleRegister)) as unknown,
+    });
   });
 
   it('is missing in a shop that has none yet, in a sentence', async () => {
@@ -77,7 +102,9 @@ describe('the register', () => {
     await superuser.ask('DELETE FROM registers WHERE shop_id = $1', [bare.id]);
     await superuser.ask('ALTER TABLE registers ENABLE TRIGGER registers_only_added');
     await superuser.close();
-    expect(expectRefusal(await admin.get(`/api/shops/${bare.slug}/register`), 404, 'not-found').message).toContain('no register');
+    expect(
+      expectRefusal(await admin.get(`/api/shops/${bare.slug}/register`), 404, 'not-found').message,
+    ).toContain('no register');
   });
 });
 
@@ -85,7 +112,13 @@ describe('people', () => {
   it('are answered with their roles, by name', async () => {
     const { body } = await lead.get(`/api/shops/${shop.slug}/people`);
     const { people } = body as { people: { name: string; roles: string[] }[] };
-    expect(people.map((person) => person.roles.join()).sort()).toEqual(['checker', 'designer', 'lead', 'reader', 'reader']);
+    expect(people.map((person) => person.roles.join()).sort()).toEqual([
+      'checker',
+      'designer',
+      'lead',
+      'reader',
+      'reader',
+    ]);
     expect(people.map((person) => person.name)).toEqual([...people.map((person) => person.name)].sort());
     expect(JSON.stringify(body)).not.toMatch(/password|\$2[aby]\$/);
   });
@@ -99,7 +132,9 @@ describe('the audit trail', () => {
     const { events } = (await lead.get(path)).body as { events: { id: string; act: string; by: string }[] };
     expect(events.map((event) => event.act)).toEqual(['saved', 'started']);
     expect(events[0]?.by).toMatch(/^designer/);
-    const { events: older } = (await lead.get(`${path}&before=${events[0]?.id}`)).body as { events: { act: string }[] };
+    const { events: older } = (await lead.get(`${path}&before=${events[0]?.id}`)).body as {
+      events: { act: string }[];
+    };
     expect(older.map((event) => event.act)).toEqual(['started']);
     expectRefusal(await lead.get(`/api/shops/${shop.slug}/audit?before=yesterday`), 422, 'bad-input');
   });
@@ -131,7 +166,8 @@ describe('the pages', () => {
 });
 
 describe('what is sent', () => {
-  const packed = (browser: BrowserLike, path: string, encoding: string) => browser.send('GET', path, undefined, { 'accept-encoding': encoding });
+  const packed = (browser: BrowserLike, path: string, encoding: string) =>
+    browser.send('GET', path, undefined, { 'accept-encoding': encoding });
 
   it('is packed where it is text and the asker can unpack it, and the same once unpacked', async () => {
     const path = revisionPath(shop, await startDrawing(designer, shop));
@@ -152,11 +188,23 @@ describe('what is sent', () => {
 
   it('under /api is kept by no cache, whatever the answer', async () => {
     const drawing = await startDrawing(designer, shop);
-    const paths = ['/api/health', '/api/session', '/api/nothing', `/api/shops/${shop.slug}/drawings`, revisionPath(shop, drawing), revisionPath(shop, drawing, 'sheet.pdf'), '/api/shops/nowhere/drawings'];
+    const paths = [
+      '/api/health',
+      '/api/session',
+      '/api/nothing',
+      `/api/shops/${shop.slug}/drawings`,
+      revisionPath(shop, drawing),
+      revisionPath(shop, drawing, 'sheet.pdf'),
+      '/api/shops/nowhere/drawings',
+    ];
     for (const browser of [designer, new BrowserLike(server)]) {
       for (const path of paths) {
         const { headers } = await browser.get(path);
-        expect({ path, kept: headers.get('cache-control'), etag: headers.get('etag') }).toEqual({ path, kept: 'no-store', etag: null });
+        expect({ path, kept: headers.get('cache-control'), etag: headers.get('etag') }).toEqual({
+          path,
+          kept: 'no-store',
+          etag: null,
+        });
       }
     }
   });

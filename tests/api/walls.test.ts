@@ -3,7 +3,14 @@ import type { RevisionAnswer } from '../../shared/api/drawings';
 import { searchAnswer } from '../../shared/api/drawings';
 import type { BrowserLike } from '../factories/browser-like';
 import { signedIn } from '../factories/browser-like';
-import { drawingRequest, releasedDrawing, revisionOf, revisionPath, saveRequest, startDrawing } from '../factories/drawing';
+import {
+  drawingRequest,
+  releasedDrawing,
+  revisionOf,
+  revisionPath,
+  saveRequest,
+  startDrawing,
+} from '../factories/drawing';
 import type { RawConnection } from '../factories/raw-connection';
 import { rawConnection } from '../factories/raw-connection';
 import { expectRefusal } from '../factories/refusal';
@@ -36,26 +43,52 @@ afterAll(() => server.close());
 
 describe('another shop', () => {
   it('is not there for whoever does not belong to it', async () => {
-    for (const path of ['drawings', 'register', 'people', 'audit', 'settings', `drawings/${drawing.revision.drawing.id}`]) {
+    for (const path of [
+      'drawings',
+      'register',
+      'people',
+      'audit',
+      'settings',
+      `drawings/${drawing.revision.drawing.id}`,
+    ]) {
       expectRefusal(await outsider.get(`/api/shops/${ours.slug}/${path}`), 404, 'not-found');
     }
-    expectRefusal(await outsider.post(`/api/shops/${ours.slug}/drawings`, drawingRequest()), 404, 'not-found');
+    expectRefusal(
+      await outsider.post(`/api/shops/${ours.slug}/drawings`, drawingRequest()),
+      404,
+      'not-found',
+    );
     expectRefusal(await outsider.get('/api/shops/no-such-shop/drawings'), 404, 'not-found');
   });
 
   it('keeps its drawings to itself when they are asked for through a shop one does belong to', async () => {
     const { version, contentHash } = drawing.revision;
     const at = (act = '') => revisionPath(theirs, drawing, act);
-    expectRefusal(await outsider.get(`/api/shops/${theirs.slug}/drawings/${drawing.revision.drawing.id}`), 404, 'not-found');
-    expectRefusal(await outsider.post(`/api/shops/${theirs.slug}/drawings/${released.revision.drawing.id}/revisions`), 404, 'not-found');
-    for (const act of ['', 'sheet.svg', 'sheet.pdf']) expectRefusal(await outsider.get(at(act)), 404, 'not-found');
+    expectRefusal(
+      await outsider.get(`/api/shops/${theirs.slug}/drawings/${drawing.revision.drawing.id}`),
+      404,
+      'not-found',
+    );
+    expectRefusal(
+      await outsider.post(`/api/shops/${theirs.slug}/drawings/${released.revision.drawing.id}/revisions`),
+      404,
+      'not-found',
+    );
+    for (const act of ['', 'sheet.svg', 'sheet.pdf'])
+      expectRefusal(await outsider.get(at(act)), 404, 'not-found');
     expectRefusal(await outsider.put(at(), saveRequest(drawing)), 404, 'not-found');
-    for (const act of ['submit', 'take-back']) expectRefusal(await outsider.post(at(act), { version }), 404, 'not-found');
+    for (const act of ['submit', 'take-back'])
+      expectRefusal(await outsider.post(at(act), { version }), 404, 'not-found');
     const reason = 'nobody of this shop';
-    for (const act of ['return', 'withdraw']) expectRefusal(await outsider.post(at(act), { version, reason }), 404, 'not-found');
+    for (const act of ['return', 'withdraw'])
+      expectRefusal(await outsider.post(at(act), { version, reason }), 404, 'not-found');
     expectRefusal(await outsider.post(at('approve'), { version, contentHash }), 404, 'not-found');
     expectRefusal(await outsider.post(at('trial'), { version, trial: true }), 404, 'not-found');
-    expectRefusal(await outsider.get(`/api/shops/${theirs.slug}/audit?drawing=${drawing.revision.drawing.id}`), 404, 'not-found');
+    expectRefusal(
+      await outsider.get(`/api/shops/${theirs.slug}/audit?drawing=${drawing.revision.drawing.id}`),
+      404,
+      'not-found',
+    );
     const found = searchAnswer.parse((await outsider.get(`/api/shops/${theirs.slug}/drawings`)).body);
     expect(found).toMatchObject({ drawings: [], total: 0 });
   });
@@ -72,7 +105,10 @@ describe('another shop', () => {
   });
 
   it('refuses the id of a drawing of a shop one cannot see, without saying whose it is', async () => {
-    const answer = await outsider.post(`/api/shops/${theirs.slug}/drawings`, drawingRequest({ id: drawing.revision.drawing.id }));
+    const answer = await outsider.post(
+      `/api/shops/${theirs.slug}/drawings`,
+      drawingRequest({ id: drawing.revision.drawing.id }),
+    );
     expect(expectRefusal(answer, 409, 'exists').message).toBe('This id is in use already.');
     // The number that the refused drawing would have had goes to the next one.
     expect((await startDrawing(outsider, theirs)).revision.drawing.number).toBe('PN-0002');
@@ -88,7 +124,21 @@ describe('another shop', () => {
 });
 
 describe('a connection of the application itself', () => {
-  const TABLES = ['drawings', 'revisions', 'revision_editors', 'decisions', 'audit_events', 'registers', 'blobs', 'number_series', 'revision_facts', 'memberships', 'shops', 'people', 'sessions'];
+  const TABLES = [
+    'drawings',
+    'revisions',
+    'revision_editors',
+    'decisions',
+    'audit_events',
+    'registers',
+    'blobs',
+    'number_series',
+    'revision_facts',
+    'memberships',
+    'shops',
+    'people',
+    'sessions',
+  ];
   const connections: RawConnection[] = [];
   const connect = async (settings: Record<string, string> = {}) => {
     const connection = await rawConnection(server.testDatabase.appUrl, settings);
@@ -103,17 +153,25 @@ describe('a connection of the application itself', () => {
     connections.push(admin);
     for (const table of TABLES) {
       expect({ table, rows: await ask(`SELECT 1 FROM ${table}`) }).toEqual({ table, rows: [] });
-      expect({ table, rows: (await admin.ask(`SELECT 1 FROM ${table}`)).length > 0 }).toEqual({ table, rows: true });
+      expect({ table, rows: (await admin.ask(`SELECT 1 FROM ${table}`)).length > 0 }).toEqual({
+        table,
+        rows: true,
+      });
     }
   });
 
   it('sees the rows of the shop that is set, and none of another', async () => {
     const { ask } = await connect({ 'benchleaf.shop_id': theirs.id });
     for (const table of TABLES.filter((name) => !['shops', 'people', 'sessions'].includes(name))) {
-      expect({ table, rows: await ask(`SELECT 1 FROM ${table} WHERE shop_id <> $1`, [theirs.id]) }).toEqual({ table, rows: [] });
+      expect({ table, rows: await ask(`SELECT 1 FROM ${table} WHERE shop_id <> $1`, [theirs.id]) }).toEqual({
+        table,
+        rows: [],
+      });
     }
     expect(await ask('SELECT id FROM shops')).toEqual([{ id: theirs.id }]);
-    expect((await ask('SELECT id FROM people')).map((row) => row['id']).sort()).toEqual([outside.id, theirs.keeper.id].sort());
+    expect((await ask('SELECT id FROM people')).map((row) => row['id']).sort()).toEqual(
+      [outside.id, theirs.keeper.id].sort(),
+    );
     expect(await ask('SELECT 1 FROM sessions')).toEqual([]);
   });
 
@@ -140,9 +198,9 @@ describe('a connection of the application itself', () => {
       `state = 'in review'`,
       `note = 'quietly'`,
     ]) {
-      await expect(ask(`UPDATE revisions SET version = version + 1, ${change} WHERE id = $1`, [id])).rejects.toThrow(
-        /only a draft changes|does not change|does not go from|violates/,
-      );
+      await expect(
+        ask(`UPDATE revisions SET version = version + 1, ${change} WHERE id = $1`, [id]),
+      ).rejects.toThrow(/only a draft changes|does not change|does not go from|violates/);
     }
     await expect(ask('DELETE FROM revisions')).rejects.toThrow(/permission denied/);
     for (const table of ['audit_events', 'decisions', 'registers']) {
@@ -155,13 +213,22 @@ describe('a connection of the application itself', () => {
 
   it('cannot release past the second pair of eyes', async () => {
     const { ask } = await connect({ 'benchleaf.shop_id': ours.id });
-    const [editor] = await ask('SELECT person_id FROM revision_editors WHERE revision_id = $1', [drawing.revision.id]);
-    const [release] = await ask('SELECT svg_hash, pdf_hash FROM revisions WHERE id = $1', [released.revision.id]);
-    await ask(`UPDATE revisions SET version = version + 1, state = 'in review', drawn_by = saved_by, drawn_at = now() WHERE id = $1`, [drawing.revision.id]);
+    const [editor] = await ask('SELECT person_id FROM revision_editors WHERE revision_id = $1', [
+      drawing.revision.id,
+    ]);
+    const [release] = await ask('SELECT svg_hash, pdf_hash FROM revisions WHERE id = $1', [
+      released.revision.id,
+    ]);
+    await ask(
+      `UPDATE revisions SET version = version + 1, state = 'in review', drawn_by = saved_by, drawn_at = now() WHERE id = $1`,
+      [drawing.revision.id],
+    );
     const approve = `UPDATE revisions SET version = version + 1, state = 'released', checked_by = $2, checked_at = now(), svg_hash = $3, pdf_hash = $4`;
     const values = [drawing.revision.id, editor?.['person_id'], release?.['svg_hash'], release?.['pdf_hash']];
     await expect(ask(`${approve} WHERE id = $1`, values)).rejects.toThrow(/nobody approves their own/);
-    await expect(ask(`${approve}, no_second_check = true WHERE id = $1`, values)).rejects.toThrow(/without a second check/);
+    await expect(ask(`${approve}, no_second_check = true WHERE id = $1`, values)).rejects.toThrow(
+      /without a second check/,
+    );
   });
 
   it('holds audit rows against the owner of the tables too', async () => {

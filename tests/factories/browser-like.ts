@@ -42,7 +42,12 @@ export class BrowserLike {
     return this.send('DELETE', path);
   }
 
-  async send(method: string, path: string, body?: string, headers: Record<string, string> = {}): Promise<Answer> {
+  async send(
+    method: string,
+    path: string,
+    body?: string,
+    headers: Record<string, string> = {},
+  ): Promise<Answer> {
     const cookie = [...this.cookies]
       .filter(([, kept]) => path.startsWith(kept.path))
       .map(([name, kept]) => `${name}=${kept.value}`)
@@ -61,7 +66,12 @@ export class BrowserLike {
     for (const line of response.headers.getSetCookie()) this.keep(line);
     const bytes = Buffer.from(await response.arrayBuffer());
     const json = response.headers.get('content-type')?.includes('application/json') ?? false;
-    return { status: response.status, headers: response.headers, bytes, body: json ? JSON.parse(bytes.toString('utf8')) : undefined };
+    return {
+      status: response.status,
+      headers: response.headers,
+      bytes,
+      body: json ? JSON.parse(bytes.toString('utf8')) : undefined,
+    };
   }
 
   private keep(line: string): void {
@@ -74,10 +84,14 @@ export class BrowserLike {
 }
 
 /** Somebody who has signed in. */
-export async function signedIn(server: TestServer, person: Pick<TestPerson, 'mail' | 'password'>): Promise<BrowserLike> {
+export async function signedIn(
+  server: TestServer,
+  person: Pick<TestPerson, 'mail' | 'password'>,
+): Promise<BrowserLike> {
   const browser = new BrowserLike(server);
   const answer = await browser.post('/api/session', { mail: person.mail, password: person.password });
-  if (answer.status !== 201) throw new Error(`${person.mail} could not sign in: ${answer.bytes.toString('utf8')}`);
+  if (answer.status !== 201)
+    throw new Error(`${person.mail} could not sign in: ${answer.bytes.toString('utf8')}`);
   browser.csrf = (answer.body as { csrf: string }).csrf;
   return browser;
 }

@@ -22,7 +22,8 @@ export function drawingRequest(changes: Partial<StartDrawingRequest> = {}): Star
 
 /** A revision in the answer's own schema; the test fails with what came instead. */
 export function revisionOf(answer: Answer): RevisionAnswer {
-  if (answer.status >= 300) throw new Error(`${answer.status}: ${answer.bytes.toString('utf8').slice(0, 600)}`);
+  if (answer.status >= 300)
+    throw new Error(`${answer.status}: ${answer.bytes.toString('utf8').slice(0, 600)}`);
   return revisionAnswer.parse(answer.body);
 }
 
@@ -40,16 +41,29 @@ export async function startDrawing(
 }
 
 /** The save that changes nothing but what is named. */
-export function saveRequest(answer: RevisionAnswer, changes: Partial<SaveRevisionRequest> = {}): SaveRevisionRequest {
+export function saveRequest(
+  answer: RevisionAnswer,
+  changes: Partial<SaveRevisionRequest> = {},
+): SaveRevisionRequest {
   const { version, title, note, entryUnit, settings, values } = answer.revision;
   return { version, title, note, entryUnit, settings, values, ...changes };
 }
 
-export async function submit(browser: BrowserLike, shop: Pick<TestShop, 'slug'>, answer: RevisionAnswer): Promise<RevisionAnswer> {
-  return revisionOf(await browser.post(revisionPath(shop, answer, 'submit'), { version: answer.revision.version }));
+export async function submit(
+  browser: BrowserLike,
+  shop: Pick<TestShop, 'slug'>,
+  answer: RevisionAnswer,
+): Promise<RevisionAnswer> {
+  return revisionOf(
+    await browser.post(revisionPath(shop, answer, 'submit'), { version: answer.revision.version }),
+  );
 }
 
-export async function approve(browser: BrowserLike, shop: Pick<TestShop, 'slug'>, answer: RevisionAnswer): Promise<RevisionAnswer> {
+export async function approve(
+  browser: BrowserLike,
+  shop: Pick<TestShop, 'slug'>,
+  answer: RevisionAnswer,
+): Promise<RevisionAnswer> {
   const { version, contentHash } = answer.revision;
   return revisionOf(await browser.post(revisionPath(shop, answer, 'approve'), { version, contentHash }));
 }

@@ -27,7 +27,9 @@ export async function readPdf(pdf: Buffer): Promise<{ pages: PdfPage[]; text: st
     const sizes = [...info.matchAll(/^Page\s+\d+ size:\s+([\d.]+) x ([\d.]+) pts/gm)];
     await run('pdftoppm', ['-gray', '-r', '100', file, join(folder, 'page')]);
     const names = (await readdir(folder)).filter((name) => name.endsWith('.pgm')).sort();
-    const pages = await Promise.all(names.map(async (name, index) => pageOf(await readFile(join(folder, name)), sizes[index])));
+    const pages = await Promise.all(
+      names.map(async (name, index) => pageOf(await readFile(join(folder, name)), sizes[index])),
+    );
     const text = (await run('pdftotext', ['-layout', file, '-'])).stdout;
     return { pages, text };
   } finally {

@@ -36,7 +36,9 @@ export interface TestServer {
 
 /** A server listening on the loopback address, with a database and a store of its own. */
 export async function startTestServer(
-  changes: Partial<Pick<ServerConfig, 'rateLimits' | 'clientFolder' | 'bcryptRounds'>> & { engine?: Services['engine'] } = {},
+  changes: Partial<Pick<ServerConfig, 'rateLimits' | 'clientFolder' | 'bcryptRounds'>> & {
+    engine?: Services['engine'];
+  } = {},
 ): Promise<TestServer> {
   const { engine = ownThread.engine, ...configured } = changes;
   const testDatabase = await createTestDatabase();
@@ -55,7 +57,12 @@ export async function startTestServer(
     accessLife: 10 * 60_000,
     refreshLife: 30 * 24 * 3_600_000,
     refreshGrace: 10_000,
-    rateLimits: { ...usualRateLimits, signInPerAddress: 10_000, signInPerMail: 10_000, requestsPerMinute: 100_000 },
+    rateLimits: {
+      ...usualRateLimits,
+      signInPerAddress: 10_000,
+      signInPerMail: 10_000,
+      requestsPerMinute: 100_000,
+    },
     secureCookies: false,
     ...configured,
   };
@@ -64,7 +71,14 @@ export async function startTestServer(
   const log: string[] = [];
   let ahead = 0;
   const clock: TestClock = { now: () => new Date(Date.now() + ahead), forward: (by) => void (ahead += by) };
-  const services: Services = { config, database, store: localDiskStore(folder), ...ownThread, engine, now: clock.now };
+  const services: Services = {
+    config,
+    database,
+    store: localDiskStore(folder),
+    ...ownThread,
+    engine,
+    now: clock.now,
+  };
   const logger = pino({ level: 'info' }, { write: (line: string) => void log.push(line) });
   const server = createServer(buildApp(services, logger));
   await new Promise<void>((done) => server.listen(0, '127.0.0.1', done));

@@ -25,7 +25,10 @@ const PASSWORD = 'paddle-gear-and-pawl';
 let made = 0;
 
 /** A shop with the example register, and a reader who keeps it; every name is its own. */
-export async function makeShop(server: TestServer, given: { slug?: string; register?: Register } = {}): Promise<TestShop> {
+export async function makeShop(
+  server: TestServer,
+  given: { slug?: string; register?: Register } = {},
+): Promise<TestShop> {
   const { owner } = server;
   made += 1;
   const shop = { id: uuid(), slug: given.slug ?? `depot-${made}`, name: `Depot ${made}` };
@@ -35,7 +38,14 @@ export async function makeShop(server: TestServer, given: { slug?: string; regis
   const keeper = await makePerson(server, shop, ['reader']);
   await inSight(owner, { shopId: shop.id }, async (transaction) => {
     await owner.models.registers.create(
-      { id: uuid(), shopId: shop.id, version: 1, content: given.register ?? exampleRegister, savedBy: keeper.id, savedAt: new Date() },
+      {
+        id: uuid(),
+        shopId: shop.id,
+        version: 1,
+        content: given.register ?? exampleRegister,
+        savedBy: keeper.id,
+        savedAt: new Date(),
+      },
       { transaction },
     );
   });
@@ -51,18 +61,38 @@ export async function makePerson(
 ): Promise<TestPerson> {
   const { owner, config } = server;
   made += 1;
-  const person = { id: uuid(), name: `${roles.join(' and ')} ${made}`, mail: `person${made}@depot.example`, password: PASSWORD, ...given };
+  const person = {
+    id: uuid(),
+    name: `${roles.join(' and ')} ${made}`,
+    mail: `person${made}@depot.example`,
+    password: PASSWORD,
+    ...given,
+  };
   const passwordHash = await hashPassword(person.password, config.bcryptRounds);
   await inSight(owner, { shopId: shop.id, personId: person.id }, async (transaction) => {
-    await owner.models.people.create({ id: person.id, name: person.name, mail: person.mail, passwordHash }, { transaction });
-    await owner.models.memberships.create({ shopId: shop.id, personId: person.id, roles: [...roles] }, { transaction });
+    await owner.models.people.create(
+      { id: person.id, name: person.name, mail: person.mail, passwordHash },
+      { transaction },
+    );
+    await owner.models.memberships.create(
+      { shopId: shop.id, personId: person.id, roles: [...roles] },
+      { transaction },
+    );
   });
   return person;
 }
 
 /** Adds a person who exists to another shop, or gives them other roles there. */
-export async function giveRoles(server: TestServer, shop: { id: string }, person: { id: string }, roles: readonly Role[]): Promise<void> {
+export async function giveRoles(
+  server: TestServer,
+  shop: { id: string },
+  person: { id: string },
+  roles: readonly Role[],
+): Promise<void> {
   await inSight(server.owner, { shopId: shop.id }, async (transaction) => {
-    await server.owner.models.memberships.upsert({ shopId: shop.id, personId: person.id, roles: [...roles] }, { transaction });
+    await server.owner.models.memberships.upsert(
+      { shopId: shop.id, personId: person.id, roles: [...roles] },
+      { transaction },
+    );
   });
 }

@@ -20,19 +20,24 @@ export function drawingRoutes(services: Services): Router {
   const router = Router({ mergeParams: true });
   router.get(
     '/',
-    inShop(services, async (work, request) => presentSearch(work, await searchDrawings(work, readQuery(request, searchQuery)))),
+    inShop(services, async (work, request) =>
+      presentSearch(work, await searchDrawings(work, readQuery(request, searchQuery))),
+    ),
   );
   router.post(
     '/',
     inShop(
       services,
-      async (work, request) => presentRevision(work, await startDrawing(work, readBody(request, startDrawingRequest))),
+      async (work, request) =>
+        presentRevision(work, await startDrawing(work, readBody(request, startDrawingRequest))),
       created,
     ),
   );
   router.get(
     '/:drawing',
-    inShop(services, async (work, request) => presentDrawing(work, await drawingAt(work, parameter(request, 'drawing')))),
+    inShop(services, async (work, request) =>
+      presentDrawing(work, await drawingAt(work, parameter(request, 'drawing'))),
+    ),
   );
   router.post(
     '/:drawing/revisions',

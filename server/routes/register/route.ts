@@ -13,7 +13,13 @@ export function registerRoutes(services: Services): Router {
     inShop(services, async (work) => {
       permit('read-register', work.asker);
       const { id, version, content, savedAt } = await currentRegister(work);
-      return { register: content, id, version, savedAt: savedAt.toISOString(), abilities: shopAbilities(work.asker) };
+      return {
+        register: content,
+        id,
+        version,
+        savedAt: savedAt.toISOString(),
+        abilities: shopAbilities(work.asker),
+      };
     }),
   );
   return router;

@@ -1,7 +1,13 @@
 import type { Request, RequestHandler, Response } from 'express';
 import { Router } from 'express';
 import type { z } from 'zod';
-import { approveRequest, reasonRequest, saveRevisionRequest, trialRequest, versionRequest } from '../../../shared/api/drawings';
+import {
+  approveRequest,
+  reasonRequest,
+  saveRevisionRequest,
+  trialRequest,
+  versionRequest,
+} from '../../../shared/api/drawings';
 import { inShop, parameter } from '../../middleware/in-shop';
 import { readBody, readQuery } from '../../middleware/read-request';
 import { presentRevision } from '../../presenters/revision';
@@ -31,11 +37,19 @@ export function revisionRoutes(services: Services): Router {
 
   router.get(
     '/',
-    inShop(services, async (work, request) => presentRevision(work, await readRevision(work, placeOf(request)))),
+    inShop(services, async (work, request) =>
+      presentRevision(work, await readRevision(work, placeOf(request))),
+    ),
   );
   router.put('/', acting(saveRevisionRequest, saveRevision));
-  router.post('/submit', acting(versionRequest, (work, place, { version }) => submitRevision(work, place, version)));
-  router.post('/take-back', acting(versionRequest, (work, place, { version }) => takeBackRevision(work, place, version)));
+  router.post(
+    '/submit',
+    acting(versionRequest, (work, place, { version }) => submitRevision(work, place, version)),
+  );
+  router.post(
+    '/take-back',
+    acting(versionRequest, (work, place, { version }) => takeBackRevision(work, place, version)),
+  );
   router.post(
     '/return',
     acting(reasonRequest, (work, place, { version, reason }) => returnRevision(work, place, version, reason)),
@@ -43,14 +57,23 @@ export function revisionRoutes(services: Services): Router {
   router.post('/approve', acting(approveRequest, approveRevision));
   router.post(
     '/withdraw',
-    acting(reasonRequest, (work, place, { version, reason }) => withdrawRevision(work, place, version, reason)),
+    acting(reasonRequest, (work, place, { version, reason }) =>
+      withdrawRevision(work, place, version, reason),
+    ),
   );
-  router.post('/trial', acting(trialRequest, (work, place, { version, trial }) => markTrial(work, place, version, trial)));
+  router.post(
+    '/trial',
+    acting(trialRequest, (work, place, { version, trial }) => markTrial(work, place, version, trial)),
+  );
   router.get(
     '/sheet.svg',
-    inShop(services, (work, request) => readSheetSvg(work, placeOf(request)), (response, { svg, name }) => {
-      named(response, 'image/svg+xml', `${name}.svg`).send(svg);
-    }),
+    inShop(
+      services,
+      (work, request) => readSheetSvg(work, placeOf(request)),
+      (response, { svg, name }) => {
+        named(response, 'image/svg+xml', `${name}.svg`).send(svg);
+      },
+    ),
   );
   router.get(
     '/sheet.pdf',

@@ -18,10 +18,20 @@ describe('letters of revisions', () => {
 });
 
 describe('the hash that a checker approves', () => {
-  const content = { values: { b: 1, a: [{ y: 0.1, x: null }] }, part: { length: 1e-7 }, scheme: {}, route: null };
+  const content = {
+    values: { b: 1, a: [{ y: 0.1, x: null }] },
+    part: { length: 1e-7 },
+    scheme: {},
+    route: null,
+  };
 
   it('does not depend on the order of keys, nor on a way through the database', () => {
-    const turned = { route: null, scheme: {}, part: { length: 1e-7 }, values: { a: [{ x: null, y: 0.1 }], b: 1 } };
+    const turned = {
+      route: null,
+      scheme: {},
+      part: { length: 1e-7 },
+      values: { a: [{ x: null, y: 0.1 }], b: 1 },
+    };
     expect(contentHash(turned)).toBe(contentHash(content));
     expect(contentHash(JSON.parse(canonicalJson(content)) as typeof content)).toBe(contentHash(content));
   });
@@ -57,7 +67,10 @@ describe('the store on disk', () => {
     const folder = await mkdtemp(join(tmpdir(), 'benchleaf-store-'));
     try {
       const store = localDiskStore(folder);
-      const [hash, again] = await Promise.all([store.put(Buffer.from('a sheet')), store.put(Buffer.from('a sheet'))]);
+      const [hash, again] = await Promise.all([
+        store.put(Buffer.from('a sheet')),
+        store.put(Buffer.from('a sheet')),
+      ]);
       expect(again).toBe(hash);
       const place = join(folder, hash.slice(0, 2));
       expect(await readdir(place)).toEqual([hash.slice(2)]);
@@ -75,11 +88,15 @@ describe('the store on disk', () => {
 describe('the lettering', () => {
   it('is unpacked to a face without ligatures, and nothing else is taken for one', () => {
     for (const sfnt of [face('latin', 400), face('latin', 700)]) {
-      const tags = Array.from({ length: sfnt.readUInt16BE(4) }, (_, index) => sfnt.toString('latin1', 12 + index * 16, 16 + index * 16));
+      const tags = Array.from({ length: sfnt.readUInt16BE(4) }, (_, index) =>
+        sfnt.toString('latin1', 12 + index * 16, 16 + index * 16),
+      );
       expect(tags).toContain('cmap');
       expect(tags).not.toContain('GSUB');
       expect(tags).toEqual([...tags].sort());
     }
-    expect(() => unpackWoff(Buffer.from('wOF2 and some more bytes than a head has, to be sure of it'))).toThrow(/no WOFF/);
+    expect(() =>
+      unpackWoff(Buffer.from('wOF2 and some more bytes than a head has, to be sure of it')),
+    ).toThrow(/no WOFF/);
   });
 });
