@@ -17,8 +17,8 @@ export function startingValues(template: Template, entryUnit: LengthUnit, title:
 export function beginsWith(template: Template, entryUnit: LengthUnit): string {
   const example = workedExamples(template).find((each) => each.entryUnit === entryUnit);
   return example
-    ? `It begins with the sizes of a worked example, ${example.name}, so that there is a sheet to look at at once. Type your own over them.`
-    : 'It begins with the usual sizes of the family, in millimetres, so that there is a sheet to look at at once. Type your own over them.';
+    ? `It begins with the sizes of a worked example, ${example.name}: there is a sheet to look at, and you type your own sizes over them.`
+    : 'It begins with the usual sizes of the family, in millimetres: there is a sheet to look at, and you type your own sizes over them.';
 }
 
 /** A sheet as the style draws it unless somebody says otherwise. */

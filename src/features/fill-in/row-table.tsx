@@ -8,8 +8,8 @@ import { useSizeForm } from './size-form';
 import { StepRow } from './step-row';
 
 /** Room for what is typed, by kind of column: a toleranced diameter and a thread need more than a length. */
-const WIDTHS: Readonly<Record<string, number>> = { diameter: 118, thread: 118, length: 84 };
-const USUAL_WIDTH = 98;
+const WIDTHS: Readonly<Record<string, number>> = { diameter: 118, thread: 118, length: 92 };
+const USUAL_WIDTH = 90;
 
 /** Repeating rows: added at the end, moved, removed; each keeps its hidden key, so its balloons and comments stay with it. */
 export function RowTable({ table }: { table: TableRows }) {

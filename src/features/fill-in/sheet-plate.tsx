@@ -84,6 +84,7 @@ export function SheetPlate({ follow }: { follow: boolean }) {
         <span className="bar-group">
           <Button size="dense" aria-expanded={choosing} onClick={() => setChoosing(!choosing)}>
             {settingsWords(draft.settings, good?.sheet)}
+            <span className="angle">, {draft.settings.style === 'iso' ? 'first' : 'third'} angle</span>
           </Button>
           <ButtonLink size="dense" to={paths.printSheet(shop, id, revision)}>
             Print

@@ -7,11 +7,10 @@ import { Button } from '../../components/button';
 import { ChoiceRow } from '../../components/choice-row';
 import { useOpenRevision } from '../../revision/open-revision';
 
-/** The bar's words for a sheet: `A4, 1:1, mm, first angle`. */
+/** The bar's words for a sheet: `A4, 1:1, mm`; the angle of projection follows where there is room. */
 export function settingsWords(settings: SheetSettings, sheet: Sheet | undefined): string {
   const size = sheet?.size ?? (settings.sheet === 'auto' ? 'sheet' : settings.sheet);
-  const angle = settings.style === 'iso' ? 'first angle' : 'third angle';
-  return [size, sheet?.scaleText, settings.unit, angle].filter(Boolean).join(', ');
+  return [size, sheet?.scaleText, settings.unit].filter(Boolean).join(', ');
 }
 
 /** Sheet, scale, unit and drafting style. They change how the part is shown, never what it is. */

@@ -71,6 +71,7 @@ function oneTarget(target: Target, size: Size | undefined, format: LengthFormat)
 
 export function feedWords({ feed, feedPer }: Operation, format: LengthFormat): string {
   if (feed <= 0) return 'by hand';
-  const text = formatLength(feed, { ...format, style: 'iso' });
-  return feedPer === 'min' ? `${text}/min` : text;
+  const perMinute = feedPer === 'min';
+  const text = formatLength(feed, { ...format, style: 'iso', ...(perMinute ? { decimals: 1 } : {}) });
+  return perMinute ? `${text}/min` : text;
 }

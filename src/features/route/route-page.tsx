@@ -15,6 +15,12 @@ import { cardsOf } from '../../revision/set-up-stages';
 import { SetUpCard } from './set-up-card';
 import { VerdictBox } from './verdict-box';
 
+/** The words of operations, needs and tools are in millimetres whatever the sheet shows; somebody who reads inches must know. */
+const UNIT_WORDS = {
+  mm: 'All figures in millimetres.',
+  in: 'Stops, targets and feeds in inches; figures in the words of operations, tools and cautions in millimetres.',
+} as const;
+
 /** The route as a works route card: read downwards, card by card. */
 export function RoutePage() {
   const { good, address, answer, draft, problems, drawing, engineFault, register } = useOpenRevision();
@@ -32,7 +38,7 @@ export function RoutePage() {
       <div className="route-bar">
         <p className="aside">
           {route
-            ? `${answer.revision.drawing.number} rev ${answer.revision.letter}. Stops and targets in ${settings.unit === 'in' ? 'inches' : 'millimetres'}.`
+            ? `${answer.revision.drawing.number} rev ${answer.revision.letter}. ${UNIT_WORDS[settings.unit]}`
             : ''}
         </p>
         <Button disabled={!route} onClick={() => window.print()}>

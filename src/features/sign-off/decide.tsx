@@ -125,7 +125,7 @@ function whatItDoes(
 ): string {
   if (state === 'draft')
     return may('submit')
-      ? `Revision ${letter} is a draft. When its sizes are right, send it for checking with the button above.`
+      ? `Revision ${letter} is a draft. When its sizes are right, send it for checking.`
       : `Revision ${letter} is a draft. It is not for manufacture.`;
   if (state === 'in review')
     return may('approve')
