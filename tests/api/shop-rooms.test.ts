@@ -214,7 +214,9 @@ describe('a fault of ours', () => {
   it('is told without its inside, written to the log, and leaves nothing behind', async () => {
     const broken = await startTestServer({
       engine: () => {
-        throw new Error('the engine stumbled over its own feet');
+        throw Object.assign(new Error('the engine stumbled over its own feet'), {
+          parameters: ['a hash of somebody'],
+        });
       },
     });
     try {
@@ -224,6 +226,7 @@ describe('a fault of ours', () => {
       const error = expectRefusal(answer, 500, 'internal');
       expect(error.message).not.toContain('feet');
       expect(broken.log.join('')).toContain('its own feet');
+      expect(broken.log.join('')).not.toContain('hash of somebody');
       expect((await somebody.get(`/api/shops/${place.slug}/drawings`)).body).toMatchObject({ total: 0 });
       expect((await somebody.get(`/api/shops/${place.slug}/audit`)).body).toEqual({ events: [] });
     } finally {

@@ -11,6 +11,7 @@ import {
   saveRequest,
   startDrawing,
 } from '../factories/drawing';
+import { inSight } from '../../server/database';
 import type { RawConnection } from '../factories/raw-connection';
 import { rawConnection } from '../factories/raw-connection';
 import { expectRefusal } from '../factories/refusal';
@@ -59,6 +60,49 @@ describe('another shop', () => {
       'not-found',
     );
     expectRefusal(await outsider.get('/api/shops/no-such-shop/drawings'), 404, 'not-found');
+  });
+
+  it('answers word for word as one that never was', async () => {
+    const answers = await Promise.all(
+      [ours.slug, 'no-such-shop', '%00', `${theirs.slug}x`].flatMap((slug) =>
+        ['drawings', 'people', `drawings/${drawing.revision.drawing.id}`].map((path) =>
+          outsider.get(`/api/shops/${slug}/${path}`),
+        ),
+      ),
+    );
+    const bare = answers.map(({ status, bytes, headers }) => ({
+      status,
+      text: bytes.toString('utf8'),
+      // Neither an id of the request, the hour, nor the count of requests tells shops apart.
+      headers: [...headers].filter(([name]) => !['x-request-id', 'date', 'ratelimit'].includes(name)),
+    }));
+    for (const answer of bare) expect(answer).toEqual(bare[0]);
+  });
+
+  it('and every secret of ours stays out of every answer, whoever reads', async () => {
+    const lead = await signedIn(server, await makePerson(server, ours, ['lead']));
+    const hashes = await inSight(server.owner, { shopId: ours.id }, (transaction) =>
+      server.owner.models.people.findAll({ attributes: ['passwordHash'], transaction }),
+    );
+    const secrets = [
+      ...hashes.map(({ passwordHash }) => passwordHash),
+      ...[...lead.cookies.values()].map(({ value }) => value),
+    ];
+    expect(secrets.length).toBeGreaterThan(4);
+    const shop = `/api/shops/${ours.slug}`;
+    const at = `${shop}/drawings/${drawing.revision.drawing.id}`;
+    const paths = [
+      ...['drawings', 'register', 'people', 'audit', 'settings'].map((path) => `${shop}/${path}`),
+      ...[at, revisionPath(ours, drawing), revisionPath(ours, drawing, 'sheet.svg'), '/api/session'],
+    ];
+    for (const path of paths) {
+      const answer = await lead.get(path);
+      expect(answer.status).toBe(200);
+      const text = answer.bytes.toString('utf8');
+      for (const secret of [...secrets, theirs.id, outside.id, outside.mail])
+        expect(text).not.toContain(secret);
+      expect(text).not.toMatch(/password|tokenHash|token_hash|shopId|shop_id/i);
+    }
   });
 
   it('keeps its drawings to itself when they are asked for through a shop one does belong to', async () => {
