@@ -2,6 +2,7 @@ import {
   chmodSync,
   existsSync,
   mkdtempSync,
+  readdirSync,
   readFileSync,
   rmSync,
   statSync,
@@ -80,6 +81,10 @@ describe('npm start', () => {
     expect(statSync(join(data, 'secrets.json')).mode & 0o777).toBe(0o600);
     expect(statSync(join(data, 'postgres')).uid).not.toBe(0);
     expect(statSync(join(data, 'postgres')).mode & 0o777).toBe(0o700);
+
+    // The demo's releases lie where the server looks for them.
+    const kept = readdirSync(join(data, 'store'), { recursive: true }).map(String);
+    expect(kept.filter((name) => /^[0-9a-f]{2}\/[0-9a-f]{62}$/.test(name)).length).toBeGreaterThan(2);
 
     await asOwner('CREATE TABLE kept (word text)');
     await asOwner("INSERT INTO kept VALUES ('Pellworth')");
