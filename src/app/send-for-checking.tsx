@@ -51,7 +51,7 @@ export function SendForChecking() {
       )}
       {first ? (
         <Button className="waits" aria-describedby="why-not-sent" onClick={goToFirst}>
-          Send for checking: {countOf(problems.length, 'size')} wrong
+          Send: {countOf(problems.length, 'size')} wrong
         </Button>
       ) : (
         <Button look="go" disabled={act.isPending} onClick={() => void send()}>

@@ -162,7 +162,7 @@ export function DrawingsPage() {
           <span>Enter opens the marked row</span>
           {singleKeys && mayStart && <span>S starts a drawing like it</span>}
           {singleKeys && <span>/ goes to the search line</span>}
-          <Tick label="single keys" checked={singleKeys} onChange={setSingleKeys} />
+          <Tick label="single-letter keys" checked={singleKeys} onChange={setSingleKeys} />
         </div>
       )}
     </main>

@@ -28,7 +28,7 @@ export function SheetSettingsPlate({ onClose }: { onClose: () => void }) {
         <ChoiceRow
           name="set-sheet"
           label="Sheet"
-          choices={[{ id: 'auto' as const, label: 'chosen' }, ...sheets.map((id) => ({ id, label: id }))]}
+          choices={[{ id: 'auto' as const, label: 'as fits' }, ...sheets.map((id) => ({ id, label: id }))]}
           value={settings.sheet}
           disabled={!editable}
           onChange={(sheet) => set({ sheet })}
@@ -39,7 +39,7 @@ export function SheetSettingsPlate({ onClose }: { onClose: () => void }) {
           name="set-scale"
           label="Scale"
           choices={[
-            { id: 'auto', label: 'chosen' },
+            { id: 'auto', label: 'as fits' },
             ...scales.map(({ text, factor }) => ({ id: String(factor), label: text })),
           ]}
           value={String(settings.scale)}

@@ -61,8 +61,8 @@ export function PrintPage() {
           </Link>
         </span>
         <p className="aside">
-          {size ? `${size} paper, lying. ` : ''}Print at 100 %, without fitting to the page, then measure the
-          check bar.
+          {size ? `${size} paper, landscape. ` : ''}Print at 100 %, without fitting to the page, then measure
+          the check bar.
           {revision.state !== 'released' && ' It is not released: the sheet says so across it.'}
         </p>
       </div>

@@ -74,7 +74,7 @@ export function CapacityPage() {
       ))}
       {lost.length > 0 && (
         <Plate head="Ways not taken" aside={lost.length}>
-          <table className="ruled needs">
+          <table className="ruled needs not-taken">
             <tbody>
               {lost.map((other) => (
                 <tr key={`${other.text} ${other.why}`}>

@@ -5,7 +5,6 @@ import { useTemplatePicture } from '../../engine/use-template-picture';
 import { useDocumentTitle } from '../../lib/document-title';
 import { useSession, useSignIn } from '../../lib/session';
 import { useShift } from '../../lib/shift';
-import { useDemoPeople } from './demo-people';
 
 /** Only an address of ours may follow the sign-in. */
 function safeTarget(to: string | null): string {
@@ -20,7 +19,6 @@ export function SignInPage() {
   const session = useSession();
   const signIn = useSignIn();
   const picture = useTemplatePicture('tapered-handle');
-  const people = useDemoPeople();
   const [shift, chooseShift] = useShift();
   const [mail, setMail] = useState('');
   const [password, setPassword] = useState('');
@@ -41,28 +39,6 @@ export function SignInPage() {
             label="A tapered handle, drawn from its worked example"
             className="sign-in-picture"
           />
-          {people.length > 0 && (
-            <section className="demo-people" aria-label="Demonstration sign-ins">
-              <h2 className="engraved">Demonstration shop</h2>
-              <ul>
-                {people.map((person) => (
-                  <li key={person.mail}>
-                    <button
-                      type="button"
-                      className="word"
-                      onClick={() => {
-                        setMail(person.mail);
-                        setPassword(person.password);
-                      }}
-                    >
-                      {person.role}
-                    </button>
-                    <span>{person.mail}</span>
-                  </li>
-                ))}
-              </ul>
-            </section>
-          )}
           <form className="title-block" onSubmit={submit}>
             <div className="cell">
               <span className="small-label">Title</span>

@@ -7,6 +7,13 @@ import { paths } from '../../lib/paths';
 import { useDrawing } from '../../revision/api/drawing';
 import { useOpenRevision } from '../../revision/open-revision';
 
+/** An act as the shop says it, where the record's own word is shorter. */
+const ACT_WORDS: Readonly<Record<string, string>> = {
+  submitted: 'sent for checking',
+  'trial on': 'marked as trial piece',
+  'trial off': 'no longer a trial piece',
+};
+
 /** What was decided, by whom and when, with the reasons given. */
 export function Decisions() {
   const { answer, shop } = useOpenRevision();
@@ -18,7 +25,7 @@ export function Decisions() {
         {[...decisions].reverse().map((decision, index) => (
           <li key={index}>
             <p>
-              <b>{decision.act}</b> by {decision.by}
+              <b>{ACT_WORDS[decision.act] ?? decision.act}</b> by {decision.by}
               <span className="aside">{momentOf(decision.at, shop.timeZone)}</span>
             </p>
             {decision.reason && <blockquote>{decision.reason}</blockquote>}
