@@ -105,7 +105,7 @@ function routeOf(route: NonNullable<EngineGood['route']>): DrawResult['route'] {
   return {
     stock: { shape, size, material, bar },
     blankLength: route.blankLength,
-    setups: route.setups.map(({ id, machine, holding, gripFrom, gripTo, freeEnd, support }) => ({
+    setups: route.setups.map(({ id, machine, holding, gripFrom, gripTo, freeEnd, support, heldOn }) => ({
       id,
       machine,
       holding,
@@ -113,8 +113,9 @@ function routeOf(route: NonNullable<EngineGood['route']>): DrawResult['route'] {
       gripTo,
       freeEnd,
       support,
+      heldOn,
     })),
-    operations: route.operations.map(({ toolItem: _toolItem, ...operation }) => ({
+    operations: route.operations.map(({ toolItem: _toolItem, notes, ...operation }) => ({
       ...operation,
       features: [...operation.features],
       cut:
@@ -126,6 +127,7 @@ function routeOf(route: NonNullable<EngineGood['route']>): DrawResult['route'] {
       stops: operation.stops.map(({ from, length }) => ({ from, length })),
       target: operation.target.map((target) => ({ ...target })),
       reasons: [...operation.reasons],
+      ...(notes ? { notes: [...notes] } : {}),
       cautions: [...operation.cautions],
     })),
     volumes: { ...route.volumes },

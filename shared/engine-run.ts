@@ -52,6 +52,8 @@ function drawAndPlan(request: EngineRequest, evaluation: Evaluation & { part: Pa
   const plan = planRoute(part, scheme, request.register, {
     quantity: quantityOf(evaluation),
     material: part.material,
+    unit: request.entryUnit,
+    style: request.style,
   });
   const drawing = drawSheet(part, scheme, {
     style: request.style,

@@ -95,7 +95,11 @@ const operation = z.object({
   settings: z.number().int().optional(),
   blankDiameter: finite.optional(),
   overWires: finite.optional(),
+  /** Thread left incomplete at a shoulder without relief (mm). */
+  runOut: finite.optional(),
   reasons: z.array(z.string()),
+  /** How it is done, in words. */
+  notes: z.array(z.string()).optional(),
   cautions: z.array(z.string()),
   check: z.string(),
 });
@@ -108,6 +112,8 @@ const setup = z.object({
   gripTo: finite,
   freeEnd: end,
   support: z.enum(['centre', 'steady', 'outboard']).optional(),
+  /** Where three jaws close on the faces of a polygon instead of a round. */
+  heldOn: z.literal('flats').optional(),
 });
 
 const route = z.object({

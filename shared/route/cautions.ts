@@ -1,4 +1,5 @@
 import type { DraftOperation } from './draft';
+import type { Register } from './register';
 
 /** On every card, whatever the work. */
 export const STANDING_CAUTIONS: readonly string[] = [
@@ -7,7 +8,12 @@ export const STANDING_CAUTIONS: readonly string[] = [
 ];
 
 /** The usual cautions of an operation (common practice), the weightiest first; a first setting says the shop’s own. */
-export function cautionsFor(operation: DraftOperation, first: boolean, spindleEnd: number): string[] {
+export function cautionsFor(
+  operation: DraftOperation,
+  register: Register,
+  first: boolean,
+  spindleEnd: number,
+): string[] {
   const cautions: string[] = [];
   switch (operation.method) {
     case 'saw':
@@ -29,7 +35,7 @@ export function cautionsFor(operation: DraftOperation, first: boolean, spindleEn
       cautions.push('Lock the carriage. The tail must clear the tool at the small end.');
       break;
     case 'part-off':
-      cautions.push('Slow, sharp and oiled; stop if it chatters, and do not reach for the piece.');
+      cautions.push('Stop if it chatters; catch the piece, do not reach for it.');
       break;
     case 'thread-die':
       cautions.push('Lowest speed or by hand; hands off the holder’s arm.');
@@ -52,7 +58,9 @@ export function cautionsFor(operation: DraftOperation, first: boolean, spindleEn
     default:
       break;
   }
-  if (operation.tool.includes('ground here'))
+  const own = register.tools.find((tool) => tool.id === operation.toolItem)?.caution;
+  if (own) cautions.push(own);
+  else if (operation.tool.includes('ground here'))
     cautions.push('Ground here: look at its edge, and try it on scrap.');
   if (first) cautions.push(...STANDING_CAUTIONS);
   return cautions;

@@ -1,5 +1,6 @@
 import type { Bar, Register } from './register';
 import type { Operation, Route } from './route';
+import type { Words } from './words';
 
 export interface CostAsked {
   register: Register;
@@ -11,6 +12,7 @@ export interface CostAsked {
   used: number;
   goesBack: number;
   quantity: number;
+  words: Words;
 }
 
 /** Money for one and for N: labour and machines by the hour, set-up once, the bar less what goes back to the rack. */
@@ -49,7 +51,7 @@ export function costOf(asked: CostAsked): NonNullable<Route['cost']> {
         label: 'Bar, each',
         amount: cents(material),
         how: asked.bar
-          ? `${tenths(asked.used)} mm at ${perMetre} a metre${asked.goesBack > 0 ? `, less ${tenths(asked.goesBack)} mm that goes back to the rack` : ''}`
+          ? `${asked.words.aboutWithUnit(asked.used)} at ${perMetre} a metre${asked.goesBack > 0 ? `, less ${asked.words.aboutWithUnit(asked.goesBack)} that goes back to the rack` : ''}`
           : 'not in the rack: no price',
       },
     ],

@@ -6,6 +6,7 @@ import type { Lathe, Mill, Register, Saw } from './register';
 import type { End, Method, NeedKind, SetUp, StockChoice } from './route';
 import type { View } from './features';
 import type { RuleId } from './rules';
+import type { Words } from './words';
 
 /** A plan that cannot be: thrown inside a candidate, caught where candidates are compared. */
 export class RuledOut {
@@ -76,6 +77,8 @@ export type DraftSetUp = SetUp & { rocks: boolean };
 /** A plan while it is being made. Bodies are in the part's own x, whatever end is free. */
 export interface Build {
   register: Register;
+  /** How lengths are said in its sentences. */
+  words: Words;
   lathe: Lathe;
   mill: Mill | null;
   saw: Saw | null;

@@ -12,7 +12,6 @@ import { instrumentFor, sizesOf } from './inspection';
 import { inOrder } from './order';
 import type { Bar } from './register';
 import type { Need, Operation, Route, Stage, Target, Volumes } from './route';
-import { mm } from './shop';
 import type { DraftNeed } from './draft';
 
 /** A plan put in order, with its figures and needs, but its metal not yet measured: what plans are compared by. */
@@ -45,7 +44,7 @@ export function weigh(build: Build, scheme: Scheme, whole: readonly DraftNeed[])
   for (const operation of ordered) {
     if (operation.method === 'inspect' && operation.key !== 'final') continue;
     for (const size of targets.get(operation.key) ?? []) {
-      const measuring = instrumentFor(build.register, size);
+      const measuring = instrumentFor(build, size);
       if (measuring) needs.push({ key: operation.key, need: measuring.need });
     }
   }
@@ -136,6 +135,7 @@ export function finishRoute(plan: WeighedPlan, extras: RouteExtras): Route {
       // A stub is worth keeping when it is long enough to hold again.
       goesBack: stub >= 100 ? stub : 0,
       quantity: extras.quantity,
+      words: build.words,
     }),
     kitting: kittingOf(plan, operations, extras),
     others: extras.others,
@@ -163,9 +163,7 @@ function operationOf(
   if (!rates) throw new Error(`operation ${draft.key} was not weighed`);
   const setup = plan.build.setups.find((s) => s.id === draft.setup);
   const sizes = plan.targets.get(draft.key) ?? [];
-  const measuring = sizes
-    .map((size) => instrumentFor(plan.build.register, size)?.text)
-    .filter((t) => t !== undefined);
+  const measuring = sizes.map((size) => instrumentFor(plan.build, size)?.text).filter((t) => t !== undefined);
   const checks = measuring.length > 0 ? [...new Set(measuring)] : draft.check ? [draft.check] : [];
   const behind = setup ? behindSpindle(plan.build, setup.gripFrom, setup.gripTo, setup.freeEnd) : 0;
   return {
@@ -201,7 +199,8 @@ function operationOf(
     ...(draft.runOut !== undefined ? { runOut: draft.runOut } : {}),
     ...(draft.blank !== undefined ? { blankDiameter: draft.blank.diameter } : {}),
     reasons: draft.reasons,
-    cautions: [...new Set([...draft.notes, ...cautionsFor(draft, first, behind)])],
+    ...(draft.notes.length > 0 ? { notes: draft.notes } : {}),
+    cautions: cautionsFor(draft, plan.build.register, first, behind),
     check: checks.join('; '),
   };
 }
@@ -236,13 +235,13 @@ function kittingOf(
   extras: RouteExtras,
 ): Route['kitting'] {
   const { build } = plan;
-  const { register } = build;
+  const { register, words } = build;
   const list: { item: string; text: string; place: string }[] = [];
-  const length = Math.round((build.blank.x1 - build.blank.x0) * 10) / 10;
+  const length = build.blank.x1 - build.blank.x0;
   const size = build.stock.size;
   list.push({
     item: extras.bar?.id ?? '',
-    text: `${extras.quantity} × ${mm(length)} of ${mm(Math.round(size * 1000) / 1000)} ${build.stock.shape === 'hex' ? 'hexagon' : build.stock.shape}`,
+    text: `${extras.quantity} × ${words.about(length)} of ${words.length(size)} ${build.stock.shape === 'hex' ? 'hexagon' : build.stock.shape}`,
     place: extras.bar?.place ?? 'to be bought',
   });
   const seen = new Set<string>();

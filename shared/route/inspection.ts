@@ -2,7 +2,9 @@ import type { Scheme, Size } from '../scheme/scheme';
 import type { DraftNeed, DraftOperation } from './draft';
 import type { Instrument, Register } from './register';
 import type { Method } from './route';
-import { alternative, held, mm, short } from './shop';
+import { alternative, held, short } from './shop';
+import type { Shop } from './shop';
+import { figure } from './words';
 
 /** Which kinds of size an operation brings to its figure. */
 const BROUGHT: Partial<Record<Method, readonly Size['kind'][]>> = {
@@ -103,10 +105,10 @@ const KINDS: Partial<Record<Size['kind'], readonly Instrument['kind'][]>> = {
  * The instrument for a size: the coarsest whose permissible error is a tenth of the tolerance; else one at the shop's
  * own ratio, with a note; else a short that names what is wanted. Null for sizes nobody measures.
  */
-export function instrumentFor(register: Register, size: Size): Measuring | null {
+export function instrumentFor({ register, words }: Shop, size: Size): Measuring | null {
   const kinds = KINDS[size.kind];
   if (!kinds) return null;
-  const spec = `measure ${size.typed || mm(size.nominal)}`;
+  const spec = `measure ${size.typed || words.length(size.nominal)}`;
   if (size.kind === 'thread') return threadGauge(register, size, spec);
   const width = size.upperLimit - size.lowerLimit;
   const reach = register.instruments.filter(
@@ -121,7 +123,7 @@ export function instrumentFor(register: Register, size: Size): Measuring | null 
           text: first.name.toLowerCase(),
           need: held('instrument', spec, first.id, `${first.name}, ${first.place}.`),
         }
-      : missing(spec, width);
+      : missing(spec, words.length(width));
   }
   const coarse = [...reach].sort((a, b) => b.permissibleError - a.permissibleError);
   const tenth = coarse.find((i) => i.permissibleError <= width / 10 + 1e-12);
@@ -132,7 +134,7 @@ export function instrumentFor(register: Register, size: Size): Measuring | null 
         'instrument',
         spec,
         tenth.id,
-        `${tenth.name}: ${mm(tenth.permissibleError)} is a tenth of ${mm(width)} or less.`,
+        `${tenth.name}: ${words.length(tenth.permissibleError)} is a tenth of ${words.length(width)} or less.`,
       ),
     };
   const ratio = Math.max(0.1, register.settings.instrumentRatio);
@@ -144,19 +146,19 @@ export function instrumentFor(register: Register, size: Size): Measuring | null 
         'instrument',
         spec,
         allowed.id,
-        `${allowed.name}: ${mm(allowed.permissibleError)} is more than a tenth of ${mm(width)} but within ${mm(ratio)} of it, which the shop allows; measure twice.`,
+        `${allowed.name}: ${words.length(allowed.permissibleError)} is more than a tenth of ${words.length(width)} but within ${figure(ratio)} of it, which the shop allows; measure twice.`,
       ),
     };
-  return missing(spec, width);
+  return missing(spec, words.length(width));
 }
 
-function missing(spec: string, width: number): Measuring {
+function missing(spec: string, width: string): Measuring {
   return {
     text: 'no instrument fine enough',
     need: short(
       'instrument',
       spec,
-      `Nothing in the register reads it to a tenth of ${mm(width)}, nor to the shop’s own share.`,
+      `Nothing in the register reads it to a tenth of ${width}, nor to the shop’s own share.`,
       ['borrow or buy a finer instrument', 'gauge it against a master piece'],
     ),
   };

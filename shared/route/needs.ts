@@ -3,7 +3,8 @@ import type { DraftNeed } from './draft';
 import type { Bar } from './register';
 import { cutList } from './cut-list';
 import type { StockAnswer } from './stock';
-import { held, mm, short } from './shop';
+import { held, short } from './shop';
+import { materialName } from './words';
 
 /** What the plan as a whole asks: bar, swing, bed. */
 export function planNeeds(
@@ -15,10 +16,10 @@ export function planNeeds(
   const needs: DraftNeed[] = [];
   const diameter = 2 * build.stockRadius;
   const length = build.blank.x1 - build.blank.x0;
-  const { lathe } = build;
+  const { lathe, words } = build;
   if (stock.short) needs.push(short('bar', stock.short.need, stock.short.why, stock.short.alternatives));
   else if (bar) {
-    const spec = `${quantity} × ${mm(Math.round(length * 10) / 10)} of ${bar.name}, ${bar.material}`;
+    const spec = `${quantity} × ${words.about(length)} of ${bar.name}, ${materialName(bar.material)}`;
     const same = build.register.bars.filter(
       (b) =>
         b.material === bar.material &&
@@ -33,12 +34,12 @@ export function planNeeds(
             'bar',
             spec,
             bar.id,
-            `${list.bars.length} bar${list.bars.length === 1 ? '' : 's'} from ${bar.place}, ${mm(Math.round(list.bars.at(-1)?.left ?? 0))} left of the last; ${bar.certified ? `certified, ${bar.certificate ?? 'certificate held'}` : 'material believed, no certificate'}.`,
+            `${list.bars.length} bar${list.bars.length === 1 ? '' : 's'} from ${bar.place}, ${words.about(list.bars.at(-1)?.left ?? 0)} left of the last; ${bar.certified ? `certified, ${bar.certificate ?? 'certificate held'}` : 'material believed, no certificate'}.`,
           )
         : short(
             'bar',
             spec,
-            `The rack gives ${list.pieces} of ${quantity}; the longest bar is ${mm(Math.max(0, ...same.map((b) => b.length)))}.`,
+            `The rack gives ${list.pieces} of ${quantity}; the longest bar is ${words.length(Math.max(0, ...same.map((b) => b.length)))}.`,
             ['buy another bar', `make ${list.pieces} now`],
           ),
     );
@@ -48,14 +49,14 @@ export function planNeeds(
     diameter <= lathe.swingOverSlide
       ? held(
           'machine',
-          `swing Ø${mm(diameter)} over the slide`,
+          `swing Ø${words.length(diameter)} over the slide`,
           lathe.id,
-          `${lathe.name} swings ${mm(lathe.swingOverSlide)}.`,
+          `${lathe.name} swings ${words.length(lathe.swingOverSlide)}.`,
         )
       : short(
           'machine',
-          `swing Ø${mm(diameter)} over the slide`,
-          `${lathe.name} swings ${mm(lathe.swingOverSlide)}.`,
+          `swing Ø${words.length(diameter)} over the slide`,
+          `${lathe.name} swings ${words.length(lathe.swingOverSlide)}.`,
           ['another shop, with a larger lathe'],
         ),
   );
@@ -64,14 +65,14 @@ export function planNeeds(
       between <= lathe.betweenCentres
         ? held(
             'machine',
-            `${mm(Math.ceil(between))} between chuck and centre`,
+            `${words.about(between)} between chuck and centre`,
             lathe.id,
-            `${lathe.name} takes ${mm(lathe.betweenCentres)} between centres.`,
+            `${lathe.name} takes ${words.length(lathe.betweenCentres)} between centres.`,
           )
         : short(
             'machine',
-            `${mm(Math.ceil(between))} between chuck and centre`,
-            `${lathe.name} takes ${mm(lathe.betweenCentres)}.`,
+            `${words.about(between)} between chuck and centre`,
+            `${lathe.name} takes ${words.length(lathe.betweenCentres)}.`,
             ['another shop, with a longer bed'],
           ),
     );

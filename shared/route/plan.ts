@@ -20,11 +20,19 @@ import { shutOut } from './setups/open-to';
 import { stockFor } from './stock';
 import type { StockAnswer, StockOption } from './stock';
 import { verdictOf } from './verdict';
+import type { LengthUnit } from '../units/parsed';
+import type { DraftingStyle } from '../units/format';
+import type { Shop } from './shop';
+import { wordsIn } from './words';
 
 export interface PlanAsked {
   quantity: number;
   /** Id of the materials table; the part's own when it is the same. */
   material: string;
+  /** Unit of the lengths in sentences, as the drawing was typed: mm unless told. Figures stay mm. */
+  unit?: LengthUnit;
+  /** Style of those lengths: `iso` unless told. */
+  style?: DraftingStyle;
 }
 
 export type PlanAnswer = { route: Route; capacity: Capacity } | { route: null; capacity: Capacity };
@@ -54,7 +62,8 @@ export function planRoute(part: Part, scheme: Scheme, register: Register, asked:
   if (register.lathes.length === 0) return noRoute(['The register has no lathe.'], 'machine', 'a lathe');
   const made = { ...part, material: asked.material };
   const views = viewsOf(made);
-  const stock = stockFor(made, scheme, register, asked.material);
+  const shop: Shop = { register, words: wordsIn(asked.unit, asked.style) };
+  const stock = stockFor(made, scheme, shop, asked.material);
   const failures: { text: string; why: string }[] = [];
   let ranked: { best: Weighed; losers: Route['others'] } | null = null;
   for (const lathe of lathesFor(register, stock)) {
@@ -62,7 +71,7 @@ export function planRoute(part: Part, scheme: Scheme, register: Register, asked:
       made,
       views,
       scheme,
-      register,
+      shop,
       candidatesFor(views, stock, lathe),
       stock,
       asked.quantity,
@@ -92,7 +101,7 @@ function bestOf(
   part: Part,
   views: Views,
   scheme: Scheme,
-  register: Register,
+  shop: Shop,
   candidates: readonly Candidate[],
   stock: StockAnswer,
   quantity: number,
@@ -112,26 +121,29 @@ function bestOf(
     }
     const shut = shutOut(views, each.candidate);
     if (shut) {
-      failures.push({ text: candidateText(each.candidate), why: shut.message });
+      failures.push({ text: candidateText(each.candidate, shop.words), why: shut.message });
       continue;
     }
     try {
-      const build = buildCandidate(part, views, register, each.candidate);
+      const build = buildCandidate(part, views, shop, each.candidate);
       const outline = outlineOf(build, each.outline);
       if (cannotWin(outline)) beaten.push({ candidate: each.candidate, outline });
       else weighed.push(weighBuilt({ candidate: each.candidate, build, outline }, stock, quantity, scheme));
     } catch (error) {
       if (!(error instanceof RuledOut)) throw error;
-      failures.push({ text: candidateText(each.candidate), why: error.message });
+      failures.push({ text: candidateText(each.candidate, shop.words), why: error.message });
     }
   }
   weighed.sort((a, b) => compareScores(a.score, b.score));
   const [best, ...rest] = weighed;
   if (!best) return null;
   const losers = [
-    ...rest.map((w) => ({ text: candidateText(w.candidate), why: whyWorse(best.score, w.score) })),
+    ...rest.map((w) => ({
+      text: candidateText(w.candidate, shop.words),
+      why: whyWorse(best.score, w.score),
+    })),
     ...beaten.map((u) => ({
-      text: candidateText(u.candidate),
+      text: candidateText(u.candidate, shop.words),
       why: whyOutlineWorse(best.outline, u.outline) ?? 'is no better',
     })),
   ];

@@ -107,6 +107,9 @@ export interface Operation {
   /** Length of thread left incomplete at a shoulder that has no relief (mm), said on the card. */
   runOut?: number;
   reasons: readonly string[];
+  /** How it is done, step by step: instructions, none of them a warning. */
+  notes?: readonly string[];
+  /** Only what can hurt somebody or spoil the work. */
   cautions: readonly string[];
   check: string;
 }

@@ -1,16 +1,20 @@
 import type { ThreadFeature } from '../part/part';
 import type { Chuck, ColletSet, Lathe, Mill, Register, Tool } from './register';
 import type { DraftNeed } from './draft';
+import { figure } from './words';
+import type { Words } from './words';
+
+/** The register, and how lengths are said of it. */
+export interface Shop {
+  register: Register;
+  words: Words;
+}
 
 /** Looking things up in the register: the smallest or nearest that will do, and the need it meets or leaves short. */
 export interface Pick {
   name: string;
   item?: Tool;
   need: DraftNeed;
-}
-
-export function mm(value: number): string {
-  return String(Math.round(value * 1000) / 1000);
 }
 
 export function held(kind: DraftNeed['kind'], need: string, by: string | undefined, why: string): DraftNeed {
@@ -63,11 +67,11 @@ export function facingTool(register: Register): Pick {
 export function chamferTool(register: Register, degrees: number): Pick {
   const all = register.tools.filter((t) => t.kind === 'chamfering');
   const found = all.find((t) => Math.abs((t.figures['angle'] ?? 45) - degrees) < 0.5);
-  return pick(found, `${mm(degrees)}° chamfering tool`, 'Buy or grind one.');
+  return pick(found, `${figure(degrees)}° chamfering tool`, 'Buy or grind one.');
 }
 
 /** The narrowest blade that reaches, and is no wider than the gap it must enter. */
-export function partingBlade(register: Register, reach: number, widest = Infinity): Pick {
+export function partingBlade({ register, words }: Shop, reach: number, widest = Infinity): Pick {
   const blades = register.tools
     .filter(
       (t) =>
@@ -76,24 +80,24 @@ export function partingBlade(register: Register, reach: number, widest = Infinit
         (t.figures['width'] ?? Infinity) <= widest,
     )
     .sort((a, b) => (a.figures['width'] ?? 0) - (b.figures['width'] ?? 0));
-  const spec = `parting blade, reach ${mm(reach)}${widest < Infinity ? `, ${mm(widest)} wide at most` : ''}`;
+  const spec = `parting blade, reach ${words.length(reach)}${widest < Infinity ? `, ${words.length(widest)} wide at most` : ''}`;
   return pick(blades[0], spec, 'Buy one, or let the saw cut the piece off.');
 }
 
-export function formTool(register: Register, radius: number): Pick {
+export function formTool({ register, words }: Shop, radius: number): Pick {
   const found = register.tools.find(
     (t) => t.kind === 'form' && Math.abs((t.figures['radius'] ?? 0) - radius) <= 0.01,
   );
-  if (found) return pick(found, `form tool, hollow R${mm(radius)}`, '');
+  if (found) return pick(found, `form tool, hollow R${words.length(radius)}`, '');
   return {
-    name: `form tool R${mm(radius)}, to be ground here`,
+    name: `form tool R${words.length(radius)}, to be ground here`,
     need: alternative(
       'tool',
-      `form tool, hollow R${mm(radius)}`,
+      `form tool, hollow R${words.length(radius)}`,
       undefined,
       'None in the register: the crown is turned freehand in steps and filed to a radius gauge, or a tool is ground here.',
       [
-        `grind a form tool R${mm(radius)} and try it on scrap`,
+        `grind a form tool R${words.length(radius)} and try it on scrap`,
         'turn in steps and file to the gauge, 10 min more',
       ],
     ),
@@ -140,12 +144,12 @@ export function centreDrill(register: Register, pilot: number, designation: stri
 }
 
 /** The largest end mill, which is the stiffest; at least as wide as the face where one is. */
-export function endMill(register: Register, faceWidth: number): Pick {
+export function endMill({ register, words }: Shop, faceWidth: number): Pick {
   const mills = register.tools
     .filter((t) => t.kind === 'end-mill')
     .sort((a, b) => (a.figures['diameter'] ?? 0) - (b.figures['diameter'] ?? 0));
   const found = mills.find((t) => (t.figures['diameter'] ?? 0) > faceWidth) ?? mills[mills.length - 1];
-  return pick(found, `end mill, over ${mm(faceWidth)} wide if it can be had`, 'Buy one.');
+  return pick(found, `end mill, over ${words.length(faceWidth)} wide if it can be had`, 'Buy one.');
 }
 
 export interface Hold {
@@ -179,7 +183,7 @@ export function holdsFor(register: Register, lathe: Lathe, diameter: number, fin
         {
           item,
           kind: 'collet' as const,
-          name: `Collet ${mm(size)}`,
+          name: `Collet ${figure(size)}`,
           reach: item.gripLength,
           minutes: 3,
           maximumSpeed: Infinity,
@@ -222,8 +226,8 @@ export function dividingTurns(
 }
 
 /** How the shop turns work from face to face: a block with those faces, else a dividing head, else nothing. */
-export function indexingFor(register: Register, faces: number, grip: number): Indexing {
-  const spec = `index ${faces} faces, held on Ø${mm(grip)}`;
+export function indexingFor({ register, words }: Shop, faces: number, grip: number): Indexing {
+  const spec = `index ${faces} faces, held on Ø${words.length(grip)}`;
   const block = register.colletBlocks.find((b) => {
     const set = register.colletSets.find((s) => s.id === b.colletSet);
     return b.faces % faces === 0 && set !== undefined && colletSize(set, grip) !== null;
@@ -233,7 +237,7 @@ export function indexingFor(register: Register, faces: number, grip: number): In
     const size = set ? colletSize(set, grip) : null;
     const step = block.faces / faces;
     return {
-      name: `${block.name}, collet ${mm(size ?? grip)}`,
+      name: `${block.name}, collet ${figure(size ?? grip)}`,
       item: block.id,
       text:
         step === 1
@@ -257,7 +261,7 @@ export function indexingFor(register: Register, faces: number, grip: number): In
     return {
       name: head.name,
       item: head.id,
-      text: `Index ${whole} a face: ${mm(head.ratio)}/${faces}.`,
+      text: `Index ${whole} a face: ${figure(head.ratio)}/${faces}.`,
       minutes: 12,
       minutesPerFace: 1.5,
       rule: 'index-head',
@@ -268,7 +272,7 @@ export function indexingFor(register: Register, faces: number, grip: number): In
   return {
     name: 'dividing head',
     item: '',
-    text: `Index by ${mm(360 / faces)}° a face.`,
+    text: `Index by ${figure(360 / faces)}° a face.`,
     minutes: 12,
     minutesPerFace: 2,
     rule: 'index-head',

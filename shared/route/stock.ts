@@ -1,7 +1,8 @@
 import type { Part } from '../part/part';
 import type { Scheme } from '../scheme/scheme';
-import type { Bar, Register } from './register';
-import { mm } from './shop';
+import type { Bar } from './register';
+import type { Shop } from './shop';
+import { materialName } from './words';
 
 /** A bar that could become the part, and the lengths whose surface it already is. */
 export interface StockOption {
@@ -58,7 +59,12 @@ export interface StockAnswer {
 }
 
 /** Bars of the material that cover the part, the best two first; a made-up one with its reason when none does. */
-export function stockFor(part: Part, scheme: Scheme, register: Register, material: string): StockAnswer {
+export function stockFor(
+  part: Part,
+  scheme: Scheme,
+  { register, words }: Shop,
+  material: string,
+): StockAnswer {
   const largest = part.maxDiameter;
   const bars = register.bars
     .filter((bar) => bar.material === material && bar.quantity > 0)
@@ -77,7 +83,7 @@ export function stockFor(part: Part, scheme: Scheme, register: Register, materia
         radius: bar.size / 2,
         bar,
         asDrawn,
-        text: `${mm(bar.size)} round`,
+        text: `${words.length(bar.size)} round`,
       });
     if (options.length === 2) break;
   }
@@ -85,7 +91,7 @@ export function stockFor(part: Part, scheme: Scheme, register: Register, materia
   const size = largest + CLEAN_UP;
   const others = register.bars
     .filter((b) => b.shape === 'round' && b.quantity > 0 && b.size >= size)
-    .map((b) => b.material);
+    .map((b) => materialName(b.material));
   const biggest = bars.filter((b) => b.shape === 'round').at(-1);
   return {
     options: [
@@ -94,16 +100,16 @@ export function stockFor(part: Part, scheme: Scheme, register: Register, materia
         size,
         radius: size / 2,
         asDrawn: [],
-        text: `round of ${mm(size)} or the next size up`,
+        text: `round of ${words.length(size)} or the next size up`,
       },
     ],
     short: {
-      need: `round bar of ${material}, Ø${mm(size)} at least`,
+      need: `round bar of ${materialName(material)}, Ø${words.length(size)} at least`,
       why: biggest
-        ? `The largest round bar of it in the rack is Ø${mm(biggest.size)}.`
+        ? `The largest round bar of it in the rack is Ø${words.length(biggest.size)}.`
         : 'The rack has no round bar of this material.',
       alternatives: [
-        `buy Ø${mm(size)} or the next size up`,
+        `buy Ø${words.length(size)} or the next size up`,
         ...(others.length > 0
           ? [`another material that is in the rack: ${[...new Set(others)].slice(0, 3).join(', ')}`]
           : []),

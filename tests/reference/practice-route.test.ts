@@ -30,7 +30,7 @@ describe('six flats on 3/4 in round', () => {
     const mill = route.operations.find((o) => o.method === 'mill-flat');
     expect(mill?.depth).toBeCloseTo(0.04 * inch, 9);
     expect(mill?.faces).toBe(6);
-    expect(mill?.cautions.join(' ')).toMatch(/corners stay round/);
+    expect(mill?.notes?.join(' ')).toMatch(/corners stay round/);
     const taper = route.operations.find((o) => o.method === 'taper-turn');
     expect(taper?.number).toBeGreaterThan(mill?.number ?? Infinity);
     expect(taper?.after).toContainEqual({ operation: mill?.number, rule: 'flats-before-taper' });
@@ -67,7 +67,7 @@ describe('a taper on the top slide', () => {
     expect(taperOf(short.route.operations).settings).toBe(1);
     // ceil((slant + run-off − overlap) / (travel − overlap)) with 3 mm of overlap
     expect(taperOf(long.route.operations).settings).toBe(2);
-    expect(taperOf(long.route.operations).cautions.join(' ')).toMatch(
+    expect(taperOf(long.route.operations).notes?.join(' ')).toMatch(
       /Setting 2: carriage on by .* cross slide out by/,
     );
     expect(long.capacity.verdict).toBe('can');

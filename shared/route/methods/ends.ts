@@ -5,10 +5,11 @@ import type { CentreHole } from '../../standards/centre-holes';
 import { addOperation, RuledOut } from '../draft';
 import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
-import { centreDrill, chamferTool, facingTool, formTool, mm } from '../shop';
+import { centreDrill, chamferTool, facingTool, formTool } from '../shop';
 import { depthFor, keyOf, metalOver, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
 import type { View } from '../features';
+import { figure } from '../words';
 
 /** Faces the free end to where the length with the centre hole ends, or to the part's own end. */
 export function faceEnd(session: Session, to: number, finishes: boolean): void {
@@ -34,7 +35,9 @@ export function faceEnd(session: Session, to: number, finishes: boolean): void {
   addOperation(session.build, session.view, {
     key,
     method: 'face',
-    title: trimming ? `face off ${mm(metal)} with the centre hole` : `face, ${mm(metal)} off`,
+    title: trimming
+      ? `face off ${session.build.words.length(metal)} with the centre hole`
+      : `face, ${session.build.words.length(metal)} off`,
     features: [session.view.flipped ? 'left-face' : 'right-face'],
     tool: tool.name,
     toolItem: tool.item?.id,
@@ -102,7 +105,7 @@ export function drillCentre(session: Session): void {
     cut: { kind: 'bore', envelope },
     after: face ? [{ key: face, rule: 'face-before-centre' }] : [],
     reasons: ['centre-before-support'],
-    check: `mouth Ø${mm(hole.mouthDiameter)}`,
+    check: `mouth Ø${session.build.words.length(hole.mouthDiameter)}`,
     needs: [tool.need],
   });
   session.done.set('centre', key);
@@ -122,7 +125,7 @@ export function turnCrown(session: Session): void {
   const crown = session.view.crownRight;
   if (!crown || crown.to <= session.from) return;
   const build = session.build;
-  const tool = formTool(build.register, crown.radius);
+  const tool = formTool(build, crown.radius);
   const metal = metalOver(session, crown.from, crown.to, 0);
   // The tool is fed in along the axis: what it goes through is the height of the crown.
   const height = crown.to - crown.from;
@@ -140,7 +143,7 @@ export function turnCrown(session: Session): void {
   addOperation(build, session.view, {
     key,
     method: 'form-turn',
-    title: `crown R${mm(crown.radius)}`,
+    title: `crown R${build.words.length(crown.radius)}`,
     features: [crown.id],
     tool: tool.name,
     toolItem: tool.item?.id,
@@ -150,8 +153,7 @@ export function turnCrown(session: Session): void {
     after,
     stops: [{ toX: crown.from }],
     reasons: ['trim-before-end-form'],
-    notes: tool.item?.caution ? [tool.item.caution] : [],
-    check: `radius gauge ${mm(crown.radius)}`,
+    check: `radius gauge ${build.words.length(crown.radius)}`,
     needs: [tool.need],
     handling: 2,
   });
@@ -182,7 +184,7 @@ export function cutChamfers(session: Session): void {
     addOperation(session.build, session.view, {
       key,
       method: 'chamfer',
-      title: `chamfer ${mm(chamfer.leg)} × ${mm(degrees)}°`,
+      title: `chamfer ${session.build.words.length(chamfer.leg)} × ${figure(degrees)}°`,
       features: [chamfer.id],
       tool: tool.name,
       toolItem: tool.item?.id,

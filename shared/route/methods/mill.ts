@@ -5,7 +5,7 @@ import { addOperation, RuledOut } from '../draft';
 import { flatsCutOf } from '../features';
 import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
-import { endMill, held, mm, short } from '../shop';
+import { endMill, held, short } from '../shop';
 import type { Indexing } from '../shop';
 import { depthFor, keyOf, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
@@ -64,6 +64,7 @@ export function markOut(session: Session, flats: FlatsFeature): void {
 /** Mills the faces of one polygon, indexed from the first. */
 export function millFlats(session: Session, flats: FlatsFeature, indexing: Indexing): void {
   const { build, view } = session;
+  const { words } = build;
   const cut = flatsCutOf(view.part.body, flats.id);
   const span = milledSpan(session, flats);
   if (span.from < session.gripTo - 1e-9)
@@ -77,7 +78,7 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
     Math.sqrt(Math.max(0, round * round - cut.distance * cut.distance)),
     flats.count >= 3 ? cut.distance * Math.tan(Math.PI / flats.count) : Infinity,
   );
-  const tool = endMill(build.register, 2 * half);
+  const tool = endMill(build, 2 * half);
   const depth = depthFor(session, 'mill-flat', to, LIMITS.millDepth.value, 'Milling the flats');
   const passes = passesFor(metal, depth);
   const arc = roundLeft(round, cut.distance, flats.count);
@@ -91,7 +92,7 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
   addOperation(build, view, {
     key,
     method: 'mill-flat',
-    title: `mill ${flats.count} flats, ${mm(2 * cut.distance)} across`,
+    title: `mill ${flats.count} flats, ${words.length(2 * cut.distance)} across`,
     features: [flats.id],
     tool: tool.name,
     toolItem: tool.item?.id,
@@ -112,10 +113,10 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
     notes: [
       indexing.text,
       ...(flats.count % 2 === 0 ? [`Measure over all ${flats.count / 2} pairs of flats.`] : []),
-      `Touch the cutter on the Ø${mm(2 * round)}, then ${mm(metal)} down a face.`,
+      `Touch the cutter on the Ø${words.length(2 * round)}, then ${words.length(metal)} down a face.`,
       arc > 0.02
-        ? `The corners stay round, ${mm(Math.round(arc * 100) / 100)} of arc at each; a face is ${mm(Math.round(2 * half * 100) / 100)} wide.`
-        : `The corners come up sharp; a face is ${mm(Math.round(2 * half * 100) / 100)} wide.`,
+        ? `The corners stay round, ${words.length(arc)} of arc at each; a face is ${words.length(2 * half)} wide.`
+        : `The corners come up sharp; a face is ${words.length(2 * half)} wide.`,
       ...(to > cut.to + 1e-6 || flats.runOutTo > flats.to + 1e-6
         ? ['The flats run on past their length; the taper cut trims their ends.']
         : []),
@@ -127,7 +128,7 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
       machine
         ? held(
             'machine',
-            `mill, travel ${mm(Math.ceil(to - span.from))}`,
+            `mill, travel ${words.about(to - span.from)}`,
             machine.id,
             `${machine.name}, ${machine.place}.`,
           )

@@ -2,17 +2,15 @@ import { constant, slice } from '../../part/generator';
 import { addOperation } from '../draft';
 import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
-import { chamferTool, mm, partingBlade } from '../shop';
-import type { Pick } from '../shop';
+import { chamferTool, partingBlade } from '../shop';
+import type { Pick, Shop } from '../shop';
 import { depthFor, keyOf, metalOver, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
+import { figure } from '../words';
 
 /** Blade for a radius, as the whole plan uses it. */
-export function bladeFor(
-  session: { build: Session['build'] },
-  radius: number,
-): { pick: Pick; width: number } {
-  const pick = partingBlade(session.build.register, radius + LIMITS.collarClear.value);
+export function bladeFor(session: { build: Shop }, radius: number): { pick: Pick; width: number } {
+  const pick = partingBlade(session.build, radius + LIMITS.collarClear.value);
   return { pick, width: pick.item?.figures['width'] ?? 3 };
 }
 
@@ -35,7 +33,7 @@ export function chamferHeldEnd(session: Session, width: number): void {
   addOperation(build, view, {
     key,
     method: 'groove',
-    title: `open the parting groove to Ø${mm(2 * floor)}`,
+    title: `open the parting groove to Ø${build.words.length(2 * floor)}`,
     features: [],
     tool: blade.pick.name,
     toolItem: blade.pick.item?.id,
@@ -56,7 +54,7 @@ export function chamferHeldEnd(session: Session, width: number): void {
   addOperation(build, view, {
     key: own,
     method: 'chamfer',
-    title: `chamfer ${mm(chamfer.leg)} × ${mm(degrees)}° beside the parting groove`,
+    title: `chamfer ${build.words.length(chamfer.leg)} × ${figure(degrees)}° beside the parting groove`,
     features: [chamfer.id],
     tool: tool.name,
     toolItem: tool.item?.id,
@@ -83,7 +81,9 @@ export function partOff(session: Session, cutAt: number, width: number, finishes
   addOperation(build, view, {
     key,
     method: 'part-off',
-    title: finishes ? 'part off to length' : `part off, ${mm(LIMITS.partedAllowance.value)} long`,
+    title: finishes
+      ? 'part off to length'
+      : `part off, ${build.words.length(LIMITS.partedAllowance.value)} long`,
     features: finishes ? [view.flipped ? 'right-face' : 'left-face'] : [],
     tool: blade.pick.name,
     toolItem: blade.pick.item?.id,
@@ -93,7 +93,7 @@ export function partOff(session: Session, cutAt: number, width: number, finishes
     after,
     stops: [{ toX: cutAt }],
     reasons: ['part-last'],
-    notes: ['Slow, with oil; catch the piece, do not reach for it.'],
+    notes: ['Slow, with oil, in one steady feed.'],
     check: finishes ? 'caliper over the length; file the pip' : 'caliper',
     needs: [blade.pick.need],
     handling: 1.5,

@@ -5,10 +5,11 @@ import type { DraftNeed } from '../draft';
 import type { Row, View } from '../features';
 import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
-import { alternative, dieFor, dieHolderFor, gearboxCuts, held, mm, short, threadingTool } from '../shop';
+import { alternative, dieFor, dieHolderFor, gearboxCuts, held, short, threadingTool } from '../shop';
 import { depthFor, keyOf, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
 import { rowsWorked } from './turn';
+import { figure, leadText } from '../words';
 
 /** Threads on rows worked here, nearest the free end first: by die where the shop cuts the size so, else single point. */
 export function cutThreads(session: Session): void {
@@ -53,7 +54,7 @@ function runOutOf(session: Session, row: Row, thread: ThreadFeature): number {
 
 function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
   const { build, view } = session;
-  const { register } = build;
+  const { register, words } = build;
   if (!openToFreeEnd(session.view, row, thread)) throw shutIn(thread);
   const exit = runOutOf(session, row, thread);
   const die = dieFor(register, thread);
@@ -91,7 +92,7 @@ function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
       reasons: turnRound ? ['die-when-held', 'die-turned-round'] : ['die-when-held'],
       notes: turnRound
         ? [
-            `No run-out at the shoulder: turn the die round for the last threads; about one pitch (${mm(thread.pitch)}) stays incomplete.`,
+            `No run-out at the shoulder: turn the die round for the last threads; about one pitch (${words.length(thread.pitch)}) stays incomplete.`,
           ]
         : ['Start square, oil, and stop at the length with the spindle turned by hand.'],
       check: 'the mate',
@@ -99,7 +100,7 @@ function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
         held('tool', `die ${thread.designation}`, die.id, `${die.name}, ${die.place}.`),
         held(
           'holder',
-          `die holder ${mm(die.figures['outside'] ?? 0)}`,
+          `die holder ${figure(die.figures['outside'] ?? 0)}`,
           holder.id,
           `${holder.name}, ${holder.place}.`,
         ),
@@ -121,13 +122,13 @@ function singlePoint(
   depth: number,
 ): void {
   const { build, view } = session;
-  const { register, lathe } = build;
+  const { register, lathe, words } = build;
   const tool = threadingTool(register, thread);
   const needs: DraftNeed[] = [tool.need];
-  const spec = `lead ${mm(thread.lead)} in the gearbox`;
+  const spec = `lead of ${leadText(thread.lead)} in the gearbox`;
   const dieHeld = dieFor(register, thread) !== undefined;
   const why = dieHeld
-    ? `Over the ${mm(register.settings.dieLimit)} the shop cuts by die.`
+    ? `Over the ${words.length(register.settings.dieLimit)} the shop cuts by die.`
     : `No ${thread.designation} die in the register.`;
   if (!gearboxCuts(lathe, thread.lead)) {
     needs.push(
@@ -144,11 +145,11 @@ function singlePoint(
         'tool',
         `die ${thread.designation}`,
         lathe.id,
-        `${why} Single point: ${lathe.name} cuts ${mm(thread.lead)}.`,
+        `${why} Single point: ${lathe.name} cuts ${leadText(thread.lead)}.`,
         [`single point on ${lathe.name}, about 15 min more`, 'buy the die'],
       ),
     );
-  } else needs.push(held('machine', spec, lathe.id, `${why} ${lathe.name} cuts ${mm(thread.lead)}.`));
+  } else needs.push(held('machine', spec, lathe.id, `${why} ${lathe.name} cuts ${leadText(thread.lead)}.`));
   const shallow = exit < LIMITS.threadExit.value * thread.pitch;
   if (shallow)
     needs.push(
@@ -156,7 +157,7 @@ function singlePoint(
         'geometry',
         `run-out or relief where ${thread.designation} meets its shoulder`,
         undefined,
-        `A single-point tool is drawn out in the last turn: about ${mm(2 * thread.pitch)} at the shoulder stays shallow.`,
+        `A single-point tool is drawn out in the last turn: about ${words.length(2 * thread.pitch)} at the shoulder stays shallow.`,
         [
           'say the run-out on the drawing',
           'draw a relief',
@@ -188,10 +189,10 @@ function singlePoint(
     reasons: shallow ? ['single-point', 'thread-run-out'] : ['single-point'],
     ...(shallow ? { runOut: 2 * thread.pitch } : {}),
     notes: [
-      `Gearbox to ${mm(thread.lead)}; infeed ${mm(Math.round(depth * 1000) / 1000)} in all, two spring passes.`,
+      `Gearbox to ${leadText(thread.lead)}; infeed ${words.length(depth)} in all, two spring passes.`,
       ...(shallow
         ? [
-            `Draw the tool out in the last turn before the shoulder, the spindle turned by hand; ${mm(2 * thread.pitch)} stays shallow.`,
+            `Draw the tool out in the last turn before the shoulder, the spindle turned by hand; ${words.length(2 * thread.pitch)} stays shallow.`,
           ]
         : []),
       ...(thread.hand === 'left'
@@ -201,7 +202,9 @@ function singlePoint(
               : 'Left hand: the tool starts in the relief and travels away from the chuck.',
           ]
         : []),
-      ...(thread.starts > 1 ? [`${thread.starts} starts, each a pitch of ${mm(thread.pitch)} on.`] : []),
+      ...(thread.starts > 1
+        ? [`${thread.starts} starts, each a pitch of ${words.length(thread.pitch)} on.`]
+        : []),
     ],
     check: 'the mate',
     needs,

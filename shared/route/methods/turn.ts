@@ -1,14 +1,16 @@
 import type { Generator } from '../../part/body';
 import { constant } from '../../part/generator';
 import { addOperation, RuledOut } from '../draft';
+import type { Build } from '../draft';
 import type { Row } from '../features';
 import { rowMax } from '../features';
 import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
-import { held, mm, partingBlade, turningTool } from '../shop';
+import { held, partingBlade, turningTool } from '../shop';
 import { depthFor, keyOf, metalOver, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
 import { threadBlank } from './thread-blank';
+import { figure } from '../words';
 
 export interface Plateau {
   rows: Row[];
@@ -76,7 +78,7 @@ function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]):
     'rough-turn',
     stage.x1,
     LIMITS.roughDepth.value,
-    `Roughing to Ø${mm(2 * target)}`,
+    `Roughing to Ø${build.words.length(2 * target)}`,
   );
   const cut = passesFor(metal, depth);
   const tool = turningTool(build.register, 'rough');
@@ -85,7 +87,7 @@ function roughPlateau(session: Session, plateau: Plateau, rows: readonly Row[]):
   addOperation(build, view, {
     key,
     method: 'rough-turn',
-    title: `rough turn Ø${mm(2 * target)}`,
+    title: `rough turn Ø${build.words.length(2 * target)}`,
     features: rows.filter((row) => row.to > from + 1e-9).map((row) => row.id),
     tool: tool.name,
     toolItem: tool.item?.id,
@@ -131,7 +133,13 @@ export function finishRows(session: Session): void {
     const radius = row.startR;
     const metal = metalOver(session, from, to, radius);
     if (metal <= 1e-9) continue;
-    const depth = depthFor(session, 'turn', to, LIMITS.lightDepth.value, `Turning Ø${mm(2 * radius)}`);
+    const depth = depthFor(
+      session,
+      'turn',
+      to,
+      LIMITS.lightDepth.value,
+      `Turning Ø${build.words.length(2 * radius)}`,
+    );
     const cut = passesFor(metal, depth);
     const tool = turningTool(build.register, 'finish');
     const key = keyOf(session, `turn.${row.id}`);
@@ -140,7 +148,9 @@ export function finishRows(session: Session): void {
     addOperation(build, view, {
       key,
       method: 'turn',
-      title: blank ? `turn Ø${mm(blank.diameter)} for the thread` : `turn Ø${mm(2 * radius)}`,
+      title: blank
+        ? `turn Ø${build.words.length(blank.diameter)} for the thread`
+        : `turn Ø${build.words.length(2 * radius)}`,
       features: [row.id],
       tool: tool.name,
       toolItem: tool.item?.id,
@@ -194,12 +204,18 @@ function cutBehindCollar(session: Session, row: Row, radius: number, method: 'ro
   if (metal <= 1e-9) return;
   const width = to - from;
   const reach = metal + LIMITS.collarClear.value;
-  const blade = partingBlade(build.register, reach, width);
+  const blade = partingBlade(build, reach, width);
   const bladeWidth = blade.item?.figures['width'] ?? 3;
   const narrow = width <= 3 * bladeWidth + 1e-9;
   const tool = narrow ? blade : turningTool(build.register, method === 'turn' ? 'finish' : 'rough', -1);
   const wish = method === 'turn' ? LIMITS.lightDepth.value : LIMITS.roughDepth.value;
-  const depth = depthFor(session, method, to, wish, `Turning Ø${mm(2 * radius)} behind the collar`);
+  const depth = depthFor(
+    session,
+    method,
+    to,
+    wish,
+    `Turning Ø${build.words.length(2 * radius)} behind the collar`,
+  );
   const cut = passesFor(metal, depth);
   const key = keyOf(session, `${method}.${row.id}`);
   const before = method === 'turn' ? session.done.get('rough') : undefined;
@@ -207,7 +223,7 @@ function cutBehindCollar(session: Session, row: Row, radius: number, method: 'ro
   addOperation(build, view, {
     key,
     method,
-    title: `${method === 'rough-turn' ? 'rough turn' : 'turn'} Ø${mm(2 * (blank ? blank.diameter / 2 : radius))} behind the collar`,
+    title: `${method === 'rough-turn' ? 'rough turn' : 'turn'} Ø${build.words.length(2 * (blank ? blank.diameter / 2 : radius))} behind the collar`,
     features: [row.id],
     tool: narrow ? tool.name : `${tool.name}, after ${blade.name}`,
     toolItem: tool.item?.id,
@@ -274,7 +290,7 @@ export function turnTapers(session: Session): void {
     addOperation(build, view, {
       key,
       method: 'taper-turn',
-      title: `turn taper, half angle ${mm((half * 180) / Math.PI)}°`,
+      title: `turn taper, half angle ${figure((half * 180) / Math.PI)}°`,
       features: [row.id],
       tool: tool.name,
       toolItem: tool.item?.id,
@@ -288,17 +304,17 @@ export function turnTapers(session: Session): void {
       slantLength: slant,
       settings,
       reasons: settings > 1 ? ['flats-before-taper', 'two-settings'] : ['flats-before-taper'],
-      notes: taperNotes(half, slant, path, travel, settings, build.lathe.slideGraduation),
+      notes: taperNotes(build, half, slant, path, settings),
       check: 'protractor, and micrometer at the small end',
       needs: [
         tool.need,
         held(
           'setting',
-          `top slide at ${mm((half * 180) / Math.PI)}°, slant ${mm(slant)}`,
+          `top slide at ${figure((half * 180) / Math.PI)}°, slant ${build.words.length(slant)}`,
           build.lathe.id,
           settings === 1
-            ? `The slide travels ${mm(travel)}.`
-            : `The slide travels ${mm(travel)}: ${settings} settings, overlapping ${mm(overlap)}.`,
+            ? `The slide travels ${build.words.length(travel)}.`
+            : `The slide travels ${build.words.length(travel)}: ${settings} settings, overlapping ${build.words.length(overlap)}.`,
         ),
       ],
       handling: 4 * settings,
@@ -332,24 +348,22 @@ function centreMouth(session: Session): number {
 }
 
 function taperNotes(
+  { words, lathe }: Build,
   half: number,
   slant: number,
   path: number,
-  travel: number,
   settings: number,
-  graduation: number,
 ): string[] {
-  const notes = ['Lock the carriage. The tail must clear the tool at the small end.'];
-  const rise = Math.round(slant * Math.sin(half) * 1000) / 1000;
+  const notes: string[] = [];
   notes.push(
-    `The slide is marked every ${mm(graduation)}°: set it by a dial on the bar, ${rise} mm rise over ${mm(Math.round(slant * Math.cos(half) * 100) / 100)} mm.`,
+    `The slide is marked every ${figure(lathe.slideGraduation)}°: set it by a dial on the bar, ${words.length(slant * Math.sin(half))} rise over ${words.length(slant * Math.cos(half))}.`,
   );
   if (settings > 1) {
-    const step = travel - LIMITS.slideOverlap.value;
+    const step = lathe.slideTravel - LIMITS.slideOverlap.value;
     for (let k = 1; k < settings; k += 1) {
       const moved = Math.min(k * step, path);
       notes.push(
-        `Setting ${k + 1}: carriage on by ${mm(Math.round(moved * Math.cos(half) * 100) / 100)}, cross slide out by ${mm(Math.round(moved * Math.sin(half) * 1000) / 1000)}; blend near ${mm(Math.round(moved))} along the slope.`,
+        `Setting ${k + 1}: carriage on by ${words.length(moved * Math.cos(half))}, cross slide out by ${words.length(moved * Math.sin(half))}; blend near ${words.about(moved)} along the slope.`,
       );
     }
   }

@@ -1,20 +1,20 @@
 import type { Build } from '../draft';
 import type { View } from '../features';
 import type { Session } from '../session';
-import { held, mm, short } from '../shop';
+import { held, short } from '../shop';
 
 /** Sawing the piece from the bar: an event, since the saw's width lies outside the blank. */
 export function sawPiece(build: Build, view: View, kind: 'bar' | 'stick' | 'blank'): void {
   if (kind === 'bar') return;
   const length = build.blank.x1 - build.blank.x0;
-  const saw = build.saw;
+  const { saw, words } = build;
   const diameter = 2 * build.stockRadius;
-  const spec = `saw for Ø${mm(diameter)}`;
+  const spec = `saw for Ø${words.length(diameter)}`;
   const fits = saw !== null && diameter <= saw.maximumDiameter;
   build.operations.push({
     key: 'saw',
     method: 'saw',
-    title: `saw ${mm(Math.round(length * 10) / 10)} long`,
+    title: `saw ${words.about(length)} long`,
     setup: 'S1',
     end: view.flipped ? 'left' : 'right',
     features: [],
@@ -32,11 +32,16 @@ export function sawPiece(build: Build, view: View, kind: 'bar' | 'stick' | 'blan
     handling: 2 + diameter / 20,
     needs: [
       fits && saw
-        ? held('machine', spec, saw.id, `${saw.name} takes ${mm(saw.maximumDiameter)}; kerf ${mm(saw.kerf)}.`)
+        ? held(
+            'machine',
+            spec,
+            saw.id,
+            `${saw.name} takes ${words.length(saw.maximumDiameter)}; kerf ${words.length(saw.kerf)}.`,
+          )
         : short(
             'machine',
             spec,
-            saw ? `${saw.name} takes ${mm(saw.maximumDiameter)}.` : 'No saw in the register.',
+            saw ? `${saw.name} takes ${words.length(saw.maximumDiameter)}.` : 'No saw in the register.',
             ['saw by hand', 'buy the piece cut to length'],
           ),
     ],

@@ -4,9 +4,9 @@ import { RuledOut } from '../draft';
 import type { Views } from '../features';
 import { trimFor } from '../methods/ends';
 import { partOff } from '../methods/part-off';
-import type { Register } from '../register';
 import { LIMITS } from '../rules';
 import { firstMill } from '../shop';
+import type { Shop } from '../shop';
 import { finishPiece, sawPiece } from './bench';
 import type { Candidate, Tails } from './candidate';
 import { inspectSetUp } from './end-work';
@@ -15,12 +15,12 @@ import { layOut, shareFlats } from './layout';
 import { secondEnd } from './second-end';
 
 /** Builds the plan; where work stands out too far it is planned again with a centre. Throws RuledOut when it cannot be. */
-export function buildCandidate(part: Part, views: Views, register: Register, candidate: Candidate): Build {
+export function buildCandidate(part: Part, views: Views, shop: Shop, candidate: Candidate): Build {
   let tails: Tails = { first: surelyNeedsCentre(views, candidate), second: false };
   for (let attempt = 0; ; attempt += 1) {
     const where = { end: 'first' as 'first' | 'second' };
     try {
-      return attemptPlan(part, views, register, candidate, tails, where);
+      return attemptPlan(part, views, shop, candidate, tails, where);
     } catch (error) {
       if (!(error instanceof RuledOut) || attempt >= 3) throw error;
       const wantsCentre = error.rule === 'support-overhang' || error.rule === 'support-bend';
@@ -41,7 +41,7 @@ function surelyNeedsCentre(views: Views, candidate: Candidate): boolean {
 function attemptPlan(
   part: Part,
   views: Views,
-  register: Register,
+  shop: Shop,
   candidate: Candidate,
   tails: Tails,
   where: { end: 'first' | 'second' },
@@ -52,9 +52,11 @@ function attemptPlan(
     first: tails.first ? trimFor(view) : 0,
     second: tails.second ? trimFor(other) : 0,
   };
-  const layout = layOut(register, view, candidate, trims);
+  const { register } = shop;
+  const layout = layOut(shop, view, candidate, trims);
   const build: Build = {
     register,
+    words: shop.words,
     lathe: candidate.lathe,
     mill: firstMill(register),
     saw: register.saws[0] ?? null,

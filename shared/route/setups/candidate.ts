@@ -1,6 +1,6 @@
 import type { Lathe } from '../register';
-import { mm } from '../shop';
 import type { StockOption } from '../stock';
+import type { Words } from '../words';
 
 export type CandidateKind = 'bar' | 'stick' | 'blank';
 
@@ -30,9 +30,9 @@ const KIND_TEXT: Record<CandidateKind, string> = {
   blank: 'from a sawn blank',
 };
 
-export function candidateText(candidate: Candidate): string {
+export function candidateText(candidate: Candidate, words: Words): string {
   const turned = candidate.secondEnd
-    ? `, turned round at ${mm(candidate.meets)} from the far end`
+    ? `, turned round at ${words.length(candidate.meets)} from the far end`
     : ', in one holding';
   return `${candidate.stock.text} ${KIND_TEXT[candidate.kind]}, ${candidate.first} end first${turned}, ${candidate.lathe.name.toLowerCase()}`;
 }

@@ -56,7 +56,7 @@ export function workEnd(session: Session, work: EndWork): Session {
   const build = session.build;
   const first = work.flats[0];
   if (!first) return session;
-  const indexing = indexingFor(build.register, first.count, work.grip.diameter);
+  const indexing = indexingFor(build, first.count, work.grip.diameter);
   dropIfEmpty(session);
   const grip = { ...work.grip, from: Math.max(work.grip.from, work.grip.to - indexing.reach) };
   inspectSetUp(session);

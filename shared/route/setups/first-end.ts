@@ -4,7 +4,6 @@ import { RuledOut, stageIn } from '../draft';
 import type { View } from '../features';
 import { LIMITS } from '../rules';
 import type { Session } from '../session';
-import { mm } from '../shop';
 import type { Candidate, Tails } from './candidate';
 import { openEnd, workEnd } from './end-work';
 import { latheHold, openSetUp, standsOut } from './holding';
@@ -21,7 +20,7 @@ export function firstEnd(
   layout: Layout,
   flats: readonly FlatsFeature[],
 ): Session {
-  const { lathe } = build;
+  const { lathe, words } = build;
   const diameter = layout.grip.diameter;
   const keeps = view.rows.some(
     (row) =>
@@ -32,7 +31,7 @@ export function firstEnd(
   if (candidate.kind === 'bar' && !passes)
     throw new RuledOut(
       'bar-through-spindle',
-      `Ø${mm(diameter)} does not pass the spindle, bore ${mm(lathe.spindleBore)}.`,
+      `Ø${words.length(diameter)} does not pass the spindle, bore ${words.length(lathe.spindleBore)}.`,
     );
   const run = {
     trim: trims.first,
@@ -52,7 +51,7 @@ export function firstEnd(
         ...(hold.item ? { holdingItem: hold.item } : {}),
         grip: layout.grip,
         ...(support ? { support: 'centre' as const } : {}),
-        how: `${work} of Ø${mm(diameter)}, ${standsOut(build, view, layout.grip)}${support ? ', centre in the tail' : ''}.`,
+        how: `${work} of Ø${words.length(diameter)}, ${standsOut(build, view, layout.grip)}${support ? ', centre in the tail' : ''}.`,
         datum,
         minutes: hold.minutes + (support ? 2 : 0),
         turned: false,

@@ -6,7 +6,7 @@ import { LIMITS } from '../rules';
 import type { RuleId } from '../rules';
 import type { SetUp } from '../route';
 import type { Session } from '../session';
-import { holdsFor, mm, short } from '../shop';
+import { holdsFor, short } from '../shop';
 import type { Hold, Indexing } from '../shop';
 
 export interface SetUpWish {
@@ -92,14 +92,14 @@ export function indicate(session: Session, within: number): void {
   addOperation(session.build, session.view, {
     key,
     method: 'indicate',
-    title: `indicate true within ${mm(within)}`,
+    title: `indicate true within ${session.build.words.length(within)}`,
     features: [],
     tool: dial?.name ?? 'dial indicator',
     toolItem: dial?.id,
     figures: null,
     after: grip ? [{ key: grip, rule: 'grip-first' }] : [],
     reasons: ['indicate-before-cut'],
-    check: `dial, ${mm(within)}`,
+    check: `dial, ${session.build.words.length(within)}`,
     needs: [
       dial
         ? {
@@ -132,7 +132,7 @@ export function latheHold(build: Build, diameter: number, finished: boolean, onF
     holdsFor(build.register, build.lathe, diameter, finished).find(
       (h) => !onFlats || (h.kind === 'chuck' && 'kind' in h.item && h.item.kind === 'three-jaw'),
     ) ?? null;
-  const spec = `hold ${onFlats ? 'the flats of ' : ''}Ø${mm(diameter)} on ${build.lathe.name.toLowerCase()}`;
+  const spec = `hold ${onFlats ? 'the flats of ' : ''}Ø${build.words.length(diameter)} on ${build.lathe.name.toLowerCase()}`;
   if (!hold) {
     build.planNeeds.push(
       short('hold', spec, 'No chuck or collet of this lathe closes on it.', [
@@ -156,7 +156,7 @@ export function latheHold(build: Build, diameter: number, finished: boolean, onF
 /** What stands out of the jaws, in words. */
 export function standsOut(build: Build, view: View, grip: Grip): string {
   const stage = stageIn(build, view);
-  return `${mm(Math.round((stage.x1 - grip.to) * 10) / 10)} out of the jaws`;
+  return `${build.words.about(stage.x1 - grip.to)} out of the jaws`;
 }
 
 export function millSetUp(
@@ -174,7 +174,7 @@ export function millSetUp(
     ...(indexing.item ? { holdingItem: indexing.item } : {}),
     grip,
     ...(outboard ? { support: 'outboard' as const } : {}),
-    how: `Held on Ø${mm(grip.diameter)}, ${standsOut(build, view, grip)}${outboard ? ', the outer end on a centre' : ''}. ${indexing.text}`,
+    how: `Held on Ø${build.words.length(grip.diameter)}, ${standsOut(build, view, grip)}${outboard ? ', the outer end on a centre' : ''}. ${indexing.text}`,
     datum: 'Lengths are from the faced end.',
     minutes: indexing.minutes + (outboard ? 3 : 0),
     turned: false,

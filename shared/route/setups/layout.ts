@@ -1,17 +1,16 @@
 import type { Body } from '../../part/body';
 import { constant } from '../../part/generator';
 import type { FlatsFeature } from '../../part/part';
-import type { Build } from '../draft';
 import { RuledOut } from '../draft';
 import { rowMax } from '../features';
 import type { View } from '../features';
 import { longEnough } from '../grips';
 import type { Grip } from '../grips';
 import { bladeFor } from '../methods/part-off';
-import type { Register } from '../register';
 import { LIMITS } from '../rules';
-import { holdsFor, mm } from '../shop';
+import { holdsFor } from '../shop';
 import type { Candidate } from './candidate';
+import type { Shop } from '../shop';
 
 export interface Layout {
   blank: Body;
@@ -23,7 +22,7 @@ export interface Layout {
 
 /** Blank and first grip, in the first end's view, then the blank in the part's own x. */
 export function layOut(
-  register: Register,
+  shop: Shop,
   view: View,
   candidate: Candidate,
   trims: { first: number; second: number },
@@ -32,9 +31,9 @@ export function layOut(
   const face = LIMITS.faceAllowance.value;
   const x1 = view.length + face + trims.first;
   const held = candidate.meets > 1e-9 ? radius : Math.max(...view.rows.slice(0, 1).map(rowMax));
-  const { width } = bladeFor({ build: { register } as Build }, held);
+  const { width } = bladeFor({ build: shop }, held);
   const cutAt = candidate.secondEnd ? -(LIMITS.partedAllowance.value + trims.second) : 0;
-  const reach = holdsFor(register, candidate.lathe, 2 * radius, false)[0]?.reach ?? 28;
+  const reach = holdsFor(shop.register, candidate.lathe, 2 * radius, false)[0]?.reach ?? 28;
   let grip: Grip;
   let x0: number;
   if (candidate.kind === 'blank') {
@@ -42,7 +41,10 @@ export function layOut(
     const begins = workBegins(view, candidate) - 2;
     grip = { from: Math.max(x0, begins - reach), to: begins, diameter: 2 * radius };
     if (!longEnough(grip))
-      throw new RuledOut('grip-length', `Only ${mm(Math.max(0, begins - x0))} of the blank is left to hold.`);
+      throw new RuledOut(
+        'grip-length',
+        `Only ${shop.words.length(Math.max(0, begins - x0))} of the blank is left to hold.`,
+      );
   } else {
     const to = cutAt - width - LIMITS.partingClear.value;
     const hold = Math.min(Math.max(20, 1.2 * radius), 38);

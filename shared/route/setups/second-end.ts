@@ -6,7 +6,6 @@ import { gripsOf, longEnough } from '../grips';
 import type { Grip } from '../grips';
 import { LIMITS } from '../rules';
 import type { Session } from '../session';
-import { mm } from '../shop';
 import type { Candidate, Tails } from './candidate';
 import { openEnd, workEnd } from './end-work';
 import { indicate, latheHold, openSetUp, standsOut } from './holding';
@@ -85,7 +84,7 @@ function holdSecond(
   const hold = latheHold(build, found.diameter, true, found.onFlats ?? false);
   const grip = { ...found, from: Math.max(found.from, found.to - hold.reach) };
   if (!longEnough(grip))
-    throw new RuledOut('grip-length', `Ø${mm(grip.diameter)} is held on too short a length.`);
+    throw new RuledOut('grip-length', `Ø${build.words.length(grip.diameter)} is held on too short a length.`);
   const run = { trim: trims.second, from, runOn: 0 };
   const open = (first: boolean): Session =>
     openSetUp(
@@ -97,12 +96,12 @@ function holdSecond(
         ...(hold.item ? { holdingItem: hold.item } : {}),
         grip,
         ...(tails.second ? { support: 'centre' as const } : {}),
-        how: `Turned round, on ${grip.onFlats ? 'the flats, padded with copper' : `Ø${mm(grip.diameter)}`}, ${standsOut(build, view, grip)}${tails.second ? ', centre in the tail' : ''}.`,
+        how: `Turned round, on ${grip.onFlats ? 'the flats, padded with copper' : `Ø${build.words.length(grip.diameter)}`}, ${standsOut(build, view, grip)}${tails.second ? ', centre in the tail' : ''}.`,
         datum: 'Stops are from the end faced here.',
         minutes: hold.minutes + 1 + (tails.second ? 2 : 0),
         turned: first,
         title: first
-          ? `turn round, grip on ${grip.onFlats ? 'the flats' : `Ø${mm(grip.diameter)}`}`
+          ? `turn round, grip on ${grip.onFlats ? 'the flats' : `Ø${build.words.length(grip.diameter)}`}`
           : 'grip again as before, against the same face',
         reasons: grip.onFlats ? ['turn-round', 'grip-polygon'] : ['turn-round'],
       },

@@ -7,7 +7,7 @@ import type { Grip } from '../grips';
 import { LIMITS } from '../rules';
 import type { Tool } from '../register';
 import type { Session } from '../session';
-import { mm, short } from '../shop';
+import { short } from '../shop';
 import { smallestDiameter } from '../stiffness';
 import { openSetUp } from './holding';
 import type { SetUpWish } from './holding';
@@ -57,11 +57,12 @@ export function openWithSteady(
   otherwise: RuledOut,
 ): Session {
   const steady = build.register.tools.find((t) => t.kind === 'steady');
+  const { words } = build;
   const stage = stageIn(build, view);
   const place = steadyPlace(stage, grip.to, steady);
   if (!place) throw otherwise;
-  const at = `Ø${mm(place.diameter)}, ${mm(Math.round(stage.x1 - place.to))} from the end`;
-  const spec = `fixed steady on Ø${mm(place.diameter)}`;
+  const at = `Ø${words.length(place.diameter)}, ${words.about(stage.x1 - place.to)} from the end`;
+  const spec = `fixed steady on Ø${words.length(place.diameter)}`;
   build.planNeeds.push(
     steady
       ? {
@@ -84,7 +85,7 @@ export function openWithSteady(
       view,
       grip,
       support: 'steady',
-      how: `${grip.onFlats ? 'On the flats' : `On Ø${mm(grip.diameter)}`}, fixed steady on ${at}, oiled.`,
+      how: `${grip.onFlats ? 'On the flats' : `On Ø${words.length(grip.diameter)}`}, fixed steady on ${at}, oiled.`,
       title: `grip, fixed steady on ${at}`,
       reasons: ['steady-end'],
     },

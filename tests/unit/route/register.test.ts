@@ -112,7 +112,7 @@ describe('a register that lacks something', () => {
   it('no six-way block: the dividing head with its turns; neither: a short', () => {
     const four = without({ colletBlocks: exampleRegister.colletBlocks.filter((block) => block.faces === 4) });
     const mill = plannedHandle(HEX, four).route.operations.find((o) => o.method === 'mill-flat');
-    expect(mill?.cautions.join(' ')).toMatch(/6 turns and 10 holes of 15/);
+    expect(mill?.notes?.join(' ')).toMatch(/6 turns and 10 holes of 15/);
     const none = plannedHandle(HEX, { ...four, dividingHeads: [] });
     expect(none.capacity.verdict).toBe('cannot');
     expect(none.capacity.needs.some((need) => need.kind === 'setting' && need.state === 'short')).toBe(true);
