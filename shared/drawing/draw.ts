@@ -7,7 +7,9 @@ import { adviseSheet } from './check/advise-sheet';
 import type { Box } from './geometry/box';
 import { moveMarks } from './move';
 import { notesOf } from './notes/notes';
-import { arrange } from './passes/arrange';
+import { arrange, leastWidth, readySizes } from './passes/arrange';
+import { axisView } from './passes/axis-view';
+import type { AxisPaper } from './layout';
 import type { Arrangement } from './passes/arrange';
 import { attemptsFor } from './passes/choose-sheet';
 import type { Attempt } from './passes/choose-sheet';
@@ -16,7 +18,7 @@ import { frameBox } from './passes/frame';
 import { foot } from './passes/title-block';
 import type { Foot } from './passes/title-block';
 import { stampGroup } from './passes/stamp';
-import type { AdviceFinding, DrawingOptions, Group, Sheet } from './sheet';
+import type { AdviceFinding, DrawingOptions, Group, Sheet, SheetSize } from './sheet';
 import type { Writing } from './size-text';
 
 /** Clean layouts compared before the best is taken; counted in work, so that the same values give the same bytes. */
@@ -24,6 +26,8 @@ const COMPARED = 4;
 const MOST_TRIED = 14;
 const SCORE_WEIGHT = 4;
 const PRICE_WEIGHT = 1.2;
+/** No arrangement has been seen under this: an attempt that could not win even so is not laid out. */
+const LEAST_PRICE = 0.25;
 const EDGE = 4;
 const NEARLY = 50;
 const OVER_FOOT = 4;
@@ -32,7 +36,6 @@ const OVER_REVISIONS = 2;
 interface Tried {
   attempt: Attempt;
   arrangement: Arrangement;
-  ground: Ground;
   place: { dx: number; dy: number } | null;
   rank: number;
 }
@@ -88,24 +91,40 @@ function better(a: Tried, b: Tried | null): boolean {
 
 function search(part: Part, scheme: Scheme, options: DrawingOptions, writing: Writing): Tried | null {
   const cache = new Map<string, Arrangement>();
+  const grounds = new Map<SheetSize, Ground>();
+  const papers = new Map<string, AxisPaper>();
+  const readies = readySizes(scheme, writing);
   const tooBig = new Map<string, number>();
   let best: Tried | null = null;
   let clean = 0;
   let tried = 0;
   for (const attempt of attemptsFor(part, options)) {
-    if (best && best.place && best.arrangement.clashes === 0 && SCORE_WEIGHT * attempt.score >= best.rank)
+    if (
+      best &&
+      best.place &&
+      best.arrangement.clashes === 0 &&
+      SCORE_WEIGHT * attempt.score + LEAST_PRICE >= best.rank
+    )
       break;
-    const key = JSON.stringify(attempt.map);
+    const key = `${attempt.scale.factor} ${attempt.map.breaks.join(' ')}`;
     const kind = `${attempt.sheet} ${attempt.map.breaks.length}`;
     if (attempt.scale.factor >= (tooBig.get(kind) ?? Infinity)) continue;
+    // The rooms are the sheet's own: the scale only changes a word of the block.
+    const base = grounds.get(attempt.sheet) ?? ground(attempt, part, options, writing);
+    grounds.set(attempt.sheet, base);
+    const least = leastWidth(part, attempt.map);
+    if (base.rooms.every((room) => room[2] - room[0] < least)) {
+      tooBig.set(kind, attempt.scale.factor);
+      continue;
+    }
     if (!cache.has(key) && ++tried > MOST_TRIED) break;
-    let arrangement = cache.get(key) ?? arrange(part, scheme, attempt.map, writing, options.balloons);
+    const paper = papers.get(key) ?? axisView(part, attempt.map, writing);
+    papers.set(key, paper);
+    let arrangement = cache.get(key) ?? arrange(part, readies, paper, options.balloons);
     cache.set(key, arrangement);
-    const base = ground(attempt, part, options, writing);
     let place = placeIn(base.rooms, arrangement.bounds);
     if (!place && nearlyFits(base.rooms, arrangement.bounds)) {
-      arrangement =
-        cache.get(`narrow ${key}`) ?? arrange(part, scheme, attempt.map, writing, options.balloons, true);
+      arrangement = cache.get(`narrow ${key}`) ?? arrange(part, readies, paper, options.balloons, true);
       cache.set(`narrow ${key}`, arrangement);
       place = placeIn(base.rooms, arrangement.bounds);
     }
@@ -113,7 +132,6 @@ function search(part: Part, scheme: Scheme, options: DrawingOptions, writing: Wr
     const now: Tried = {
       attempt,
       arrangement,
-      ground: base,
       place,
       rank: SCORE_WEIGHT * attempt.score + PRICE_WEIGHT * arrangement.price,
     };
@@ -123,8 +141,9 @@ function search(part: Part, scheme: Scheme, options: DrawingOptions, writing: Wr
   return best;
 }
 
-function assemble(tried: Tried, options: DrawingOptions, writing: Writing): Sheet {
-  const { attempt, arrangement, ground: base } = tried;
+function assemble(tried: Tried, part: Part, options: DrawingOptions, writing: Writing): Sheet {
+  const { attempt, arrangement } = tried;
+  const base = ground(attempt, part, options, writing);
   const { dx, dy } = tried.place ?? { dx: 0, dy: 0 };
   const { width, height } = SHEET_SIZES[attempt.sheet];
   const stamp = options.stamp
@@ -188,6 +207,6 @@ export function drawSheet(
   };
   const best = search(part, scheme, options, writing);
   if (!best || !best.place) return { problem: nothingFits(part, options, writing) };
-  const sheet = assemble(best, options, writing);
+  const sheet = assemble(best, part, options, writing);
   return { sheet, advice: adviseSheet(sheet, scheme, part) };
 }

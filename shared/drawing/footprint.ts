@@ -1,7 +1,7 @@
 import { boxesMeet, growBox } from './geometry/box';
 import type { Box } from './geometry/box';
 import { segmentMeetsBox, segmentsCross, sideBySide } from './geometry/segment';
-import type { Mark } from './sheet';
+import type { LineType, Mark, PolylineMark } from './sheet';
 import { strokesOf, textBoxesOf } from './strokes';
 import type { Stroke } from './strokes';
 
@@ -20,58 +20,69 @@ export interface Footprint {
   bounds: Box;
 }
 
-function printStroke(s: Stroke): PrintStroke {
+function stroke(line: LineType, x1: number, y1: number, x2: number, y2: number): PrintStroke {
   return {
-    line: s.line,
-    x1: s.x1,
-    y1: s.y1,
-    x2: s.x2,
-    y2: s.y2,
-    x0: Math.min(s.x1, s.x2),
-    y0: Math.min(s.y1, s.y2),
-    xe: Math.max(s.x1, s.x2),
-    ye: Math.max(s.y1, s.y2),
+    line,
+    x1,
+    y1,
+    x2,
+    y2,
+    x0: x1 < x2 ? x1 : x2,
+    y0: y1 < y2 ? y1 : y2,
+    xe: x1 < x2 ? x2 : x1,
+    ye: y1 < y2 ? y2 : y1,
   };
+}
+
+function addPolyline(mark: PolylineMark, out: PrintStroke[]): void {
+  const { points } = mark;
+  if (mark.line === 'arrow') {
+    const [tip, a, b] = points;
+    if (tip && a && b) out.push(stroke('arrow', tip.x, tip.y, (a.x + b.x) / 2, (a.y + b.y) / 2));
+    return;
+  }
+  const last = mark.closed ? points.length : points.length - 1;
+  for (let i = 0; i < last; i++) {
+    const a = points[i];
+    const b = points[i + 1] ?? points[0];
+    if (a && b) out.push(stroke(mark.line, a.x, a.y, b.x, b.y));
+  }
 }
 
 function solverStrokes(marks: readonly Mark[]): PrintStroke[] {
   const out: PrintStroke[] = [];
-  const drawn: Mark[] = [];
   for (const mark of marks) {
-    if (mark.type === 'polyline' && mark.line === 'arrow') {
-      const [tip, a, b] = mark.points;
-      if (tip && a && b)
-        out.push(
-          printStroke({ line: 'arrow', x1: tip.x, y1: tip.y, x2: (a.x + b.x) / 2, y2: (a.y + b.y) / 2 }),
-        );
-    } else if (mark.type === 'line') out.push(printStroke(mark));
-    else if (mark.type !== 'text' && mark.type !== 'symbol') drawn.push(mark);
+    if (mark.type === 'line') out.push(stroke(mark.line, mark.x1, mark.y1, mark.x2, mark.y2));
+    else if (mark.type === 'polyline') addPolyline(mark, out);
+    else if (mark.type !== 'text' && mark.type !== 'symbol')
+      for (const s of strokesOf([mark])) out.push(stroke(s.line, s.x1, s.y1, s.x2, s.y2));
   }
-  for (const stroke of strokesOf(drawn)) out.push(printStroke(stroke));
   return out;
 }
 
 /** The footprint of marks. */
 export function footprintOf(marks: readonly Mark[]): Footprint {
-  const texts = textBoxesOf(marks);
+  return footprintWith(marks, textBoxesOf(marks));
+}
+
+/** The footprint of marks whose texts' boxes are known. */
+export function footprintWith(marks: readonly Mark[], texts: readonly Box[]): Footprint {
   const strokes = solverStrokes(marks);
   let x0 = Infinity;
   let y0 = Infinity;
   let x1 = -Infinity;
   let y1 = -Infinity;
+  const reach = (a: number, b: number, c: number, d: number): void => {
+    if (a < x0) x0 = a;
+    if (b < y0) y0 = b;
+    if (c > x1) x1 = c;
+    if (d > y1) y1 = d;
+  };
   for (const s of strokes) {
     const half = s.line === 'arrow' ? ARROW_HALF : 0;
-    x0 = Math.min(x0, s.x0 - half);
-    y0 = Math.min(y0, s.y0 - half);
-    x1 = Math.max(x1, s.xe + half);
-    y1 = Math.max(y1, s.ye + half);
+    reach(s.x0 - half, s.y0 - half, s.xe + half, s.ye + half);
   }
-  for (const t of texts) {
-    x0 = Math.min(x0, t[0]);
-    y0 = Math.min(y0, t[1]);
-    x1 = Math.max(x1, t[2]);
-    y1 = Math.max(y1, t[3]);
-  }
+  for (const t of texts) reach(t[0], t[1], t[2], t[3]);
   return { texts, strokes, bounds: x0 <= x1 ? [x0, y0, x1, y1] : [0, 0, 0, 0] };
 }
 

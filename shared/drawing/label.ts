@@ -1,4 +1,6 @@
+import type { Box } from './geometry/box';
 import type { Mark, TextMark } from './sheet';
+import { textBoxesOf } from './strokes';
 import { DIAMETER_ROOM, diameterSymbol } from './symbols/diameter';
 import { ASCENT, DESCENT, fontSizeFor, textWidth } from './text-metrics';
 
@@ -59,6 +61,27 @@ export function makeLabel(
     down += (ASCENT + DESCENT) * smallSize + 0.2;
   }
   return { runs, under, letter, small, width, figureWidth, up, down, text };
+}
+
+/** A label with a place: its marks are made when they are drawn, its boxes are known before. */
+export interface Written {
+  label: Label;
+  x: number;
+  y: number;
+  rotate?: -90;
+}
+
+/** Boxes of a label's texts and symbols about its own origin, upright and turned, worked out once. */
+const boxesAtOrigin = new WeakMap<Label, { upright?: readonly Box[]; turned?: readonly Box[] }>();
+
+/** The boxes that the placed label's texts and symbols will have. */
+export function writtenBoxes({ label, x, y, rotate }: Written): Box[] {
+  let known = boxesAtOrigin.get(label);
+  if (!known) boxesAtOrigin.set(label, (known = {}));
+  const boxes = rotate
+    ? (known.turned ??= textBoxesOf(placeLabel(label, 0, 0, rotate)))
+    : (known.upright ??= textBoxesOf(placeLabel(label, 0, 0)));
+  return boxes.map((b): Box => [b[0] + x, b[1] + y, b[2] + x, b[3] + y]);
 }
 
 /** The label's marks with the left end (upright) or the lower end (turned) of its baseline at (x, y). */

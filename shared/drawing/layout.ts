@@ -15,7 +15,7 @@ export interface ReadySize {
 /** One complete way of drawing a size: everything it needs, at what price. */
 export interface Candidate {
   form: 'inside' | 'end' | 'through' | 'leader' | 'lane' | 'view';
-  marks: readonly Mark[];
+  marks: () => readonly Mark[];
   print: Footprint;
   /** Own price, meetings with the view and the lengths included. */
   cost: number;

@@ -1,5 +1,6 @@
 import type { Part } from '../../part/part';
 import type { Scheme, Size } from '../../scheme/scheme';
+import { boxAround } from '../geometry/box';
 import type { Box } from '../geometry/box';
 import type { CheckFinding, Group, LineType, Point, Sheet, ViewMap } from '../sheet';
 import { strokesOf } from '../strokes';
@@ -25,6 +26,8 @@ export interface ReadGroup {
   strokes: readonly ReadStroke[];
   texts: readonly ReadText[];
   arrows: readonly Point[];
+  /** Round all its strokes; null without any. */
+  inked: Box | null;
 }
 
 /** Everything a rule may read: the finished sheet, and scheme and part for truth. */
@@ -62,7 +65,15 @@ function readGroup(group: Group, index: number): ReadGroup {
     y2: s.y2,
     box: [Math.min(s.x1, s.x2), Math.min(s.y1, s.y2), Math.max(s.x1, s.x2), Math.max(s.y1, s.y2)],
   }));
-  return { group, index, name: nameOf(group), strokes, texts, arrows };
+  return {
+    group,
+    index,
+    name: nameOf(group),
+    strokes,
+    texts,
+    arrows,
+    inked: boxAround(strokes.map((s) => s.box)),
+  };
 }
 
 /** Reads a finished sheet. */

@@ -11,7 +11,6 @@ import { sizeLabel } from '../size-text';
 import type { Writing } from '../size-text';
 import { strokesOf, textBoxesOf } from '../strokes';
 import type { XMap } from '../x-map';
-import { axisView } from './axis-view';
 import { placeBalloons } from './balloons';
 import type { BalloonWish } from './balloons';
 import { choose } from './choose';
@@ -44,6 +43,8 @@ const DENSE_WORK = { enough: 70, most: 260 } as const;
 /** Price of a millimetre past the ends of the view: little, or much where the sheet is narrow. */
 const OVERHANG = { roomy: 0.02, narrow: 0.2 } as const;
 const NARROW_APART = 8;
+/** Across the flats of an end view, at the least, in largest diameters: a view of two flats is narrower than its round. */
+const LEAST_ACROSS = 0.5;
 /** Shares of the flats that the metal before them may differ by and still be much alike. */
 const MUCH_ALIKE = 0.05;
 
@@ -140,7 +141,7 @@ function placeEnd(
     sizes: drawn.map(({ ready, candidate }) => ({
       view: view.name,
       ready,
-      marks: moveMarks(candidate.marks, centre, 0),
+      marks: moveMarks(candidate.marks(), centre, 0),
       text: [
         candidate.textBox[0] + centre,
         candidate.textBox[1],
@@ -166,17 +167,27 @@ function sizeGroup(drawing: Drawing): Group {
   };
 }
 
+/** The sizes with their writing: the same at every scale. */
+export function readySizes(scheme: Scheme, writing: Writing): ReadySize[] {
+  return scheme.sizes.map((size) => ({ size, label: sizeLabel(size, writing) }));
+}
+
+/** No arrangement of the part at this scale is narrower on paper. */
+export function leastWidth(part: Part, map: XMap): number {
+  const drawn = (map.knots[map.knots.length - 1]?.[1] ?? 0) - (map.knots[0]?.[1] ?? 0);
+  const hasEnd = needsEndView(part.body) && flatsCanBeSeen(part);
+  return drawn + (hasEnd ? part.maxDiameter * map.scale * LEAST_ACROSS + NARROW_APART : 0);
+}
+
 /** Lays out the whole drawing at one scale; `balloons` also numbers the sizes; `narrow` saves width where it can. */
 export function arrange(
   part: Part,
-  scheme: Scheme,
-  map: XMap,
-  writing: Writing,
+  readies: readonly ReadySize[],
+  paper: AxisPaper,
   balloons: boolean,
   narrow = false,
 ): Arrangement {
-  const paper = axisView(part, map, writing);
-  const readies = scheme.sizes.map((size): ReadySize => ({ size, label: sizeLabel(size, writing) }));
+  const { map, writing } = paper;
   const hasEnd = needsEndView(part.body) && flatsCanBeSeen(part);
   const inEnd = readies.filter(
     (r) => hasEnd && r.size.anchor.kind === 'flats' && r.size.kind === 'across-flats',
@@ -188,11 +199,11 @@ export function arrange(
   const others = readies.filter((r) => r.size.anchor.kind !== 'span' && !inEnd.includes(r));
   const chosen = chooseSizes(paper, others, lengths, narrow);
   const placed = [...lengths, ...chosen.placed];
-  const cutMarks = interrupt(shareExtensions(placed.map((p) => p.candidate.marks)));
+  const cutMarks = interrupt(shareExtensions(placed.map((p) => p.candidate.marks())));
   const drawings = placed.map((p, i): Drawing => ({
     view: p.forView,
     ready: p.ready,
-    marks: cutMarks.marks[i] ?? p.candidate.marks,
+    marks: cutMarks.marks[i] ?? [],
     text: p.candidate.textBox,
     rotate: p.candidate.rotate,
     onLine: p.candidate.form === 'lane' && writing.style === 'iso',
@@ -205,7 +216,7 @@ export function arrange(
     : null;
   const lostFlats = end ? inEnd.filter((r) => !end.sizes.some((s) => s.ready === r)) : [];
   const all = [...drawings, ...(end?.sizes ?? [])].sort(
-    (a, b) => scheme.sizes.indexOf(a.ready.size) - scheme.sizes.indexOf(b.ready.size),
+    (a, b) => readies.indexOf(a.ready) - readies.indexOf(b.ready),
   );
   const viewMarks = [...paper.marks, ...(end?.marks ?? [])];
   const bounds =

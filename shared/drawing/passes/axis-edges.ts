@@ -148,28 +148,30 @@ function longEdges(cut: FlatsCut, body: Body, map: XMap, merge: number): Mark[] 
   const stations = readingStations(cut, body);
   const marks: Mark[] = [];
   const angles = faceAngles(cut);
-  const half = (x: number): number => {
-    const r = Math.max(radiusAt(body.outer, x, 'left'), radiusAt(body.outer, x, 'right'));
-    return faceHalfWidth(
+  // What lies under the edges is read once a station, not once a face.
+  const radii = stations.map((x) =>
+    x >= cut.to - SAME ? radiusAt(body.outer, x, 'left') : radiusAt(body.outer, x, 'right'),
+  );
+  const halves = stations.map((x, i) =>
+    faceHalfWidth(
       cut,
-      x >= cut.to - SAME
-        ? radiusAt(body.outer, x, 'left')
-        : x <= cut.from + SAME
-          ? radiusAt(body.outer, x, 'right')
-          : r,
-    );
-  };
+      x >= cut.to - SAME || x <= cut.from + SAME
+        ? (radii[i] ?? 0)
+        : Math.max(radii[i] ?? 0, radiusAt(body.outer, x, 'left')),
+    ),
+  );
+  const places = stations.map((x) => toPaper(map.knots, x));
   const edge = (angle: number, side: 1 | -1): Point[] =>
-    stations.map((x) => {
-      const y = cut.distance * Math.cos(angle) - side * half(x) * Math.sin(angle);
-      return { x: toPaper(map.knots, x), y: -y * map.scale };
+    places.map((x, i) => {
+      const y = cut.distance * Math.cos(angle) - side * (halves[i] ?? 0) * Math.sin(angle);
+      return { x, y: -y * map.scale };
     });
+  const reaches = radii.map((r) => reach(r, [cut]));
   const outlineAt = (upper: boolean): Point[] =>
-    stations.map((x) => {
-      const r = x >= cut.to - SAME ? radiusAt(body.outer, x, 'left') : radiusAt(body.outer, x, 'right');
-      const { top, bottom } = reach(r, [cut]);
-      return { x: toPaper(map.knots, x), y: (upper ? -top : bottom) * map.scale };
-    });
+    places.map((x, i) => ({
+      x,
+      y: (upper ? -(reaches[i]?.top ?? 0) : (reaches[i]?.bottom ?? 0)) * map.scale,
+    }));
   const draw = (points: readonly Point[]): void => {
     const straight = straightened(points);
     if (straight.length > 1) marks.push({ type: 'polyline', line: 'visible', points: straight });

@@ -39,8 +39,10 @@ function boxDistance(x: number, y: number, b: Box): number {
 
 /** A coarse grid over the paper, so that a place is judged by what is near it. */
 class Field {
-  private readonly cells = new Map<string, { texts: Box[]; strokes: Stroke[] }>();
+  private readonly cells = new Map<number, { texts: Box[]; strokes: Stroke[] }>();
   private static readonly CELL = 10;
+  /** More cells than any paper has down its side. */
+  private static readonly ROW = 4096;
   constructor(ink: Ink) {
     for (const text of ink.texts) this.addText(text);
     for (const stroke of ink.strokes)
@@ -66,14 +68,14 @@ class Field {
     const n = (v: number): number => Math.floor(v / Field.CELL);
     for (let i = n(box[0] - 4); i <= n(box[2] + 4); i++)
       for (let j = n(box[1] - 4); j <= n(box[3] + 4); j++) {
-        const key = `${i},${j}`;
+        const key = i * Field.ROW + j;
         let cell = this.cells.get(key);
         if (!cell) this.cells.set(key, (cell = { texts: [], strokes: [] }));
         act(cell);
       }
   }
   free(x: number, y: number, r: number): boolean {
-    const cell = this.cells.get(`${Math.floor(x / Field.CELL)},${Math.floor(y / Field.CELL)}`);
+    const cell = this.cells.get(Math.floor(x / Field.CELL) * Field.ROW + Math.floor(y / Field.CELL));
     if (!cell) return true;
     return (
       cell.texts.every((t) => boxDistance(x, y, t) >= r + CLEAR) &&

@@ -63,23 +63,34 @@ function breaksFor(part: Part, scale: number, target: number): [number, number][
   return found.sort((a, b) => a[0] - b[0]);
 }
 
+/** What the score asks of a part, worked out once. */
+interface PartFacts {
+  part: Part;
+  shortest: number;
+  smallest: number;
+}
+
+function factsOf(part: Part): PartFacts {
+  const steps = part.features.flatMap((f) =>
+    f.kind === 'cylinder' || f.kind === 'cone' ? [f.to - f.from] : [],
+  );
+  const diameters = part.body.outer.map((p) =>
+    p.kind === 'line' ? 2 * Math.max(p.start, p.end) : 2 * p.radius,
+  );
+  return { part, shortest: Math.min(...steps, part.length), smallest: Math.min(...diameters) };
+}
+
 function score(
-  part: Part,
+  facts: PartFacts,
   sheet: SheetSize,
   scale: DrawingScale,
   drawnLength: number,
   height: number,
 ): number {
+  const { part } = facts;
   const { target, price } = SHEETS[sheet];
-  const stations = part.stations.map((s) => s.x).sort((a, b) => a - b);
-  const steps = part.features
-    .filter((f) => f.kind === 'cylinder' || f.kind === 'cone')
-    .map((f) => (f.to - f.from) * scale.factor);
-  const shortest = Math.min(...steps, part.length * scale.factor, ...(steps.length === 0 ? stations : []));
-  const diameters = part.body.outer.map((p) =>
-    p.kind === 'line' ? 2 * Math.max(p.start, p.end) : 2 * p.radius,
-  );
-  const smallest = Math.min(...diameters) * scale.factor;
+  const shortest = facts.shortest * scale.factor;
+  const smallest = facts.smallest * scale.factor;
   let sum =
     price + 0.9 * Math.abs(Math.log(Math.max(drawnLength, WIDE * part.maxDiameter * scale.factor) / target));
   if (scale.factor !== 1) sum += NOT_FULL_SIZE;
@@ -100,6 +111,7 @@ export function attemptsFor(part: Part, options: DrawingOptions): Attempt[] {
       : series.filter((s) => Math.abs(s.factor - Number(options.scale)) < 1e-9);
   const forced = options.scale !== 'auto' && options.sheet !== 'auto';
   const attempts: Attempt[] = [];
+  const facts = factsOf(part);
   for (const sheet of sheets) {
     const [x0, y0, x1, y1] = frameBox(sheet);
     const width = x1 - x0 - SIDE_ROOM;
@@ -107,10 +119,10 @@ export function attemptsFor(part: Part, options: DrawingOptions): Attempt[] {
     for (const scale of scales) {
       if (!forced && part.maxDiameter * scale.factor > height * TALLEST) continue;
       const full = part.length * scale.factor;
-      if (full <= width || forced) add(attempts, part, sheet, scale, [], height);
+      if (full <= width || forced) add(attempts, facts, sheet, scale, [], height);
       if (full > width * 0.7) {
         const breaks = breaksFor(part, scale.factor, SHEETS[sheet].target);
-        if (breaks.length > 0) add(attempts, part, sheet, scale, breaks, height, width);
+        if (breaks.length > 0) add(attempts, facts, sheet, scale, breaks, height, width);
       }
     }
   }
@@ -119,20 +131,20 @@ export function attemptsFor(part: Part, options: DrawingOptions): Attempt[] {
 
 function add(
   attempts: Attempt[],
-  part: Part,
+  facts: PartFacts,
   sheet: SheetSize,
   scale: DrawingScale,
   breaks: readonly (readonly [number, number])[],
   height: number,
   width = Infinity,
 ): void {
-  const map = makeXMap(0, part.length, scale.factor, breaks, BREAK_GAP);
+  const map = makeXMap(0, facts.part.length, scale.factor, breaks, BREAK_GAP);
   const drawn = map.knots[map.knots.length - 1]?.[1] ?? 0;
   if (drawn > width) return;
   attempts.push({
     sheet,
     scale,
     map,
-    score: score(part, sheet, scale, drawn, height) + (breaks.length > 0 ? BROKEN : 0),
+    score: score(facts, sheet, scale, drawn, height) + (breaks.length > 0 ? BROKEN : 0),
   });
 }

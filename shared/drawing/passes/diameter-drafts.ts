@@ -3,12 +3,12 @@
  * or by a leader. Afterwards: each candidate is complete and clean in itself.
  */
 import { arrowHead, lineMark } from '../arrow';
-import { placeLabel } from '../label';
+import type { Label, Written } from '../label';
 import type { AxisPaper, ReadySize } from '../layout';
 import { reachWithin } from '../layout';
 import type { Mark } from '../sheet';
 import { toPaper } from '../x-map';
-import type { Draft } from './candidate';
+import type { Draft, Drafts } from './candidate';
 import { leaderDrafts } from './leader-drafts';
 
 /** Prices of the forms and of their variants. Source: trial sheets, looked at. */
@@ -65,6 +65,8 @@ function onOutline({ paper, r }: Across, x: number): boolean {
   );
 }
 
+const written = (label: Label, x: number, y: number, rotate?: -90): Written => ({ label, x, y, rotate });
+
 /** The vertical dimension line between the outlines, arrows in or out. */
 function crossLine(
   a: Across,
@@ -111,7 +113,7 @@ function inside(a: Across): Draft[] {
         rotate: -90,
         build: () => ({
           strokes: crossLine(a, x, true, 0, null),
-          writing: placeLabel(label, x - rules.textLift - Math.max(0, label.down - 1.06), -1.4, -90),
+          writing: written(label, x - rules.textLift - Math.max(0, label.down - 1.06), -1.4, -90),
         }),
       });
     } else {
@@ -122,7 +124,7 @@ function inside(a: Across): Draft[] {
         cost,
         build: () => ({
           strokes: crossLine(a, x, true, 0, [middle - tall - rules.textGap, middle + tall + rules.textGap]),
-          writing: placeLabel(label, x - label.width / 2, middle + (label.up - label.down) / 2),
+          writing: written(label, x - label.width / 2, middle + (label.up - label.down) / 2),
         }),
       });
     }
@@ -157,7 +159,7 @@ function through(a: Across): Draft[] {
           rotate: -90,
           build: () => ({
             strokes: crossLine(a, x, arrowsIn, start - label.width - 0.3, null),
-            writing: placeLabel(label, x - shift, start, -90),
+            writing: written(label, x - shift, start, -90),
           }),
         });
       } else {
@@ -167,7 +169,7 @@ function through(a: Across): Draft[] {
           cost,
           build: () => ({
             strokes: crossLine(a, x, arrowsIn, lineEnd, null),
-            writing: placeLabel(label, x - label.width / 2, lineEnd - rules.textGap - label.down),
+            writing: written(label, x - label.width / 2, lineEnd - rules.textGap - label.down),
           }),
         });
       }
@@ -215,7 +217,7 @@ function atEnd(a: Across, side: 1 | -1): Draft[] {
     const price = PRICE.end + slot * PRICE.slot + reach * PRICE.perMm + hug;
     const ext = (y: number): Mark =>
       lineMark('extension', corner + side * rules.extensionGap, y, x + side * rules.extensionPast, y);
-    const push = (more: () => Mark[], writing: () => Mark[], extra: number, rotate?: -90): void => {
+    const push = (more: () => Mark[], writing: () => Written, extra: number, rotate?: -90): void => {
       out.push({
         form: 'end',
         cost: price + extra,
@@ -227,7 +229,7 @@ function atEnd(a: Across, side: 1 | -1): Draft[] {
       if (2 * r >= label.width + 1.6)
         push(
           () => crossLine(a, x, arrowsIn, 0, null),
-          () => placeLabel(label, x - shift, label.width / 2, -90),
+          () => written(label, x - shift, label.width / 2, -90),
           0,
           -90,
         );
@@ -235,7 +237,7 @@ function atEnd(a: Across, side: 1 | -1): Draft[] {
         const from = r + TURNED_TEXT_FROM_ARROW;
         push(
           () => crossLine(a, x, arrowsIn, -from - label.width - 0.3, null),
-          () => placeLabel(label, x - shift, -from, -90),
+          () => written(label, x - shift, -from, -90),
           0.5,
           -90,
         );
@@ -244,7 +246,7 @@ function atEnd(a: Across, side: 1 | -1): Draft[] {
             ...crossLine(a, x, arrowsIn, 0, null),
             lineMark('dimension', x, r, x, from + label.width + 0.3),
           ],
-          () => placeLabel(label, x - shift, from + label.width, -90),
+          () => written(label, x - shift, from + label.width, -90),
           0.7,
           -90,
         );
@@ -254,14 +256,14 @@ function atEnd(a: Across, side: 1 | -1): Draft[] {
       if (2 * r >= 2 * gapHalf + (arrowsIn ? 7 : 1))
         push(
           () => crossLine(a, x, arrowsIn, 0, [-gapHalf, gapHalf]),
-          () => placeLabel(label, x - label.width / 2, (label.up - label.down) / 2),
+          () => written(label, x - label.width / 2, (label.up - label.down) / 2),
           0,
         );
       else {
         const top = -(r + (arrowsIn ? 3 : TAIL));
         push(
           () => crossLine(a, x, arrowsIn, top, null),
-          () => placeLabel(label, x - label.width / 2, top - rules.textGap - label.down),
+          () => written(label, x - label.width / 2, top - rules.textGap - label.down),
           0.5,
         );
       }
@@ -285,15 +287,15 @@ function byLeader(a: Across): Draft[] {
   );
 }
 
-/** Every draft of a diameter or a thread. */
-export function diameterDrafts(paper: AxisPaper, ready: ReadySize): Draft[] {
+/** Every draft of a diameter or a thread: leaders, the dearest and by far the most, only where they are asked for. */
+export function diameterDrafts(paper: AxisPaper, ready: ReadySize): Drafts {
   const across = acrossOf(paper, ready);
-  if (!across) return [];
-  return [
-    ...inside(across),
-    ...atEnd(across, 1),
-    ...atEnd(across, -1),
-    ...through(across),
-    ...byLeader(across),
-  ];
+  if (!across) return { first: [] };
+  return {
+    first: [...inside(across), ...atEnd(across, 1), ...atEnd(across, -1), ...through(across)],
+    later: {
+      from: across.at === null ? PRICE.leader : PRICE.cornerLeader,
+      make: () => byLeader(across),
+    },
+  };
 }

@@ -1,7 +1,6 @@
 /** Leaders: one polyline from an arrow on its feature to a shelf under (or beside) the writing, at 30 to 75 degrees. */
 import { arrowHead } from '../arrow';
-import type { Label } from '../label';
-import { placeLabel } from '../label';
+import type { Label, Written } from '../label';
 import type { AxisPaper } from '../layout';
 import { reachWithin } from '../layout';
 import type { Mark, Point } from '../sheet';
@@ -36,20 +35,34 @@ export function leaderDrafts(paper: AxisPaper, label: Label, tip: Point, wish: L
     for (let y = local + 5; y < paper.reach + 50; y += 2.7) heights.push({ y, cost: 1 + (y - local) * 0.03 });
   (wish.dense ? DENSE_ANGLES : ANGLES).forEach((angle, i) => {
     const cot = 1 / Math.tan((angle * Math.PI) / 180);
-    for (const { y, cost } of heights)
+    for (const { y, cost } of heights) {
+      const rise = y + tip.y;
+      const run = rise * cot;
+      if (rise < 4.5 || Math.hypot(run, rise) > paper.rules.longestLeader) continue;
+      const price = wish.cost + cost + i * 0.15;
       for (const side of [-1, 1] as const) {
-        const rise = y + tip.y;
-        const run = rise * cot;
-        if (rise < 4.5 || Math.hypot(run, rise) > paper.rules.longestLeader) continue;
         const lean = wish.lean !== 0 && wish.lean !== side ? 0.8 : 0;
-        out.push({
-          form: 'leader',
-          cost: wish.cost + cost + i * 0.15 + lean,
-          build: () => leader(paper, label, tip, { x: tip.x + side * run, y: -y }, side),
-        });
+        out.push(new LeaderDraft(price + lean, paper, label, tip, { x: tip.x + side * run, y: -y }, side));
       }
+    }
   });
   return out;
+}
+
+/** Many are drafted and few drawn, so a draft holds its figures and no function of its own. */
+class LeaderDraft implements Draft {
+  readonly form = 'leader';
+  constructor(
+    readonly cost: number,
+    private readonly paper: AxisPaper,
+    private readonly label: Label,
+    private readonly tip: Point,
+    private readonly elbow: Point,
+    private readonly side: 1 | -1,
+  ) {}
+  build(): { strokes: Mark[]; writing: Written } {
+    return leader(this.paper, this.label, this.tip, this.elbow, this.side);
+  }
 }
 
 function leader(
@@ -58,7 +71,7 @@ function leader(
   tip: Point,
   elbow: Point,
   side: 1 | -1,
-): { strokes: Mark[]; writing: Mark[] } {
+): { strokes: Mark[]; writing: Written } {
   const iso = paper.style === 'iso';
   const shelf = iso ? label.width + 0.8 : ASME_SHELF;
   const end = { x: elbow.x + side * shelf, y: elbow.y };
@@ -67,12 +80,12 @@ function leader(
     { type: 'polyline', line: 'leader', points: [tip, elbow, end] },
     arrowHead(tip.x, tip.y, (tip.x - elbow.x) / length, (tip.y - elbow.y) / length, paper.style),
   ];
-  const writing = iso
-    ? placeLabel(label, side > 0 ? elbow.x + 0.6 : elbow.x - label.width - 0.6, elbow.y - 0.5 - label.down)
-    : placeLabel(
+  const writing: Written = iso
+    ? { label, x: side > 0 ? elbow.x + 0.6 : elbow.x - label.width - 0.6, y: elbow.y - 0.5 - label.down }
+    : {
         label,
-        side > 0 ? end.x + paper.rules.textGap : end.x - paper.rules.textGap - label.width,
-        elbow.y + (label.up - label.down) / 2,
-      );
+        x: side > 0 ? end.x + paper.rules.textGap : end.x - paper.rules.textGap - label.width,
+        y: elbow.y + (label.up - label.down) / 2,
+      };
   return { strokes, writing };
 }

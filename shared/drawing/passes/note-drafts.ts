@@ -3,7 +3,7 @@ import type { AxisPaper, ReadySize } from '../layout';
 import { reachWithin } from '../layout';
 import type { Point } from '../sheet';
 import { toPaper } from '../x-map';
-import type { Draft } from './candidate';
+import type { Drafts } from './candidate';
 import { leaderDrafts } from './leader-drafts';
 
 const CORNER_COST = 1.5;
@@ -51,9 +51,11 @@ function tipsOf(paper: AxisPaper, ready: ReadySize): { tips: Tip[]; lean: -1 | 0
 }
 
 /** Every leader of a note-like size. */
-export function noteDrafts(paper: AxisPaper, ready: ReadySize, dense: boolean): Draft[] {
+export function noteDrafts(paper: AxisPaper, ready: ReadySize, dense: boolean): Drafts {
   const { tips, lean } = tipsOf(paper, ready);
-  return tips.flatMap((tip) =>
-    leaderDrafts(paper, ready.label, tip, { cost: CORNER_COST + tip.cost, lean, dense }),
-  );
+  return {
+    first: tips.flatMap((tip) =>
+      leaderDrafts(paper, ready.label, tip, { cost: CORNER_COST + tip.cost, lean, dense }),
+    ),
+  };
 }

@@ -5,7 +5,7 @@ import { clashesWithItself, compareFootprints, strokeNearBox } from '../footprin
 import type { Footprint, PrintStroke } from '../footprint';
 import type { Candidate } from '../layout';
 import { realise } from './candidate';
-import type { Draft } from './candidate';
+import type { Draft, Drafts } from './candidate';
 
 const PRICE = {
   leaderOverOutline: 9,
@@ -68,12 +68,7 @@ export interface Work {
   overhang: number;
 }
 
-function weigh(
-  candidate: Candidate,
-  view: Footprint,
-  fixed: readonly Footprint[],
-  overhang: number,
-): Candidate {
+function weigh(candidate: Candidate, view: Footprint, fixed: readonly Footprint[], overhang: number): void {
   const verdict = againstView(candidate, view);
   const { bounds } = candidate.print;
   verdict.cost +=
@@ -83,7 +78,13 @@ function weigh(
     verdict.clashes += met.clashes;
     verdict.cost += met.cost;
   }
-  return { ...candidate, cost: candidate.cost + verdict.cost, clashes: candidate.clashes + verdict.clashes };
+  candidate.cost += verdict.cost;
+  candidate.clashes += verdict.clashes;
+}
+
+/** Cheapest first; sorting keeps equals in their order. */
+function byCost(drafts: readonly Draft[]): Draft[] {
+  return [...drafts].sort((a, b) => a.cost - b.cost);
 }
 
 /**
@@ -91,29 +92,29 @@ function weigh(
  * clashes, then price. `most` bounds the work; `overhang` is the price of a millimetre beyond the ends of the view.
  */
 export function weighDrafts(
-  drafts: readonly Draft[],
+  drafts: Drafts,
   view: Footprint,
   fixed: readonly Footprint[],
   work: Work,
 ): Candidate[] {
   const { enough, most, overhang } = work;
-  const order = drafts
-    .map((draft, i) => ({ draft, i }))
-    .sort((a, b) => a.draft.cost - b.draft.cost || a.i - b.i);
+  let order = byCost(drafts.first);
+  let later = drafts.later;
   const weighed: Candidate[] = [];
   let clean = 0;
-  for (const { draft } of order) {
-    if (clean >= enough || weighed.length >= most) break;
+  for (let i = 0; clean < enough && weighed.length < most; i++) {
+    if (later && (order[i]?.cost ?? Infinity) >= later.from) {
+      order = byCost([...order.slice(i), ...later.make()]);
+      later = undefined;
+      i = 0;
+    }
+    const draft = order[i];
+    if (!draft) break;
     const candidate = realise(draft);
     if (clashesWithItself(candidate.print)) continue;
-    const now = weigh(candidate, view, fixed, overhang);
-    if (now.clashes === 0) clean++;
-    weighed.push(now);
+    weigh(candidate, view, fixed, overhang);
+    if (candidate.clashes === 0) clean++;
+    weighed.push(candidate);
   }
-  return weighed
-    .map((candidate, i) => ({ candidate, i }))
-    .sort(
-      (a, b) => a.candidate.clashes - b.candidate.clashes || a.candidate.cost - b.candidate.cost || a.i - b.i,
-    )
-    .map(({ candidate }) => candidate);
+  return weighed.sort((a, b) => a.clashes - b.clashes || a.cost - b.cost);
 }

@@ -1,3 +1,4 @@
+import { boxesMeet } from '../../geometry/box';
 import { sideBySide } from '../../geometry/segment';
 import { finding, ofRole, strokesOfKind } from '../reading';
 import type { CheckRule } from '../reading';
@@ -11,7 +12,9 @@ export const extensionHugs: CheckRule = {
   check: (reading) => {
     const outlines = ofRole(reading, 'view').flatMap((v) => strokesOfKind(v, 'visible'));
     return ofRole(reading, 'dimension').flatMap((size) =>
-      strokesOfKind(size, 'extension').some((s) => outlines.some((o) => sideBySide(s, o, APART) > LENGTH))
+      strokesOfKind(size, 'extension').some((s) =>
+        outlines.some((o) => boxesMeet(s.box, o.box, APART) && sideBySide(s, o, APART) > LENGTH),
+      )
         ? [finding('extension-hugs', `An extension line of ${size.name} runs along an outline.`, [size.name])]
         : [],
     );

@@ -1,3 +1,4 @@
+import { boxesMeet } from '../../geometry/box';
 import { segmentsCross } from '../../geometry/segment';
 import { finding, ofRole, strokesOfKind } from '../reading';
 import type { CheckRule } from '../reading';
@@ -8,7 +9,9 @@ export const leaderOverOutline: CheckRule = {
   check: (reading) => {
     const outlines = ofRole(reading, 'view').flatMap((v) => strokesOfKind(v, 'visible'));
     return ofRole(reading, 'dimension').flatMap((size) =>
-      strokesOfKind(size, 'leader').some((s) => outlines.some((o) => segmentsCross(s, o, 0.3)))
+      strokesOfKind(size, 'leader').some((s) =>
+        outlines.some((o) => boxesMeet(s.box, o.box, 0) && segmentsCross(s, o, 0.3)),
+      )
         ? [finding('leader-over-outline', `The leader of ${size.name} crosses an outline.`, [size.name])]
         : [],
     );

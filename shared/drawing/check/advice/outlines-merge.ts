@@ -1,3 +1,4 @@
+import { boxesMeet } from '../../geometry/box';
 import { distanceToSegment, sideBySide } from '../../geometry/segment';
 import { rulesFor } from '../../rules';
 import { finding, ofRole, strokesOfKind } from '../reading';
@@ -30,7 +31,11 @@ export const outlinesMerge: CheckRule = {
         edges
           .slice(i + 1)
           .some(
-            (b) => !touch(a, b) && sideBySide(a, b, apart) > LENGTH && sideBySide(a, b, ON_ONE_ANOTHER) === 0,
+            (b) =>
+              boxesMeet(a.box, b.box, apart) &&
+              !touch(a, b) &&
+              sideBySide(a, b, apart) > LENGTH &&
+              sideBySide(a, b, ON_ONE_ANOTHER) === 0,
           ),
       );
       return merged

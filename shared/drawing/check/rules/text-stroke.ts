@@ -13,7 +13,9 @@ export const textStroke: CheckRule = {
       g.texts.flatMap((text) => {
         const [x0, y0, x1, y1] = text.box;
         const inner = growBox(text.box, -SLACK);
-        for (const other of groups)
+        for (const other of groups) {
+          const ink = other.inked;
+          if (!ink || ink[0] >= x1 || ink[2] <= x0 || ink[1] >= y1 || ink[3] <= y0) continue;
           for (const s of other.strokes) {
             if (s.box[0] >= x1 || s.box[2] <= x0 || s.box[1] >= y1 || s.box[3] <= y0) continue;
             if (other === g && s.line === 'symbol') continue;
@@ -25,6 +27,7 @@ export const textStroke: CheckRule = {
                 ]),
               ];
           }
+        }
         return [];
       }),
     ),
