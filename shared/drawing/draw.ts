@@ -1,6 +1,7 @@
 import type { Part } from '../part/part';
 import type { Problem } from '../problem';
 import type { Scheme } from '../scheme/scheme';
+import { INCH_SCALES, ISO_SCALES } from '../standards/scales';
 import { SHEET_SIZES } from '../standards/sheets';
 import { formatLength } from '../units/format';
 import { adviseSheet } from './check/advise-sheet';
@@ -176,19 +177,42 @@ function assemble(tried: Tried, part: Part, options: DrawingOptions, writing: Wr
   };
 }
 
-function nothingFits(part: Part, options: DrawingOptions, writing: Writing): Problem {
+/** Said when nothing that was asked for holds the part: its size, and what of the listed would. */
+function nothingFits(part: Part, scheme: Scheme, options: DrawingOptions, writing: Writing): Problem {
   const say = (mm: number): string =>
     `${formatLength(mm, { unit: writing.unit, style: writing.style })} ${writing.unit}`;
-  const size = `${say(part.length)} long and ${say(part.maxDiameter)} in diameter`;
-  const path = options.sheet !== 'auto' ? '--sheet' : options.scale !== 'auto' ? '--scale' : 'sheet';
-  const asked =
-    options.sheet === 'auto' && options.scale === 'auto'
-      ? 'any listed sheet at any listed scale'
-      : 'the sheet and scale asked for';
-  return {
-    path,
-    message: `The part is ${size} and does not fit ${asked}. Choose a larger sheet, a smaller scale, or let both be chosen.`,
+  const size = `The part is ${say(part.length)} long and ${say(part.maxDiameter)} in diameter`;
+  const pinnedSheet = options.sheet !== 'auto';
+  const pinnedScale = options.scale !== 'auto';
+  const path = pinnedScale ? 'scale' : 'sheet';
+  if (!pinnedSheet && !pinnedScale)
+    return { path, message: `${size} and does not fit any listed sheet at any listed scale.` };
+  const asked = [
+    ...(pinnedSheet ? [`sheet ${options.sheet}`] : []),
+    ...(pinnedScale ? [`the scale ${scaleName(options)}`] : []),
+  ].join(' at ');
+  const free = (changed: Partial<DrawingOptions>): string | null => {
+    const found = search(part, scheme, { ...options, ...changed }, writing);
+    return found?.place ? `${found.attempt.sheet} at ${found.attempt.scale.text}` : null;
   };
+  const ways = [
+    ...new Set([
+      ...(pinnedSheet && pinnedScale ? [free({ scale: 'auto' }), free({ sheet: 'auto' })] : []),
+      free({ sheet: 'auto', scale: 'auto' }),
+    ]),
+  ].filter((way) => way !== null);
+  const would =
+    ways.length > 0
+      ? `It would fit ${ways.join(', or ')}; choose that, or let both be chosen.`
+      : 'No listed sheet holds it.';
+  return { path, message: `${size} and does not fit ${asked}. ${would}` };
+}
+
+function scaleName(options: DrawingOptions): string {
+  const listed = [...ISO_SCALES, ...INCH_SCALES].find(
+    (s) => Math.abs(s.factor - Number(options.scale)) < 1e-9,
+  );
+  return listed?.text ?? String(options.scale);
 }
 
 /**
@@ -206,7 +230,7 @@ export function drawSheet(
     decimalSign: options.decimalSign ?? '.',
   };
   const best = search(part, scheme, options, writing);
-  if (!best || !best.place) return { problem: nothingFits(part, options, writing) };
+  if (!best || !best.place) return { problem: nothingFits(part, scheme, options, writing) };
   const sheet = assemble(best, part, options, writing);
   return { sheet, advice: adviseSheet(sheet, scheme, part) };
 }
