@@ -10,8 +10,9 @@ export function constant(from: number, to: number, radius: number): Generator {
 /** The piece over x; at a station between two pieces, the one on the asked side. Null outside. */
 export function pieceAt(generator: Generator, x: number, side: 'left' | 'right' = 'right'): Piece | null {
   const last = generator.length - 1;
-  for (const [index, piece] of generator.entries()) {
-    if (x < piece.from) return null;
+  for (let index = 0; index <= last; index += 1) {
+    const piece = generator[index];
+    if (!piece || x < piece.from) return null;
     const within = side === 'left' ? x <= piece.to : x < piece.to || index === last;
     if (within && x <= piece.to) return piece;
   }
@@ -45,9 +46,12 @@ function extreme(
   start: number,
 ): number {
   let found = start;
-  for (const piece of slice(generator, from, to)) {
-    found = pick(found, pieceRadius(piece, piece.from), pieceRadius(piece, piece.to));
-    if (piece.kind === 'arc' && piece.centreX > piece.from && piece.centreX < piece.to)
+  for (const piece of generator) {
+    if (piece.to <= from || piece.from >= to) continue;
+    const a = Math.max(piece.from, from);
+    const b = Math.min(piece.to, to);
+    found = pick(found, pieceRadius(piece, a), pieceRadius(piece, b));
+    if (piece.kind === 'arc' && piece.centreX > a && piece.centreX < b)
       found = pick(found, pieceRadius(piece, piece.centreX));
   }
   return Number.isFinite(found) ? found : 0;

@@ -1,4 +1,4 @@
-import { formatLength, formatNumber, roundTo } from '../units/format';
+import { formatLength, roundTo } from '../units/format';
 import type { DraftingStyle } from '../units/format';
 import type { LengthUnit } from '../units/parsed';
 import { MM_PER_INCH } from '../units/length';
@@ -24,14 +24,16 @@ function inchDecimals(mm: number): number {
 export function wordsIn(unit: LengthUnit = 'mm', style: DraftingStyle = 'iso'): Words {
   const fixed = unit === 'in' && style === 'asme';
   const length = (mm: number): string =>
-    formatLength(mm, { unit, style, ...(fixed ? { decimals: inchDecimals(mm) } : {}) });
+    unit === 'mm'
+      ? figure(mm)
+      : formatLength(mm, { unit, style, ...(fixed ? { decimals: inchDecimals(mm) } : {}) });
   const about = (mm: number): string => formatLength(mm, { unit, style, decimals: unit === 'in' ? 2 : 1 });
   return { unit, length, about, aboutWithUnit: (mm) => `${about(mm)} ${unit}` };
 }
 
 /** A plain figure that is no length: degrees, ratios, the size in a tool's own name. */
 export function figure(value: number): string {
-  return formatNumber(value, 3);
+  return String(roundTo(value, 3));
 }
 
 /** What a material is called: its id is never said. */

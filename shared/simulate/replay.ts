@@ -47,6 +47,15 @@ export function replay(route: Route, part: Part): Replay {
   const faults: Fault[] = [];
   const steps: Step[] = [];
   const views = { drawn: part, turned: mirrorPart(part) };
+  // A stage is the end of one step and the beginning of the next: it is turned round once.
+  const round = new Map<Body, Body>();
+  const turned = (body: Body): Body => {
+    const known = round.get(body);
+    if (known) return known;
+    const made = mirrorBody(body, part.length);
+    round.set(body, made);
+    return made;
+  };
   let stage = route.blank;
   checkStage(route, 0, stage, faults);
   for (const [index, operation] of route.operations.entries()) {
@@ -61,7 +70,7 @@ export function replay(route: Route, part: Part): Replay {
     if (!setup) return stop(`Set-up ${operation.setup} is not on the route.`);
     try {
       const after = operation.cut ? applyRemoval(stage, operation.cut) : stage;
-      steps.push(stepOf(operation, setup, views, stage, after, part.length));
+      steps.push(stepOf(operation, setup, views, stage, after, part.length, turned));
       stage = after;
     } catch (error) {
       return stop(
@@ -80,9 +89,10 @@ function stepOf(
   before: Body,
   after: Body,
   length: number,
+  turned: (body: Body) => Body,
 ): Step {
   const flipped = isFlipped(setup, length);
-  const turn = (body: Body): Body => (flipped ? mirrorBody(body, length) : body);
+  const turn = (body: Body): Body => (flipped ? turned(body) : body);
   const place = (x: number): number => (flipped ? length - x : x);
   const start = turn(before);
   const end = before === after ? start : turn(after);

@@ -1,5 +1,6 @@
 import type { Part } from '../part/part';
-import { differences } from '../part/same-metal';
+import { maxInner, minOuter } from '../part/envelope';
+import { differences, unequalSpans } from '../part/same-metal';
 import { constant } from '../part/generator';
 import type { Fault, Route } from '../route/route';
 import { judgeBalance } from './balance';
@@ -11,7 +12,7 @@ import { judgeHold } from './hold';
 import { judgeFeatures } from './named-features';
 import { judgeOrder } from './order';
 import { replay } from './replay';
-import type { Replay } from './replay';
+import type { Replay, Step } from './replay';
 import { judgeSupport } from './support';
 import { judgeTechnology } from './technology';
 import { judgeWayIn } from './way-in';
@@ -41,12 +42,28 @@ export function simulate(route: Route, part: Part): Fault[] {
   return faults.sort((a, b) => a.operation - b.operation);
 }
 
+/** True where the cut alone, laid on the finished part, would take nothing off it: no more has to be looked at. */
+function staysClear({ cut, part }: Step): boolean {
+  const { outer, inner, x0, x1 } = part.body;
+  switch (cut?.kind) {
+    case 'outer':
+      return unequalSpans(minOuter(outer, cut.envelope), outer, x0, x1).length === 0;
+    case 'bore':
+      return unequalSpans(maxInner(inner, cut.envelope), inner, x0, x1).length === 0;
+    case 'trim':
+    case 'sever':
+      return cut.from <= x0 && cut.to >= x1;
+    default:
+      return false;
+  }
+}
+
 /** The part is cut out of the blank and nothing else: below it at no operation, the same metal at the end. */
 function judgeEnd(replayed: Replay, part: Part): Fault[] {
   const faults: Fault[] = [];
   let lost = 0;
   for (const step of replayed.steps) {
-    if (step.changes.length === 0) continue;
+    if (step.changes.length === 0 || staysClear(step)) continue;
     const missing = missingMetal(step.after, step.part.body);
     const first = missing[0];
     if (first && missing.length > lost)

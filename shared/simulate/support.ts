@@ -64,7 +64,13 @@ function supportFaults(step: Step): Fault[] {
   const far = Math.min(before.x1, Math.max(...changes.map((change) => change.to)));
   if (far <= gripTo) return [];
   const number = operation.number;
-  const ratio = (far - gripTo) / smallestAcross(before, gripTo, operation.method === 'thread-single-point' ? withoutLead(before, far) : far);
+  const ratio =
+    (far - gripTo) /
+    smallestAcross(
+      before,
+      gripTo,
+      operation.method === 'thread-single-point' ? withoutLead(before, far) : far,
+    );
   const tail = standsInTail(step);
   const steadied =
     setup.support === 'steady' || (setup.support === 'outboard' && operation.method === 'mill-flat');
@@ -80,7 +86,12 @@ function supportFaults(step: Step): Fault[] {
     );
   }
   const depth = operation.depthOfCut;
-  if (light && operation.method !== 'face' && ratio > LIMITS.overhang.value * SLACK && depth > LIMITS.lightDepth.value + 1e-9)
+  if (
+    light &&
+    operation.method !== 'face' &&
+    ratio > LIMITS.overhang.value * SLACK &&
+    depth > LIMITS.lightDepth.value + 1e-9
+  )
     faults.push(
       fault(
         'support-overhang',

@@ -14,6 +14,17 @@ export interface ThreadBlank {
  * that raises the crest a little stays inside them. Without a table of limits a tenth of the pitch under.
  */
 export function threadBlank(thread: ThreadFeature): ThreadBlank {
+  const known = KNOWN.get(thread);
+  if (known) return known;
+  const blank = blankOf(thread);
+  KNOWN.set(thread, blank);
+  return blank;
+}
+
+/** Asked for in every candidate: a thread's limits are looked up once. */
+const KNOWN = new WeakMap<ThreadFeature, ThreadBlank>();
+
+function blankOf(thread: ThreadFeature): ThreadBlank {
   const parsed = parseThread(thread.designation);
   const limits = parsed.ok ? threadLimits(parsed.value) : null;
   const name = parsed.ok ? formatThread(parsed.value) : thread.designation;
