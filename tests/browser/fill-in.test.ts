@@ -9,7 +9,7 @@ afterAll(() => pages.close());
 
 it('a wrong size says its sentence at its field, keeps the last good sheet and is not sent', async () => {
   const { page } = await pages.signedIn(['designer']);
-  await startDrawing(page, 'Tapered handle', 'Windlass handle');
+  await startDrawing(page, pages.shop, 'tapered-handle', 'Windlass handle');
   const field = sizeField(page, 'Spigot diameter');
   const good = await page
     .locator('.sheet-host g[data-role="dimension"][data-id="spigotDiameter"]')
@@ -25,7 +25,7 @@ it('a wrong size says its sentence at its field, keeps the last good sheet and i
   ).toBe(good);
   await page.locator('.sheet-host g[data-id="spigotDiameter"].is-wrong').first().waitFor();
   await page.getByRole('heading', { name: 'Windlass handle' }).click();
-  await page.getByRole('button', { name: 'Send for checking: 1 size wrong' }).click();
+  await page.getByRole('button', { name: 'Send: 1 size wrong' }).click();
   await page.waitForFunction(() => document.activeElement?.id === 'field-spigotDiameter');
   await kept(page);
   await page.reload();
@@ -36,7 +36,7 @@ it('a wrong size says its sentence at its field, keeps the last good sheet and i
 
 it('a size and its field light up together, and a size is edited where it stands on the sheet', async () => {
   const { page } = await pages.signedIn(['designer']);
-  await startDrawing(page, 'Tapered handle', 'Windlass handle');
+  await startDrawing(page, pages.shop, 'tapered-handle', 'Windlass handle');
   await sizeField(page, 'Grip length').focus();
   await page.locator('.sheet-host g[data-role="dimension"][data-id="gripLength"].is-lit').waitFor();
   await page.locator('.sheet-host g[data-role="dimension"][data-id="taperLength"] text').first().hover();
@@ -57,7 +57,7 @@ it('a size and its field light up together, and a size is edited where it stands
 
 it('rows of a table are added, filled in, moved and removed', async () => {
   const { page } = await pages.signedIn(['designer']);
-  await startDrawing(page, 'Stepped shaft', 'Sluice-gear spindle');
+  await startDrawing(page, pages.shop, 'stepped-shaft', 'Sluice-gear spindle');
   const steps = page.locator('.step');
   const before = await steps.count();
   await page.getByRole('button', { name: 'Add a step' }).click();
@@ -65,6 +65,7 @@ it('rows of a table are added, filled in, moved and removed', async () => {
   await added.getByLabel('Diameter').fill('12');
   await added.getByLabel('Length').fill('17');
   await page.locator(`.sheet-host g[data-kind="length"][data-value="17"]`).waitFor();
+  await page.getByRole('button', { name: `Step ${before + 1}: move or remove` }).click();
   await page.getByRole('button', { name: `Move step ${before + 1} left` }).click();
   expect(
     await steps
@@ -77,9 +78,28 @@ it('rows of a table are added, filled in, moved and removed', async () => {
   await page.locator(`.sheet-host g[data-kind="length"][data-value="17"]`).waitFor({ state: 'detached' });
 });
 
+it('says what the sheet check looks at, keeps the note, and tells why the unit of typing stays', async () => {
+  const { page } = await pages.signedIn(['designer']);
+  await startDrawing(page, pages.shop, 'tapered-handle', 'Windlass handle');
+  await page.getByRole('button', { name: 'What was checked' }).click();
+  await page.getByText('no size is given twice').waitFor();
+  await page.getByLabel('Note').fill('Goes with the long crank.');
+  await page.getByRole('button', { name: /^A4, 1:1, mm/ }).click();
+  await page.getByRole('radio', { name: 'inches' }).check();
+  await page.locator('.sheet-host g[data-id="gripLength"][data-value="60"]').getByText('2.362').waitFor();
+  expect(await sizeField(page, 'Grip length').inputValue()).toBe('60');
+  await page.getByText(/^millimetres, as the drawing was started/).waitFor();
+  await kept(page);
+  await page.reload();
+  await sheetDrawn(page);
+  expect(await page.getByLabel('Note').inputValue()).toBe('Goes with the long crank.');
+  await page.goto(`/shops/${pages.shop.slug}/drawings?find=crank`);
+  await page.getByRole('link', { name: 'Windlass handle' }).waitFor();
+});
+
 it('holds what is typed without a connection, through a closed page, and keeps it when the connection is back', async () => {
   const { page } = await pages.signedIn(['designer']);
-  await startDrawing(page, 'Tapered handle', 'Windlass handle');
+  await startDrawing(page, pages.shop, 'tapered-handle', 'Windlass handle');
   await kept(page);
   const saves = '**/api/shops/**/revisions/*';
   await page.route(saves, (route) => (route.request().method() === 'PUT' ? route.abort() : route.continue()));
@@ -100,7 +120,7 @@ it('holds what is typed without a connection, through a closed page, and keeps i
 
 it('shows both values when somebody else saved meanwhile, and keeps what was chosen', async () => {
   const { page: first } = await pages.signedIn(['designer']);
-  await startDrawing(first, 'Tapered handle', 'Windlass handle');
+  await startDrawing(first, pages.shop, 'tapered-handle', 'Windlass handle');
   await kept(first);
   const address = new URL(first.url()).pathname;
   const { page: second, person } = await pages.signedIn(['designer']);
@@ -108,7 +128,6 @@ it('shows both values when somebody else saved meanwhile, and keeps what was cho
   await sheetDrawn(second);
   await sizeField(second, 'Grip length').fill('51');
   await kept(second);
-  await second.waitForTimeout(1_500);
   await sizeField(first, 'Taper length').fill('88');
   const dialog = first.getByRole('dialog', { name: 'Somebody else changed it' });
   await dialog.getByText(person.name).first().waitFor();
@@ -124,7 +143,7 @@ it('shows both values when somebody else saved meanwhile, and keeps what was cho
 
 it('comes back over the page when the session has ended, and loses nothing that was typed', async () => {
   const { page, person } = await pages.signedIn(['designer']);
-  await startDrawing(page, 'Tapered handle', 'Windlass handle');
+  await startDrawing(page, pages.shop, 'tapered-handle', 'Windlass handle');
   await kept(page);
   await page.context().clearCookies();
   await sizeField(page, 'Grip length').fill('58');

@@ -14,11 +14,10 @@ export interface Pages {
   shop: TestShop;
   /** Faults of the pages themselves: thrown errors, and what the content policy refused. */
   faults: string[];
-  /** A person of these roles, signed in, on the list of drawings; each in a browser of their own. */
-  signedIn: (
-    roles: readonly Role[],
-    size?: { width: number; height: number },
-  ) => Promise<{ page: Page; person: TestPerson }>;
+  /** A person of these roles, signed in, with a page in a browser of their own. */
+  signedIn: (roles: readonly Role[]) => Promise<{ page: Page; person: TestPerson }>;
+  /** Somebody who is not signed in yet. */
+  stranger: () => Promise<Page>;
   close: () => Promise<void>;
 }
 
@@ -28,24 +27,33 @@ export async function openPages(): Promise<Pages> {
   const browser: Browser = await launchBrowser();
   const shop = await makeShop(server);
   const faults: string[] = [];
+  const stranger = async () => {
+    const context = await browser.newContext({
+      viewport: { width: 1280, height: 832 },
+      baseURL: server.url,
+      reducedMotion: 'reduce',
+    });
+    const page = await context.newPage();
+    page.setDefaultTimeout(20_000);
+    page.on('pageerror', (error) => faults.push(error.message));
+    page.on('console', (message) => {
+      if (/content security policy/i.test(message.text())) faults.push(message.text());
+    });
+    return page;
+  };
   return {
     server,
     shop,
     faults,
-    async signedIn(roles, viewport = { width: 1280, height: 832 }) {
+    stranger,
+    async signedIn(roles) {
       const person = await makePerson(server, shop, roles);
-      const context = await browser.newContext({ viewport, baseURL: server.url });
-      const page = await context.newPage();
-      page.setDefaultTimeout(20_000);
-      page.on('pageerror', (error) => faults.push(error.message));
-      page.on('console', (message) => {
-        if (/content security policy/i.test(message.text())) faults.push(message.text());
+      const page = await stranger();
+      const answer = await page.request.post('/api/session', {
+        data: { mail: person.mail, password: person.password },
+        headers: { origin: server.url },
       });
-      await page.goto('/');
-      await page.getByLabel('Address').fill(person.mail);
-      await page.getByLabel('Password').fill(person.password);
-      await page.getByRole('button', { name: 'Sign in' }).click();
-      await page.waitForURL(`**/shops/${shop.slug}/drawings`);
+      if (!answer.ok()) throw new Error(`Not signed in: ${answer.status()} ${await answer.text()}`);
       return { page, person };
     },
     async close() {
@@ -55,10 +63,14 @@ export async function openPages(): Promise<Pages> {
   };
 }
 
-/** Starts a drawing of a family through the pages and waits until its sheet is there. */
-export async function startDrawing(page: Page, family: string, title: string): Promise<void> {
-  await page.getByRole('link', { name: 'Start a drawing' }).click();
-  await page.getByRole('radio', { name: new RegExp(family) }).check();
+/** Starts a drawing of a family on the page for it and waits until its sheet is there. */
+export async function startDrawing(
+  page: Page,
+  shop: { slug: string },
+  family: 'stepped-shaft' | 'tapered-handle',
+  title: string,
+): Promise<void> {
+  await page.goto(`/shops/${shop.slug}/drawings/new?family=${family}`);
   await page.getByLabel('Title, as the sheet names the part').fill(title);
   await page.getByRole('button', { name: 'Start it' }).click();
   await page.waitForURL('**/sizes');
