@@ -1,7 +1,8 @@
 import type { Part } from '../../part/part';
 import type { Build } from '../draft';
 import { RuledOut } from '../draft';
-import type { Views } from '../features';
+import { rowMax } from '../features';
+import type { View, Views } from '../features';
 import { trimFor } from '../methods/ends';
 import { partOff } from '../methods/part-off';
 import { LIMITS } from '../rules';
@@ -16,7 +17,12 @@ import { secondEnd } from './second-end';
 
 /** Builds the plan; where work stands out too far it is planned again with a centre. Throws RuledOut when it cannot be. */
 export function buildCandidate(part: Part, views: Views, shop: Shop, candidate: Candidate): Build {
-  let tails: Tails = { first: surelyNeedsCentre(views, candidate), second: false };
+  const view = candidate.first === 'right' ? views.right : views.left;
+  const other = candidate.first === 'right' ? views.left : views.right;
+  let tails: Tails = {
+    first: surelyNeedsCentre(view, candidate.meets, candidate),
+    second: candidate.secondEnd && surelyNeedsCentre(other, view.length - candidate.meets, candidate),
+  };
   for (let attempt = 0; ; attempt += 1) {
     const where = { end: 'first' as 'first' | 'second' };
     try {
@@ -30,12 +36,15 @@ export function buildCandidate(part: Part, views: Views, shop: Shop, candidate: 
   }
 }
 
-/** True where even the raw bar stands out too far for the turning that its free end gets: spares a vain attempt. */
-function surelyNeedsCentre(views: Views, candidate: Candidate): boolean {
-  const view = candidate.first === 'right' ? views.right : views.left;
+/**
+ * True where the free end, roughed down to its last length, stands out too far for the cut that brings it to size:
+ * spares a vain attempt.
+ */
+function surelyNeedsCentre(view: View, from: number, { stock }: Candidate): boolean {
   const last = view.rows[view.rows.length - 1];
-  if (!last || candidate.stock.asDrawn.includes(last.id)) return false;
-  return (view.length - candidate.meets) / (2 * candidate.stock.radius) > LIMITS.overhang.value;
+  if (!last || last.from < from - 1e-9 || stock.asDrawn.includes(last.id)) return false;
+  const roughed = Math.min(stock.radius, rowMax(last) + LIMITS.roughAllowance.value);
+  return (view.length - from) / (2 * roughed) > LIMITS.overhang.value;
 }
 
 function attemptPlan(
