@@ -2,6 +2,7 @@ import type { RevisionAnswer } from '../../shared/api/drawings';
 import type { Decision } from '../models/decision';
 import type { Revision } from '../models/revision';
 import { revisionAbilities } from '../policies/abilities';
+import { frozenBalloons } from '../services/frozen-balloons';
 import { namesOf } from '../services/people-names';
 import type { RevisionAt } from '../services/revision-at';
 import { revisionHistory } from '../services/revision-history';
@@ -39,6 +40,7 @@ export async function presentRevision(work: ShopWork, at: RevisionAt): Promise<R
     saved: { name: name(revision.savedBy), at: revision.savedAt.toISOString() },
     decisions: decisions.map((decision) => presentDecision(decision, name)),
     history: await revisionHistory(work, revision),
+    frozenBalloons: (await frozenBalloons(work, revision)) ?? null,
     result: await presentResult(work, revision),
   };
   return {

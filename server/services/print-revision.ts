@@ -7,7 +7,7 @@ import { recordAudit } from './record';
 import type { RevisionAt, RevisionPlace } from './revision-at';
 import type { ShopWork } from './shop-work';
 import { sheetSvg } from './sheet-svg';
-import { stampAcross, stateWord } from './state-words';
+import { stampAcross, stateWord } from '../../shared/state-words';
 
 /** The sheet of a revision as SVG, and a name for its file. @throws Refusal `not-drawn` while there is none. */
 export async function readSheetSvg(

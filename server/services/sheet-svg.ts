@@ -2,7 +2,7 @@ import type { Group, Sheet } from '../../shared/drawing/sheet';
 import { renderSvg } from '../../shared/render/svg';
 import type { Revision } from '../models/revision';
 import type { ShopWork } from './shop-work';
-import { stampAcross } from './state-words';
+import { stampAcross } from '../../shared/state-words';
 
 /**
  * The sheet as SVG: a released one is the very bytes that were kept at its release; one that no longer holds is drawn

@@ -2,7 +2,7 @@ import { namesOf } from './people-names';
 import { printedDate } from './printed-date';
 import { frozenBalloons } from './frozen-balloons';
 import { revisionHistory } from './revision-history';
-import { stampAcross, stateWord } from './state-words';
+import { stampAcross, stateWord } from '../../shared/state-words';
 import type { RevisionAt } from './revision-at';
 import type { ShopWork } from './shop-work';
 import type { Signed } from './work-out';

@@ -141,6 +141,8 @@ export const revisionAnswer = z.object({
     decisions: z.array(decision),
     /** Earlier released revisions for the sheet's revision table. */
     history: z.array(z.object({ letter: z.string(), change: z.string(), by: z.string(), date: z.string() })),
+    /** Balloons of the newest earlier release by size id, which unchanged sizes keep; null before any release. */
+    frozenBalloons: z.record(z.string(), z.number().int()).nullable(),
     /** Last good evaluation; null when a draft has never been good. Shown as stored unless the revision is a draft. */
     result: storedResult.nullable(),
   }),

@@ -1,13 +1,15 @@
 import type { RevisionAnswer } from '../../shared/api/drawings';
 import type { EngineRequest, EngineTitleBlock } from '../../shared/engine';
 import type { Register } from '../../shared/route/register';
+import { stampAcross, stateWord } from '../../shared/state-words';
 import type { Draft } from './draft';
 
 /** What the sheet prints of the record, as plain data: the same facts draw the same sheet. */
 export interface SheetFacts {
   template: string;
   titleBlock: EngineTitleBlock;
-  stamp: string;
+  stamp?: string;
+  frozenBalloons?: Readonly<Record<string, number>>;
 }
 
 export function sheetFacts(
@@ -21,11 +23,12 @@ export function sheetFacts(
       revision: revision.letter,
       drawn: { by: revision.saved.name, date: dateIn(revision.saved.at, shop.timeZone) },
       checked: null,
-      state: revision.trial ? 'TRIAL' : 'DRAFT',
+      state: stateWord(revision),
       owner: shop.name,
       revisions: revision.history,
     },
-    stamp: revision.trial ? 'TRIAL PIECE ONLY' : 'DRAFT: not for manufacture',
+    stamp: stampAcross(revision),
+    ...(revision.frozenBalloons ? { frozenBalloons: revision.frozenBalloons } : {}),
   };
 }
 

@@ -96,6 +96,9 @@ describe('a drawing from first value to withdrawal', () => {
       values: first.revision.values,
     });
     expect(next.revision.history.map((line) => line.letter)).toEqual(['A']);
+    // Unchanged sizes keep the balloons they were released with, on the page while typing too.
+    expect(first.revision.frozenBalloons).toBeNull();
+    expect(next.revision.frozenBalloons).toMatchObject({ 'steps.r1.length': expect.any(Number) });
     expectRefusal(await designer.post(`${path}/revisions`), 409, 'wrong-state');
 
     const second = await approve(checker, shop, await submit(designer, shop, next));

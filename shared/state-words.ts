@@ -1,4 +1,4 @@
-import type { RevisionState } from '../../shared/api/drawings';
+import type { RevisionState } from './api/drawings';
 
 interface Standing {
   state: RevisionState;
