@@ -44,10 +44,12 @@ export async function benchEngine(): Promise<void> {
     const request = exampleRequest(template, 'iso', 'mm');
     const { good } = runEngine(request);
     if (!good) throw new Error('no part');
-    const plan = () => planRoute(good.part, good.scheme, exampleRegister, { quantity: 1, material: good.part.material });
+    const plan = () =>
+      planRoute(good.part, good.scheme, exampleRegister, { quantity: 1, material: good.part.material });
     routes.push(await measure(`${template.id} plan`, RUNS, plan));
     const planned = plan().route;
-    if (planned) routes.push(await measure(`${template.id} simulate`, RUNS, () => simulate(planned, good.part)));
+    if (planned)
+      routes.push(await measure(`${template.id} simulate`, RUNS, () => simulate(planned, good.part)));
     routes.push(await measure(`${template.id} everything`, RUNS, () => runEngine(request)));
   }
   printTable(`Values to checked sheet to SVG (aim: median under ${AIM_SHEET} ms)`, sheets);

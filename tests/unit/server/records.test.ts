@@ -6,7 +6,7 @@ import { face } from '../../../server/pdf/faces';
 import { unpackWoff } from '../../../server/pdf/woff';
 import { canonicalJson, contentHash } from '../../../server/services/content-hash';
 import { revisionLetter } from '../../../server/services/revision-letter';
-import { stampAcross, stateWord } from '../../../server/services/state-words';
+import { stampAcross, stateWord } from '../../../shared/state-words';
 import { localDiskStore } from '../../../server/storage/local-disk';
 
 describe('letters of revisions', () => {
