@@ -30,7 +30,7 @@ const PRICE_WEIGHT = 1.2;
 /** No arrangement has been seen under this: an attempt that could not win even so is not laid out. */
 const LEAST_PRICE = 0.25;
 const EDGE = 4;
-const NEARLY = 50;
+const NEARLY = 28;
 const OVER_FOOT = 4;
 const OVER_REVISIONS = 2;
 

@@ -95,7 +95,7 @@ describe('what a sheet says', () => {
   it('refuses, in words, a sheet and scale that cannot hold the part', () => {
     expect(() =>
       sheetOf('tapered-handle', typed, { style: 'iso', unit: 'mm', options: { sheet: 'A4', scale: 5 } }),
-    ).toThrow(/does not fit the sheet and scale asked for/);
+    ).toThrow(/does not fit sheet A4 at the scale 5:1\. It would fit /);
   });
 
   it('notes a hexagon milled from the round, and that strength was not checked', () => {
