@@ -5,6 +5,7 @@ import type { CuttingOperation } from '../standards/speeds';
 import { drillFeed, feedPerTooth, partingFeed, tableFeed, turningFeed } from '../standards/feeds';
 import type { Build, DraftOperation } from './draft';
 import type { Method } from './route';
+import { LIMITS } from './rules';
 import { nearestFeed, nearestSpeed } from './shop';
 
 export interface Rates {
@@ -64,15 +65,17 @@ export function ratesFor(build: Build, operation: DraftOperation, maximumSpeed: 
     : spindleSpeed(speedForPower(build, material, figures, method), Math.max(figures.diameter, 1));
   const speed = nearestSpeed(
     speeds.length > 0 ? speeds : [Math.floor(wanted)],
-    Math.min(wanted, maximumSpeed, strong),
+    Math.min(wanted, maximumSpeed, strong, method === 'thread-die' ? DIE_SPEED : Infinity),
   );
   const { feed, feedPer } = feedFor(build, operation, material, speed, milling);
   const perMinute = feedPer === 'min' ? feed : feed * Math.max(speed, 1);
   const sides = milling ? (operation.faces ?? 1) : 1;
   // Every pass travels back as well, at the hand's or the machine's quick pace.
   const coarse =
-    method === 'taper-turn' ? Math.max(1, turningFeed('roughing', material.group) / Math.max(feed, 0.01)) : 1;
-  // On a taper all passes but the last are roughing.
+    method === 'taper-turn' || (method === 'face' && figures.depth > LIMITS.lightDepth.value)
+      ? Math.max(1, turningFeed('roughing', material.group) / Math.max(feed, 0.01))
+      : 1;
+  // On a taper, and on a face that is not cut lightly, all passes but the last are roughing.
   const cutting = (figures.travel / Math.max(perMinute, 1)) * ((figures.passes - 1) / coarse + 1) * sides;
   const back = 0.1 * figures.passes * sides;
   const minutes = cutting + back + operation.handling;
@@ -85,6 +88,9 @@ export function ratesFor(build: Build, operation: DraftOperation, maximumSpeed: 
     how: `${round(wantedSpeed)} m/min for ${material.name} (common practice) at Ø${round(figures.diameter)} wants ${Math.round(wanted)} rpm; nearest not above: ${speed}. ${round(figures.travel)} mm × ${figures.passes * sides} at ${round(perMinute)} mm/min, ${round(operation.handling)} min by hand.`,
   };
 }
+
+/** Fastest that a lathe turns under a die (rpm): it has to be stopped at the shoulder by hand. Common practice. */
+const DIE_SPEED = 60;
 
 /** Share of the motor's power that reaches the cut. Common practice. */
 const EFFICIENCY = 0.75;

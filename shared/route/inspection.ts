@@ -4,7 +4,7 @@ import type { Instrument, Register } from './register';
 import type { Method } from './route';
 import { alternative, held, short } from './shop';
 import type { Shop } from './shop';
-import { figure } from './words';
+import { figure, inSentence } from './words';
 
 /** Which kinds of size an operation brings to its figure. */
 const BROUGHT: Partial<Record<Method, readonly Size['kind'][]>> = {
@@ -120,16 +120,17 @@ export function instrumentFor({ register, words }: Shop, size: Size): Measuring 
     const first = reach[0];
     return first
       ? {
-          text: first.name.toLowerCase(),
+          text: inSentence(first.name),
           need: held('instrument', spec, first.id, `${first.name}, ${first.place}.`),
         }
       : missing(spec, words.length(width));
   }
   const coarse = [...reach].sort((a, b) => b.permissibleError - a.permissibleError);
-  const tenth = coarse.find((i) => i.permissibleError <= width / 10 + 1e-12);
+  const coarsest = coarse.find((i) => i.permissibleError <= width / 10 + 1e-12);
+  const tenth = coarsest && handiest(coarse, coarsest);
   if (tenth)
     return {
-      text: tenth.name.toLowerCase(),
+      text: inSentence(tenth.name),
       need: held(
         'instrument',
         spec,
@@ -141,7 +142,7 @@ export function instrumentFor({ register, words }: Shop, size: Size): Measuring 
   const allowed = coarse.find((i) => i.permissibleError <= width * ratio + 1e-12);
   if (allowed)
     return {
-      text: `${allowed.name.toLowerCase()}, twice`,
+      text: `${inSentence(allowed.name)}, twice`,
       need: held(
         'instrument',
         spec,
@@ -150,6 +151,19 @@ export function instrumentFor({ register, words }: Shop, size: Size): Measuring 
       ),
     };
   return missing(spec, words.length(width));
+}
+
+/** Of the same kind, the shortest that reads as closely: nobody takes the long caliper to a short size. */
+function handiest(reach: readonly Instrument[], found: Instrument): Instrument {
+  return reach.reduce(
+    (best, each) =>
+      each.kind === found.kind &&
+      each.maximum < best.maximum &&
+      each.permissibleError <= found.permissibleError
+        ? each
+        : best,
+    found,
+  );
 }
 
 function missing(spec: string, width: string): Measuring {
@@ -175,18 +189,18 @@ function threadGauge(register: Register, size: Size, spec: string): Measuring {
   );
   if (gauge)
     return {
-      text: gauge.name.toLowerCase(),
+      text: inSentence(gauge.name),
       need: held('instrument', spec, gauge.id, `${gauge.name}, ${gauge.place}.`),
     };
   const wires = register.instruments.find((i) => i.kind === 'thread-wires');
   if (wires)
     return {
-      text: `${wires.name.toLowerCase()}, or the mate`,
+      text: `${inSentence(wires.name)}, or the mate`,
       need: held(
         'instrument',
         spec,
         wires.id,
-        `No ring gauge for it: over ${wires.name.toLowerCase()} with a micrometer, and in the mate.`,
+        `No ring gauge for it: over ${inSentence(wires.name)} with a micrometer, and in the mate.`,
       ),
     };
   return {

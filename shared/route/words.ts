@@ -36,6 +36,11 @@ export function figure(value: number): string {
   return String(roundTo(value, 3));
 }
 
+/** A name inside a sentence: its first letter small, and the rest, sizes of threads too, as it is written. */
+export function inSentence(name: string): string {
+  return name.charAt(0).toLowerCase() + name.slice(1);
+}
+
 /** What a material is called: its id is never said. */
 export function materialName(id: string): string {
   return materialById(id)?.name ?? 'a material that is not in the table';

@@ -127,7 +127,9 @@ function judgeThreadBlank(
     const wanted = radiusAt(part.body.outer, beside);
     if (wanted < thread.major / 2 - 1e-6 && radiusAt(before.outer, beside) > wanted + 1e-6)
       say('relief-before-thread', `The smaller diameter beside the thread at ${mm(x)} is not there yet.`);
-    const stated = (operation.runOut ?? 0) >= LIMITS.threadExit.value * thread.pitch - 1e-9;
+    // A run-out said on the card is room to draw the tool out, and no more than the thread itself.
+    const said = operation.runOut ?? 0;
+    const stated = said >= LIMITS.threadExit.value * thread.pitch - 1e-9 && said < thread.to - thread.from;
     if (
       side === 'left' &&
       operation.method === 'thread-single-point' &&

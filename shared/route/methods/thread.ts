@@ -9,7 +9,7 @@ import { alternative, dieFor, dieHolderFor, gearboxCuts, held, short, threadingT
 import { depthFor, keyOf, passesFor, stageOf } from '../session';
 import type { Session } from '../session';
 import { rowsWorked } from './turn';
-import { figure, leadText } from '../words';
+import { figure, leadText, inSentence } from '../words';
 
 /** Threads on rows worked here, nearest the free end first: by die where the shop cuts the size so, else single point. */
 export function cutThreads(session: Session): void {
@@ -85,7 +85,7 @@ function cutThread(session: Session, row: Row, thread: ThreadFeature): void {
       ...common,
       method: 'thread-die',
       title: `thread ${thread.designation} by die`,
-      tool: `${die.name}, ${holder.name.toLowerCase()}`,
+      tool: `${die.name}, ${inSentence(holder.name)}`,
       toolItem: die.id,
       toolFigures: die.figures,
       figures: { diameter: thread.major, travel: thread.to - thread.from, depth, passes: 1 },

@@ -162,7 +162,7 @@ export function finishRows(session: Session): void {
       stops: [{ toX: from }],
       reasons: blank ? ['die-blank-under', 'blank-before-thread'] : ['rough-before-finish'],
       ...(blank ? { blank } : {}),
-      check: '',
+      check: 'caliper',
       needs: [tool.need],
     });
     session.done.set(`row.${row.id}`, key);
@@ -235,7 +235,7 @@ function cutBehindCollar(session: Session, row: Row, radius: number, method: 'ro
     stops: [{ toX: to }, { toX: from }],
     reasons: ['way-in'],
     ...(blank ? { blank } : {}),
-    check: '',
+    check: 'caliper',
     needs: narrow ? [blade.need] : [blade.need, tool.need],
     handling: 1.5,
   });

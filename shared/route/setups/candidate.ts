@@ -1,6 +1,7 @@
 import type { Lathe } from '../register';
 import type { StockOption } from '../stock';
 import type { Words } from '../words';
+import { inSentence } from '../words';
 
 export type CandidateKind = 'bar' | 'stick' | 'blank';
 
@@ -32,7 +33,9 @@ const KIND_TEXT: Record<CandidateKind, string> = {
 
 export function candidateText(candidate: Candidate, words: Words): string {
   const turned = candidate.secondEnd
-    ? `, turned round at ${words.length(candidate.meets)} from the far end`
+    ? candidate.meets > 1e-9
+      ? `, turned round at ${words.length(candidate.meets)} from the far end`
+      : ', turned round for its far face'
     : ', in one holding';
-  return `${candidate.stock.text} ${KIND_TEXT[candidate.kind]}, ${candidate.first} end first${turned}, ${candidate.lathe.name.toLowerCase()}`;
+  return `${candidate.stock.text} ${KIND_TEXT[candidate.kind]}, ${candidate.first} end first${turned}, ${inSentence(candidate.lathe.name)}`;
 }

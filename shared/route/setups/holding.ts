@@ -8,6 +8,7 @@ import type { SetUp } from '../route';
 import type { Session } from '../session';
 import { holdsFor, short } from '../shop';
 import type { Hold, Indexing } from '../shop';
+import { inSentence } from '../words';
 
 export interface SetUpWish {
   view: View;
@@ -132,7 +133,7 @@ export function latheHold(build: Build, diameter: number, finished: boolean, onF
     holdsFor(build.register, build.lathe, diameter, finished).find(
       (h) => !onFlats || (h.kind === 'chuck' && 'kind' in h.item && h.item.kind === 'three-jaw'),
     ) ?? null;
-  const spec = `hold ${onFlats ? 'the flats of ' : ''}Ø${build.words.length(diameter)} on ${build.lathe.name.toLowerCase()}`;
+  const spec = `hold ${onFlats ? 'the flats of ' : ''}Ø${build.words.length(diameter)} on ${inSentence(build.lathe.name)}`;
   if (!hold) {
     build.planNeeds.push(
       short('hold', spec, 'No chuck or collet of this lathe closes on it.', [
@@ -178,7 +179,7 @@ export function millSetUp(
     datum: 'Lengths are from the faced end.',
     minutes: indexing.minutes + (outboard ? 3 : 0),
     turned: false,
-    title: `grip in ${indexing.name.toLowerCase()}`,
+    title: `grip in ${inSentence(indexing.name)}`,
     reasons: ['stick-for-milling', indexing.rule],
   };
 }

@@ -85,6 +85,85 @@ describe('single rules', () => {
     ).not.toContain('thread-run-out');
   });
 
+  it('a run-out that the card states is room enough: a pitch at least, and less than the thread', () => {
+    const made = handleRoute();
+    const [thread] = made.part.body.treatments;
+    if (thread?.kind !== 'thread') throw new Error('no thread');
+    const cut = (runOut: number): string[] =>
+      broken(made, change('thread-die', { method: 'thread-single-point', speed: 60, runOut }));
+    expect(cut(thread.pitch)).not.toContain('thread-run-out');
+    expect(cut(2 * thread.pitch)).not.toContain('thread-run-out');
+    expect(cut(0.9 * thread.pitch)).toContain('thread-run-out');
+    expect(cut(thread.to - thread.from)).toContain('thread-run-out');
+  });
+
+  it('three jaws do not sit on flats whose number they do not divide', () => {
+    const square: Rewrite = (route) => ({
+      ...hold('B', { gripFrom: 30, gripTo: 60, heldOn: 'flats' })(route),
+      operations: route.operations.map((each) =>
+        each.method === 'mill-flat' && each.cut?.kind === 'cut' && each.cut.cut.kind === 'flats'
+          ? { ...each, faces: 4, cut: { ...each.cut, cut: { ...each.cut.cut, count: 4 } } }
+          : each,
+      ),
+    });
+    expect(broken(handleRoute(), square)).toContain('grip-plain');
+  });
+
+  it('a groove in what is parted off is the work of no feature; one in the part is of some', () => {
+    const grooved =
+      (from: number, to: number): Rewrite =>
+      (route) => {
+        const at = route.operations.findIndex((each) => each.method === 'part-off');
+        const groove = {
+          ...(route.operations[at] as Operation),
+          method: 'groove' as const,
+          features: [],
+          cut: { kind: 'outer' as const, envelope: constant(from, to, 12) },
+          depthOfCut: 1,
+          passes: 2,
+          stops: [],
+          after: [],
+        };
+        const operations = route.operations.map((each) => ({ ...each, after: [] as Operation['after'] }));
+        operations.splice(at, 0, groove);
+        return { operations };
+      };
+    expect(broken(shaftRoute(), grooved(-3.5, -0.5))).not.toContain('named-features');
+    expect(broken(shaftRoute(), grooved(-3.5, 1))).toEqual(
+      expect.arrayContaining(['named-features', 'not-below-part']),
+    );
+  });
+
+  it('facing far out is judged by how much the work bends, not by how far it stands out', () => {
+    const faced = (depthOfCut: number): string[] =>
+      broken(handleRoute(), (route) => ({
+        operations: route.operations.map((each) =>
+          each.setup === 'B' && each.method === 'face' ? { ...each, depthOfCut } : each,
+        ),
+      }));
+    expect(faced(0.25).filter((rule) => rule.startsWith('support'))).toEqual([]);
+    expect(faced(8)).toContain('support-bend');
+    expect(faced(8)).not.toContain('support-overhang');
+  });
+
+  it('the chamfer at the tip of a thread does not count as its thinnest place', () => {
+    // Jaws at 24: the thread stands out 36, three times its own 12, though 4.2 times the small end of its chamfer.
+    const overhung = (gripTo: number): boolean => {
+      const made = shaftRoute();
+      const route = {
+        ...made.route,
+        ...hold('A', { gripFrom: gripTo - 30, gripTo, support: undefined })(made.route),
+        ...change('thread-die', { method: 'thread-single-point', speed: 60 })(made.route),
+      };
+      const thread = route.operations.find((each) => each.method === 'thread-single-point');
+      return simulate(restate(route, made.part), made.part).some(
+        (fault) => fault.rule === 'support-overhang' && fault.operation === thread?.number,
+      );
+    };
+    expect(overhung(24)).toBe(false);
+    expect(overhung(20)).toBe(true);
+  });
+
   it('a heavy cut on slender work bends it', () => {
     expect(broken(handleRoute(), change('form-turn', { depthOfCut: 5 }))).toEqual(
       expect.arrayContaining(['support-overhang', 'support-bend']),
