@@ -44,6 +44,19 @@ export function planNeeds(
           ),
     );
   }
+  for (const machine of [
+    lathe,
+    ...(build.setups.some((s) => s.machine === build.mill?.id) ? [build.mill] : []),
+  ])
+    if (machine && machine.speeds.length === 0)
+      needs.push(
+        short(
+          'machine',
+          `the speeds of ${machine.name}`,
+          'The register gives it no speeds, so none can be chosen.',
+          ['write its speeds into the register'],
+        ),
+      );
   const between = length;
   needs.push(
     diameter <= lathe.swingOverSlide

@@ -291,8 +291,9 @@ export function nearestSpeed(speeds: readonly number[], wanted: number): number 
   return found;
 }
 
+/** The machine's nearest feed not above the wanted; the wanted itself where the register gives it none. */
 export function nearestFeed(feeds: readonly number[], wanted: number): number {
-  return nearestSpeed(feeds, wanted);
+  return feeds.length === 0 ? wanted : nearestSpeed(feeds, wanted);
 }
 
 export function firstMill(register: Register): Mill | null {

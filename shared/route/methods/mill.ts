@@ -89,6 +89,7 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
   const turned = session.done.get('turn') ?? session.done.get('face');
   if (turned) after.push({ key: turned, rule: 'turn-before-mill' });
   const machine = build.mill;
+  const travel = to - span.from;
   addOperation(build, view, {
     key,
     method: 'mill-flat',
@@ -125,17 +126,24 @@ export function millFlats(session: Session, flats: FlatsFeature, indexing: Index
     needs: [
       tool.need,
       indexing.need,
-      machine
-        ? held(
+      machine && travel > machine.travelX
+        ? short(
             'machine',
-            `mill, travel ${words.about(to - span.from)}`,
-            machine.id,
-            `${machine.name}, ${machine.place}.`,
+            `mill, travel ${words.about(travel)}`,
+            `${machine.name} travels ${words.length(machine.travelX)}.`,
+            ['send the piece out for its flats'],
           )
-        : short('machine', 'a mill for the flats', 'No mill in the register.', [
-            'file the flats to a gauge, slow and less true',
-            'send the piece out for its flats',
-          ]),
+        : machine
+          ? held(
+              'machine',
+              `mill, travel ${words.about(travel)}`,
+              machine.id,
+              `${machine.name}, ${machine.place}.`,
+            )
+          : short('machine', 'a mill for the flats', 'No mill in the register.', [
+              'file the flats to a gauge, slow and less true',
+              'send the piece out for its flats',
+            ]),
     ],
     handling: indexing.minutesPerFace * flats.count,
   });

@@ -77,6 +77,61 @@ describe('a register that lacks something', () => {
     expect(capacity.needs.find((need) => need.kind === 'bar')?.why).toMatch(/no round bar of this material/);
   });
 
+  it('nothing at all: no route, and why', () => {
+    const bare = without({ lathes: [], mills: [], saws: [], chucks: [], colletSets: [], colletBlocks: [], dividingHeads: [], tools: [], instruments: [], bars: [] }); // prettier-ignore
+    const { capacity } = plannedHandle(HEX, bare, true).answer;
+    expect(capacity.verdict).toBe('cannot');
+    expect(capacity.needs.map((need) => need.why)).toEqual(['The register has no lathe.']);
+  });
+
+  it('a lathe alone: every tool, hold, bar and instrument is a short of its own', () => {
+    const bare = without({ mills: [], saws: [], chucks: [], colletSets: [], colletBlocks: [], dividingHeads: [], tools: [], instruments: [], bars: [] }); // prettier-ignore
+    const { capacity } = plannedHandle(HEX, bare);
+    const lacking = capacity.needs.filter((need) => need.state === 'short');
+    expect(new Set(lacking.map((need) => need.kind))).toEqual(
+      new Set(['bar', 'hold', 'tool', 'setting', 'instrument', 'machine']),
+    );
+  });
+
+  it('no instruments: each size is a short that says how fine it must be read', () => {
+    const { capacity } = plannedHandle(HEX, without({ instruments: [] }));
+    const lacking = capacity.needs.filter((need) => need.kind === 'instrument' && need.state === 'short');
+    expect(lacking.length).toBeGreaterThan(5);
+    expect(lacking.map((need) => need.why).join(' ')).toMatch(/tenth of 0\.043/);
+  });
+
+  it('a part longer than every bed and every bar: both are said', () => {
+    const rows = [
+      { diameter: 90, length: 1200 },
+      { diameter: 80, length: 1200 },
+    ];
+    const { answer } = plannedHandle({ rows }, without({ bars: exampleRegister.bars.map((bar) => ({ ...bar, length: 1000 })) }), true); // prettier-ignore
+    expect(answer.capacity.verdict).toBe('cannot');
+    const why = answer.capacity.needs.filter((need) => need.state === 'short').map((need) => need.why);
+    expect(why.join(' ')).toMatch(/takes 1000/);
+    expect(why.join(' ')).toMatch(/The rack gives 0 of 1; the longest bar is 1000/);
+  });
+
+  it('machines with no speeds written down: a short each, and figures that are still figures', () => {
+    const { capacity, route } = plannedHandle(
+      HEX,
+      without({
+        lathes: exampleRegister.lathes.map((lathe) => ({ ...lathe, speeds: [], feeds: [] })),
+        mills: exampleRegister.mills.map((mill) => ({ ...mill, speeds: [], feedsPerMin: [] })),
+      }),
+    );
+    const short = capacity.needs.filter((need) => need.state === 'short').map((need) => need.need);
+    expect(short).toEqual(['the speeds of Centre lathe, long bed', 'the speeds of Turret mill']);
+    expect(route.operations.every((o) => Number.isFinite(o.minutes) && o.minutes < 600)).toBe(true);
+  });
+
+  it('a mill whose table is shorter than the flats', () => {
+    const mills = exampleRegister.mills.map((mill) => ({ ...mill, travelX: 40 }));
+    const { capacity } = plannedHandle(HEX, without({ mills }));
+    const short = capacity.needs.filter((need) => need.state === 'short');
+    expect(short.map((need) => need.why)).toEqual(['Turret mill travels 40.']);
+  });
+
   it('no die, thread with room to run out: single point, as another way', () => {
     const rows = [
       { diameter: 20, length: 40 },
