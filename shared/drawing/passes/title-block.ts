@@ -21,8 +21,8 @@ const ROW = 10;
 const ROWS = 4;
 const PAD = 1.2;
 /** Baselines of a label and of one line under it; of the label and the first of several lines; and what several need. */
-const ONE_LINE = { label: 3.2, first: 8.8 } as const;
-const MORE_LINES = { label: 3.3, first: 7.55, under: 1 } as const;
+const ONE_LINE = { label: 3.5, first: 8.8 } as const;
+const MORE_LINES = { label: 3.4, first: 7.75, under: 1 } as const;
 const LINE_PITCH = 4.2;
 const SMALL = fontSizeFor(2.5);
 /** Title and number: as large as they fit. */
