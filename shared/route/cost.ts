@@ -25,10 +25,11 @@ export function costOf(asked: CostAsked): NonNullable<Route['cost']> {
   const machineRun = operations.reduce((sum, o) => sum + (o.minutes * (rates.get(o.machine) ?? 0)) / 60, 0);
   const rate =
     rates.get(operations.find((o) => rates.has(o.machine) && o.method !== 'saw')?.machine ?? '') ?? 0;
-  const setup = (asked.setupMinutes * (labourPerHour + rate)) / 60;
-  const run = (asked.runMinutes * labourPerHour) / 60 + machineRun;
+  // Rounded before they are added, so that the sums a reader opens come out to the penny.
+  const setup = cents((asked.setupMinutes * (labourPerHour + rate)) / 60);
+  const run = cents((asked.runMinutes * labourPerHour) / 60 + machineRun);
   const perMetre = asked.bar?.costPerMetre ?? 0;
-  const material = (Math.max(0, asked.used - asked.goesBack) * perMetre) / 1000;
+  const material = cents((Math.max(0, asked.used - asked.goesBack) * perMetre) / 1000);
   const each = run + material;
   return {
     one: cents(setup + each),

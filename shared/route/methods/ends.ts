@@ -36,8 +36,8 @@ export function faceEnd(session: Session, to: number, finishes: boolean): void {
     key,
     method: 'face',
     title: trimming
-      ? `face off ${session.build.words.length(metal)} with the centre hole`
-      : `face, ${session.build.words.length(metal)} off`,
+      ? `face off ${session.build.words.about(metal)} with the centre hole`
+      : `face, ${session.build.words.about(metal)} off`,
     features: [session.view.flipped ? 'left-face' : 'right-face'],
     tool: tool.name,
     toolItem: tool.item?.id,

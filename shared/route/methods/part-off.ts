@@ -83,7 +83,7 @@ export function partOff(session: Session, cutAt: number, width: number, finishes
     method: 'part-off',
     title: finishes
       ? 'part off to length'
-      : `part off, ${build.words.length(LIMITS.partedAllowance.value)} long`,
+      : `part off, ${build.words.about(LIMITS.partedAllowance.value)} long`,
     features: finishes ? [view.flipped ? 'right-face' : 'left-face'] : [],
     tool: blade.pick.name,
     toolItem: blade.pick.item?.id,

@@ -125,6 +125,17 @@ describe('a register that lacks something', () => {
     expect(route.operations.every((o) => Number.isFinite(o.minutes) && o.minutes < 600)).toBe(true);
   });
 
+  it('costs what its opened sums come to, to the penny', () => {
+    for (const quantity of [1, 7]) {
+      const { cost } = plannedHandle({ ...HEX, quantity }).route;
+      const [setup, run, bar] = cost?.sums.map((sum) => Math.round(sum.amount * 100)) ?? [];
+      expect(Math.round((cost?.each ?? 0) * 100)).toBe((run ?? NaN) + (bar ?? NaN));
+      expect(Math.round((cost?.total ?? 0) * 100)).toBe(
+        (setup ?? NaN) + quantity * ((run ?? NaN) + (bar ?? NaN)),
+      );
+    }
+  });
+
   it('a mill whose table is shorter than the flats', () => {
     const mills = exampleRegister.mills.map((mill) => ({ ...mill, travelX: 40 }));
     const { capacity } = plannedHandle(HEX, without({ mills }));
