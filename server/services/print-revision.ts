@@ -49,6 +49,7 @@ async function pdfOf(work: ShopWork, at: RevisionAt, card: boolean): Promise<Uin
       title: revision.title,
       state: stateText(work, at),
       stamp: stampAcross(revision),
+      entryUnit: revision.entryUnit,
       format: {
         unit: revision.settings.unit,
         style: revision.settings.style,

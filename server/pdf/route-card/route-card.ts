@@ -26,6 +26,8 @@ export interface CardFacts {
   /** Words across a card that must not be worked from. */
   stamp: string | undefined;
   format: LengthFormat;
+  /** What the sentences of the route are written in: the unit the drawing was typed in. */
+  entryUnit: LengthFormat['unit'];
   register: Register;
 }
 
@@ -33,7 +35,7 @@ const GAP = 2;
 
 /** The route as cards on landscape A4, one page after another, drawn with the marks every sheet is made of. */
 export function routeCard(route: Route, scheme: Scheme, facts: CardFacts): Sheet[] {
-  const caution = standingCaution(facts.format);
+  const caution = standingCaution(facts);
   const bottom = PAGE.bottom - caution.height;
   const head: HeadFacts = { ...facts, bar: barText(route, facts.format) };
   const first = titleStrip(head, '').height + GAP;
@@ -86,7 +88,7 @@ function cardsOf(route: Route, scheme: Scheme, facts: CardFacts): SetUpCard[] {
     const row = (operation: Operation): Row => {
       const own = operation.cautions.filter((caution) => !said.has(caution));
       own.forEach((caution) => said.add(caution));
-      return operationRow(columns, cells(operation), own);
+      return operationRow(columns, cells(operation), operation.notes ?? [], own);
     };
     const operations = route.operations.filter((operation) => operation.setup === setup.id);
     const minutes = operations.reduce((sum, operation) => sum + operation.minutes, 0);
@@ -114,13 +116,20 @@ function barText(route: Route, format: LengthFormat): string {
   return `${formatLength(size, format)} ${shape}, ${formatLength(route.blankLength, { ...format, decimals: 1 })} long`;
 }
 
-/** The route words its operations in millimetres, whatever the sheet is dimensioned in. */
-const MIXED_UNITS = 'Columns and bar are in inches; figures within sentences are in millimetres.';
+const UNIT_NAMES = { mm: 'millimetres', in: 'inches' } as const;
+
+/** Said only where the sheet shows another unit than the drawing was typed in. */
+function mixedUnits({ format, entryUnit }: CardFacts): string[] {
+  if (format.unit === entryUnit) return [];
+  return [
+    `Columns and bar are in ${UNIT_NAMES[format.unit]}; figures within sentences are in ${UNIT_NAMES[entryUnit]}.`,
+  ];
+}
 
 /** What stands on every card, at its foot. */
-function standingCaution({ unit }: LengthFormat): Block {
+function standingCaution(facts: CardFacts): Block {
   const room = Math.floor((PAGE.right - PAGE.left) / GLYPH);
-  const lines = wrap([...STANDING_CAUTIONS, ...(unit === 'in' ? [MIXED_UNITS] : [])].join(' '), room);
+  const lines = wrap([...STANDING_CAUTIONS, ...mixedUnits(facts)].join(' '), room);
   return {
     height: lines.length * LINE,
     marks: (y) => lines.flatMap((text, line) => lettering(PAGE.left, y + BASELINE + line * LINE, text)),

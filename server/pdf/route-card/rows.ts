@@ -14,8 +14,13 @@ export interface Row {
 
 const PADDING = 0.7;
 
-/** One operation over the ten columns, with its cautions under it. */
-export function operationRow(columns: readonly Column[], cells: Cells, cautions: readonly string[]): Row {
+/** One operation over the ten columns, with its instructions and then its cautions under it. */
+export function operationRow(
+  columns: readonly Column[],
+  cells: Cells,
+  notes: readonly string[],
+  cautions: readonly string[],
+): Row {
   const starts = columnStarts(columns);
   const texts = cellLines(cells, columns);
   const placed = columns.map((column, index) => ({
@@ -23,9 +28,10 @@ export function operationRow(columns: readonly Column[], cells: Cells, cautions:
     start: starts[index] ?? TABLE_LEFT,
     lines: texts.get(column.id) ?? [],
   }));
+  const told = wrap(notes.join(' '), Math.floor((PAGE.right - CAUTION_LEFT) / GLYPH));
   const said = cautionLines(cautions);
   const lines = Math.max(1, ...placed.map((one) => one.lines.length));
-  const height = (lines + said.length) * LINE + 2 * PADDING;
+  const height = (lines + told.length + said.length) * LINE + 2 * PADDING;
   return {
     height,
     marks: (y) => [
@@ -39,7 +45,10 @@ export function operationRow(columns: readonly Column[], cells: Cells, cautions:
         );
       }),
       tickBox(PAGE.right - 4.5, y + PADDING + BASELINE),
-      ...cautionMarks(said, y + PADDING + lines * LINE),
+      ...told.flatMap((text, line) =>
+        lettering(CAUTION_LEFT, y + PADDING + BASELINE + (lines + line) * LINE, text),
+      ),
+      ...cautionMarks(said, y + PADDING + (lines + told.length) * LINE),
       rule(TABLE_LEFT, y + height, PAGE.right, y + height),
     ],
   };

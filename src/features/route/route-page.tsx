@@ -15,11 +15,13 @@ import { cardsOf } from '../../revision/set-up-stages';
 import { SetUpCard } from './set-up-card';
 import { VerdictBox } from './verdict-box';
 
-/** The words of operations, needs and tools are in millimetres whatever the sheet shows; somebody who reads inches must know. */
-const UNIT_WORDS = {
-  mm: 'All figures in millimetres.',
-  in: 'Stops, targets and feeds in inches; figures in the words of operations, tools and cautions in millimetres.',
-} as const;
+const UNIT_NAMES = { mm: 'millimetres', in: 'inches' } as const;
+
+/** Columns follow the sheet's unit, sentences the unit of typing; where these differ somebody must be told. */
+function unitWords(shown: 'mm' | 'in', typed: 'mm' | 'in'): string {
+  if (shown === typed) return `All figures in ${UNIT_NAMES[shown]}.`;
+  return `Stops, targets and feeds in ${UNIT_NAMES[shown]}; figures within sentences in ${UNIT_NAMES[typed]}.`;
+}
 
 /** The route as a works route card: read downwards, card by card. */
 export function RoutePage() {
@@ -38,7 +40,7 @@ export function RoutePage() {
       <div className="route-bar">
         <p className="aside">
           {route
-            ? `${answer.revision.drawing.number} rev ${answer.revision.letter}. ${UNIT_WORDS[settings.unit]}`
+            ? `${answer.revision.drawing.number} rev ${answer.revision.letter}. ${unitWords(settings.unit, draft.entryUnit)}`
             : ''}
         </p>
         <Button disabled={!route} onClick={() => window.print()}>

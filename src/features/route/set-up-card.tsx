@@ -87,6 +87,12 @@ export function SetUpCard({ card, number, sizes, format, machine }: SetUpCardPro
                 <span className="paper-square" aria-hidden="true" />
               </td>
             </tr>
+            {(operation.notes ?? []).length > 0 && (
+              <tr className="op-caution">
+                <td />
+                <td colSpan={9}>{(operation.notes ?? []).join(' ')}</td>
+              </tr>
+            )}
             {(cautions.get(operation.number) ?? []).map((caution) => (
               <tr key={caution} className="op-caution">
                 <td />

@@ -27,6 +27,7 @@ const cases = templates.flatMap((template) =>
       title: template.name,
       state: 'RELEASED 2026-03-09',
       stamp: undefined,
+      entryUnit: 'mm' as const,
       register: exampleRegister,
     };
     return {
@@ -133,6 +134,28 @@ describe.each(cases)('the route card of $name', ({ route, pages }) => {
   });
 });
 
+describe('instructions on the card', () => {
+  it.each(cases)('prints each in full under its operation: $name', ({ route, pages }) => {
+    const printed = pages
+      .flatMap(textsOf)
+      .map(({ text }) => text)
+      .join(' ');
+    const notes = route.operations.flatMap((operation) => operation.notes ?? []);
+    expect(notes.length).toBeGreaterThan(0);
+    // The diameter sign is drawn, not lettered.
+    for (const word of notes.join(' ').replaceAll('Ø', '').split(' '))
+      expect(printed.includes(word), word).toBe(true);
+  });
+
+  it.each(cases)('says so where sentences and columns are in different units: $name', ({ name, pages }) => {
+    const printed = pages
+      .flatMap(textsOf)
+      .map(({ text }) => text)
+      .join(' ');
+    expect(printed.includes('figures within sentences are in millimetres')).toBe(name.endsWith(' in in'));
+  });
+});
+
 describe('a long route', () => {
   it('is broken between operations, never with one alone at the foot or the head of a page', () => {
     const [first] = cases;
@@ -155,6 +178,7 @@ describe('a long route', () => {
           title: 'Long',
           state: 'DRAFT',
           stamp: undefined,
+          entryUnit: 'mm',
           register: exampleRegister,
         },
         format: { unit: 'mm', style: 'iso' },
