@@ -3,6 +3,9 @@ import type { View } from '../features';
 import type { Session } from '../session';
 import { held, short } from '../shop';
 
+/** Leg of an edge that carries no size of its own (mm), as the sheet's general note gives it. Common practice. */
+const EDGE_BREAK = 0.2;
+
 /** Sawing the piece from the bar: an event, since the saw's width lies outside the blank. */
 export function sawPiece(build: Build, view: View, kind: 'bar' | 'stick' | 'blank'): void {
   if (kind === 'bar') return;
@@ -95,7 +98,7 @@ export function finishPiece(build: Build, session: Session): void {
           : [],
     });
   };
-  step('deburr', 'deburr', 'break all edges 0.2', {
+  step('deburr', 'deburr', `break all edges ${build.words.about(EDGE_BREAK)}`, {
     features: [],
     tool: file?.name ?? 'file',
     toolItem: file?.id,
