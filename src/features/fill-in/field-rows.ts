@@ -47,11 +47,19 @@ function isSettled({ kind, choices, default: usual }: ParameterBase, typed: stri
 
 const OF_SHEET = ['title', 'material', 'quantity'];
 
-/** The form of a family for these values: `shown` are the paths that count now; null before the engine has said. */
-export function formRows(template: Template, values: TypedValues, shown: readonly string[] | null): FormRows {
+/**
+ * The form of a family for these values: `shown` are the paths that count now. Before the engine has said (null), the
+ * sizes of the stored sheet (`sized`, their paths) stand, so that no row comes late.
+ */
+export function formRows(
+  template: Template,
+  values: TypedValues,
+  shown: readonly string[] | null,
+  sized: ReadonlySet<string> = new Set(),
+): FormRows {
   const known = shown ? new Set(shown) : null;
   const isShown = ({ path, parameter }: OneRow) =>
-    parameter.notYet === undefined && (known ? known.has(path) : parameter.when === undefined);
+    parameter.notYet === undefined && (known ? known.has(path) : parameter.when === undefined || sized.has(path));
   const shape: FormRow[] = [];
   const sheet: OneRow[] = [];
   const notYet: OneRow[] = [];

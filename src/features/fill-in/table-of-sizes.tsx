@@ -10,7 +10,7 @@ import { SizeRow } from './size-row';
 
 /** The sizes as they are typed, in the order of the family; Enter and the arrows go from one to the next. */
 export function TableOfSizes() {
-  const { template, draft, shown, answer } = useOpenRevision();
+  const { template, draft, shown, good, answer } = useOpenRevision();
   const form = useSizeForm();
   if (!template)
     return (
@@ -19,7 +19,8 @@ export function TableOfSizes() {
         Its sheet stands as it is stored.
       </p>
     );
-  const { shape, sheet, notYet, notYetChoices } = formRows(template, draft.values, shown);
+  const sized = new Set(good?.scheme.sizes.flatMap(({ parameter }) => parameter ?? []));
+  const { shape, sheet, notYet, notYetChoices } = formRows(template, draft.values, shown, sized);
   const onKeyDown = (event: KeyboardEvent<HTMLElement>) => {
     const { target } = event;
     if (!(target instanceof HTMLElement) || !target.hasAttribute('data-field')) return;

@@ -23,6 +23,15 @@ describe('the form of a family', () => {
     expect(paths(rowsOf('tapered-handle', { grip: 'round' }))).not.toContain('acrossFlats');
   });
 
+  it('shows the sizes of the stored sheet before the engine has said which fields count', () => {
+    const template = templateById('tapered-handle');
+    if (!template) throw new Error('no such family');
+    const values = { ...exampleValues(template), grip: 'hex' };
+    const stored = new Set(['acrossFlats', 'spigotDiameter']);
+    expect(paths(formRows(template, values, null, stored))).toEqual(expect.arrayContaining([...stored]));
+    expect(paths(formRows(template, values, null))).not.toContain('acrossFlats');
+  });
+
   it('puts title, material and quantity after the shape, and what cannot be asked for yet apart', () => {
     const rows = rowsOf('tapered-handle');
     expect(rows.sheet.map(({ path }) => path)).toEqual(['title', 'material', 'quantity']);
