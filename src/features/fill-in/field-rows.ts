@@ -59,7 +59,8 @@ export function formRows(
 ): FormRows {
   const known = shown ? new Set(shown) : null;
   const isShown = ({ path, parameter }: OneRow) =>
-    parameter.notYet === undefined && (known ? known.has(path) : parameter.when === undefined || sized.has(path));
+    parameter.notYet === undefined &&
+    (known ? known.has(path) : parameter.when === undefined || sized.has(path));
   const shape: FormRow[] = [];
   const sheet: OneRow[] = [];
   const notYet: OneRow[] = [];
