@@ -13,7 +13,7 @@ import { titleBlockFor } from '../../shared/title-block';
 import { templates } from '../../templates';
 
 const AIM_SHEET = 16;
-const RUNS = 60;
+const RUNS = 100;
 
 /** Values to checked sheet to SVG, and the route beside it, for each family's worked example in both styles. */
 export async function benchEngine(): Promise<void> {

@@ -7,9 +7,9 @@ export interface Measured {
   slowest: number;
 }
 
-/** Runs `act` until `runs` timings are in hand, after a warm-up a fifth as long. Milliseconds by the monotonic clock. */
+/** Runs `act` until `runs` timings are in hand, after a warm-up as long. Milliseconds by the monotonic clock. */
 export async function measure(name: string, runs: number, act: () => unknown): Promise<Measured> {
-  for (let warm = 0; warm < Math.ceil(runs / 5); warm += 1) await act();
+  for (let warm = 0; warm < runs; warm += 1) await act();
   const times: number[] = [];
   for (let run = 0; run < runs; run += 1) {
     const start = performance.now();

@@ -109,8 +109,11 @@ it('holds what is typed without a connection, through a closed page, and keeps i
   await page.reload();
   await sheetDrawn(page);
   expect(await sizeField(page, 'Grip length').inputValue()).toBe('57');
-  await page.unroute(saves);
   await page.getByRole('button', { name: 'Try now' }).click();
+  await page.getByText('not kept: no connection, held here').waitFor();
+  await page.unroute(saves);
+  // The browser says that it is connected again; the page may have tried by itself before.
+  await page.evaluate(() => window.dispatchEvent(new Event('online')));
   await kept(page);
   await page.evaluate(() => localStorage.clear());
   await page.reload();
