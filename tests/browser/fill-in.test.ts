@@ -29,7 +29,7 @@ it('a wrong size says its sentence at its field, keeps the last good sheet and i
   await page.waitForFunction(() => document.activeElement?.id === 'field-spigotDiameter');
   await kept(page);
   await page.reload();
-  await page.getByText(/4000 mm is too large/).waitFor();
+  await row.getByText(/4000 mm is too large/).waitFor();
   expect(await sizeField(page, 'Spigot diameter').inputValue()).toBe('4000');
   expect(pages.faults).toEqual([]);
 });
